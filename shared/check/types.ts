@@ -1,0 +1,32 @@
+import type { Finding } from '#shared/findings/types.ts';
+import type { Derived, FieldValues, Kind, SourceRow } from '#shared/records/types.ts';
+import type { Pour } from '#shared/rules/types.ts';
+
+/** One line as the check leaves it; stored in `records`, shown everywhere. */
+export type CheckedRecord = {
+  readonly kind: Kind;
+  readonly structureNumber: string;
+  readonly occurrence: number;
+  readonly sheet: string;
+  readonly row: number;
+  readonly source: SourceRow;
+  readonly values: FieldValues;
+  readonly derived: Derived;
+  readonly workDay: string | null;
+  readonly standardId: string;
+  readonly standardNumber: number;
+  readonly pours: readonly Pour[];
+  readonly ruleCodes: readonly string[];
+};
+
+/** A rule (or a part of a rule's context) that did not run, and why. */
+export type Skipped = {
+  readonly code: string;
+  readonly reason: 'off' | 'no-lots' | 'no-design' | 'no-photos' | 'no-siblings';
+};
+
+export type CheckResult = {
+  readonly records: readonly CheckedRecord[];
+  readonly findings: readonly Finding[];
+  readonly skipped: readonly Skipped[];
+};

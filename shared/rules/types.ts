@@ -1,0 +1,157 @@
+import type { Derived, FieldValues, Kind, Scalar, SourceRow } from '#shared/records/types.ts';
+import type { Finding, Params, Severity } from '#shared/findings/types.ts';
+import type { Product, Standard } from '#shared/standard/types.ts';
+
+/** A pour of one kit size and lot, normalised; several rows may share a number. Fields are null where blank or unreadable. */
+export type Pour = {
+  readonly source: SourceRow;
+  readonly pourNumber: number | null;
+  readonly event: number;
+  /** Wall clock `YYYY-MM-DDTHH:mm`. */
+  readonly pouredAt: string | null;
+  /** UTC milliseconds of `pouredAt` in the work order's zone; null when unreal or missing. */
+  readonly pouredAtMs: number | null;
+  readonly product: string | null;
+  readonly lot: string | null;
+  readonly kitFt3: number | null;
+  readonly quantity: number | null;
+  readonly wastedQuantity: number;
+  readonly componentATempF: number | null;
+  readonly componentBTempF: number | null;
+};
+
+export type PhotoFact = {
+  readonly id: string;
+  readonly fileName: string;
+  readonly sha256: string;
+  readonly view: string;
+};
+
+/** What the batch knows beside one line, as plain data prepared once a batch by set-based queries. Null: not known here, so rules that need it are skipped and say so. */
+export type CheckContext = {
+  readonly zone: string;
+  /** UTC milliseconds of hand-in (or of the check, for a draft). */
+  readonly asOfMs: number | null;
+  /** Published standards, ascending by `effectiveOn` (YYYY-MM-DD). The one in force on the work day is used. */
+  readonly standards: readonly StandardInForce[];
+  readonly products: readonly ProductInForce[];
+  readonly lots: readonly LotFact[] | null;
+  readonly design: readonly DesignFact[] | null;
+  /** Photographs by line key `kind|structureNumber|occurrence`. */
+  readonly photos: ReadonlyMap<string, readonly PhotoFact[]> | null;
+  /** Approved lines of earlier revisions of this batch, `kind|structureNumber`. */
+  readonly siblings: ReadonlySet<string> | null;
+};
+
+export type StandardInForce = {
+  readonly id: string;
+  readonly n: number;
+  readonly effectiveOn: string;
+  readonly body: Standard;
+};
+export type ProductInForce = {
+  readonly code: string;
+  readonly n: number;
+  readonly effectiveOn: string;
+  readonly body: Product;
+};
+export type LotFact = {
+  readonly product: string;
+  readonly number: string;
+  readonly expiresOn: string | null;
+  readonly status: 'in-use' | 'held' | 'recalled';
+};
+export type DesignFact = {
+  readonly structureNumber: string;
+  readonly kind: Kind;
+  readonly poleLengthFt: number | null;
+  readonly poleClass: string | null;
+  readonly poleMaterial: string | null;
+  readonly embedmentFt: number | null;
+  readonly latitude: number | null;
+  readonly longitude: number | null;
+};
+
+/** One line with all a rule may look at. */
+export type LineView = {
+  readonly kind: Kind;
+  readonly structureNumber: string;
+  readonly occurrence: number;
+  readonly source: SourceRow;
+  readonly values: FieldValues;
+  /** Fields with a `record-…` finding: what follows from them adds nothing more. */
+  readonly broken: ReadonlySet<string>;
+  readonly pours: readonly Pour[];
+  readonly events: readonly SourceRow[];
+  readonly photos: readonly PhotoFact[] | null;
+  readonly derived: Derived;
+  readonly workDay: string | null;
+  readonly standard: StandardInForce;
+  /** Product of the line's first pour whose product is known; null otherwise. */
+  readonly product: Product | null;
+  /** UTC milliseconds of a wall-clock field; null when blank, a word, unreal or ambiguous. */
+  readonly instants: ReadonlyMap<string, number>;
+};
+
+/** The part of a finding that a rule says itself; the engine adds code, severity, place and fingerprint. */
+export type FindingDraft = {
+  readonly field?: string | null;
+  /** Where it stands, when not in the line's own row (a pour row). */
+  readonly source?: SourceRow;
+  readonly measured: number | string | null;
+  readonly limit: number | string | null;
+  readonly margin: number | null;
+  readonly unit: string | null;
+  readonly uncertainty?: number | null;
+  readonly params?: Params;
+  readonly ownerParams?: Params;
+  /** Tells two findings of one rule on one line apart. */
+  readonly part?: string;
+  /** Overrides the rule's severity (a `record-…` note, say). */
+  readonly severity?: Severity;
+  /** Overrides the rule's code: `unproved` raised by a rule that lacks a value. */
+  readonly unproved?: string;
+};
+
+export type BatchView = {
+  readonly lines: readonly LineView[];
+  readonly pours: readonly Pour[];
+  readonly batch: SourceRow;
+};
+
+type RuleBase = {
+  readonly code: string;
+  readonly title: string;
+  readonly kinds: readonly Kind[];
+  readonly severity: Severity;
+  /** Field key of the primary cell. */
+  readonly field: string;
+  /** Parts of the context without which the rule is skipped. */
+  readonly needs: readonly ('lots' | 'design' | 'photos' | 'siblings')[];
+  /** JSON Schema (2020-12) of the rule's parameters, each with title, unit, default and range. */
+  readonly paramsSchema: Readonly<Record<string, unknown>>;
+  /** One sentence of what is wrong, from the finding's data alone. */
+  readonly message: (finding: Finding) => string;
+  /** What would put it right. */
+  readonly remedy: (finding: Finding) => string;
+};
+
+export type LineRule = RuleBase & {
+  readonly scope: 'line';
+  readonly check: (
+    line: LineView,
+    params: Readonly<Record<string, Scalar>>,
+    context: CheckContext,
+  ) => readonly FindingDraft[];
+};
+
+export type BatchRule = RuleBase & {
+  readonly scope: 'batch';
+  readonly check: (
+    batch: BatchView,
+    params: Readonly<Record<string, Scalar>>,
+    context: CheckContext,
+  ) => readonly (FindingDraft & { readonly line?: LineView })[];
+};
+
+export type Rule = LineRule | BatchRule;
