@@ -18,6 +18,8 @@ export type Pour = {
   readonly wastedQuantity: number;
   readonly componentATempF: number | null;
   readonly componentBTempF: number | null;
+  /** Fields of the row with a `record-…` finding. */
+  readonly broken: ReadonlySet<string>;
 };
 
 export type PhotoFact = {
@@ -72,6 +74,15 @@ export type DesignFact = {
   readonly longitude: number | null;
 };
 
+/** A rework or repair of a line (2, 3 …) as its row of the Events sheet tells it. Event 1 is the line's own row. */
+export type LineEvent = {
+  readonly event: number;
+  readonly source: SourceRow;
+  readonly values: FieldValues;
+  readonly broken: ReadonlySet<string>;
+  readonly instants: ReadonlyMap<string, number>;
+};
+
 /** One line with all a rule may look at. */
 export type LineView = {
   readonly kind: Kind;
@@ -79,10 +90,11 @@ export type LineView = {
   readonly occurrence: number;
   readonly source: SourceRow;
   readonly values: FieldValues;
-  /** Fields with a `record-…` finding: what follows from them adds nothing more. */
+  /** Fields of the line's own row with a `record-…` finding (`pours` when rows that might be its pours could not be linked): what follows from them adds nothing more. */
   readonly broken: ReadonlySet<string>;
   readonly pours: readonly Pour[];
-  readonly events: readonly SourceRow[];
+  /** Ascending by number. */
+  readonly events: readonly LineEvent[];
   readonly photos: readonly PhotoFact[] | null;
   readonly derived: Derived;
   readonly workDay: string | null;

@@ -1,0 +1,52 @@
+import type { Scalar } from '#shared/records/types.ts';
+
+export type NumberParam = {
+  readonly type: 'number';
+  readonly title: string;
+  readonly description?: string;
+  readonly 'x-unit': string;
+  readonly default: number;
+  readonly minimum: number;
+  readonly maximum: number;
+};
+export type TextParam = {
+  readonly type: 'string';
+  readonly title: string;
+  readonly description?: string;
+  readonly default: string;
+  readonly maxLength: number;
+};
+type Properties = Readonly<Record<string, NumberParam | TextParam>>;
+
+/** JSON Schema (2020-12) of a rule's parameters from its properties. */
+export const paramsSchema = <P extends Properties>(properties: P) =>
+  ({
+    $schema: 'https://json-schema.org/draft/2020-12/schema',
+    type: 'object',
+    additionalProperties: false,
+    required: Object.keys(properties),
+    properties,
+  }) as const;
+
+/** A parameter of the standard's version; the rule's default where the version lacks it or holds something else. */
+export const numberOf = (
+  params: Readonly<Record<string, Scalar>>,
+  schema: { readonly properties: Properties },
+  name: string,
+): number => {
+  const value = params[name];
+  if (typeof value === 'number' && Number.isFinite(value)) return value;
+  const fallback = schema.properties[name]?.default;
+  return typeof fallback === 'number' ? fallback : 0;
+};
+
+export const textOf = (
+  params: Readonly<Record<string, Scalar>>,
+  schema: { readonly properties: Properties },
+  name: string,
+): string => {
+  const value = params[name];
+  if (typeof value === 'string') return value;
+  const fallback = schema.properties[name]?.default;
+  return typeof fallback === 'string' ? fallback : '';
+};
