@@ -1,0 +1,100 @@
+import { fork, type ChildProcess } from 'node:child_process';
+import { open } from 'node:fs/promises';
+import { createRequire } from 'node:module';
+import { fileURLToPath, pathToFileURL } from 'node:url';
+import { READER_LIMITS } from '#shared/workbook/limits.ts';
+import type { Workbook } from '#shared/workbook/types.ts';
+import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
+import { createCollector } from '#shared/workbook/xml/collect-workbook.ts';
+import type { ReaderMessage } from './reader-messages.ts';
+import { residentMemory } from './resident-memory.ts';
+import { createSlots } from './slots.ts';
+
+export type ReadOptions = {
+  readonly timeLimitMs?: number;
+  /** Resident memory at which the reading process is ended; buffers are outside the heap limit. */
+  readonly memoryLimitBytes?: number;
+};
+
+const HEAP_MB = 256;
+const WATCH_EVERY_MS = 50;
+const CHILD = fileURLToPath(new URL('./reader-child.ts', import.meta.url));
+const inSlot = createSlots(2);
+
+function startChild(path: string): ChildProcess {
+  const loader = pathToFileURL(createRequire(import.meta.url).resolve('tsx')).href;
+  return fork(CHILD, [path], {
+    execArgv: [`--max-old-space-size=${HEAP_MB}`, '--import', loader],
+    // Nothing of the server's settings (database, secrets) is within reach of code that reads a stranger's file.
+    env: { TZ: 'UTC', PATH: process.env['PATH'] ?? '', NODE_ENV: 'production' },
+    stdio: ['ignore', 'ignore', 'ignore', 'ipc'],
+  });
+}
+
+function readInChild(
+  path: string,
+  { timeLimitMs = 30_000, memoryLimitBytes = 400_000_000 }: ReadOptions,
+): Promise<Workbook> {
+  return new Promise((resolve, reject) => {
+    const child = startChild(path);
+    const collector = createCollector();
+    let verdict: WorkbookRefused | null = null;
+    let done = false;
+    const end = (refused: WorkbookRefused): void => {
+      verdict ??= refused;
+      child.kill('SIGKILL');
+    };
+    const timer = setTimeout(
+      () => end(new WorkbookRefused('reader-time', { seconds: timeLimitMs / 1000 })),
+      timeLimitMs,
+    );
+    const watch = setInterval(() => {
+      if (child.pid === undefined) return;
+      void residentMemory(child.pid).then((bytes) => {
+        if (bytes !== null && bytes > memoryLimitBytes) end(new WorkbookRefused('reader-memory'));
+      });
+    }, WATCH_EVERY_MS);
+    child.on('message', (message: ReaderMessage) => {
+      if (message.type === 'event') collector.add(message.event);
+      else if (message.type === 'done') done = true;
+      else verdict ??= new WorkbookRefused(message.code, message.params);
+    });
+    child.on('error', () => end(new WorkbookRefused('reader-failed')));
+    child.on('close', () => {
+      clearTimeout(timer);
+      clearInterval(watch);
+      if (verdict !== null) reject(verdict);
+      else if (!done) reject(new WorkbookRefused('reader-failed'));
+      else {
+        try {
+          resolve(collector.finish());
+        } catch (error) {
+          reject(error as Error);
+        }
+      }
+    });
+  });
+}
+
+/** Refuses by size before a process is started; an unreadable path throws the system's own error. */
+async function checkSize(path: string): Promise<void> {
+  const file = await open(path);
+  try {
+    const { size } = await file.stat();
+    if (size === 0) throw new WorkbookRefused('empty-file');
+    if (size > READER_LIMITS.fileBytes) {
+      throw new WorkbookRefused('file-too-large', { limitMb: READER_LIMITS.fileBytes / 1_000_000 });
+    }
+  } finally {
+    await file.close();
+  }
+}
+
+/**
+ * Reads a workbook of unknown origin in a process of its own, at most two at once, with limits on time and memory.
+ * Throws WorkbookRefused (code and parameters; sentence by shared/workbook/refusal-text.ts).
+ */
+export async function readWorkbookFile(path: string, options: ReadOptions = {}): Promise<Workbook> {
+  await checkSize(path);
+  return inSlot(() => readInChild(path, options));
+}

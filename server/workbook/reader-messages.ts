@@ -1,0 +1,8 @@
+import type { RefusalCode, RefusalParams } from '#shared/workbook/workbook-refused.ts';
+import type { WorkbookEvent } from '#shared/workbook/xml/read-package.ts';
+
+/** What the reading process tells the one that started it. An exit before `done` or `refused` is a failure. */
+export type ReaderMessage =
+  | { readonly type: 'event'; readonly event: WorkbookEvent }
+  | { readonly type: 'refused'; readonly code: RefusalCode; readonly params: RefusalParams }
+  | { readonly type: 'done' };

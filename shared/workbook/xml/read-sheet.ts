@@ -1,0 +1,121 @@
+import { READER_LIMITS } from '#shared/workbook/limits.ts';
+import type { Cell, Row } from '#shared/workbook/types.ts';
+import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
+import { cellAddress, LAST_COLUMN, LAST_ROW, parseAddress } from './cell-address.ts';
+import { cellValue, type CellTables, type RawCell } from './cell-value.ts';
+import { decodeEscapes } from './decode-escapes.ts';
+import { attribute, parseXml, type XmlTag } from './parse-xml.ts';
+
+/** Counts over all sheets of one workbook. */
+export type Budget = { rows: number; cells: number; characters: number };
+
+export type SheetPart = {
+  readonly sheet: string;
+  readonly part: string;
+  readonly chunks: AsyncIterable<Uint8Array>;
+};
+
+type OpenCell = { -readonly [K in keyof RawCell]: RawCell[K] } & { row: number; column: number; run: string };
+
+/** Rows of one worksheet in the order of the file, handed on chunk by chunk; at the end the merged ranges. Blank cells and rows are left out. */
+export async function* readSheet(
+  { sheet, part, chunks }: SheetPart,
+  tables: CellTables,
+  budget: Budget,
+): AsyncGenerator<{ rows: Row[] } | { merged: string[] }> {
+  let rows: Row[] = [];
+  const merged: string[] = [];
+  let row = 0;
+  let column = 0;
+  let cells: Cell[] = [];
+  let cell: OpenCell | null = null;
+
+  const endRow = (): void => {
+    if (cells.length === 0) return;
+    if (++budget.rows > READER_LIMITS.rows)
+      throw new WorkbookRefused('too-many-rows', { limit: READER_LIMITS.rows });
+    rows.push({ row, cells });
+    cells = [];
+  };
+  const openRow = (tag: XmlTag): void => {
+    const given = attribute(tag, 'r');
+    row = given === undefined ? row + 1 : Number(given);
+    if (!Number.isInteger(row) || row < 1 || row > LAST_ROW) {
+      throw new WorkbookRefused('cell-address', { sheet, address: given ?? String(row) });
+    }
+    column = 0;
+  };
+  const openCell = (tag: XmlTag): void => {
+    const given = attribute(tag, 'r');
+    const place = given === undefined ? { row, column: column + 1 } : parseAddress(given.trim());
+    if (place === null || place.column > LAST_COLUMN) {
+      throw new WorkbookRefused('cell-address', { sheet, address: given ?? '' });
+    }
+    // A row without number whose cells carry one: the cells know better.
+    if (place.row !== row) {
+      endRow();
+      row = place.row;
+    }
+    column = place.column;
+    const style = attribute(tag, 's');
+    cell = {
+      type: attribute(tag, 't') ?? 'n',
+      style: style === undefined ? null : Number(style),
+      value: null,
+      inline: null,
+      formula: false,
+      row,
+      column,
+      run: '',
+    };
+  };
+  const closeCell = (done: OpenCell): void => {
+    const address = cellAddress(done.row, done.column);
+    const body = cellValue(done, tables, { sheet, address });
+    if (body === null) return;
+    budget.characters += body.raw.length;
+    if (body.raw.length > READER_LIMITS.cellCharacters || budget.characters > READER_LIMITS.characters) {
+      throw new WorkbookRefused('too-much-text', { sheet, address });
+    }
+    if (++budget.cells > READER_LIMITS.cells) {
+      throw new WorkbookRefused('too-many-cells', { limit: READER_LIMITS.cells });
+    }
+    cells.push({ address, column: done.column, ...body, ...(done.formula ? { formula: true } : {}) });
+  };
+
+  const steps = parseXml(part, chunks, {
+    open: (name, tag, parents) => {
+      const parent = parents.at(-1);
+      if (name === 'row' && parent === 'sheetData') openRow(tag);
+      else if (name === 'c' && parent === 'row') openCell(tag);
+      else if (name === 'mergeCell') merged.push(attribute(tag, 'ref') ?? '');
+      else if (cell === null) return;
+      else if (name === 'v' && parent === 'c') cell.value ??= '';
+      else if (name === 'f' && parent === 'c') cell.formula = true;
+      else if (name === 'is' && parent === 'c') cell.inline ??= '';
+      else if (name === 't') cell.run = '';
+      if (merged.length > READER_LIMITS.mergedRanges) throw new WorkbookRefused('too-many-cells', { sheet });
+    },
+    text: (text, path) => {
+      if (cell === null) return;
+      const name = path.at(-1);
+      if (name === 'v') cell.value += text;
+      else if (name === 't' && !path.includes('rPh')) cell.run += text;
+    },
+    close: (name, parents) => {
+      if (name === 'row' && parents.at(-1) === 'sheetData') endRow();
+      if (cell === null) return;
+      if (name === 'c') {
+        closeCell(cell);
+        cell = null;
+      } else if (name === 't' && !parents.includes('rPh') && cell.inline !== null) {
+        cell.inline += decodeEscapes(cell.run);
+      }
+    },
+  });
+  while (!(await steps.next()).done) {
+    if (rows.length > 0) yield { rows };
+    rows = [];
+  }
+  if (merged.length > 0) yield { merged };
+}
