@@ -1,0 +1,17 @@
+import { defineJob } from '#server/jobs/define-job.ts';
+
+/** Sends one row of the outbox. A mail server that is down for a night loses nothing: the repeats reach over about 18 hours. */
+export const sendMailJob = defineJob<{ outboxId: string }>({
+  name: 'send-mail',
+  payload: {
+    type: 'object',
+    required: ['outboxId'],
+    additionalProperties: false,
+    properties: { outboxId: { type: 'string', format: 'uuid' } },
+  },
+  retryLimit: 14,
+  retryDelay: 4,
+  expireSeconds: 120,
+  concurrency: 2,
+  load: () => import('#server/mail/send-mail.ts').then((module) => ({ handler: module.sendMail })),
+});
