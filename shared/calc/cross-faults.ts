@@ -1,0 +1,54 @@
+import { classTableOf } from './class-table.ts';
+import { numberOf, textOf } from './values.ts';
+import type { FieldFault } from './field-fault.ts';
+import type { FieldValues } from '#shared/records/types.ts';
+
+const NOT_WOOD = new Set(['steel', 'concrete', 'composite']);
+
+const missing = (field: string): FieldFault => ({
+  field,
+  keyword: 'required',
+  params: { missingProperty: field, because: 'not-in-class-table' },
+});
+
+const given = (values: FieldValues, fields: readonly string[]) =>
+  fields.some((field) => values[field] !== undefined && values[field] !== null);
+
+/** What a wood pole needs taped because the class table lacks it. Poles that are not wood, and blank fields, are the schema's matter. */
+function untaped(values: FieldValues, ends: readonly (readonly string[])[]): FieldFault[] {
+  const material = textOf(values, 'poleMaterial');
+  if (material === null || NOT_WOOD.has(material) || classTableOf(values) !== null) return [];
+  return ends.flatMap((fields) => (given(values, fields) ? [] : [missing(fields[0] ?? '')]));
+}
+
+const GROUND_LINE = ['girthGroundLineIn', 'diameterGroundLineIn'] as const;
+const BUTT = ['girthButtIn', 'diameterButtIn'] as const;
+
+/** Faults that hang on the class table or on two numbers, which JSON Schema cannot say. Total on any input. */
+export function crossFaults(kind: string, value: unknown): FieldFault[] {
+  if (typeof value !== 'object' || value === null || Array.isArray(value)) return [];
+  const values = value as FieldValues;
+  switch (kind) {
+    case 'set': {
+      // Without length or class the schema already asks for them.
+      if (values.poleLengthFt === undefined || values.poleClass === undefined) return [];
+      return untaped(values, [GROUND_LINE, BUTT]);
+    }
+    case 'straighten':
+      return untaped(values, [GROUND_LINE]);
+    case 'pour': {
+      const quantity = numberOf(values, 'quantity');
+      const wasted = numberOf(values, 'wastedQuantity');
+      if (quantity === null || wasted === null || wasted <= quantity) return [];
+      return [
+        {
+          field: 'wastedQuantity',
+          keyword: 'maximum',
+          params: { comparison: '<=', limit: quantity, of: 'quantity' },
+        },
+      ];
+    }
+    default:
+      return [];
+  }
+}
