@@ -4,7 +4,9 @@ import { defineConfig } from 'vitest/config';
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
-  build: { outDir: 'dist', sourcemap: true, target: 'es2022' },
+  publicDir: 'src/public',
+  // No assets as data: addresses: the content security policy allows fonts and pictures from the server alone.
+  build: { outDir: 'dist', sourcemap: true, target: 'es2022', assetsInlineLimit: 0 },
   server: { port: 4601, proxy: { '/api': 'http://127.0.0.1:4600' } },
   test: {
     projects: [

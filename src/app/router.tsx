@@ -1,0 +1,36 @@
+import { createBrowserRouter, type RouteObject } from 'react-router-dom';
+import { ErrorPage } from '#src/app/error-page.tsx';
+import { NotFound } from '#src/app/not-found.tsx';
+import { SessionGate } from '#src/app/session-gate.tsx';
+import { Skeleton } from '#src/components/ui/skeleton.tsx';
+import { paths } from '#src/config/paths.ts';
+
+/** Pages that need nobody signed in. */
+const OPEN: RouteObject[] = [
+  { path: paths.signIn.path, lazy: () => import('#src/features/session/routes/sign-in.tsx') },
+  { path: paths.requestReset.path, lazy: () => import('#src/features/session/routes/request-reset.tsx') },
+  { path: paths.setPassword.path, lazy: () => import('#src/features/session/routes/set-password.tsx') },
+];
+
+/** Pages inside the shell; each route module exports `Component` and is fetched when first visited. */
+const SIGNED_IN: RouteObject[] = [
+  { path: paths.home.path, lazy: () => import('#src/features/home/routes/home.tsx') },
+  { path: '*', Component: NotFound },
+];
+
+export function createRouter() {
+  return createBrowserRouter([
+    {
+      ErrorBoundary: ErrorPage,
+      HydrateFallback: Skeleton,
+      children: [
+        ...OPEN,
+        {
+          Component: SessionGate,
+          // A page that fails leaves the header standing.
+          children: [{ ErrorBoundary: ErrorPage, children: SIGNED_IN }],
+        },
+      ],
+    },
+  ]);
+}

@@ -1,0 +1,45 @@
+import { ApiProblem } from '#src/lib/api/api-problem.ts';
+import { Button } from '#src/components/ui/button.tsx';
+import { Glyph } from '#src/components/ui/glyph.tsx';
+
+type Props = {
+  readonly error: unknown;
+  /** What the person was about to see or do: "The batch". */
+  readonly what?: string;
+  readonly onRetry?: () => void;
+};
+
+/** What happened, what it means, what to do. */
+export function ErrorState({ error, what, onRetry }: Props) {
+  const problem = error instanceof ApiProblem ? error : null;
+  return (
+    <div role="alert" className="flex max-w-prose gap-3 px-gutter py-6">
+      <Glyph name="triangle" className="mt-0.5" />
+      <div>
+        <p className="font-semibold">{title(problem, what)}</p>
+        <p className="mt-1 text-ink-2">
+          {problem?.message ??
+            'Something in this page failed. What you sent before is kept. Load the page again; if it fails again, tell the administrator.'}
+        </p>
+        {problem && problem.errors.length > 0 ? (
+          <ul className="mt-2 list-disc pl-5 text-ink-2">
+            {problem.errors.map((entry) => (
+              <li key={`${entry.pointer} ${entry.code} ${entry.detail}`}>{entry.detail}</li>
+            ))}
+          </ul>
+        ) : null}
+        {onRetry ? (
+          <Button className="mt-4" onClick={onRetry}>
+            Try again
+          </Button>
+        ) : null}
+      </div>
+    </div>
+  );
+}
+
+function title(problem: ApiProblem | null, what = 'This'): string {
+  if (problem?.status === 404) return `${what} was not found`;
+  if (problem?.status === 403) return `${what} is not open to your role`;
+  return problem?.title ?? `${what} could not be shown`;
+}

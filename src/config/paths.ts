@@ -1,0 +1,37 @@
+/** Every address of the client in one place. `path` is the router's pattern, `to` builds a link. */
+const encode = encodeURIComponent;
+
+export const paths = {
+  home: { path: '/', to: () => '/' },
+  signIn: {
+    path: '/sign-in',
+    to: (next?: string) => (next && next !== '/' ? `/sign-in?next=${encode(next)}` : '/sign-in'),
+  },
+  requestReset: { path: '/password-reset', to: () => '/password-reset' },
+  setPassword: { path: '/password-reset/:token', to: (token: string) => `/password-reset/${encode(token)}` },
+  search: { path: '/search', to: (q: string) => `/search?q=${encode(q)}` },
+  workOrders: { path: '/work-orders', to: () => '/work-orders' },
+  workOrder: { path: '/work-orders/:id', to: (id: string) => `/work-orders/${encode(id)}` },
+  batches: { path: '/batches', to: () => '/batches' },
+  batch: { path: '/batches/:id', to: (id: string) => `/batches/${encode(id)}` },
+  review: { path: '/review', to: () => '/review' },
+  reviewBatch: { path: '/review/:id', to: (id: string) => `/review/${encode(id)}` },
+  record: { path: '/records/:id', to: (id: string) => `/records/${encode(id)}` },
+  register: { path: '/register', to: () => '/register' },
+  registerEnter: { path: '/register/enter', to: () => '/register/enter' },
+  registerRecord: { path: '/register/:recordNumber', to: (n: string) => `/register/${encode(n)}` },
+  nonconformities: { path: '/nonconformities', to: () => '/nonconformities' },
+  concessions: { path: '/concessions', to: () => '/concessions' },
+  concession: { path: '/concessions/:id', to: (id: string) => `/concessions/${encode(id)}` },
+  lots: { path: '/lots', to: () => '/lots' },
+  lot: { path: '/lots/:id', to: (id: string) => `/lots/${encode(id)}` },
+  transmittals: { path: '/transmittals', to: () => '/transmittals' },
+  transmittal: { path: '/transmittals/:id', to: (id: string) => `/transmittals/${encode(id)}` },
+  standard: { path: '/standard', to: () => '/standard' },
+  standardVersion: { path: '/standard/:n', to: (n: number) => `/standard/${n}` },
+  trail: { path: '/trail', to: () => '/trail' },
+  people: { path: '/people', to: () => '/people' },
+  mail: { path: '/mail', to: () => '/mail' },
+  mailMessage: { path: '/mail/:id', to: (id: string) => `/mail/${encode(id)}` },
+  jobs: { path: '/jobs', to: () => '/jobs' },
+} as const;

@@ -1,0 +1,41 @@
+const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'] as const;
+
+/** `2026-04-14` -> `14 Apr 2026`; what is no day stays as written. */
+export function formatDay(day: string): string {
+  const match = /^(\d{4})-(\d{2})-(\d{2})$/.exec(day);
+  const month = match && MONTHS[Number(match[2]) - 1];
+  return match && month ? `${Number(match[3])} ${month} ${match[1]}` : day;
+}
+
+/** `2026-04-14T10:42` -> `14 Apr 2026, 10:42`, without any zone: a wall clock is shown as it was read. */
+export function formatWallClock(wall: string): string {
+  const match = /^(\d{4}-\d{2}-\d{2})T(\d{2}:\d{2})/.exec(wall);
+  return match?.[1] && match[2] ? `${formatDay(match[1])}, ${match[2]}` : wall;
+}
+
+/** An instant as day and time in `zone` (IANA), else in the reader's own. */
+export function formatInstant(at: string, zone?: string): string {
+  const date = new Date(at);
+  if (Number.isNaN(date.getTime())) return at;
+  const parts = new Intl.DateTimeFormat('en-CA', {
+    timeZone: zone,
+    year: 'numeric',
+    month: '2-digit',
+    day: '2-digit',
+    hour: '2-digit',
+    minute: '2-digit',
+    hourCycle: 'h23',
+  }).formatToParts(date);
+  const part = (type: string) => parts.find((one) => one.type === type)?.value ?? '';
+  return formatWallClock(`${part('year')}-${part('month')}-${part('day')}T${part('hour')}:${part('minute')}`);
+}
+
+/** `1,234`. */
+export function formatCount(count: number): string {
+  return count.toLocaleString('en-US');
+}
+
+/** `1 line`, `3 lines`. */
+export function counted(count: number, one: string, many = `${one}s`): string {
+  return `${formatCount(count)} ${count === 1 ? one : many}`;
+}
