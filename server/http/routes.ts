@@ -1,0 +1,7 @@
+import type { Route } from '#server/http/define-route.ts';
+import { healthRoutes } from '#server/modules/health/routes.ts';
+import { openapiRoutes } from '#server/modules/openapi/routes.ts';
+import { sessionRoutes } from '#server/modules/session/routes.ts';
+
+/** Every route of the server. A module adds one line. */
+export const ROUTES: readonly Route[] = [...healthRoutes, ...sessionRoutes, ...openapiRoutes(() => ROUTES)];
