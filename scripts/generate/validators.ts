@@ -1,13 +1,8 @@
 import { Ajv2020 } from 'ajv/dist/2020.js';
-import standalone from 'ajv/dist/standalone/index.js';
+import standaloneCode from 'ajv/dist/standalone/index.js';
 import { build } from 'esbuild';
 import { join } from 'node:path';
 import { ROOT, type Schema } from './schema-files.ts';
-
-/** The CommonJS module's default export, whichever way it is loaded. */
-const standaloneCode = (
-  'default' in standalone ? standalone.default : standalone
-) as typeof import('ajv/dist/standalone/index.js').default;
 
 /** Our own words in the schemas: notes for template and forms, nothing to check. */
 const NOTES = ['x-unit', 'x-read', 'x-words'];
