@@ -1,6 +1,12 @@
 // Written by `npm run generate` from schemas/api. Do not edit.
 
 /**
+ * A contractor's answer to a finding.
+ */
+export interface AnswerBody {
+  text: string;
+}
+/**
  * A contractor's answer in writing.
  */
 export interface Answer {
@@ -279,6 +285,7 @@ export interface InputRow {
   sha256: string;
   at: string;
   by: string;
+  revision: number;
 }
 /**
  * The inspector's newest decision on a line itself.
@@ -454,6 +461,25 @@ export interface Person {
   lastSignInAt: string | null;
   version: number;
   can: string[];
+}
+/**
+ * Where a photograph is placed by hand.
+ */
+export interface PhotoMatchBody {
+  lineId: string;
+  view:
+    | 'bore-depth'
+    | 'water'
+    | 'kits'
+    | 'finish'
+    | 'plumb'
+    | 'brand'
+    | 'before'
+    | 'gap'
+    | 'after'
+    | 'level-after'
+    | 'rework'
+    | 'other';
 }
 /**
  * A photograph handed in with a batch.
