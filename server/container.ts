@@ -1,12 +1,11 @@
 import type { MikroORM } from '@mikro-orm/postgresql';
 import type { Pool } from 'pg';
-import type PgBoss from 'pg-boss';
 import type { Logger } from 'pino';
 import type { Config } from '#server/config/config.ts';
 import { createOrm } from '#server/db/orm.ts';
 import { createPool } from '#server/db/pool.ts';
 import { createLog } from '#server/http/create-log.ts';
-import { createQueue } from '#server/jobs/create-queue.ts';
+import { createQueue, type Queue } from '#server/jobs/create-queue.ts';
 import { createBlobStore, type BlobStore } from '#server/storage/blob-store.ts';
 
 /** What handlers and jobs work with; one a process. */
@@ -16,7 +15,7 @@ export type Services = {
   /** on the application's role, for what runs outside an entity manager */
   readonly pool: Pool;
   readonly blobs: BlobStore;
-  readonly queue: PgBoss;
+  readonly queue: Queue;
   readonly log: Logger;
   close(): Promise<void>;
 };
@@ -37,8 +36,8 @@ export async function createServices(config: Config): Promise<Services> {
     const orm = await createOrm(config.databaseAppUrl);
     opened.push(() => orm.close(true));
     const blobs = await createBlobStore(config.storageConnectionString);
-    const queue = await createQueue({ pool, log });
-    opened.push(() => queue.stop({ graceful: false }));
+    const queue = createQueue({ databaseUrl: config.databaseAppUrl, pool, log });
+    opened.push(() => queue.close());
     return { config, orm, pool, blobs, queue, log, close };
   } catch (error) {
     await close();

@@ -1,0 +1,25 @@
+import type { EntityManager } from '@mikro-orm/postgresql';
+import { rows } from '#server/db/rows.ts';
+
+export type ParkedJob = {
+  readonly id: string;
+  readonly name: string;
+  readonly payload: Readonly<Record<string, unknown>>;
+  readonly attempts: number;
+  /** What its last attempt said. */
+  readonly problem: string;
+  readonly createdAt: string;
+  readonly failedAt: string | null;
+};
+
+/** Jobs whose attempts are used up, newest first; they wait here for an administrator. */
+export function listParked(em: EntityManager, limit = 100): Promise<ParkedJob[]> {
+  return rows<ParkedJob>(
+    em,
+    `select id, name, data as payload, retry_count + 1 as attempts,
+       coalesce(output ->> 'message', output #>> '{value,message}', 'No reason was kept.') as problem,
+       created_on as "createdAt", completed_on as "failedAt"
+     from pgboss.job where state = 'failed' order by completed_on desc nulls last, id limit $1`,
+    [limit],
+  );
+}

@@ -1,0 +1,75 @@
+import type PgBoss from 'pg-boss';
+import type { Services } from '#server/container.ts';
+import type { JobDefinition } from '#server/jobs/define-job.ts';
+
+/** How long the queue is asked again to write down how an attempt ended, while PostgreSQL restarts, say. */
+const REPORT_PAUSES_MS = [200, 1_000, 3_000, 10_000];
+
+const pauseFor = (ms: number) => new Promise((resolve) => setTimeout(resolve, ms));
+
+/** One attempt at one job: run it within its time, then tell the queue how it ended. Never throws. */
+export async function runAttempt(options: {
+  services: Services;
+  definition: JobDefinition<never>;
+  job: PgBoss.JobWithMetadata<object>;
+  /** Aborted when the process ends. */
+  stop: AbortSignal;
+}): Promise<void> {
+  const { services, job, stop } = options;
+  const { boss, listener } = services.queue;
+  const lock = `job:${job.id}`;
+  const log = { job: job.name, id: job.id, attempt: job.retryCount + 1 };
+  try {
+    await listener.hold(lock);
+    await attempt(options);
+    await report(() => boss.complete(job.name, job.id));
+    services.log.info(log, 'job done');
+  } catch (error) {
+    services.log.error({ ...log, err: error }, stop.aborted ? 'job stopped with the process' : 'job failed');
+    const reason = { message: error instanceof Error ? error.message : String(error) };
+    await report(() => boss.fail(job.name, job.id, reason)).catch((lost: unknown) =>
+      services.log.error(
+        { ...log, err: lost },
+        'how the job ended could not be written down; it will be tried again',
+      ),
+    );
+  } finally {
+    await listener.letGo(lock);
+  }
+}
+
+async function attempt(options: Parameters<typeof runAttempt>[0]): Promise<void> {
+  const { services, definition, job, stop } = options;
+  const { handler } = await definition.load();
+  const signal = AbortSignal.any([stop, AbortSignal.timeout(definition.expireSeconds * 1000)]);
+  const overdue = new Promise<never>((_resolve, reject) => {
+    signal.addEventListener('abort', () =>
+      reject(
+        new Error(
+          stop.aborted
+            ? 'The process that worked on it was ended.'
+            : `It took longer than ${definition.expireSeconds} s.`,
+        ),
+      ),
+    );
+  });
+  const context = {
+    services,
+    em: services.orm.em.fork(),
+    job: { id: job.id, attempt: job.retryCount + 1, last: job.retryCount >= job.retryLimit },
+    signal,
+  };
+  await Promise.race([handler(job.data as never, context), overdue]);
+}
+
+async function report(write: () => Promise<unknown>): Promise<void> {
+  for (const pause of REPORT_PAUSES_MS) {
+    try {
+      await write();
+      return;
+    } catch {
+      await pauseFor(pause);
+    }
+  }
+  await write();
+}
