@@ -3,7 +3,7 @@ import { Mark } from '#src/components/ui/mark.tsx';
 /** The product's mark drawn large, as the section it is. Decoration: it says nothing that the words beside it do not. */
 export function EntranceDrawing() {
   return (
-    <div className="flex h-full flex-col">
+    <div className="flex h-full flex-col overflow-hidden">
       <div className="flex items-center gap-3.5 px-8 pt-7">
         <Mark className="h-9 w-7.5" />
         <p className="text-display font-semibold">Upstand</p>
@@ -13,8 +13,8 @@ export function EntranceDrawing() {
       </p>
       <svg
         viewBox="0 0 600 620"
-        preserveAspectRatio="xMidYMax slice"
-        className="min-h-0 w-full flex-1"
+        preserveAspectRatio="xMidYMax meet"
+        className="min-h-0 w-full flex-1 overflow-visible"
         aria-hidden="true"
       >
         <defs>
@@ -33,7 +33,7 @@ export function EntranceDrawing() {
             <circle cx="12" cy="12" r="1.5" className="fill-foam-cell" opacity="0.7" />
           </pattern>
         </defs>
-        <path d="M0 250H228L242 640H0ZM372 250H600V640H358Z" fill="url(#entrance-soil)" />
+        <path d="M-500 250H228L242 640H-500ZM372 250H1100V640H358Z" fill="url(#entrance-soil)" />
         <path d="M228 250C236 226 364 226 372 250L359 600H241Z" fill="url(#entrance-foam)" />
         <path d="M242.3 566H357.7L359 600H241Z" className="fill-water-fill" />
         <path
@@ -48,7 +48,7 @@ export function EntranceDrawing() {
           opacity="0.45"
         />
         <path d="M300 14V618" className="stroke-ink" strokeWidth="1" strokeDasharray="22 5 4 5" />
-        <path d="M0 250H228M372 250H600" className="stroke-ink" strokeWidth="2.6" />
+        <path d="M-500 250H228M372 250H1100" className="stroke-ink" strokeWidth="2.6" />
         <path d="M228 250 241 600H359L372 250" className="fill-none stroke-ink" strokeWidth="1.8" />
         <path d="M84 250V600M70 600H236" className="stroke-ink-2" strokeWidth="1" />
         <path d="M84 250l-3.2 10h6.4ZM84 600l-3.2-10h6.4Z" className="fill-ink" />
