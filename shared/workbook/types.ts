@@ -14,6 +14,8 @@ export type Cell = {
   readonly formula?: boolean;
   /** The cell's number format shows dates or times. */
   readonly dateFormat?: boolean;
+  /** The cell's number format shows hours, so a whole serial is a midnight and not a bare day. */
+  readonly timeFormat?: boolean;
 };
 
 export type Row = { readonly row: number; readonly cells: readonly Cell[] };

@@ -1,5 +1,5 @@
 import type { SheetInfo } from '#shared/workbook/types.ts';
-import { isDateFormat } from './date-format.ts';
+import { type DateFormat, dateFormatOf } from './date-format.ts';
 import { attribute, parseXmlPart } from './parse-xml.ts';
 
 type Chunks = AsyncIterable<Uint8Array>;
@@ -64,8 +64,8 @@ export async function readWorkbookPart(
   return { date1904, sheets };
 }
 
-/** For each cell style, whether its number format shows a date or a time. */
-export async function readDateStyles(part: string, chunks: Chunks): Promise<boolean[]> {
+/** For each cell style, what its number format shows of a date. */
+export async function readDateStyles(part: string, chunks: Chunks): Promise<DateFormat[]> {
   const codes = new Map<number, string>();
   const formats: number[] = [];
   await parseXmlPart(part, chunks, {
@@ -76,7 +76,7 @@ export async function readDateStyles(part: string, chunks: Chunks): Promise<bool
       if (name === 'xf' && parent === 'cellXfs') formats.push(id);
     },
   });
-  return formats.map((id) => isDateFormat(id, codes.get(id)));
+  return formats.map((id) => dateFormatOf(id, codes.get(id)));
 }
 
 /** `keywords` of the core properties; null without any. */
