@@ -1,0 +1,70 @@
+import type { ReadingGroup } from './fill-uncertainty.ts';
+import { BUTT_FIELDS, GROUND_LINE_FIELDS, type PoleSize } from './pole-sizes.ts';
+import { setSpace, setVoid, type SetSpace } from './set-space.ts';
+import { numberOf } from './values.ts';
+import type { FieldValues } from '#shared/records/types.ts';
+import type { Standard } from '#shared/standard/types.ts';
+
+const BORE_FIELDS = ['boreTopIn', 'boreTopAcrossIn', 'boreBottomIn', 'boreBottomAcrossIn', 'bellIn'] as const;
+const DEPTH_FIELDS = ['boreDepthFt', 'embedmentFt'] as const;
+
+/** Fields that carry a number, each moved by so much. */
+function moved(values: FieldValues, fields: readonly string[], by: number): FieldValues {
+  const out: Record<string, FieldValues[string]> = { ...values };
+  for (const field of fields) {
+    const value = numberOf(values, field);
+    if (value !== null) out[field] = value + by;
+  }
+  return out;
+}
+
+const withPole = (space: SetSpace, groundLine: number, butt: number): SetSpace => ({
+  ...space,
+  pole: {
+    ...space.pole,
+    groundLineIn: space.pole.groundLineIn + groundLine,
+    buttIn: space.pole.buttIn + butt,
+  },
+});
+
+/** The field to tape (again) for a size; what the class table gave is best taped as a girth. */
+function fieldOf(size: PoleSize, [girth, diameter]: readonly [string, string]): string | null {
+  if (size.source === 'taper') return null;
+  return size.source === 'diameter' ? diameter : girth;
+}
+
+/** The readings of a *set* void by tape: bore diameters, pole sizes, depths. */
+export function setReadings(values: FieldValues, space: SetSpace, standard: Standard): ReadingGroup[] {
+  const { uncertainty } = standard;
+  const options = { foamFollowsGrade: standard.foamFollowsGrade };
+  const voidOf = (changed: FieldValues) => {
+    const space = setSpace(changed, options);
+    return space === null ? null : setVoid(space);
+  };
+  const group = (u: number, fields: readonly string[], unit: number): ReadingGroup => ({
+    u,
+    shifted: (by) => voidOf(moved(values, fields, by * unit)),
+    readings: fields.map((field) => ({
+      field,
+      shifted: (by) => voidOf(moved(values, [field], by * unit)),
+    })),
+  });
+
+  const groundLine = fieldOf(space.sizes.groundLine, GROUND_LINE_FIELDS);
+  const butt = fieldOf(space.sizes.butt, BUTT_FIELDS);
+  // A size carried over by the taper moves with the one that was taped.
+  const ends = [
+    { field: groundLine, groundLine: 1, butt: butt === null ? 1 : 0 },
+    { field: butt, groundLine: groundLine === null ? 1 : 0, butt: 1 },
+  ];
+  const pole: ReadingGroup = {
+    u: space.sizes.taped ? uncertainty.poleTapedIn : uncertainty.poleTableIn,
+    shifted: (by) => setVoid(withPole(space, by, by)),
+    readings: ends.flatMap(({ field, groundLine, butt }) =>
+      field === null
+        ? []
+        : [{ field, shifted: (by: number) => setVoid(withPole(space, by * groundLine, by * butt)) }],
+    ),
+  };
+  return [group(uncertainty.boreIn, BORE_FIELDS, 1), pole, group(uncertainty.depthIn, DEPTH_FIELDS, 1 / 12)];
+}
