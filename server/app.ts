@@ -14,8 +14,8 @@ import { ROUTES } from '#server/http/routes.ts';
 import { securityHeaders } from '#server/http/security-headers.ts';
 import { serveClient } from '#server/http/serve-client.ts';
 
-/** The whole server without a port. `close` stops the timers of the session store; the services are the caller's. */
-export function createApp(services: Services): { app: Express; close(): Promise<void> } {
+/** The whole server without a port. `stop` ends the timers of the session store; the services are the caller's. */
+export function createApp(services: Services): { app: Express; stop(): void } {
   const { config, log } = services;
   const app = express();
   const session = createSession(services);
@@ -52,5 +52,5 @@ export function createApp(services: Services): { app: Express; close(): Promise<
     throw notFound();
   });
   app.use(errorHandler(log));
-  return { app, close: session.close };
+  return { app, stop: () => session.stop() };
 }

@@ -31,7 +31,7 @@ async function main(): Promise<void> {
       await closed;
       clearTimeout(late);
     }
-    await web?.close();
+    web?.stop();
     await worker?.stop();
     await services.close();
   };

@@ -10,7 +10,7 @@ import type { Services } from '#server/container.ts';
  */
 export function createSession({ config, pool, log }: Services): {
   middleware: RequestHandler;
-  close(): Promise<void>;
+  stop: () => void;
 } {
   const secure = config.publicUrl.startsWith('https:');
   const PgStore = connectPgSimple(session);
@@ -31,5 +31,5 @@ export function createSession({ config, pool, log }: Services): {
     proxy: config.trustedProxies > 0,
     cookie: { httpOnly: true, sameSite: 'lax', secure, path: '/' },
   });
-  return { middleware, close: async () => void (await store.close()) };
+  return { middleware, stop: () => store.close() };
 }

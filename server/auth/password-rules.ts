@@ -5,7 +5,7 @@ export const PASSWORD_MOST = 200;
 
 /** What is wrong with a new password, in words for the person who chose it; null when it will do. */
 export function passwordFault(password: string, email: string): string | null {
-  const length = [...password].length;
+  const length = Array.from(password).length;
   if (length < PASSWORD_LEAST) return `Use at least ${PASSWORD_LEAST} characters; this has ${length}.`;
   if (length > PASSWORD_MOST) return `Use at most ${PASSWORD_MOST} characters.`;
   const plain = password.toLowerCase();

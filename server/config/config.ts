@@ -1,5 +1,6 @@
 import { resolve } from 'node:path';
 import { installationSecret } from '#server/config/installation-secret.ts';
+import { APP_ROLE } from '#server/db/grants.ts';
 import { createReader, type Environment } from '#server/config/read-settings.ts';
 
 /** How long a session lasts and how often a wrong password is borne. */
@@ -46,6 +47,15 @@ export class ConfigError extends Error {
 
 const LEVELS = ['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'] as const;
 
+/** The same database under the application's role; without its password the owner's own address stands. */
+function asAppRole(databaseUrl: string, password: string): string {
+  if (password === '' || !URL.canParse(databaseUrl)) return databaseUrl;
+  const url = new URL(databaseUrl);
+  url.username = APP_ROLE;
+  url.password = encodeURIComponent(password);
+  return url.href;
+}
+
 /**
  * Reads the settings from the environment; each has a default but the two stores, which `npm start` brings up.
  * @throws ConfigError listing every fault
@@ -73,7 +83,7 @@ export function loadConfig(env: Environment): Config {
     publicUrl: publicUrl.replace(/\/+$/, ''),
     databaseUrl,
     databaseAppUrl: read.url('DATABASE_APP_URL', {
-      fallback: databaseUrl,
+      fallback: asAppRole(databaseUrl, read.text('DATABASE_APP_PASSWORD', '')),
       protocols: ['postgres:', 'postgresql:'],
     }),
     storageConnectionString,

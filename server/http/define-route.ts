@@ -59,7 +59,7 @@ export type RouteOf<T extends RouteTypes> = RouteBase & {
 };
 
 /** Checks what a route must not combine and forgets its types, so that all routes stand in one table. */
-export function defineRoute<T extends RouteTypes = Record<never, never>>(route: RouteOf<T>): Route {
+export function defineRoute<T extends RouteTypes = RouteTypes>(route: RouteOf<T>): Route {
   const name = `${route.method.toUpperCase()} ${route.path}`;
   if (route.creates && route.raw) {
     throw new Error(`${name}: a raw route cannot honour Idempotency-Key, since its answer is not kept.`);

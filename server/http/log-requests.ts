@@ -5,7 +5,7 @@ import { pinoHttp } from 'pino-http';
 
 /** A reset link is as good as a password for an hour: its token stays out of the log. */
 export function withoutToken(url: string): string {
-  return url.replace(/(\/(?:api\/password-resets|password)\/)[^/?#]+/, '$1[token]');
+  return url.replace(/(\/(?:api\/password-resets|password-reset)\/)[^/?#]+/, '$1[token]');
 }
 
 /** One line a request, without cookies, tokens or bodies. */

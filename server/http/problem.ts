@@ -10,21 +10,22 @@ export type ProblemBody = {
 } & Record<string, unknown>;
 
 const TITLES: Readonly<Record<number, string>> = {
-  400: 'Bad Request',
-  401: 'Unauthorized',
-  403: 'Forbidden',
-  404: 'Not Found',
-  405: 'Method Not Allowed',
-  409: 'Conflict',
-  412: 'Precondition Failed',
-  413: 'Content Too Large',
-  415: 'Unsupported Media Type',
-  421: 'Misdirected Request',
-  422: 'Unprocessable Content',
-  428: 'Precondition Required',
-  429: 'Too Many Requests',
-  500: 'Internal Server Error',
-  503: 'Service Unavailable',
+  400: 'That cannot be read',
+  401: 'You are not signed in',
+  403: 'Not allowed',
+  404: 'Nothing here',
+  405: 'Not possible here',
+  409: 'Not possible as things stand',
+  410: 'No longer valid',
+  412: 'Changed by someone else',
+  413: 'Too large',
+  415: 'Wrong kind of content',
+  421: 'Wrong address',
+  422: 'That cannot be used',
+  428: 'Version missing',
+  429: 'Too many attempts',
+  500: 'Something went wrong',
+  503: 'Not available just now',
 };
 
 type ProblemOptions = {
@@ -55,16 +56,9 @@ export class Problem extends Error {
 
   toBody(): ProblemBody {
     const { status, code, detail, errors } = this;
-    // `about:blank` says that the status tells the kind; `code` is the stable name that programs read.
-    return {
-      ...this.extra,
-      type: 'about:blank',
-      title: TITLES[status] ?? 'Error',
-      status,
-      code,
-      detail,
-      errors,
-    };
+    const title = TITLES[status] ?? 'That did not work';
+    // A tag URI (RFC 4151) names the kind and promises no page; `code` is its short form, which programs read.
+    return { ...this.extra, type: `tag:upstand.example,2026:${code}`, title, status, code, detail, errors };
   }
 }
 

@@ -1,7 +1,17 @@
 import type { Route } from '#server/http/define-route.ts';
 import { healthRoutes } from '#server/modules/health/routes.ts';
+import { homeRoutes } from '#server/modules/home/routes.ts';
 import { openapiRoutes } from '#server/modules/openapi/routes.ts';
+import { organisationRoutes } from '#server/modules/organisations/routes.ts';
+import { peopleRoutes } from '#server/modules/people/routes.ts';
 import { sessionRoutes } from '#server/modules/session/routes.ts';
 
 /** Every route of the server. A module adds one line. */
-export const ROUTES: readonly Route[] = [...healthRoutes, ...sessionRoutes, ...openapiRoutes(() => ROUTES)];
+export const ROUTES: readonly Route[] = [
+  ...healthRoutes,
+  ...sessionRoutes,
+  ...homeRoutes,
+  ...peopleRoutes,
+  ...organisationRoutes,
+  ...openapiRoutes(() => ROUTES),
+];

@@ -266,12 +266,13 @@ export interface Home {
      * Address of the list within the product.
      */
     to: string;
+    detail: string | null;
   }[];
   recent: {
     at: string;
     title: string;
     detail: string | null;
-    to: string;
+    to: string | null;
   }[];
 }
 /**
@@ -410,6 +411,13 @@ export interface Organisation {
   kind: 'owner' | 'contractor';
   people: number;
   version: number;
+}
+/**
+ * Whom a link for a new password belongs to.
+ */
+export interface PasswordResetLink {
+  email: string;
+  purpose: 'invitation' | 'password-reset';
 }
 /**
  * Whose password was forgotten.
