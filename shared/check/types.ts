@@ -15,7 +15,12 @@ export type CheckedRecord = {
   readonly workDay: string | null;
   readonly standardId: string;
   readonly standardNumber: number;
+  /** Version of the product in force on the work day; null when no pour's product is known. */
+  readonly product: { readonly code: string; readonly n: number } | null;
   readonly pours: readonly Pour[];
+  /** Rows of the Events sheet, values cleaned; ascending by event. */
+  readonly events: readonly SourceRow[];
+  /** Codes of the findings on this line, sorted. */
   readonly ruleCodes: readonly string[];
 };
 

@@ -19,7 +19,11 @@ const partsOf = (record: CheckedRecord): ReadonlyMap<string, Part> => {
   return parts;
 };
 
-const changesOf = (record: CheckedRecord, before: Part | undefined, after: Part | undefined): ValueChange[] => {
+const changesOf = (
+  record: CheckedRecord,
+  before: Part | undefined,
+  after: Part | undefined,
+): ValueChange[] => {
   const { kind, structureNumber, occurrence } = record;
   const one = after ?? before;
   if (!one) return [];
@@ -30,7 +34,17 @@ const changesOf = (record: CheckedRecord, before: Part | undefined, after: Part 
     if (was === is) return [];
     const cell = (after?.source.cells[field] ?? before?.source.cells[field])?.address ?? null;
     return [
-      { kind, structureNumber, occurrence, field, part: one.part, before: was, after: is, sheet: one.source.sheet, cell },
+      {
+        kind,
+        structureNumber,
+        occurrence,
+        field,
+        part: one.part,
+        before: was,
+        after: is,
+        sheet: one.source.sheet,
+        cell,
+      },
     ];
   });
 };

@@ -5,7 +5,9 @@ export const canonical = (value: unknown): string => {
     const entries = Object.entries(value).toSorted(([a], [b]) => (a < b ? -1 : a > b ? 1 : 0));
     return `{${entries.map(([key, one]) => `${JSON.stringify(key)}:${canonical(one)}`).join(',')}}`;
   }
-  return JSON.stringify(typeof value === 'number' && !Number.isFinite(value) ? String(value) : value) ?? 'null';
+  return (
+    JSON.stringify(typeof value === 'number' && !Number.isFinite(value) ? String(value) : value) ?? 'null'
+  );
 };
 
 /** Text order by code unit: the same in every locale. */

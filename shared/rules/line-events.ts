@@ -51,7 +51,9 @@ const groupPours = (pours: readonly Pour[]): PourGroup[] =>
 
 /** The line's events in order. Clock rules run event by event, so that a later top-up does not put the first hardware in the wrong. */
 export const lineEvents = (line: LineView): readonly EventView[] => {
-  const pours = bucket(line.pours, (pour) => pour.event);
+  // A pour whose event cannot be read belongs to no clock.
+  const dated = line.pours.filter((pour) => !pour.broken.has('event'));
+  const pours = bucket(dated, (pour) => pour.event);
   const rows = new Map(line.events.map((row) => [row.event, row]));
   const numbers = new Set([1, ...pours.keys(), ...rows.keys()]);
   return [...numbers]

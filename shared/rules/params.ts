@@ -9,14 +9,7 @@ export type NumberParam = {
   readonly minimum: number;
   readonly maximum: number;
 };
-export type TextParam = {
-  readonly type: 'string';
-  readonly title: string;
-  readonly description?: string;
-  readonly default: string;
-  readonly maxLength: number;
-};
-type Properties = Readonly<Record<string, NumberParam | TextParam>>;
+type Properties = Readonly<Record<string, NumberParam>>;
 
 /** JSON Schema (2020-12) of a rule's parameters from its properties. */
 export const paramsSchema = <P extends Properties>(properties: P) =>
@@ -36,17 +29,5 @@ export const numberOf = (
 ): number => {
   const value = params[name];
   if (typeof value === 'number' && Number.isFinite(value)) return value;
-  const fallback = schema.properties[name]?.default;
-  return typeof fallback === 'number' ? fallback : 0;
-};
-
-export const textOf = (
-  params: Readonly<Record<string, Scalar>>,
-  schema: { readonly properties: Properties },
-  name: string,
-): string => {
-  const value = params[name];
-  if (typeof value === 'string') return value;
-  const fallback = schema.properties[name]?.default;
-  return typeof fallback === 'string' ? fallback : '';
+  return schema.properties[name]?.default ?? 0;
 };

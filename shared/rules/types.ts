@@ -92,6 +92,7 @@ export type LineView = {
   readonly values: FieldValues;
   /** Fields of the line's own row with a `record-…` finding (`pours` when rows that might be its pours could not be linked): what follows from them adds nothing more. */
   readonly broken: ReadonlySet<string>;
+  /** By event, then pour number. */
   readonly pours: readonly Pour[];
   /** Ascending by number. */
   readonly events: readonly LineEvent[];
@@ -128,6 +129,8 @@ export type FindingDraft = {
 export type BatchView = {
   readonly lines: readonly LineView[];
   readonly pours: readonly Pour[];
+  /** Pours whose structure has no line here, nor an approved one of an earlier revision. */
+  readonly orphans: readonly Pour[];
   readonly batch: SourceRow;
 };
 

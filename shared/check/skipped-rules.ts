@@ -1,0 +1,18 @@
+import type { CheckContext, Rule, StandardInForce } from '#shared/rules/types.ts';
+import { ruleSetting } from '#shared/standard/rule-setting.ts';
+import type { Skipped } from './types.ts';
+
+const REASON = { lots: 'no-lots', design: 'no-design', photos: 'no-photos', siblings: 'no-siblings' } as const;
+
+/** Rules that did not run: a part of their context is not known here, or a standard used has them off. */
+export const skippedRules = (
+  rules: readonly Rule[],
+  standards: readonly StandardInForce[],
+  context: CheckContext,
+): readonly Skipped[] =>
+  rules.flatMap((rule): Skipped[] => {
+    const lacking = rule.needs.find((part) => context[part] === null);
+    if (lacking) return [{ code: rule.code, reason: REASON[lacking] }];
+    const off = standards.some((standard) => ruleSetting(standard.body, rule.code)?.on !== true);
+    return off ? [{ code: rule.code, reason: 'off' }] : [];
+  });

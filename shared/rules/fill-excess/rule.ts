@@ -1,0 +1,51 @@
+import { say } from '#shared/findings/say.ts';
+import { aboveLimit } from '../against-limit.ts';
+import { fillOf } from '../fill.ts';
+import { numberOf, paramsSchema } from '../params.ts';
+import { atMost } from '../slack.ts';
+import type { LineRule } from '../types.ts';
+
+const schema = paramsSchema({
+  greatestRatio: {
+    type: 'number',
+    title: 'Greatest fill ratio',
+    'x-unit': 'ratio',
+    default: 1.5,
+    minimum: 0.5,
+    maximum: 20,
+  },
+});
+
+export const fillExcess: LineRule = {
+  code: 'fill-excess',
+  title: 'Fill excessive',
+  kinds: ['set', 'straighten', 'relevel'],
+  scope: 'line',
+  severity: 'query',
+  field: 'boreDepthFt',
+  needs: [],
+  paramsSchema: schema,
+  check: (line, params) => {
+    const { fill, missing } = fillOf(line);
+    if (missing) return missing;
+    const surplusFt3 = fill.placedFt3 - fill.voidFt3;
+    // One kit is the least a crew can add: what is left of it is no sign of anything.
+    if (fill.smallestKitFt3 !== null && atMost(surplusFt3, fill.smallestKitFt3)) return [];
+    return aboveLimit({
+      field: fill.field,
+      measured: fill.ratio,
+      limit: numberOf(params, schema, 'greatestRatio'),
+      unit: 'ratio',
+      uncertainty: line.derived.fillRatioU,
+      params: {
+        placedFt3: fill.placedFt3,
+        voidFt3: fill.voidFt3,
+        surplusFt3,
+        measureAgain: line.derived.worstReading,
+      },
+    });
+  },
+  message: ({ measured, limit, params }) =>
+    `${say(params['placedFt3'], 'ft3')} of foam was placed for a void of ${say(params['voidFt3'], 'ft3')}: fill ratio ${say(measured, 'ratio')}, over ${say(limit, 'ratio')}. The bore may be larger than written down, or foam ran off.`,
+  remedy: () => 'Check the bore sizes and the kits poured, or say where the foam went.',
+};
