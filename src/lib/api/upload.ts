@@ -18,8 +18,8 @@ export type UploadRequest = {
 export async function upload<T>(request: UploadRequest): Promise<T> {
   const key = newIdempotencyKey();
   const first = await send(request, key);
-  if (first.status !== 401 || !(await waitForSignIn())) return read<T>(first);
-  return read<T>(await send(request, key));
+  if (first.status !== 401 || !(await waitForSignIn())) return read(first) as T;
+  return read(await send(request, key)) as T;
 }
 
 type Answer = { readonly status: number; readonly text: string };
@@ -43,7 +43,7 @@ function send(request: UploadRequest, idempotencyKey: string): Promise<Answer> {
   });
 }
 
-function read<T>(answer: Answer): T {
+function read(answer: Answer): unknown {
   if (answer.status < 200 || answer.status > 299) throw problemFrom(answer.status, answer.text);
-  return JSON.parse(answer.text) as T;
+  return JSON.parse(answer.text);
 }

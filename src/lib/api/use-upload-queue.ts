@@ -11,13 +11,24 @@ export type QueuedFile = {
   readonly problem: string | null;
 };
 
+/** What the server says of an upload; `error` is written for people. */
+export type UploadReply = {
+  readonly input: number;
+  readonly files: readonly {
+    readonly id: string | null;
+    readonly fileName: string;
+    readonly sha256: string | null;
+    readonly error: string | null;
+  }[];
+};
+
 type Target = { readonly path: string; readonly method: 'POST' | 'PUT'; readonly field: string };
 
 /** Two at a time: one waits for the server while the other uses the line. */
 const AT_ONCE = 2;
 
 /** Sends many files one request each, so that one refusal or a lost connection costs one file; failed ones can be tried again. */
-export function useUploadQueue<Reply>(target: Target, onStored?: (reply: Reply, file: File) => void) {
+export function useUploadQueue(target: Target, onStored?: (reply: UploadReply, file: File) => void) {
   const [files, setFiles] = useState<readonly QueuedFile[]>([]);
   const nextId = useRef(1);
   const abort = useRef<AbortController | null>(null);
@@ -42,7 +53,7 @@ export function useUploadQueue<Reply>(target: Target, onStored?: (reply: Reply, 
           const { id, file } = one;
           patch(id, { state: 'sending', sent: 0, problem: null });
           try {
-            const reply = await upload<Reply>({
+            const reply = await upload<UploadReply>({
               path,
               method,
               field,
@@ -50,8 +61,13 @@ export function useUploadQueue<Reply>(target: Target, onStored?: (reply: Reply, 
               signal,
               onProgress: (sent) => patch(id, { sent }),
             });
-            patch(id, { state: 'stored', sent: file.size });
-            stored.current?.(reply, file);
+            const refused = reply.files.find((answer) => answer.error !== null)?.error;
+            if (refused) {
+              patch(id, { state: 'failed', problem: refused });
+            } else {
+              patch(id, { state: 'stored', sent: file.size });
+              stored.current?.(reply, file);
+            }
           } catch (error) {
             if (signal.aborted) return;
             const problem = error instanceof ApiProblem ? error.message : 'It could not be sent. Try again.';
