@@ -2,6 +2,7 @@ import { createServer } from 'node:http';
 import { createApp } from '#server/app.ts';
 import { ConfigError, loadConfig } from '#server/config/config.ts';
 import { createServices } from '#server/container.ts';
+import { startCapture } from '#server/mail/capture-server.ts';
 import { startWorker } from '#server/worker.ts';
 
 /** How long requests under way may take after the process was told to stop. */
@@ -11,6 +12,7 @@ async function main(): Promise<void> {
   const config = loadConfig(process.env);
   const services = await createServices(config);
   const { log } = services;
+  const capture = config.captureMail && config.run !== 'worker' ? await startCapture(services) : null;
   const worker = config.run === 'web' ? null : await startWorker(services);
   const web = config.run === 'worker' ? null : createApp(services);
   const server = web ? createServer(web.app) : null;
@@ -33,6 +35,7 @@ async function main(): Promise<void> {
     }
     web?.stop();
     await worker?.stop();
+    await capture?.close();
     await services.close();
   };
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {

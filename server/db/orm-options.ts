@@ -27,8 +27,15 @@ export const ENTITIES = [
   Transmittal,
 ];
 
+export type OrmOptions = {
+  max?: number;
+  applicationName?: string;
+  /** Reads and writes migrations/snapshot-upstand.json: for making and checking migrations, never for running them. */
+  snapshot?: boolean;
+};
+
 /** Entities cover the mutable aggregates; append-only tables are written and read by SQL. */
-export function ormOptions(url: string, options: { max?: number; applicationName?: string } = {}) {
+export function ormOptions(url: string, options: OrmOptions = {}) {
   return defineConfig({
     clientUrl: url,
     entities: ENTITIES,
@@ -43,6 +50,7 @@ export function ormOptions(url: string, options: { max?: number; applicationName
     migrations: {
       path: fileURLToPath(new URL('../../migrations', import.meta.url)),
       migrationsList: MIGRATIONS,
+      snapshot: options.snapshot ?? false,
       snapshotName: 'snapshot-upstand',
       tableName: 'mikro_orm_migrations',
       allOrNothing: true,

@@ -1,10 +1,7 @@
 import { MikroORM } from '@mikro-orm/postgresql';
-import { ormOptions } from '#server/db/orm-options.ts';
+import { ormOptions, type OrmOptions } from '#server/db/orm-options.ts';
 
 /** One ORM a process; one fresh `orm.em.fork()` a request and a job. */
-export function createOrm(
-  url: string,
-  options: { max?: number; applicationName?: string } = {},
-): Promise<MikroORM> {
+export function createOrm(url: string, options: OrmOptions = {}): Promise<MikroORM> {
   return MikroORM.init(ormOptions(url, options));
 }

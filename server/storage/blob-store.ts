@@ -174,7 +174,8 @@ export class BlobStore {
   }
 
   async deleteIncoming(name: string, before: Date): Promise<boolean> {
-    if (!name.startsWith(INCOMING)) throw new RangeError('Only an upload under way has no hash for its name.');
+    if (!name.startsWith(INCOMING))
+      throw new RangeError('Only an upload under way has no hash for its name.');
     return deleteIfOld(this.container.getBlockBlobClient(name), before);
   }
 
@@ -192,7 +193,8 @@ export class BlobStore {
           intervalInMs: COPY_POLL_MS,
         });
         const { copyStatus } = await copy.pollUntilDone();
-        if (copyStatus !== 'success') throw new Error(`The store did not take the file over (${copyStatus}).`);
+        if (copyStatus !== 'success')
+          throw new Error(`The store did not take the file over (${copyStatus}).`);
         return false;
       } catch (error) {
         if ((error as { statusCode?: number }).statusCode !== 409) throw error;

@@ -41,7 +41,8 @@ export async function sweep(options: {
     signal?.throwIfAborted();
     if (item.changedAt >= before) continue;
     if (item.sha256 === null) {
-      if (item.name.startsWith('incoming/') && (await blobs.deleteIncoming(item.name, before))) swept.incoming += 1;
+      if (item.name.startsWith('incoming/') && (await blobs.deleteIncoming(item.name, before)))
+        swept.incoming += 1;
     } else if ((await row(em, 'select 1 from blobs where sha256 = $1', [item.sha256])) === null) {
       if (await blobs.deleteIfOld(item.sha256, before)) swept.unknown += 1;
     }

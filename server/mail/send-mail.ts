@@ -1,0 +1,63 @@
+import type { EntityManager } from '@mikro-orm/postgresql';
+import { row, run } from '#server/db/rows.ts';
+import type { JobHandler } from '#server/jobs/define-job.ts';
+import { renderMail, type MailTemplate } from '#server/mail/mail-templates.ts';
+import { createTransport } from '#server/mail/transport.ts';
+
+type OutboxRow = {
+  recipient: string;
+  name: string;
+  template: MailTemplate;
+  data: never;
+  messageId: string;
+  state: 'queued' | 'sent' | 'failed';
+};
+
+/** At least once: a process that dies between the server's answer and our note of it sends again, under the same Message-ID. */
+export const sendMail: JobHandler<{ outboxId: string }> = async ({ outboxId }, { services, em, job }) => {
+  const found = await row<OutboxRow>(
+    em,
+    `select recipient, recipient_name as name, template, data, message_id as "messageId", state from outbox where id = $1`,
+    [outboxId],
+  );
+  if (found === null || found.state === 'sent') return;
+  const { config } = services;
+  const transport = createTransport(config.smtpUrl);
+  try {
+    const { subject, text, html } = renderMail(found.template, found.data, { publicUrl: config.publicUrl });
+    await transport.sendMail({
+      from: { name: 'Upstand', address: config.mailFrom },
+      to: { name: found.name, address: found.recipient },
+      messageId: found.messageId,
+      // Says to other servers' responders that nobody reads an answer to this.
+      headers: { 'Auto-Submitted': 'auto-generated' },
+      subject,
+      text,
+      html,
+    });
+  } catch (error) {
+    await note(em, outboxId, { error, last: job.last });
+    throw error;
+  } finally {
+    transport.close();
+  }
+  await run(
+    em,
+    // A sent link has done its work here: the token is nobody's business any more.
+    `update outbox set state = 'sent', sent_at = now(), attempts = attempts + 1, last_error = null, data = data - 'token' where id = $1`,
+    [outboxId],
+  );
+};
+
+async function note(
+  em: EntityManager,
+  id: string,
+  outcome: { error: unknown; last: boolean },
+): Promise<void> {
+  const message = outcome.error instanceof Error ? outcome.error.message : String(outcome.error);
+  await run(em, `update outbox set state = $2, attempts = attempts + 1, last_error = $3 where id = $1`, [
+    id,
+    outcome.last ? 'failed' : 'queued',
+    message.slice(0, 1_000),
+  ]);
+}
