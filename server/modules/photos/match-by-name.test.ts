@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { matchByName, type NamedLine } from './match-by-name.ts';
+import { matchByName, nameIndex, type NamedLine } from './match-by-name.ts';
 
 const line = (structureNumber: string, kind: NamedLine['kind'] = 'set', occurrence = 1): NamedLine => ({
   lineId: `${structureNumber}/${kind}/${occurrence}`,
@@ -29,7 +29,7 @@ describe('matchByName', () => {
     ['X-9 gap.jpg', 'X-9/straighten/1', 'gap'],
     ['X-9 plumb.jpg', 'X-9/set/1', 'plumb'],
   ])('%s is placed at %s, %s', (name, lineId, view) => {
-    expect(matchByName(name, LINES)).toEqual({ lineId, view });
+    expect(matchByName(name, nameIndex(LINES))).toEqual({ lineId, view });
   });
 
   it.each([
@@ -40,14 +40,16 @@ describe('matchByName', () => {
     ['two kinds that both ask for the view', 'X-9 kits.jpg'],
     ['nothing', ''],
   ])('is left to be placed by hand: %s', (_why, name) => {
-    expect(matchByName(name, LINES)).toBeNull();
+    expect(matchByName(name, nameIndex(LINES))).toBeNull();
   });
 
   it('is left to be placed by hand when two structures fit alike', () => {
-    expect(matchByName('A-10 B-20 kits.jpg', [line('A-10'), line('B-20')])).toBeNull();
+    expect(matchByName('A-10 B-20 kits.jpg', nameIndex([line('A-10'), line('B-20')]))).toBeNull();
   });
 
   it('places at the first line where a structure stands twice', () => {
-    expect(matchByName('S1 kits.jpg', [line('S1'), line('S1', 'set', 2)])?.lineId).toBe('S1/set/1');
+    expect(matchByName('S1 kits.jpg', nameIndex([line('S1'), line('S1', 'set', 2)]))?.lineId).toBe(
+      'S1/set/1',
+    );
   });
 });

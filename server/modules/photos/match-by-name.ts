@@ -9,18 +9,30 @@ export type NamedLine = {
 };
 export type NameMatch = { readonly lineId: string; readonly view: string };
 
+/** Lines by their squashed structure number, made once for all photographs of a batch. */
+export type NameIndex = ReadonlyMap<string, readonly NamedLine[]>;
+
+export function nameIndex(lines: readonly NamedLine[]): NameIndex {
+  const index = new Map<string, NamedLine[]>();
+  for (const line of lines) {
+    const key = squash(line.structureNumber);
+    const same = index.get(key);
+    if (same) same.push(line);
+    else if (key !== '') index.set(key, [line]);
+  }
+  return index;
+}
+
 /**
  * Line and view of a photograph by its file name: the structure number and a view stand in it, separators and case
  * aside (`L-1042_bore-depth.jpg`, `l1042 BoreDepth (2).JPG`). The longest wins, so that `level-after` is not `after`
  * and `L-104-2` is not `L-104`. Null when either is lacking or two fit alike: a guess would hide a missing picture.
  */
-export function matchByName(fileName: string, lines: readonly NamedLine[]): NameMatch | null {
+export function matchByName(fileName: string, lines: NameIndex): NameMatch | null {
   const runs = runsOf(stem(fileName));
-  const view = longest(VIEWS, runs, (name) => name);
-  if (view === null) return null;
-  const number = longest([...new Set(lines.map((line) => line.structureNumber))], runs, (text) => text);
-  if (number === null) return null;
-  const candidates = lines.filter((line) => line.structureNumber === number && line.occurrence === 1);
+  const view = longest(VIEW_INDEX, runs);
+  const candidates = longest(lines, runs)?.filter((line) => line.occurrence === 1);
+  if (!view || !candidates) return null;
   const fitting = candidates.filter((line) => VIEWS_OF_KIND[line.kind].includes(view));
   const only = candidates.length === 1 ? candidates[0] : fitting.length === 1 ? fitting[0] : undefined;
   return only ? { lineId: only.lineId, view } : null;
@@ -52,23 +64,16 @@ function runsOf(text: string): ReadonlySet<string> {
   return runs;
 }
 
-function longest<T>(
-  choices: readonly T[],
-  runs: ReadonlySet<string>,
-  textOf: (choice: T) => string,
-): T | null {
-  let best: T | null = null;
-  let length = 0;
-  let tied = false;
-  for (const choice of choices) {
-    const text = squash(textOf(choice));
-    if (text === '' || !runs.has(text) || text.length < length) continue;
-    tied = text.length === length;
-    best = choice;
-    length = text.length;
-  }
-  return tied ? null : best;
+/** What the longest run that the index knows stands for; null for none, and for two different ones of that length. */
+function longest<T>(index: ReadonlyMap<string, T>, runs: ReadonlySet<string>): T | null {
+  const known = [...runs].filter((run) => index.has(run));
+  const length = Math.max(0, ...known.map((run) => run.length));
+  const best = known.filter((run) => run.length === length);
+  const [only] = best;
+  return best.length === 1 && only !== undefined ? (index.get(only) ?? null) : null;
 }
+
+const VIEW_INDEX: ReadonlyMap<string, string> = new Map(VIEWS.map((view) => [squash(view), view]));
 
 function stem(fileName: string): string {
   return fileName.replace(/\.[^.]*$/u, '');

@@ -1,0 +1,102 @@
+import type { EntityManager } from '@mikro-orm/postgresql';
+import { insertRowsReturning } from '#server/db/insert-rows.ts';
+import { rows } from '#server/db/rows.ts';
+import { enqueue } from '#server/jobs/enqueue.ts';
+import { preparePhotosJob } from '#server/modules/photos/prepare-photos.job.ts';
+import { rememberBlob } from '#server/storage/remember-blob.ts';
+import { appendTrail } from '#server/trail/append-trail.ts';
+import type { ReceivedFile } from '#server/uploads/blob-engine.ts';
+import type { UploadReply } from '#shared/generated/api-types.ts';
+import type { Actor } from '#shared/permissions/ability.ts';
+import { moveRevision } from '#shared/review/revision.ts';
+import { accepted } from './accepted.ts';
+import { addInput } from './add-input.ts';
+import { lockRevision, stateOf, type LockedRevision } from './lock-revision.ts';
+
+type PhotoRow = { id: string; sha256: string };
+
+/**
+ * Adds received photographs to the batch's open revision. A file refused by itself is told beside the others; the
+ * same bytes twice in a batch are one photograph.
+ * @throws Problem 404, 409 when the revision takes no more files
+ */
+export async function postPhotos(
+  em: EntityManager,
+  options: { batchId: string; contractorId: string | null; actor: Actor; files: readonly ReceivedFile[] },
+): Promise<UploadReply> {
+  const { batchId, contractorId, actor, files } = options;
+  return em.transactional(async (tx) => {
+    const revision = await lockRevision(tx, { id: batchId, contractorId });
+    const moved = accepted(moveRevision(stateOf(revision), { type: 'upload' }, actor));
+    const known = await photosBySha(tx, batchId, files);
+    const fresh = newFiles(files, known);
+    let input = revision.input;
+    if (fresh.length > 0) {
+      for (const { stored } of fresh) if (stored) await rememberBlob(tx, stored);
+      const added = await addInput(
+        tx,
+        { id: revision.id, input: revision.input, status: moved.status },
+        { kind: 'photos', actorId: actor.id },
+      );
+      input = added.n;
+      for (const photo of await insertPhotos(tx, { revision, inputId: added.id, actor, fresh }))
+        known.set(photo.sha256, photo.id);
+      await enqueue(tx, preparePhotosJob, { batchId });
+      await appendTrail(tx, {
+        actor,
+        action: 'batch.photos-uploaded',
+        subject: { type: 'batch', id: batchId, label: revision.batch_number },
+        payload: { revision: revision.n, input, photographs: fresh.length },
+      });
+    }
+    return {
+      input,
+      files: files.map(({ fileName, stored, refused }) => ({
+        id: stored ? (known.get(stored.sha256) ?? null) : null,
+        fileName,
+        sha256: stored?.sha256 ?? null,
+        error: refused ? { code: refused.code, detail: refused.detail } : null,
+      })),
+    };
+  });
+}
+
+async function photosBySha(
+  em: EntityManager,
+  batchId: string,
+  files: readonly ReceivedFile[],
+): Promise<Map<string, string>> {
+  const found = await rows<PhotoRow>(
+    em,
+    'select id, sha256 from photos where batch_id = $1 and sha256 = any($2)',
+    [batchId, files.flatMap((file) => (file.stored ? [file.stored.sha256] : []))],
+  );
+  return new Map(found.map((photo) => [photo.sha256, photo.id]));
+}
+
+function newFiles(files: readonly ReceivedFile[], known: ReadonlyMap<string, string>): ReceivedFile[] {
+  const bySha = new Map<string, ReceivedFile>();
+  for (const file of files)
+    if (file.stored && !known.has(file.stored.sha256) && !bySha.has(file.stored.sha256))
+      bySha.set(file.stored.sha256, file);
+  return [...bySha.values()];
+}
+
+function insertPhotos(
+  em: EntityManager,
+  photos: { revision: LockedRevision; inputId: string; actor: Actor; fresh: readonly ReceivedFile[] },
+): Promise<PhotoRow[]> {
+  const { revision, inputId, actor, fresh } = photos;
+  return insertRowsReturning<PhotoRow>(em, {
+    table: 'photos',
+    list: fresh.map((file) => ({
+      batch_id: revision.batch_id,
+      revision_id: revision.id,
+      input_id: inputId,
+      sha256: file.stored?.sha256,
+      file_name: file.fileName,
+      actor_id: actor.id,
+    })),
+    returning: ['id', 'sha256'],
+  });
+}

@@ -1,0 +1,60 @@
+import type { EntityManager } from '@mikro-orm/postgresql';
+import { row } from '#server/db/rows.ts';
+import type { SourceBatch } from '#shared/records/types.ts';
+import type { CheckContext } from '#shared/rules/types.ts';
+import { loadDesign } from './load-design.ts';
+import { loadLines, type KnownLines } from './load-lines.ts';
+import { loadLots, type LotRow } from './load-lots.ts';
+import { loadPhotos } from './load-photos.ts';
+import { loadProducts, loadStandards } from './load-versions.ts';
+import { placePhotos, type Placing } from './place-photos.ts';
+import type { StartedRun } from './start-run.ts';
+
+export type LoadedContext = {
+  readonly context: CheckContext;
+  readonly lots: readonly LotRow[];
+  readonly placing: Placing;
+  /** `kind|STRUCTURE` of the lines that came back with an earlier revision. */
+  readonly returned: ReadonlySet<string>;
+  readonly lines: KnownLines;
+};
+
+/** What the batch knows beside its lines, by one query a matter, whatever the number of lines. */
+export async function loadContext(
+  em: EntityManager,
+  run: StartedRun,
+  source: SourceBatch,
+): Promise<LoadedContext> {
+  const order = await row<{ zone: string; first_submitted: string | null }>(
+    em,
+    `select w.zone, (
+       select v.submitted_at from revisions v where v.batch_id = $2 and v.n = 0
+     ) as first_submitted from work_orders w where w.id = $1`,
+    [run.workOrderId, run.batchId],
+  );
+  if (!order) throw new Error(`The work order ${run.workOrderId} is gone.`);
+  // What was in force when the batch was first handed in stays in force for its returned lines.
+  const asOf = run.n === 0 ? null : order.first_submitted;
+  const standards = await loadStandards(em, asOf);
+  const products = await loadProducts(em, asOf);
+  const lots = await loadLots(em);
+  const design = await loadDesign(em, run.workOrderId);
+  const lines = await loadLines(em, run.batchId);
+  const placing = placePhotos({ photos: await loadPhotos(em, run.batchId), source, known: lines });
+  return {
+    context: {
+      zone: order.zone,
+      asOfMs: run.asOfMs,
+      standards,
+      products,
+      lots: lots.map(({ product, number, expiresOn, status }) => ({ product, number, expiresOn, status })),
+      design,
+      photos: placing.byLine,
+      siblings: lines.standing,
+    },
+    lots,
+    placing,
+    returned: lines.returned,
+    lines,
+  };
+}

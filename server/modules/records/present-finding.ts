@@ -1,0 +1,107 @@
+import { renderFinding } from '#shared/findings/render.ts';
+import type { Finding } from '#shared/findings/types.ts';
+import type { FindingRow } from '#shared/generated/api-types.ts';
+import { may, type Ability, type Actor } from '#shared/permissions/ability.ts';
+import type { FindingDbRow } from './finding-select.ts';
+
+const STATES = {
+  open: 'undecided',
+  approved: 'approved',
+  rejected: 'rejected',
+  held: 'concession-asked',
+} as const;
+
+/**
+ * A finding on the wire, with its sentence. A contractor is told nothing of another one, and nothing of a review that
+ * is still going on: decisions count when it is closed.
+ */
+export function presentFinding(row: FindingDbRow, viewer: { actor: Actor; ability: Ability }): FindingRow {
+  const owner = viewer.actor.orgKind === 'owner';
+  const told = owner || row.revision_status !== 'in-review';
+  const { title, message, remedy } = renderFinding(toFinding(row, owner));
+  return {
+    id: row.id,
+    recordId: row.record_id,
+    lineId: row.line_id,
+    kind: row.kind,
+    code: row.code,
+    title,
+    severity: row.severity,
+    structureNumber: row.structure_number,
+    sheet: row.sheet,
+    row: row.row,
+    cell: row.cell,
+    field: row.field,
+    measured: row.measured,
+    limit: row.limit_value,
+    margin: row.margin,
+    unit: row.unit,
+    uncertainty: row.uncertainty,
+    params: { ...row.params, ...(owner ? row.owner_params : {}) },
+    message,
+    remedy,
+    answer:
+      row.answer_text === null
+        ? null
+        : { text: row.answer_text, by: row.answer_by ?? '', at: row.answer_at ?? '' },
+    state: told ? STATES[row.state] : 'undecided',
+    decision: told ? decisionOf(row) : null,
+    concession: told ? concessionOf(row) : null,
+    version: row.version,
+    can: findingCan(row, viewer),
+  };
+}
+
+export function toFinding(row: FindingDbRow, owner: boolean): Finding {
+  return {
+    code: row.code,
+    severity: row.severity,
+    kind: row.kind,
+    structureNumber: row.structure_number,
+    occurrence: row.occurrence,
+    sheet: row.sheet,
+    row: row.row,
+    cell: row.cell,
+    field: row.field,
+    measured: row.measured,
+    limit: row.limit_value,
+    margin: row.margin,
+    unit: row.unit,
+    uncertainty: row.uncertainty,
+    params: row.params,
+    ownerParams: owner ? row.owner_params : {},
+    fingerprint: row.fingerprint,
+  };
+}
+
+function decisionOf(row: FindingDbRow): FindingRow['decision'] {
+  const { decision } = row;
+  if ((decision !== 'approve' && decision !== 'reject') || row.decided_at === null) return null;
+  return {
+    decision,
+    grounds: row.grounds,
+    action: row.action,
+    dueOn: row.due_on,
+    reason: row.reason,
+    by: row.decided_by ?? '',
+    at: row.decided_at,
+  };
+}
+
+function concessionOf(row: FindingDbRow): FindingRow['concession'] {
+  const { concession_id: id, concession_number: number, concession_type: state } = row;
+  if (!id || !number || !state || state === 'withdrawn') return null;
+  return { id, number, state };
+}
+
+function findingCan(row: FindingDbRow, { actor, ability }: { actor: Actor; ability: Ability }): string[] {
+  const owned = { contractorId: row.contractor_id };
+  const can: string[] = [];
+  if (row.severity === 'note') return can;
+  if (row.open_revision_id && may(ability, 'hand-in', 'Finding', owned)) can.push('answer');
+  const holds = row.revision_status === 'in-review' && row.inspector_id === actor.id;
+  if (!holds || !may(ability, 'review', 'Finding', owned)) return can;
+  if (row.state !== 'held') can.push('decide', 'ask-concession');
+  if (row.state === 'approved' || row.state === 'rejected') can.push('undo');
+  return can;
+}
