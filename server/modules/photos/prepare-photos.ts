@@ -1,0 +1,114 @@
+import { mkdtemp, rm } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import type { EntityManager } from '@mikro-orm/postgresql';
+import type { Services } from '#server/container.ts';
+import { rows, run } from '#server/db/rows.ts';
+import type { JobHandler } from '#server/jobs/define-job.ts';
+import { setProgress } from '#server/jobs/progress.ts';
+import { BlobMissing } from '#server/storage/blob-store.ts';
+import { rememberBlob } from '#server/storage/remember-blob.ts';
+import type { PictureAnswer } from './picture-messages.ts';
+import { PictureProcess } from './picture-process.ts';
+import { PHOTO_PIPELINE } from './pipeline.ts';
+import type { PreparePhotosPayload } from './prepare-photos.job.ts';
+
+const DISPLAY_BYTES = 20_000_000;
+
+/** Every photograph of the batch that has no facts yet, one at a time; each is kept when it is done, so that a repeat goes on from there. */
+export const preparePhotos: JobHandler<PreparePhotosPayload> = async (
+  { batchId },
+  { services, em, signal },
+) => {
+  const waiting = await rows<{ sha256: string }>(
+    em,
+    `select distinct p.sha256 from photos p
+     where p.batch_id = $1 and not exists (
+       select 1 from photo_facts f where f.sha256 = p.sha256 and f.pipeline = $2
+     )`,
+    [batchId, PHOTO_PIPELINE],
+  );
+  if (waiting.length === 0) return;
+  const process = new PictureProcess();
+  const folder = await mkdtemp(join(tmpdir(), 'upstand-photos-'));
+  try {
+    for (const [index, { sha256 }] of waiting.entries()) {
+      await preparePhoto({ em, services, process, folder, sha256, signal });
+      const done = index + 1;
+      const state = done < waiting.length ? 'running' : 'done';
+      await setProgress(em, { subject: `photos:${batchId}`, state, done, total: waiting.length });
+    }
+  } finally {
+    process.close();
+    await rm(folder, { recursive: true, force: true });
+  }
+};
+
+async function preparePhoto(options: {
+  em: EntityManager;
+  services: Services;
+  process: PictureProcess;
+  folder: string;
+  sha256: string;
+  signal: AbortSignal;
+}): Promise<void> {
+  const { em, services, process, folder, sha256, signal } = options;
+  const files = {
+    source: join(folder, 'source'),
+    thumb: join(folder, 'thumb.jpg'),
+    display: join(folder, 'display.jpg'),
+  };
+  try {
+    await services.blobs.readTo(sha256, files.source, { signal });
+    const answer = await process.decode(files, signal);
+    await keep({ em, services, sha256, answer, files, signal });
+  } catch (error) {
+    // Its bytes are gone: the others are prepared all the same.
+    if (!(error instanceof BlobMissing)) throw error;
+    services.log.error({ sha256 }, 'the bytes of a photograph are missing from the blob store');
+  } finally {
+    for (const path of Object.values(files)) await rm(path, { force: true });
+  }
+}
+
+async function keep(options: {
+  em: EntityManager;
+  services: Services;
+  sha256: string;
+  answer: PictureAnswer;
+  files: { thumb: string; display: string };
+  signal: AbortSignal;
+}): Promise<void> {
+  const { em, services, sha256, answer, files, signal } = options;
+  const put = (path: string) => services.blobs.putFile(path, { maxBytes: DISPLAY_BYTES, signal });
+  const shown =
+    answer.type === 'facts' ? { thumb: await put(files.thumb), display: await put(files.display) } : null;
+  const facts = answer.type === 'facts' ? answer.facts : null;
+  const problem = answer.type === 'problem' ? { code: answer.code, detail: answer.detail } : null;
+  await em.transactional(async (tx) => {
+    if (shown) {
+      await rememberBlob(tx, { ...shown.thumb, type: 'image/jpeg' });
+      await rememberBlob(tx, { ...shown.display, type: 'image/jpeg' });
+    }
+    await run(
+      tx,
+      `insert into photo_facts (sha256, pipeline, type, width, height, taken_wall, taken_at, latitude, longitude,
+         thumb_sha256, display_sha256, problem)
+       values ($1, $2, $3, $4, $5, $6, $7, $8, $9, $10, $11, $12) on conflict (sha256, pipeline) do nothing`,
+      [
+        sha256,
+        PHOTO_PIPELINE,
+        facts?.type ?? null,
+        facts?.width ?? null,
+        facts?.height ?? null,
+        facts?.takenWall ?? null,
+        facts?.takenAt ?? null,
+        facts?.latitude ?? null,
+        facts?.longitude ?? null,
+        shown?.thumb.sha256 ?? null,
+        shown?.display.sha256 ?? null,
+        problem === null ? null : JSON.stringify(problem),
+      ],
+    );
+  });
+}
