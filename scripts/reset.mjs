@@ -9,7 +9,7 @@ import { lockHolder } from './lib/start-lock.mjs';
 import { readStartSettings } from './lib/start-settings.mjs';
 
 /** What `npm start` makes in its data folder; whatever else lies there is not ours to remove. */
-const OURS = ['postgres', 'blobs', 'mail', 'uploads', 'logs', 'secrets.json', 'start.lock'];
+const OURS = ['postgres', 'blobs', 'mail', 'uploads', 'logs', 'secrets.json', 'session-secret', 'start.lock'];
 const root = fileURLToPath(new URL('..', import.meta.url));
 
 try {

@@ -4,7 +4,7 @@ import { fileURLToPath } from 'node:url';
 import { startAzurite } from './lib/azurite.mjs';
 import { startChild, endWithParentArgs } from './lib/child.mjs';
 import { ensureClientBuild } from './lib/client-build.mjs';
-import { portIsFree } from './lib/free-port.mjs';
+import { freePort, portIsFree } from './lib/free-port.mjs';
 import { ensureNodePackages } from './lib/node-packages.mjs';
 import { portOwner } from './lib/port-owner.mjs';
 import { startPostgres } from './lib/postgres.mjs';
@@ -103,8 +103,10 @@ async function checkPort(port) {
 async function startStores({ settings, secrets, logs }) {
   const { dataDir } = settings;
   const env = { ...process.env, TZ: 'UTC', PORT: String(settings.port), DATA_DIR: dataDir };
-  env.SESSION_SECRET ||= secrets.sessionSecret;
-  env.PUBLIC_URL ||= settings.url;
+  if (!settings.smtpUrl) {
+    env.SMTP_URL = `smtp://127.0.0.1:${await freePort()}`;
+    env.CAPTURE_MAIL = '1'; // the server keeps the messages itself and shows them to the administrator
+  }
   if (settings.databaseUrl) {
     await step('PostgreSQL', async (say) => say('the one that DATABASE_URL names'));
   } else {
@@ -115,7 +117,6 @@ async function startStores({ settings, secrets, logs }) {
     );
     env.DATABASE_URL = database.url;
     env.DATABASE_APP_URL = database.appUrl;
-    env.DEMO_PASSWORD = secrets.demoPassword;
   }
   if (settings.storage) {
     await step('Blob store', async (say) => say('the one that AZURE_STORAGE_CONNECTION_STRING names'));
@@ -126,7 +127,13 @@ async function startStores({ settings, secrets, logs }) {
     );
     env.AZURE_STORAGE_CONNECTION_STRING = blobs.connectionString;
   }
+  if (isDemo(settings)) Object.assign(env, { DEMO: '1', DEMO_PASSWORD: secrets.demoPassword });
   return env;
+}
+
+/** The demo belongs to stores of our own only; what the environment names is never seeded. */
+function isDemo(settings) {
+  return !settings.databaseUrl && !settings.storage;
 }
 
 async function startServer({ settings, env, logFile }) {
@@ -144,9 +151,9 @@ async function startServer({ settings, env, logFile }) {
   return server;
 }
 
-/** The demo goes only into a cluster of our own, and once: the database itself remembers. */
+/** Once: the database itself remembers. */
 async function seedOnce({ settings, env }) {
-  if (settings.databaseUrl) return false;
+  if (!isDemo(settings)) return false;
   await step('Demo', async (say) => {
     const { output } = await run(process.execPath, ['--import', 'tsx', 'scripts/seed/seed.ts'], {
       cwd: root,

@@ -1,4 +1,4 @@
-import { randomBytes, randomInt } from 'node:crypto';
+import { randomInt } from 'node:crypto';
 import { existsSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { newAccountKey } from './azurite.mjs';
@@ -11,7 +11,7 @@ const WORDS =
 
 /**
  * The secrets of this installation, made at the first start and kept in its data folder, readable by its owner only.
- * @returns {{database: {owner: string, app: string}, storageKey: string, sessionSecret: string, demoPassword: string}}
+ * @returns {{database: {owner: string, app: string}, storageKey: string, demoPassword: string}}
  */
 export function readSecrets(dir) {
   const file = path.join(dir, 'secrets.json');
@@ -19,7 +19,6 @@ export function readSecrets(dir) {
   const secrets = {
     database: newPasswords(),
     storageKey: newAccountKey(),
-    sessionSecret: randomBytes(32).toString('hex'),
     demoPassword: newDemoPassword(),
   };
   const half = `${file}.${process.pid}`;
