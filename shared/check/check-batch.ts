@@ -111,9 +111,12 @@ export const checkBatch = (source: SourceBatch, context: CheckContext): CheckRes
     ...notices.map(noticeFinding),
   ]);
   const codes = new Map<unknown, Set<string>>();
-  for (const one of found) if (one.line) codes.set(one.line, (codes.get(one.line) ?? new Set()).add(one.code));
+  for (const one of found)
+    if (one.line) codes.set(one.line, (codes.get(one.line) ?? new Set()).add(one.code));
   const used = new Set(viewed.map((line) => line.standard));
-  const records = orderRecords(viewed.map((line) => toRecord(line, [...(codes.get(line.line) ?? [])].toSorted())));
+  const records = orderRecords(
+    viewed.map((line) => toRecord(line, [...(codes.get(line.line) ?? [])].toSorted())),
+  );
   return {
     records,
     findings: orderFindings(findings, records),

@@ -5,6 +5,17 @@ import type { Derived, FieldValues, Kind } from '#shared/records/types.ts';
 import type { LineEvent, Pour } from '#shared/rules/types.ts';
 import type { Product, Standard } from '#shared/standard/types.ts';
 
+type Line = {
+  readonly kind: Kind;
+  readonly values: FieldValues;
+  readonly broken: ReadonlySet<string>;
+  readonly pours: readonly Pour[];
+  readonly events: readonly LineEvent[];
+  readonly standard: Standard;
+  readonly product: Product | null;
+  readonly designDepthFt: number | null;
+};
+
 const DERIVE = { set: deriveSet, straighten: deriveStraighten, relevel: deriveRelevel };
 
 const BORE = ['boreTopIn', 'boreTopAcrossIn', 'boreBottomIn', 'boreBottomAcrossIn'];
@@ -12,25 +23,47 @@ const GROUND_LINE = ['girthGroundLineIn', 'diameterGroundLineIn', 'poleSection']
 const CLASS_TABLE = ['poleLengthFt', 'poleClass', 'poleMaterial'];
 const POLE = [...GROUND_LINE, ...CLASS_TABLE, 'girthButtIn', 'diameterButtIn', 'embedmentFt'];
 const SIZES = [...BORE, ...POLE];
-const SPACE = [...SIZES, 'bellIn', 'bellHeightFt', 'boreDepthFt', 'buttEnd', 'wallIn', 'bedMaterial', 'bedFt'];
+const SPACE = [
+  ...SIZES,
+  'bellIn',
+  'bellHeightFt',
+  'boreDepthFt',
+  'buttEnd',
+  'wallIn',
+  'bedMaterial',
+  'bedFt',
+];
 
 /** What each void is made of. */
 const VOID: Readonly<Record<Kind, readonly string[]>> = {
   set: [...SPACE, 'slopeRiseIn', 'foamTopBelowGradeIn'],
   straighten: ['gapAtGradeIn', 'gapAtDepthIn', 'gapDepthFt', 'gapWidthIn', ...GROUND_LINE, ...CLASS_TABLE],
-  relevel: ['padLengthIn', 'padWidthIn', 'openingLengthIn', 'openingWidthIn', 'gap1In', 'gap2In', 'gap3In', 'gap4In'],
+  relevel: [
+    'padLengthIn',
+    'padWidthIn',
+    'openingLengthIn',
+    'openingWidthIn',
+    'gap1In',
+    'gap2In',
+    'gap3In',
+    'gap4In',
+  ],
 };
 
 /** A figure is not known where a reading behind it could not be read: the computations would take a blank for its default. */
-const withoutBroken = (derived: Derived, kind: Kind, broken: ReadonlySet<string>): Derived => {
+const withoutBroken = (
+  derived: Derived,
+  { kind, values, events, broken }: Pick<Line, 'kind' | 'values' | 'events' | 'broken'>,
+): Derived => {
   const any = (fields: readonly string[]): boolean => fields.some((field) => broken.has(field));
-  const noVoid = any(VOID[kind]);
+  const noVoid = any(VOID[kind]) || events.some((event) => event.broken.has('foamTopBelowGradeIn'));
+  const due = ['ground', 'rockFromFt', 'poleLengthFt', ...(values['ground'] === 'soil' ? [] : BORE)];
   return {
     ...derived,
     ...(noVoid ? { voidFt3: null, fillRatio: null, fillRatioU: null, worstReading: null } : {}),
     ...(kind === 'set' && any([...SPACE, 'waterIn', 'waterMeasured']) ? { waterWithPoleIn: null } : {}),
     ...(any([...SIZES, 'leastGapIn']) ? { leastAnnulusIn: null } : {}),
-    ...(any(['ground', 'rockFromFt', 'poleLengthFt', ...BORE]) ? { dueFt: null } : {}),
+    ...(any(due) ? { dueFt: null } : {}),
     ...(any(POLE) ? { poleTaped: null } : {}),
   };
 };
@@ -42,34 +75,15 @@ const countable = (pours: readonly Pour[]): readonly Pour[] =>
   );
 
 /** Derived figures of a line; null where a reading is missing or could not be read. */
-export const deriveLine = ({
-  kind,
-  values,
-  broken,
-  pours,
-  events,
-  standard,
-  product,
-  designDepthFt,
-}: {
-  readonly kind: Kind;
-  readonly values: FieldValues;
-  readonly broken: ReadonlySet<string>;
-  readonly pours: readonly Pour[];
-  readonly events: readonly LineEvent[];
-  readonly standard: Standard;
-  readonly product: Product | null;
-  readonly designDepthFt: number | null;
-}): Derived =>
+export const deriveLine = (line: Line): Derived =>
   withoutBroken(
-    DERIVE[kind]({
-      values,
-      pours: countable(pours),
-      standard,
-      product,
-      designEmbedmentFt: designDepthFt,
-      events: events.map((event) => event.values),
+    DERIVE[line.kind]({
+      values: line.values,
+      pours: countable(line.pours),
+      standard: line.standard,
+      product: line.product,
+      designEmbedmentFt: line.designDepthFt,
+      events: line.events.map((event) => event.values),
     }),
-    kind,
-    broken,
+    line,
   );

@@ -13,7 +13,8 @@ import { toPour } from './to-pour.ts';
 
 type Target = LinkTarget & { readonly row: CleanRow; readonly broken: Set<string> };
 
-const numberText = (value: unknown): string => String(typeof value === 'number' ? value : 999).padStart(3, '0');
+const numberText = (value: unknown): string =>
+  String(typeof value === 'number' ? value : 999).padStart(3, '0');
 
 /** By event, pour number, then content: no figure may hang on the order of rows, not even by its last digit. */
 const contentOrder = (rows: readonly CleanRow[]): CleanRow[] => {

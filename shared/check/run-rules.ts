@@ -81,7 +81,11 @@ export const runLineRules = (
 /** What the rules on the whole batch find, by the standard of its last work day. */
 export const runBatchRules = (
   rules: readonly Rule[],
-  { batch, lineOf, standard }: {
+  {
+    batch,
+    lineOf,
+    standard,
+  }: {
     readonly batch: BatchView;
     readonly lineOf: ReadonlyMap<unknown, PreparedLine>;
     readonly standard: StandardInForce;

@@ -10,7 +10,8 @@ const shorten = (text: string): string => (text.length > LONGEST ? `${text.slice
 /** A value of a finding as it stands in a sentence: numbers with their unit, wall-clock times, words. A dash for nothing. */
 export const say = (value: Scalar | readonly Scalar[] | undefined, unit: string | null): string => {
   if (value === undefined || value === null || value === '') return '–';
-  if (typeof value === 'number') return formatQuantity(value, unit ?? 'count', unit === null ? { digits: 4 } : {});
+  if (typeof value === 'number')
+    return formatQuantity(value, unit ?? 'count', unit === null ? { digits: 4 } : {});
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (typeof value !== 'string') return value.map((one) => say(one, unit)).join(', ');
   const clock = unit === 'clock' ? CLOCK.exec(value) : null;

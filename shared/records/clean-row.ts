@@ -20,7 +20,9 @@ const RANGE: ReadonlySet<string> = new Set(['minimum', 'exclusiveMinimum', 'maxi
 const CLASS_TABLE_FIELDS = ['poleLengthFt', 'poleClass', 'poleMaterial'] as const;
 
 const isScalar = (value: unknown): value is Scalar =>
-  typeof value === 'string' || typeof value === 'boolean' || (typeof value === 'number' && Number.isFinite(value));
+  typeof value === 'string' ||
+  typeof value === 'boolean' ||
+  (typeof value === 'number' && Number.isFinite(value));
 
 const faultIssue = (fault: FieldFault, field: string, meta: FieldMeta, value: Scalar): RecordIssue => {
   const params = expectedParams(meta);
@@ -41,11 +43,16 @@ const faultIssue = (fault: FieldFault, field: string, meta: FieldMeta, value: Sc
   if (fault.keyword === 'enum' || fault.keyword === 'const') {
     // A code that is allowed as such does not go with the rest of the row.
     if (typeof value === 'string' && meta.allowed?.includes(value) === true)
-      return { ...plain, code: 'record-conditional', params: { ...params, condition: conditionOf(field, null) } };
+      return {
+        ...plain,
+        code: 'record-conditional',
+        params: { ...params, condition: conditionOf(field, null) },
+      };
     return { ...plain, code: 'record-code' };
   }
   if (fault.keyword === 'pattern') return { ...plain, code: 'record-unreadable' };
-  if (fault.keyword === 'maxLength' || fault.keyword === 'minLength') return { ...plain, code: 'record-length' };
+  if (fault.keyword === 'maxLength' || fault.keyword === 'minLength')
+    return { ...plain, code: 'record-length' };
   return { ...plain, code: 'record-type' };
 };
 

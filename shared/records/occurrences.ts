@@ -28,6 +28,6 @@ export const occurrences = (lines: readonly SourceLine[]): ReadonlyMap<SourceLin
 
 const sortKey = (line: SourceLine): string => {
   const at = line.values[WORK_TIME[line.kind]];
-  const raw = Object.entries(line.cells ?? {}).map(([field, cell]) => [field, cell.raw]);
-  return `${typeof at === 'string' ? at : '~'} ${canonical(line.values)} ${canonical(raw.toSorted())}`;
+  const raw = Object.fromEntries(Object.entries(line.cells).map(([field, cell]) => [field, cell.raw]));
+  return `${typeof at === 'string' ? at : '~'} ${canonical(line.values)} ${canonical(raw)}`;
 };

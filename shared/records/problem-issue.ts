@@ -10,5 +10,5 @@ export const problemIssue = (problem: CellProblem, meta: FieldMeta | undefined):
   limit: null,
   margin: null,
   unit: null,
-  params: { ...expectedParams(meta), ...problem.params },
+  params: { ...problem.params, ...expectedParams(meta) },
 });

@@ -43,20 +43,24 @@ export const clockUnreal: LineRule = {
   check: (line, _params, { zone }) =>
     lineEvents(line).flatMap(({ event, source, values, instants, pours }) => [
       ...clockFields(line.kind, event).flatMap((field) =>
-        source && !instants.has(field) ? unreal({ field, source, part: `event ${event}`, value: values[field] }, zone) : [],
+        source && !instants.has(field)
+          ? unreal({ field, source, part: `event ${event}`, value: values[field] }, zone)
+          : [],
       ),
       ...pours.flatMap((pour) =>
-        pour.rows.filter((row) => row.pouredAtMs === null).flatMap((row) =>
-          unreal(
-            {
-              field: 'pouredAt',
-              source: row.source,
-              part: `event ${event} pour ${pour.pourNumber ?? '?'}`,
-              value: row.pouredAt,
-            },
-            zone,
+        pour.rows
+          .filter((row) => row.pouredAtMs === null)
+          .flatMap((row) =>
+            unreal(
+              {
+                field: 'pouredAt',
+                source: row.source,
+                part: `event ${event} pour ${pour.pourNumber ?? '?'}`,
+                value: row.pouredAt,
+              },
+              zone,
+            ),
           ),
-        ),
       ),
     ]),
   message: ({ measured, params }) =>
