@@ -115,5 +115,9 @@ export function orderList(
   for (const kit of plans.flatMap(({ kits }) => kits)) counts.set(kit, (counts.get(kit) ?? 0) + 1);
   return [...counts]
     .sort(([a], [b]) => b - a)
-    .map(([kitFt3, planned]) => ({ kitFt3, planned, spares: Math.ceil(planned * spareShare - SLACK) }));
+    .map(([kitFt3, planned]) => ({
+      kitFt3,
+      planned,
+      spares: Math.max(0, Math.ceil(planned * spareShare - SLACK)),
+    }));
 }
