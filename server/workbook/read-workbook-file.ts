@@ -6,6 +6,7 @@ import { READER_LIMITS } from '#shared/workbook/limits.ts';
 import type { Workbook } from '#shared/workbook/types.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
 import { createCollector } from '#shared/workbook/xml/collect-workbook.ts';
+import { unpackRow } from './pack-rows.ts';
 import type { ReaderMessage } from './reader-messages.ts';
 import { residentMemory } from './resident-memory.ts';
 import { createSlots } from './slots.ts';
@@ -55,7 +56,9 @@ function readInChild(
       });
     }, WATCH_EVERY_MS);
     child.on('message', (message: ReaderMessage) => {
-      if (message.type === 'event') collector.add(message.event);
+      if (message.type === 'rows') {
+        collector.add({ type: 'rows', sheet: message.sheet, rows: message.rows.map(unpackRow) });
+      } else if (message.type === 'event') collector.add(message.event);
       else if (message.type === 'done') done = true;
       else verdict ??= new WorkbookRefused(message.code, message.params);
     });

@@ -1,6 +1,6 @@
 import { readFile } from 'node:fs/promises';
-import type { Row } from '#shared/workbook/types.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
+import { packRow, type PackedRow } from './pack-rows.ts';
 import type { ReaderMessage } from './reader-messages.ts';
 import { readWorkbookEvents } from './read-workbook-bytes.ts';
 
@@ -15,11 +15,11 @@ function send(message: ReaderMessage): Promise<void> {
 }
 
 async function readAndSend(path: string): Promise<void> {
-  let rows: Row[] = [];
+  let rows: PackedRow[] = [];
   let cells = 0;
   let sheet = 0;
   const flush = async (): Promise<void> => {
-    if (rows.length > 0) await send({ type: 'event', event: { type: 'rows', sheet, rows } });
+    if (rows.length > 0) await send({ type: 'rows', sheet, rows });
     rows = [];
     cells = 0;
   };
@@ -32,7 +32,7 @@ async function readAndSend(path: string): Promise<void> {
     if (event.sheet !== sheet) await flush();
     sheet = event.sheet;
     for (const row of event.rows) {
-      rows.push(row);
+      rows.push(packRow(row));
       cells += row.cells.length;
       if (cells >= CELLS_A_MESSAGE) await flush();
     }

@@ -20,29 +20,30 @@ export type Header = {
   readonly skipped: readonly number[];
 };
 
-type NameSet = 'keys' | 'names';
-
-function columnNamed(layout: SheetLayout, cell: Cell, set: NameSet): Column | undefined {
+function columnNamed(layout: SheetLayout, cell: Cell): Column | undefined {
   if (cell.kind !== 'text') return undefined;
   const name = nameKey(cell.raw);
-  return name === '' ? undefined : layout.columns.find((column) => column[set].has(name));
+  return name === '' ? undefined : layout.columns.find((column) => column.names.has(name));
 }
 
-const hits = (layout: SheetLayout, row: Row, set: NameSet): number =>
-  new Set(row.cells.map((cell) => columnNamed(layout, cell, set)).filter(Boolean)).size;
+const hits = (layout: SheetLayout, row: Row): number =>
+  new Set(row.cells.map((cell) => columnNamed(layout, cell)).filter(Boolean)).size;
 
-/** The row with most keys, else the one with most titles; one lone match is chance. */
-function headingRow(layout: SheetLayout, rows: readonly Row[]): { row: Row; set: NameSet } | null {
-  for (const set of ['keys', 'names'] as const) {
-    let best: Row | null = null;
-    let most = 1;
-    for (const row of rows) {
-      const count = row.row > SEARCHED_ROWS ? 0 : hits(layout, row, set);
-      if (count > most) [best, most] = [row, count];
-    }
-    if (best !== null) return { row: best, set };
+/** The first row with the most keys or titles; one lone match is chance. */
+function headingRow(layout: SheetLayout, rows: readonly Row[]): Row | null {
+  let best: Row | null = null;
+  let most = 1;
+  for (const row of rows) {
+    const count = row.row > SEARCHED_ROWS ? 0 : hits(layout, row);
+    if (count > most) [best, most] = [row, count];
   }
-  return null;
+  return best;
+}
+
+/** Keys stand exactly as the schemas write them, titles do not. */
+function isKeyRow(layout: SheetLayout, row: Row): boolean {
+  const keys = row.cells.filter((cell) => layout.columns.some((column) => column.keys.has(cell.raw.trim())));
+  return keys.length * 2 > hits(layout, row);
 }
 
 const isFilled = (cell: Cell): boolean => cell.kind === 'error' || trimText(cell.raw) !== '';
@@ -81,10 +82,10 @@ export function findHeader(
   const unknown = new Map<number, Cell>();
   const twice: { cell: Cell; column: Column }[] = [];
   const taken = new Set<string>();
-  const head = (row: Row, set: NameSet): void => {
+  const head = (row: Row): void => {
     for (const cell of row.cells) {
       if (columns.has(cell.column) || !isFilled(cell)) continue;
-      const column = columnNamed(layout, cell, set);
+      const column = columnNamed(layout, cell);
       if (column === undefined) {
         if (!unknown.has(cell.column)) unknown.set(cell.column, cell);
       } else if (taken.has(column.key)) twice.push({ cell, column });
@@ -95,19 +96,20 @@ export function findHeader(
       }
     }
   };
-  head(found.row, found.set);
+  head(found);
 
   // Under a row of keys stand titles and hints, under a row of titles hints; some leave them out.
-  let dataFrom = found.row.row + 1;
-  const last = found.row.row + (found.set === 'keys' ? 2 : 1);
+  const keys = isKeyRow(layout, found);
+  let dataFrom = found.row + 1;
+  const last = found.row + (keys ? 2 : 1);
   const skipped: number[] = [];
   for (const row of rows) {
     if (row.row < dataFrom || row.row > last) continue;
     if (!isHeading(row, columns)) {
       if (isData(row, columns, date1904)) break;
       if (row.cells.some((cell) => columns.has(cell.column) && isFilled(cell))) skipped.push(row.row);
-    } else if (found.set === 'keys') head(row, 'names');
+    } else if (keys) head(row);
     dataFrom = row.row + 1;
   }
-  return { columns, unknown, twice, row: found.row.row, dataFrom, skipped };
+  return { columns, unknown, twice, row: found.row, dataFrom, skipped };
 }

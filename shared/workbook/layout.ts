@@ -11,7 +11,7 @@ export type Column = FieldMeta & {
   readonly heading: string;
   /** The template fills it in from the design: alone it makes no line. */
   readonly prefilled: boolean;
-  /** Keys of this and earlier template versions, as nameKey makes them. */
+  /** Keys of this and earlier template versions, exactly as they stand in the row of keys. */
   readonly keys: ReadonlySet<string>;
   /** Keys and titles of this and earlier template versions, as nameKey makes them. */
   readonly names: ReadonlySet<string>;
@@ -54,21 +54,21 @@ export function heading(title: string, unit: string | null): string {
 
 function earlierName(names: object | undefined, field: string): string[] {
   const name: unknown = new Map<string, unknown>(Object.entries(names ?? {})).get(field);
-  return typeof name === 'string' ? [nameKey(name)] : [];
+  return typeof name === 'string' ? [name] : [];
 }
 
 function layoutOf(sheet: TemplateSheet): SheetLayout {
   const record = sheet.record as RecordName;
   const earlier: TemplateSheet | undefined = v1.sheets.find((one) => one.record === sheet.record);
   const columns = [...RECORD_FIELDS[record]].map(([key, meta]): Column => {
-    const keys = [nameKey(key), ...earlierName(earlier?.keys, key)];
+    const keys = [key, ...earlierName(earlier?.keys, key)];
     return {
       ...meta,
       key,
       heading: heading(meta.title, meta.unit),
       prefilled: sheet.prefilled?.includes(key) ?? false,
       keys: new Set(keys),
-      names: new Set([...keys, nameKey(meta.title), ...earlierName(earlier?.titles, key)]),
+      names: new Set([...keys, meta.title, ...earlierName(earlier?.titles, key)].map(nameKey)),
     };
   });
   return { name: sheet.name, record, columns };

@@ -7,7 +7,7 @@ export const NOTICE_SEVERITY = {
   'workbook-sheet-unknown': 'note',
   'workbook-sheet-not-read': 'note',
   'workbook-header-missing': 'nonconformity',
-  'workbook-column-missing': 'query',
+  'workbook-column-missing': 'note',
   'workbook-column-unknown': 'note',
   'workbook-column-twice': 'nonconformity',
   'workbook-row-skipped': 'note',

@@ -13,7 +13,9 @@ function entryOf(row: Row, columns: readonly Column[]): { column: Column; cell: 
   for (const set of ['keys', 'names'] as const) {
     for (const label of row.cells) {
       if (label.kind !== 'text') continue;
-      const column = columns.find((one) => one[set].has(nameKey(label.raw)));
+      const column = columns.find((one) =>
+        set === 'keys' ? one.keys.has(label.raw.trim()) : one.names.has(nameKey(label.raw)),
+      );
       if (column === undefined) continue;
       const cell = row.cells.find((one) =>
         set === 'keys' && label.column === 1 ? one.column === VALUE_COLUMN : one.column > label.column,

@@ -97,8 +97,8 @@ export function readRows(layout: SheetLayout, sheet: Sheet, system: DateSystem):
   if (header === null)
     return { rows: [], notices: [notice('workbook-header-missing', { sheet: layout.name })] };
   const data = sheet.rows.filter((row) => row.row >= header.dataFrom);
-  return {
-    rows: data.flatMap((row) => readRow(layout, row, header, system) ?? []),
-    notices: [...headerNotices(layout, header, data), ...mergedNotices(layout, sheet, header.dataFrom)],
-  };
+  const rows = data.flatMap((row) => readRow(layout, row, header, system) ?? []);
+  // Headings of a sheet that nobody used are nobody's concern.
+  const said = rows.length === 0 && header.skipped.length === 0 ? [] : headerNotices(layout, header, data);
+  return { rows, notices: [...said, ...mergedNotices(layout, sheet, header.dataFrom)] };
 }

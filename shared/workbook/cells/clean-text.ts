@@ -19,7 +19,7 @@ const VULGAR: Readonly<Record<string, string>> = {
 /** Surrounding blanks of every kind, also those that cannot be seen, taken away; inside they become plain spaces. */
 export function trimText(text: string): string {
   return text
-    .replace(/[\u200b\u200c\u200d\u2060\ufeff]/g, '')
+    .replace(/\u200b|\u200c|\u200d|\u2060|\ufeff/g, '')
     .replace(/[^\S\r\n]/g, ' ')
     .trim();
 }

@@ -1,0 +1,51 @@
+import { createWriteStream } from 'node:fs';
+import type { Writable } from 'node:stream';
+import ExcelJS from 'exceljs';
+
+type Writer = ExcelJS.stream.xlsx.WorkbookWriter;
+export type SheetWriter = ExcelJS.Worksheet;
+
+export type Validation = {
+  readonly type: 'list' | 'whole';
+  readonly formulae: readonly (string | number)[];
+  readonly errorStyle: 'stop' | 'warning';
+  readonly error: string;
+};
+
+/** The streaming writer takes validations of whole ranges; its types do not say so. */
+export function addValidation(sheet: SheetWriter, range: string, validation: Validation): void {
+  const { dataValidations } = sheet as unknown as {
+    dataValidations: { add: (range: string, validation: object) => void };
+  };
+  dataValidations.add(range, {
+    ...validation,
+    allowBlank: true,
+    showErrorMessage: true,
+    errorTitle: 'Please check',
+  });
+}
+
+/**
+ * Writes a workbook row by row to a file or a stream, without holding it in memory. `fill` adds and commits the sheets.
+ * Rejects when the target fails; the target is ended.
+ */
+export async function streamWorkbook(
+  target: string | Writable,
+  { keywords, title }: { readonly keywords: string; readonly title: string },
+  fill: (writer: Writer) => void,
+): Promise<void> {
+  const stream = typeof target === 'string' ? createWriteStream(target) : target;
+  const failed = new Promise<never>((_, reject) => stream.once('error', reject));
+  const closed = new Promise<never>((_, reject) =>
+    stream.once('close', () =>
+      reject(new Error('The target of the workbook was closed before it was written.')),
+    ),
+  );
+  const writer = new ExcelJS.stream.xlsx.WorkbookWriter({ stream, useStyles: true, useSharedStrings: true });
+  writer.creator = 'Upstand';
+  writer.lastModifiedBy = 'Upstand';
+  writer.title = title;
+  writer.keywords = keywords;
+  fill(writer);
+  await Promise.race([writer.commit(), failed, closed]);
+}
