@@ -1,0 +1,61 @@
+import { renderFinding } from '#shared/findings/render.ts';
+import type { Nonconformity } from '#shared/generated/api-types.ts';
+import type { NonconformityDbRow } from './nonconformity-select.ts';
+
+const STATES = {
+  open: 'undecided',
+  approved: 'approved',
+  rejected: 'rejected',
+  held: 'concession-asked',
+} as const;
+
+/** A finding as the auditor sees it. Only the owner's people and auditors come here, so nothing is held back. */
+export function presentNonconformity(row: NonconformityDbRow): Nonconformity {
+  const { title, message } = renderFinding({
+    code: row.code,
+    severity: row.severity,
+    kind: row.kind,
+    structureNumber: row.structure_number,
+    occurrence: null,
+    sheet: row.sheet,
+    row: row.row,
+    cell: row.cell,
+    field: row.field,
+    measured: row.measured,
+    limit: row.limit_value,
+    margin: row.margin,
+    unit: row.unit,
+    uncertainty: row.uncertainty,
+    params: row.params,
+    ownerParams: row.owner_params,
+    fingerprint: '',
+  });
+  return {
+    id: row.id,
+    recordId: row.record_id,
+    code: row.code,
+    title,
+    severity: row.severity,
+    structureNumber: row.structure_number,
+    kind: row.kind,
+    measured: row.measured,
+    limit: row.limit_value,
+    margin: row.margin,
+    unit: row.unit,
+    uncertainty: row.uncertainty,
+    message,
+    state: STATES[row.state],
+    grounds: row.grounds,
+    action: row.action,
+    dueOn: row.due_on,
+    concession: row.concession,
+    condition: row.condition,
+    contractor: { id: row.contractor_id, name: row.contractor_name },
+    workOrder: { id: row.work_order_id, number: row.work_order_number },
+    batch: { id: row.batch_id, number: row.batch_number, revision: row.revision },
+    installedOn: row.work_day,
+    lots: row.lots,
+    decidedBy: row.decided_by,
+    recordNumber: row.record_number,
+  };
+}

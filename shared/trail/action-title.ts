@@ -1,0 +1,63 @@
+/** What a step of the trail is called for people. One word list for the trail page and the history of a record. */
+const TITLES: Readonly<Record<string, string>> = {
+  'session.signed-in': 'Signed in',
+  'session.signed-out': 'Signed out',
+  'person.invited': 'Person invited',
+  'person.invited-again': 'Person invited again',
+  'person.password-reset-asked': 'Password reset asked for',
+  'person.changed': 'Person changed',
+  'person.password-set': 'Password set',
+  'organisation.added': 'Organisation added',
+  'work-order.created': 'Work order created',
+  'work-order.template-fetched': 'Workbook template downloaded',
+  'product.created': 'Product created',
+  'lot.created': 'Lot created',
+  'lot.received': 'Kits of a lot received',
+  'lot.held': 'Lot held',
+  'lot.released': 'Lot released',
+  'lot.recalled': 'Lot recalled',
+  'standard.drafted': 'Standard drafted',
+  'standard.published': 'Standard published',
+  'batch.created': 'Batch opened',
+  'batch.workbook-uploaded': 'Workbook handed in',
+  'batch.photos-uploaded': 'Photographs handed in',
+  'batch.checked': 'Batch checked',
+  'batch.check-failed': 'Check failed',
+  'batch.submitted': 'Batch submitted',
+  'batch.withdrawn': 'Batch withdrawn',
+  'batch.taken': 'Batch taken for review',
+  'batch.released': 'Batch given back to the queue',
+  'batch.freed': 'Batch freed after nobody worked on it',
+  'batch.assigned': 'Review handed to another inspector',
+  'batch.on-record': 'Batch on record',
+  'photo.placed': 'Photograph placed',
+  'photo.taken-off': 'Photograph taken off a line',
+  'finding.answered': 'Finding answered',
+  'finding.approved': 'Finding approved',
+  'finding.rejected': 'Finding rejected',
+  'finding.decision-undone': 'Decision on a finding undone',
+  'record.approved': 'Line approved',
+  'record.returned': 'Line returned',
+  'record.decision-undone': 'Decision on a line undone',
+  'record.reopened': 'Line reopened',
+  'record.referred-back': 'Line referred back',
+  'record.abandoned': 'Line abandoned',
+  'review.closed': 'Review closed',
+  'concession.asked': 'Concession asked for',
+  'concession.granted': 'Concession granted',
+  'concession.refused': 'Concession refused',
+  'register.entered': 'Entered on the register',
+  'register.superseded': 'Superseded on the register',
+  'transmittal.requested': 'Transmittal requested',
+  'transmittal.issued': 'Transmittal issued',
+  'transmittal.failed': 'Transmittal failed',
+  'job.retried': 'Parked job tried again',
+};
+
+/** The title of an action; one that has none yet is spelled out from its code. */
+export function actionTitle(action: string): string {
+  const words = action.replaceAll(/[.-]/g, ' ').trim();
+  return TITLES[action] ?? words.charAt(0).toUpperCase() + words.slice(1);
+}
+
+export const TRAIL_ACTIONS: readonly string[] = Object.keys(TITLES);
