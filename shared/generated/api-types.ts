@@ -37,6 +37,19 @@ export interface AppInfo {
   signedIn: boolean;
 }
 /**
+ * How many lines without findings were approved.
+ */
+export interface ApproveCleanReply {
+  approved: number;
+}
+/**
+ * The inspector who is to hold the review.
+ */
+export interface AssignBody {
+  inspectorId: string;
+  reason?: string;
+}
+/**
  * What the newest check changed against the one before.
  */
 export interface BatchChanges {
@@ -150,12 +163,21 @@ export interface CloseReviewReply {
   nextRevision: number | null;
 }
 /**
+ * An engineer's answer to a concession.
+ */
+export interface ConcessionDecisionBody {
+  decision: 'grant' | 'refuse';
+  reason: string;
+  condition?: string | null;
+  endsOn?: string | null;
+}
+/**
  * A request to accept as built what does not conform.
  */
 export interface Concession {
   id: string;
   number: string;
-  state: 'asked' | 'granted' | 'refused';
+  state: 'asked' | 'granted' | 'refused' | 'withdrawn';
   findings: {
     id: string;
     recordId: string | null;
@@ -193,6 +215,16 @@ export interface Derived {
   poleTaped: boolean | null;
   worstReading: string | null;
   [k: string]: unknown;
+}
+/**
+ * The inspector's word on one finding.
+ */
+export interface FindingDecisionBody {
+  decision: 'approve' | 'reject';
+  grounds?: 'evidence' | 'answer' | null;
+  action?: 'correct' | 'rework' | 'repair' | null;
+  dueOn?: string | null;
+  reason?: string | null;
 }
 /**
  * The newest decision on a finding.
@@ -508,6 +540,7 @@ export interface Photo {
   height: number | null;
   state: 'stored' | 'ready' | 'unreadable';
   can: string[];
+  problem: string | null;
 }
 /**
  * One line of a work order's design list.
@@ -565,6 +598,19 @@ export interface ProgressCount {
   inBatch: number;
   approved: number;
   onRecord: number;
+}
+/**
+ * A reason, which stands in the trail.
+ */
+export interface ReasonBody {
+  reason: string;
+}
+/**
+ * The inspector's word on a line itself.
+ */
+export interface RecordDecisionBody {
+  decision: 'approve' | 'return';
+  reason?: string | null;
 }
 /**
  * One line of a batch as checked.
@@ -654,6 +700,28 @@ export interface RegisterCandidate {
   supersedes: string | null;
 }
 /**
+ * Approved records to enter, all or nothing; a reason where a version on record is superseded.
+ */
+export interface RegisterEntriesBody {
+  /**
+   * @minItems 1
+   * @maxItems 2000
+   */
+  recordIds: string[];
+  reason?: string | null;
+}
+/**
+ * What was entered, in the order asked for.
+ */
+export interface RegisterEntriesReply {
+  entries: {
+    id: string;
+    recordId: string;
+    recordNumber: string;
+    version: number;
+  }[];
+}
+/**
  * One structure on record, one version.
  */
 export interface RegisterRow {
@@ -715,6 +783,15 @@ export interface SignIn {
   password: string;
 }
 /**
+ * A draft of the next version of the construction standard.
+ */
+export interface StandardDraftBody {
+  title?: string;
+  effectiveOn: string;
+  body: {};
+  note?: string | null;
+}
+/**
  * A version of the construction standard.
  */
 export interface StandardVersion {
@@ -760,6 +837,29 @@ export interface TrailVerification {
   head: string | null;
   brokenAt: number | null;
   problem: string | null;
+}
+/**
+ * What an as-built is issued of: a work order, chosen records, or what a filter of the register finds; as the next revision of `supersedes`, where given.
+ */
+export interface TransmittalBody {
+  scope:
+    | {
+        workOrder: string;
+      }
+    | {
+        /**
+         * @minItems 1
+         * @maxItems 50000
+         */
+        recordNumbers: string[];
+      }
+    | {
+        filter: {
+          [k: string]: string;
+        };
+      };
+  title?: string;
+  supersedes?: string | null;
 }
 /**
  * An issued as-built workbook, or one being made.

@@ -65,7 +65,7 @@ function problemOf(error: unknown, last: boolean): CheckProblem | null {
   if (error instanceof WorkbookRefused)
     return {
       code: `workbook.${error.code}`,
-      detail: refusalText(error.code, error.params),
+      detail: refusalText(error),
       params: error.params,
     };
   if (!last) return null;

@@ -1,0 +1,36 @@
+import type { RouteContext } from '#server/http/define-route.ts';
+import { contractorWall } from '#server/http/contractor-wall.ts';
+import { receiveFiles } from '#server/uploads/receive-files.ts';
+import type { UploadReply } from '#shared/generated/api-types.ts';
+import { READER_LIMITS } from '#shared/workbook/limits.ts';
+import { ensureTakesFiles } from './ensure-takes-files.ts';
+import { putWorkbook } from './put-workbook.ts';
+
+/** Receives the workbook of a batch. What kind of file it is, the check says; an empty or too large one is refused here. */
+export async function uploadWorkbook(ctx: RouteContext): Promise<UploadReply> {
+  const { em, req, res, actor, ability, services } = ctx;
+  const where = { batchId: ctx.params.id, contractorId: contractorWall(ability, 'hand-in', 'Batch'), actor };
+  await ensureTakesFiles(em, { req, ...where });
+  const [file] = await receiveFiles({
+    req,
+    res,
+    field: 'workbook',
+    maxFiles: 1,
+    blobs: services.blobs,
+    maxBytes: READER_LIMITS.fileBytes,
+    headBytes: 1,
+    admit: (head) =>
+      head.length === 0
+        ? {
+            code: 'upload.empty',
+            detail: 'The file is empty. Choose the workbook again, and wait until it has been copied whole.',
+          }
+        : { type: null },
+    tooLarge: {
+      code: 'upload.too-large',
+      detail: `The workbook is larger than ${READER_LIMITS.fileBytes / 1_000_000} MB. Remove pictures from it; photographs are uploaded apart.`,
+    },
+  });
+  if (!file) throw new Error('An upload ended without a file and without saying why.');
+  return putWorkbook(em, { ...where, file });
+}
