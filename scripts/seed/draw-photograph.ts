@@ -22,6 +22,7 @@ const SCENES: Readonly<Record<View, Scene>> = {
   gap: drawGap,
   after: drawStanding,
   'level-after': drawPad,
+  rework: drawFinish,
 };
 
 /**

@@ -12,6 +12,7 @@ export const VIEWS = [
   'gap',
   'after',
   'level-after',
+  'rework',
 ] as const;
 export type View = (typeof VIEWS)[number];
 
