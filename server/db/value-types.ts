@@ -17,6 +17,6 @@ const parsers: Readonly<Record<number, (text: string) => unknown>> = {
 
 /** How columns of plain SQL come back: instants as ISO strings in UTC, days as `YYYY-MM-DD`, whole and decimal numbers as numbers, JSON parsed. */
 export const VALUE_TYPES: pg.CustomTypesConfig = {
-  getTypeParser: ((oid: number, format?: 'text' | 'binary') =>
+  getTypeParser: ((oid: Parameters<typeof pg.types.getTypeParser>[0], format?: 'text' | 'binary') =>
     parsers[oid] ?? pg.types.getTypeParser(oid, format as 'text')) as pg.CustomTypesConfig['getTypeParser'],
 };

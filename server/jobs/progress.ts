@@ -29,7 +29,7 @@ export async function setProgress(em: EntityManager, progress: Progress): Promis
       progress.state,
       progress.done,
       progress.total,
-      progress.problem == null ? null : JSON.stringify(progress.problem),
+      progress.problem ? JSON.stringify(progress.problem) : null,
       PROGRESS_CHANNEL,
     ],
   );

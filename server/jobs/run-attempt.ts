@@ -11,7 +11,7 @@ const pauseFor = (ms: number) => new Promise((resolve) => setTimeout(resolve, ms
 export async function runAttempt(options: {
   services: Services;
   definition: JobDefinition<never>;
-  job: PgBoss.JobWithMetadata<object>;
+  job: PgBoss.JobWithMetadata;
   /** Aborted when the process ends. */
   stop: AbortSignal;
 }): Promise<void> {

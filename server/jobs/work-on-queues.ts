@@ -22,7 +22,7 @@ export async function workOnQueues(
   const ended = new AbortController();
   const sleepers = new Set<{ name: string; wake: () => void }>();
   const wake = (name: string | null): void => {
-    for (const sleeper of [...sleepers]) if (name === null || sleeper.name === name) sleeper.wake();
+    for (const sleeper of sleepers) if (name === null || sleeper.name === name) sleeper.wake();
   };
   const sleep = (name: string): Promise<void> =>
     new Promise((resolve) => {

@@ -17,7 +17,7 @@ export type MailBlock =
     }
   /** What a person wrote. */
   | { readonly type: 'quote'; readonly by: string; readonly text: string }
-  /** To a page of the product; `path` begins with a slash. */
+  /** To a page of the product: a path that begins with a slash, or its whole address. */
   | { readonly type: 'link'; readonly label: string; readonly path: string };
 
 export type MailTexts = { readonly subject: string; readonly text: string; readonly html: string };

@@ -43,8 +43,8 @@ export const sendMail: JobHandler<{ outboxId: string }> = async ({ outboxId }, {
   }
   await run(
     em,
-    // A sent link has done its work here: the token is nobody's business any more.
-    `update outbox set state = 'sent', sent_at = now(), attempts = attempts + 1, last_error = null, data = data - 'token' where id = $1`,
+    // A sent link has done its work here: its token is nobody's business any more.
+    `update outbox set state = 'sent', sent_at = now(), attempts = attempts + 1, last_error = null, data = data - 'link' where id = $1`,
     [outboxId],
   );
 };

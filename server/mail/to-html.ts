@@ -53,8 +53,8 @@ function blockHtml(block: MailBlock, publicUrl: string): string {
     case 'quote':
       return `<p style="margin:0 0 4px">${escapeHtml(block.by)} wrote:</p>
 <blockquote style="margin:0 0 14px;padding:6px 12px;border-left:3px solid #8a949d">${lines(block.text)}</blockquote>`;
-    case 'link': {
-      const address = escapeHtml(`${publicUrl}${block.path}`);
+    default: {
+      const address = escapeHtml(new URL(block.path, publicUrl).href);
       return `<p style="margin:18px 0 14px"><a href="${address}" style="display:inline-block;padding:10px 16px;background:#14507a;color:#ffffff;text-decoration:none;font-weight:600">${escapeHtml(block.label)}</a><br>
 <span style="font-size:12px;color:#59636c">${address}</span></p>`;
     }

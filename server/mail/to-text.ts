@@ -21,8 +21,8 @@ function blockText(block: MailBlock, publicUrl: string): string {
         .split('\n')
         .map((line) => `> ${line}`)
         .join('\n')}`;
-    case 'link':
-      return `${block.label}:\n${publicUrl}${block.path}`;
+    default:
+      return `${block.label}:\n${new URL(block.path, publicUrl).href}`;
   }
 }
 

@@ -132,9 +132,8 @@ export class BlobStore {
   /** Writes the file to `path`, which must not exist yet. @throws BlobMissing */
   async readTo(sha256: string, path: string, options: ReadOptions = {}): Promise<void> {
     const source = await this.openRead(sha256, options);
-    await pipeline(source, createWriteStream(path, { flags: 'wx', mode: 0o600 }), {
-      ...(options.signal ? { signal: options.signal } : {}),
-    });
+    const target = createWriteStream(path, { flags: 'wx', mode: 0o600 });
+    await pipeline(source, target, options.signal ? { signal: options.signal } : {});
   }
 
   exists(sha256: string): Promise<boolean> {

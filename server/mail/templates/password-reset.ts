@@ -2,9 +2,10 @@ import type { MailContent } from '#server/mail/content.ts';
 
 export type PasswordReset = {
   readonly name: string;
-  /** Taken out of the outbox once the message is sent. */
-  readonly token: string;
-  /** For people, like `30 minutes`. */
+  readonly owner: string;
+  /** Whole address with its token; taken out of the outbox once the message is sent. */
+  readonly link: string;
+  /** For people, like `one hour`. */
   readonly validFor: string;
 };
 
@@ -15,13 +16,9 @@ export function passwordReset(data: PasswordReset): MailContent {
     blocks: [
       {
         type: 'text',
-        text: `${data.name}, somebody asked for a new password for your account. The link works once and for ${data.validFor}. If it was not you, do nothing: your password stays as it is.`,
+        text: `${data.name}, somebody asked for a new password for your account${data.owner ? ` at ${data.owner}` : ''}. The link works once and for ${data.validFor}. If it was not you, do nothing: your password stays as it is.`,
       },
-      {
-        type: 'link',
-        label: 'Choose a new password',
-        path: `/password-reset/${encodeURIComponent(data.token)}`,
-      },
+      { type: 'link', label: 'Choose a new password', path: data.link },
     ],
   };
 }

@@ -1,0 +1,169 @@
+import { afterAll, beforeAll, beforeEach, expect, it } from 'vitest';
+import { createServices, type Services } from '#server/container.ts';
+import { row, rows, run } from '#server/db/rows.ts';
+import { defineJob, type JobDefinition, type JobHandler } from '#server/jobs/define-job.ts';
+import { enqueue } from '#server/jobs/enqueue.ts';
+import { freeOrphans } from '#server/jobs/free-orphans.ts';
+import { listParked } from '#server/jobs/list-parked.ts';
+import { PROGRESS_CHANNEL, readProgress, setProgress } from '#server/jobs/progress.ts';
+import { retryParked } from '#server/jobs/retry-parked.ts';
+import { workOnQueues } from '#server/jobs/work-on-queues.ts';
+import { cloneDatabase, type TestDatabase } from '#tests/setup/clone-database.ts';
+import { drainJobs } from '#tests/setup/drain-jobs.ts';
+import { testConfig } from '#tests/setup/test-config.ts';
+
+let database: TestDatabase;
+let services: Services;
+let done: () => void;
+let handler: JobHandler<{ n: number }>;
+
+/** Stands on the queue of a real job, whose own handler is not asked. */
+const job = defineJob<{ n: number }>({
+  name: 'send-mail',
+  payload: {
+    type: 'object',
+    required: ['n'],
+    properties: { n: { type: 'integer' } },
+    additionalProperties: false,
+  },
+  load: () => Promise.resolve({ handler }),
+});
+const jobs = [job] as readonly JobDefinition<never>[];
+const em = () => services.orm.em.fork();
+
+beforeAll(async () => {
+  database = await cloneDatabase();
+  const made = await testConfig(database);
+  done = made.done;
+  services = await createServices(made.config);
+});
+afterAll(async () => {
+  await services.close();
+  await database.drop();
+  done();
+});
+beforeEach(() => run(em(), 'delete from pgboss.job'));
+
+async function work(): Promise<void> {
+  const worker = await workOnQueues(services, jobs);
+  await drainJobs(services.pool);
+  await worker.stop();
+}
+
+it('a job is gone with the transaction that enqueued it', async () => {
+  const seen: number[] = [];
+  handler = ({ n }) => Promise.resolve(void seen.push(n));
+  const refused = em().transactional(async (tx) => {
+    await enqueue(tx, job, { n: 1 });
+    throw new Error('rolled back on purpose');
+  });
+  await expect(refused).rejects.toThrow('rolled back on purpose');
+  await em().transactional((tx) => enqueue(tx, job, { n: 2 }));
+  await work();
+  expect(seen).toEqual([2]);
+});
+
+it('a worker that rests is woken by the commit', async () => {
+  const seen: number[] = [];
+  handler = ({ n }) => Promise.resolve(void seen.push(n));
+  const worker = await workOnQueues(services, jobs);
+  for (const n of [1, 2, 3]) await em().transactional((tx) => enqueue(tx, job, { n }));
+  await drainJobs(services.pool);
+  await worker.stop();
+  expect(seen).toEqual([1, 2, 3]);
+});
+
+it('a payload that does not fit never reaches the queue', async () => {
+  await expect(enqueue(em(), job, { n: 1.5 })).rejects.toThrow('send-mail');
+  expect(await rows(em(), 'select id from pgboss.job')).toEqual([]);
+});
+
+it('a waiting job of the same key stands for the new one; another key does not', async () => {
+  for (const key of ['a', 'a', 'b']) await em().transactional((tx) => enqueue(tx, job, { n: 1 }, { key }));
+  expect(await rows(em(), 'select singleton_key as key from pgboss.job order by 1')).toEqual([
+    { key: 'a' },
+    { key: 'b' },
+  ]);
+});
+
+it('a job whose attempts are used up is parked with its reason, and runs again when asked to', async () => {
+  handler = () => Promise.reject(new Error('the pump is dry'));
+  await em().transactional((tx) => enqueue(tx, job, { n: 7 }));
+  await run(em(), 'update pgboss.job set retry_limit = 0');
+  await work();
+  const parked = await listParked(em());
+  expect(parked).toMatchObject([
+    { name: 'send-mail', payload: { n: 7 }, attempts: 1, problem: 'the pump is dry' },
+  ]);
+
+  const seen: { n: number; attempt: number; last: boolean }[] = [];
+  handler = ({ n }, context) =>
+    Promise.resolve(void seen.push({ n, attempt: context.job.attempt, last: context.job.last }));
+  const id = parked[0]?.id ?? '';
+  expect(await retryParked(em(), id)).toBe('send-mail');
+  await work();
+  expect(seen).toEqual([{ n: 7, attempt: 2, last: true }]);
+  expect(await listParked(em())).toEqual([]);
+  expect(await retryParked(em(), id)).toBe(null);
+});
+
+it('a job left running by a process that died is free again; one that is worked on is not', async () => {
+  await em().transactional((tx) => enqueue(tx, job, { n: 1 }));
+  await em().transactional((tx) => enqueue(tx, job, { n: 2 }));
+  const taken = [
+    ...(await services.queue.boss.fetch(job.name)),
+    ...(await services.queue.boss.fetch(job.name)),
+  ];
+  await run(em(), `update pgboss.job set started_on = now() - interval '1 minute'`);
+  await services.queue.listener.hold(`job:${taken[0]?.id}`);
+  expect(await freeOrphans(services)).toBe(1);
+  await services.queue.listener.letGo(`job:${taken[0]?.id}`);
+  const states = await rows(em(), 'select id, state::text from pgboss.job order by state');
+  expect(states).toEqual([
+    { id: taken[0]?.id, state: 'active' },
+    { id: taken[1]?.id, state: 'retry' },
+  ]);
+});
+
+it('progress is kept and told, also after the connection that listens was cut', async () => {
+  const told: (string | null)[] = [];
+  const heard = (): Promise<string | null> =>
+    new Promise((resolve) => {
+      const off = services.queue.listener.on(PROGRESS_CHANNEL, (subject) => {
+        if (subject === null) return;
+        told.push(subject);
+        off();
+        resolve(subject);
+      });
+    });
+  const again = (): Promise<void> =>
+    new Promise((resolve) => {
+      const off = services.queue.listener.on(PROGRESS_CHANNEL, (subject) => {
+        if (subject !== null) return;
+        off();
+        resolve();
+      });
+    });
+  const ready = again();
+  await ready;
+  const first = heard();
+  await setProgress(em(), { subject: 'check:1', state: 'running', done: 3, total: 10 });
+  expect(await first).toBe('check:1');
+
+  const reconnected = again();
+  const { rows: cut } = await services.pool.query(
+    `select pg_terminate_backend(pid) as cut from pg_stat_activity where application_name = 'upstand-listen' and datname = current_database()`,
+  );
+  expect(cut).toEqual([{ cut: true }]);
+  await reconnected;
+  const second = heard();
+  await setProgress(em(), { subject: 'check:1', state: 'done', done: 10, total: 10 });
+  expect(await second).toBe('check:1');
+  expect(await readProgress(em(), 'check:1')).toMatchObject({
+    state: 'done',
+    done: 10,
+    total: 10,
+    problem: null,
+  });
+  expect(await row(em(), 'select count(*) as n from job_progress')).toEqual({ n: 1 });
+});
