@@ -1,19 +1,7 @@
 import { mkdir, readFile, writeFile } from 'node:fs/promises';
 import { dirname, join } from 'node:path';
-import { apiTypes } from './api-types.ts';
-import { recordTypes } from './record-types.ts';
-import { ROOT, readOwnSchemas } from './schema-files.ts';
-import { VALIDATOR_TYPES, validators } from './validators.ts';
-
-async function outputs(): Promise<ReadonlyMap<string, string>> {
-  const schemas = await readOwnSchemas();
-  return new Map([
-    ['shared/generated/records.ts', await recordTypes(schemas)],
-    ['shared/generated/api-types.ts', await apiTypes()],
-    ['shared/generated/validators.mjs', await validators(schemas)],
-    ['shared/generated/validators.d.mts', VALIDATOR_TYPES],
-  ]);
-}
+import { outputs } from './outputs.ts';
+import { ROOT } from './schema-files.ts';
 
 async function stale(path: string, text: string): Promise<boolean> {
   return (await readFile(join(ROOT, path), 'utf8').catch(() => null)) !== text;

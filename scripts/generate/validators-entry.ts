@@ -1,8 +1,11 @@
-import * as compiled from 'compiled-schemas';
+import { batch, event, photo, pour, product, relevel, set, standard, straighten } from 'compiled-schemas';
 import { crossFaults } from '#shared/calc/cross-faults.ts';
 import type { FieldFault } from '#shared/calc/field-fault.ts';
 
-type Fault = NonNullable<(typeof compiled.set)['errors']>[number];
+type Validate = typeof set;
+type Fault = NonNullable<Validate['errors']>[number];
+
+const RECORDS = { set, straighten, relevel, pour, event, photo, batch } as const;
 
 /** Which of several faults of one field says most; the rest follow from it. */
 const TELLING = [
@@ -43,24 +46,24 @@ function tell(faults: readonly FieldFault[]): FieldFault[] {
   return [...best.values()];
 }
 
-function run(validate: typeof compiled.set, value: unknown): FieldFault[] {
+function run(validate: Validate, value: unknown): FieldFault[] {
   if (validate(value)) return [];
   return (validate.errors ?? [])
     .filter((fault) => fault.keyword !== 'if')
     .map((fault) => ({ field: fieldOf(fault), keyword: fault.keyword, params: fault.params }));
 }
 
-export type RecordName = 'set' | 'straighten' | 'relevel' | 'pour' | 'event' | 'photo' | 'batch';
+export type RecordName = keyof typeof RECORDS;
 
 /** Faults of one row against its schema and against what a schema cannot say (the class table); one a field, in the schema's words. */
 export function validateRecord(kind: RecordName, values: unknown): FieldFault[] {
-  return tell([...run(compiled[kind], values), ...crossFaults(kind, values)]);
+  return tell([...run(RECORDS[kind], values), ...crossFaults(kind, values)]);
 }
 
 export function validateStandard(value: unknown): FieldFault[] {
-  return tell(run(compiled.standard, value));
+  return tell(run(standard, value));
 }
 
 export function validateProduct(value: unknown): FieldFault[] {
-  return tell(run(compiled.product, value));
+  return tell(run(product, value));
 }

@@ -4,8 +4,16 @@ import { build } from 'esbuild';
 import { join } from 'node:path';
 import { ROOT, type Schema } from './schema-files.ts';
 
-/** Our own words in the schemas: notes for template and forms, nothing to check. */
-const NOTES = ['x-unit', 'x-read', 'x-words'];
+/** Without titles, hints and our own `x-` words, which check nothing and would be carried into the browser. */
+function bare(node: unknown): unknown {
+  if (Array.isArray(node)) return node.map(bare);
+  if (typeof node !== 'object' || node === null) return node;
+  const kept = Object.entries(node).filter(
+    ([key, value]) =>
+      !key.startsWith('x-') && !(['title', 'description'].includes(key) && typeof value === 'string'),
+  );
+  return Object.fromEntries(kept.map(([key, value]) => [key, bare(value)]));
+}
 
 /** Ajv's standalone code as one ES module without `require` or `eval`: it runs under a strict content-security policy. */
 export async function validators(schemas: ReadonlyMap<string, Schema>): Promise<string> {
@@ -17,10 +25,9 @@ export async function validators(schemas: ReadonlyMap<string, Schema>): Promise<
     messages: false,
     code: { source: true, esm: true },
   });
-  for (const note of NOTES) ajv.addKeyword(note);
   const names: Record<string, string> = {};
   for (const [name, schema] of schemas) {
-    ajv.addSchema(schema);
+    ajv.addSchema(bare(schema) as Schema);
     names[name] = String(schema.$id);
   }
   const compiled = standaloneCode(ajv, names);
