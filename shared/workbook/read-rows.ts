@@ -8,7 +8,12 @@ import { rawText } from './raw-text.ts';
 import type { Row, Sheet } from './types.ts';
 import { columnLetters, parseAddress } from './xml/cell-address.ts';
 
-type Read = { readonly rows: readonly SourceRow[]; readonly notices: readonly WorkbookNotice[] };
+type Read = {
+  readonly rows: readonly SourceRow[];
+  readonly notices: readonly WorkbookNotice[];
+  /** Letters of each known column by field. */
+  readonly columns: Readonly<Record<string, string>>;
+};
 type DateSystem = { readonly date1904: boolean };
 
 /** Merged ranges named one by one up to here. */
@@ -92,13 +97,14 @@ function mergedNotices(layout: SheetLayout, sheet: Sheet, dataFrom: number): Wor
 
 /** Rows of one data sheet that carry more than what the template prefilled, with what is to be said about the sheet. */
 export function readRows(layout: SheetLayout, sheet: Sheet, system: DateSystem): Read {
-  if (sheet.rows.length === 0) return { rows: [], notices: [] };
+  if (sheet.rows.length === 0) return { rows: [], notices: [], columns: {} };
   const header = findHeader(layout, sheet.rows, system);
   if (header === null)
-    return { rows: [], notices: [notice('workbook-header-missing', { sheet: layout.name })] };
+    return { rows: [], notices: [notice('workbook-header-missing', { sheet: layout.name })], columns: {} };
   const data = sheet.rows.filter((row) => row.row >= header.dataFrom);
   const rows = data.flatMap((row) => readRow(layout, row, header, system) ?? []);
   // Headings of a sheet that nobody used are nobody's concern.
   const said = rows.length === 0 && header.skipped.length === 0 ? [] : headerNotices(layout, header, data);
-  return { rows, notices: [...said, ...mergedNotices(layout, sheet, header.dataFrom)] };
+  const columns = Object.fromEntries([...header.columns].map(([at, { key }]) => [key, columnLetters(at)]));
+  return { rows, columns, notices: [...said, ...mergedNotices(layout, sheet, header.dataFrom)] };
 }

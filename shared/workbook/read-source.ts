@@ -67,6 +67,7 @@ export function readSource(workbook: Workbook): SourceBatch {
   if (batchSheet === null) notices.push(notice('workbook-sheet-missing', { sheet: 'Batch' }));
   notices.push(...versionNotices(batch, workbook));
 
+  const columns: Record<string, Readonly<Record<string, string>>> = {};
   const lines: SourceLine[] = [];
   const others = { pour: [] as SourceRow[], event: [] as SourceRow[], photo: [] as SourceRow[] };
   for (const { layout, sheet } of known) {
@@ -74,6 +75,7 @@ export function readSource(workbook: Workbook): SourceBatch {
     if (record === 'batch') continue;
     const read = readRows(layout, sheet, workbook);
     notices.push(...read.notices);
+    columns[layout.name] = read.columns;
     if (isKind(record)) {
       for (const row of read.rows) {
         lines.push({ ...row, kind: record, structureNumber: text(row.values['structureNumber']) ?? '' });
@@ -89,5 +91,6 @@ export function readSource(workbook: Workbook): SourceBatch {
     photos: others.photo,
     notices,
     templateVersion: text(batch.values['templateVersion']) ?? parseKeywords(workbook.keywords).template,
+    columns,
   };
 }
