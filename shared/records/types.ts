@@ -50,6 +50,8 @@ export type SourceBatch = {
   /** Workbook-level problems: unknown sheets, unknown columns (notes), template version, missing key columns. */
   readonly notices: readonly WorkbookNotice[];
   readonly templateVersion: string | null;
+  /** Column letters by sheet, then field: where a blank field would stand. */
+  readonly columns?: Readonly<Record<string, Readonly<Record<string, string>>>>;
 };
 
 export type WorkbookNotice = {
