@@ -21,7 +21,7 @@ export const cellFinder = (source: SourceBatch): CellFinder => {
     const cell = Object.hasOwn(row.cells, field) ? row.cells[field] : undefined;
     const address = cell?.address ?? problem?.address;
     if (address !== undefined && address !== null) return address;
-    const column = columns.get(`${row.sheet}|${field}`);
+    const column = source.columns?.[row.sheet]?.[field] ?? columns.get(`${row.sheet}|${field}`);
     return column === undefined ? null : `${column}${row.row}`;
   };
 };

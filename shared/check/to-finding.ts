@@ -37,7 +37,9 @@ export const toFinding = (found: Found, cellOf: CellFinder): Finding => {
     code,
     severity,
     kind: line?.kind ?? null,
-    structureNumber: line ? line.structureNumber : null,
+    structureNumber: line
+      ? line.structureNumber
+      : (told(source.values['structureNumber'])?.toString() ?? null),
     occurrence: line?.occurrence ?? null,
     sheet: source.sheet,
     row: source.row,

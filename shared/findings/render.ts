@@ -1,7 +1,8 @@
 import { RULES } from '#shared/rules/registry.ts';
-import { NOTICE_TEXT } from './notice-text.ts';
+import { noticeText } from '#shared/workbook/notice-text.ts';
 import { RECORD_TEXT, type FindingText } from './record-text.ts';
 import { say } from './say.ts';
+import type { Scalar } from '#shared/records/types.ts';
 import type { Finding } from './types.ts';
 
 export type RenderedFinding = {
@@ -32,12 +33,31 @@ const uncertaintySentence = ({ uncertainty, margin, unit }: Finding): string => 
     : ` Uncertainty of the readings ${u}.`;
 };
 
-const textOf = (code: string): FindingText =>
-  RULE_TEXT.get(code) ?? RECORD_TEXT.get(code) ?? NOTICE_TEXT.get(code) ?? UNKNOWN;
+/** Said by the check itself where the owner has published no standard. */
+const NO_STANDARD: FindingText = {
+  title: 'No standard',
+  message: () => 'The owner has no construction standard in force, so nothing can be judged.',
+  remedy: () => 'Ask the owner to publish a standard.',
+};
+
+/** What concerns the workbook as a whole is worded with the reader; its parameters are all scalars. */
+const noticeOf = ({ code, params, sheet }: Pick<Finding, 'code' | 'params' | 'sheet'>) => {
+  const scalars = Object.entries(params).map(([name, value]) => [
+    name,
+    Array.isArray(value) ? value.join(', ') : value,
+  ]);
+  return noticeText({ code, params: Object.fromEntries(scalars) as Readonly<Record<string, Scalar>>, sheet });
+};
+
+const textOf = (code: string): FindingText | undefined =>
+  RULE_TEXT.get(code) ?? RECORD_TEXT.get(code) ?? (code === 'standard-none' ? NO_STANDARD : undefined);
 
 /** A finding in words: the same on screen, in mail, in exports and on the command line. */
 export const renderFinding = (finding: Finding): RenderedFinding => {
-  const text = textOf(finding.code);
+  const known = textOf(finding.code);
+  const notice = known ? null : noticeOf(finding);
+  if (notice) return notice;
+  const text = known ?? UNKNOWN;
   return {
     title: text.title,
     message: text.message(finding) + uncertaintySentence(finding),
@@ -46,4 +66,5 @@ export const renderFinding = (finding: Finding): RenderedFinding => {
 };
 
 /** A finding's title from its code alone, for lists and filters. */
-export const findingTitle = (code: string): string => textOf(code).title;
+export const findingTitle = (code: string): string =>
+  textOf(code)?.title ?? noticeOf({ code, params: {}, sheet: null })?.title ?? UNKNOWN.title;

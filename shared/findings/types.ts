@@ -11,6 +11,7 @@ export type Finding = {
   readonly severity: Severity;
   /** Null: the finding belongs to the revision (an orphan pour, the Batch sheet). */
   readonly kind: Kind | null;
+  /** As written in the row, also where the row belongs to no line. */
   readonly structureNumber: string | null;
   /** 1 for the first line of this structure and kind in the batch. */
   readonly occurrence: number | null;

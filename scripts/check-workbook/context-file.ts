@@ -1,0 +1,86 @@
+import { Ajv2020 } from 'ajv/dist/2020.js';
+import { KINDS, type Kind } from '#shared/records/types.ts';
+import type { Product } from '#shared/standard/types.ts';
+
+/** A context file as it stands; a part left out is not known, and the rules that need it are skipped. */
+export type ContextFile = {
+  readonly zone?: string;
+  readonly asOf?: string;
+  readonly products?: readonly Product[];
+  readonly lots?: readonly {
+    readonly product: string;
+    readonly number: string;
+    readonly expiresOn?: string | null;
+    readonly status?: 'in-use' | 'held' | 'recalled';
+  }[];
+  readonly design?: readonly {
+    readonly structureNumber: string;
+    readonly kind?: Kind;
+    readonly poleLengthFt?: number | null;
+    readonly poleClass?: string | null;
+    readonly poleMaterial?: string | null;
+    readonly embedmentFt?: number | null;
+    readonly latitude?: number | null;
+    readonly longitude?: number | null;
+  }[];
+  /** GeoJSON polygon of the work order; kept for the rule on positions outside it. */
+  readonly area?: object | null;
+};
+
+const text = { type: 'string', minLength: 1 };
+const number = { type: ['number', 'null'] };
+
+const SCHEMA = {
+  type: 'object',
+  additionalProperties: false,
+  properties: {
+    zone: text,
+    asOf: text,
+    products: { type: 'array', items: { type: 'object' } },
+    lots: {
+      type: 'array',
+      items: {
+        type: 'object',
+        required: ['product', 'number'],
+        additionalProperties: false,
+        properties: {
+          product: text,
+          number: text,
+          expiresOn: { type: ['string', 'null'], pattern: '^\\d{4}-\\d{2}-\\d{2}$' },
+          status: { enum: ['in-use', 'held', 'recalled'] },
+        },
+      },
+    },
+    design: {
+      type: 'array',
+      items: {
+        type: 'object',
+        required: ['structureNumber'],
+        additionalProperties: false,
+        properties: {
+          structureNumber: text,
+          kind: { enum: KINDS },
+          poleLengthFt: number,
+          poleClass: { type: ['string', 'null'] },
+          poleMaterial: { type: ['string', 'null'] },
+          embedmentFt: number,
+          latitude: number,
+          longitude: number,
+        },
+      },
+    },
+    area: { type: ['object', 'null'] },
+  },
+};
+
+const validate = new Ajv2020({ allErrors: true, allowUnionTypes: true }).compile(SCHEMA);
+
+/** What is wrong with a context file, each with the place in it; empty when it can be used. */
+export const contextFaults = (value: unknown): readonly string[] => {
+  if (validate(value)) return [];
+  return (validate.errors ?? []).map((error) => {
+    const extra: unknown = error.params['additionalProperty'];
+    const name = typeof extra === 'string' ? ` (${extra})` : '';
+    return `${error.instancePath.slice(1) || 'the file'}: ${error.message ?? error.keyword}${name}`;
+  });
+};

@@ -1,0 +1,65 @@
+import { readFile } from 'node:fs/promises';
+import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
+import { isZone } from '#shared/dates/wall-clock.ts';
+import { validateProduct } from '#shared/generated/validators.mjs';
+import type { CheckContext, DesignFact, LotFact, ProductInForce } from '#shared/rules/types.ts';
+import { contextFaults, type ContextFile } from './context-file.ts';
+
+/** The context file cannot be used; the message names every fault. */
+export class ContextRefused extends Error {}
+
+const productsOf = (file: ContextFile): readonly ProductInForce[] =>
+  file.products?.map((body) => ({ code: body.code, n: 1, effectiveOn: '1900-01-01', body })) ??
+  DEMO_CONTEXT.products;
+
+const lotsOf = (file: ContextFile): readonly LotFact[] | null =>
+  file.lots?.map(({ expiresOn = null, status = 'in-use', ...lot }) => ({ ...lot, expiresOn, status })) ??
+  null;
+
+const designOf = (file: ContextFile): readonly DesignFact[] | null =>
+  file.design?.map((fact) => ({
+    structureNumber: fact.structureNumber,
+    kind: fact.kind ?? 'set',
+    poleLengthFt: fact.poleLengthFt ?? null,
+    poleClass: fact.poleClass ?? null,
+    poleMaterial: fact.poleMaterial ?? null,
+    embedmentFt: fact.embedmentFt ?? null,
+    latitude: fact.latitude ?? null,
+    longitude: fact.longitude ?? null,
+  })) ?? null;
+
+const faultsOf = (value: unknown): readonly string[] => {
+  const faults = contextFaults(value);
+  if (faults.length > 0) return faults;
+  const { zone, asOf, products = [] } = value as ContextFile;
+  return [
+    ...(zone === undefined || isZone(zone) ? [] : [`zone: "${zone}" is no IANA time zone`]),
+    ...(asOf === undefined || Number.isFinite(Date.parse(asOf)) ? [] : [`asOf: "${asOf}" is no instant`]),
+    ...products.flatMap((product, index) =>
+      validateProduct(product).map(({ field, keyword }) => `products/${index}/${field ?? ''}: ${keyword}`),
+    ),
+  ];
+};
+
+/** What a check without a server is told of its context: JSON with zone, asOf, products, lots, design. Throws ContextRefused. */
+export const readContext = async (path: string): Promise<CheckContext> => {
+  let value: unknown;
+  try {
+    value = JSON.parse(await readFile(path, 'utf8'));
+  } catch (error) {
+    const why = error instanceof SyntaxError ? 'is not JSON' : 'cannot be read';
+    throw new ContextRefused(`The context file ${path} ${why}: ${(error as Error).message}`);
+  }
+  const faults = faultsOf(value);
+  if (faults.length > 0)
+    throw new ContextRefused(`The context file ${path} cannot be used: ${faults.join('; ')}.`);
+  const file = value as ContextFile;
+  return {
+    ...DEMO_CONTEXT,
+    zone: file.zone ?? DEMO_CONTEXT.zone,
+    asOfMs: file.asOf === undefined ? null : Date.parse(file.asOf),
+    products: productsOf(file),
+    lots: lotsOf(file),
+    design: designOf(file),
+  };
+};
