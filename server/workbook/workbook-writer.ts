@@ -2,7 +2,7 @@ import { createWriteStream } from 'node:fs';
 import type { Writable } from 'node:stream';
 import ExcelJS from 'exceljs';
 
-type Writer = ExcelJS.stream.xlsx.WorkbookWriter;
+export type Writer = ExcelJS.stream.xlsx.WorkbookWriter;
 export type SheetWriter = ExcelJS.Worksheet;
 
 export type Validation = {
@@ -31,21 +31,35 @@ export function addValidation(sheet: SheetWriter, range: string, validation: Val
  */
 export async function streamWorkbook(
   target: string | Writable,
-  { keywords, title }: { readonly keywords: string; readonly title: string },
-  fill: (writer: Writer) => void,
+  options: {
+    readonly keywords: string;
+    readonly title: string;
+    /** Texts kept once for the whole file: smaller, but held in memory. Off for what may be very long. */
+    readonly sharedStrings?: boolean;
+    /** When it counts as written; now, unless given. */
+    readonly at?: Date;
+  },
+  fill: (writer: Writer) => void | Promise<void>,
 ): Promise<void> {
   const stream = typeof target === 'string' ? createWriteStream(target) : target;
   const failed = new Promise<never>((_, reject) => stream.once('error', reject));
   const closed = new Promise<never>((_, reject) =>
-    stream.once('close', () =>
-      reject(new Error('The target of the workbook was closed before it was written.')),
-    ),
+    stream.once('close', () => {
+      // A target that took all of it may close before the writer hears so.
+      if (!stream.writableFinished)
+        reject(new Error('The target of the workbook was closed before it was written.'));
+    }),
   );
-  const writer = new ExcelJS.stream.xlsx.WorkbookWriter({ stream, useStyles: true, useSharedStrings: true });
+  const writer = new ExcelJS.stream.xlsx.WorkbookWriter({
+    stream,
+    useStyles: true,
+    useSharedStrings: options.sharedStrings ?? true,
+  });
   writer.creator = 'Upstand';
   writer.lastModifiedBy = 'Upstand';
-  writer.title = title;
-  writer.keywords = keywords;
-  fill(writer);
-  await Promise.race([writer.commit(), failed, closed]);
+  writer.title = options.title;
+  writer.keywords = options.keywords;
+  if (options.at) writer.created = writer.modified = options.at;
+  const written = Promise.resolve(fill(writer)).then(() => writer.commit());
+  await Promise.race([written, failed, closed]);
 }

@@ -1,0 +1,25 @@
+import { createHash } from 'node:crypto';
+import type { ContentSheet } from './read-content.ts';
+
+export type ContentSummary = {
+  /** SHA-256 over the rows, sheet by sheet: the same content has the same digest, whatever program wrote the file. */
+  readonly digest: string;
+  /** Rows of each sheet by its name. */
+  readonly counts: ReadonlyMap<string, number>;
+};
+
+/** Reads the content once through, before the file is written, so that its cover can carry the digest. */
+export async function contentDigest(sheets: readonly ContentSheet[]): Promise<ContentSummary> {
+  const hash = createHash('sha256');
+  const counts = new Map<string, number>();
+  for (const sheet of sheets) {
+    hash.update(`${JSON.stringify([sheet.name, ...sheet.columns.map((column) => column.key)])}\n`);
+    let n = 0;
+    for await (const row of sheet.rows()) {
+      hash.update(`${JSON.stringify(sheet.columns.map((column) => row[column.key] ?? null))}\n`);
+      n += 1;
+    }
+    counts.set(sheet.name, n);
+  }
+  return { digest: hash.digest('hex'), counts };
+}

@@ -1,0 +1,236 @@
+import type { EntityManager } from '@mikro-orm/postgresql';
+import { rows } from '#server/db/rows.ts';
+import { renderFinding } from '#shared/findings/render.ts';
+import type { Finding } from '#shared/findings/types.ts';
+import {
+  FINDING_COLUMNS,
+  kindColumns,
+  POUR_COLUMNS,
+  type ExportColumn,
+  type ExportRow,
+} from '#shared/export/as-built-columns.ts';
+import { KINDS, SHEET_OF_KIND, type Derived, type FieldValues, type Kind } from '#shared/records/types.ts';
+
+/** Rows fetched at a time: memory does not grow with the scope. */
+const CHUNK = 500;
+
+export type ContentSheet = {
+  readonly name: string;
+  readonly columns: readonly ExportColumn[];
+  readonly rows: () => AsyncGenerator<ExportRow>;
+};
+
+type RecordRow = {
+  ordinal: number;
+  record_number: string;
+  n: number;
+  values: FieldValues;
+  derived: Derived;
+  nonconforming: boolean;
+  concessions: string[];
+  standard: number | null;
+  contractor: string;
+  work_order: string;
+  batch: string;
+  revision: number;
+  photographs: number;
+  entered_on: string;
+};
+
+/** The sheets of an as-built with their rows in the fixed order of the transmittal; read in em's own snapshot. */
+export function readContent(em: EntityManager, transmittalId: string): readonly ContentSheet[] {
+  const kindSheet = (kind: Kind): ContentSheet => ({
+    name: SHEET_OF_KIND[kind],
+    columns: kindColumns(kind),
+    rows: () =>
+      inChunks<RecordRow, ExportRow>(em, { sql: RECORDS, values: [transmittalId, kind], map: recordRow }),
+  });
+  return [
+    ...KINDS.map(kindSheet),
+    {
+      name: 'Pours',
+      columns: POUR_COLUMNS,
+      rows: () => inChunks<PourRow, ExportRow>(em, { sql: POURS, values: [transmittalId], map: pourRow }),
+    },
+    {
+      name: 'Findings',
+      columns: FINDING_COLUMNS,
+      rows: () =>
+        inChunks<FindingRow, ExportRow>(em, { sql: FINDINGS, values: [transmittalId], map: findingRow }),
+    },
+  ];
+}
+
+/** Pages by `ordinal`; every query takes it as its last parameter and ends in `limit`. A structure's rows stay together. */
+async function* inChunks<Row extends { ordinal: number }, Out>(
+  em: EntityManager,
+  query: { sql: string; values: readonly unknown[]; map: (row: Row) => Out },
+): AsyncGenerator<Out> {
+  let last = 0;
+  for (;;) {
+    const found = await rows<Row>(em, query.sql, [...query.values, last, last + CHUNK]);
+    for (const item of found) yield query.map(item);
+    last += CHUNK;
+    if (found.length === 0 && !(await anyBeyond(em, String(query.values[0]), last))) return;
+  }
+}
+
+async function anyBeyond(em: EntityManager, transmittalId: string, ordinal: number): Promise<boolean> {
+  const beyond = await rows(
+    em,
+    'select 1 from transmittal_items where transmittal_id = $1 and ordinal > $2 limit 1',
+    [transmittalId, ordinal],
+  );
+  return beyond.length > 0;
+}
+
+const ITEMS = `
+from transmittal_items i
+join register_versions v on v.id = i.version_id
+join records r on r.id = v.record_id
+where i.transmittal_id = $1`;
+
+const RECORDS = `
+select i.ordinal, v.record_number, v.n, r.values, r.derived, v.nonconforming, sv.n as standard, o.name as contractor,
+  w.number as work_order, b.number as batch, rev.n as revision,
+  to_char(v.entered_at at time zone w.zone, 'YYYY-MM-DD') as entered_on,
+  (select count(*)::int from photo_placed p where p.line_id = r.line_id) as photographs,
+  array(
+    select distinct c.number from finding_states s join decisions d on d.finding_id = s.finding_id and d.seq = s.version
+    join concessions c on c.id = d.concession_id where s.record_id = r.id and s.grounds = 'concession' order by 1
+  ) as concessions
+from transmittal_items i
+join register_versions v on v.id = i.version_id
+join records r on r.id = v.record_id
+join revisions rev on rev.id = r.revision_id
+join batches b on b.id = rev.batch_id
+join organisations o on o.id = v.contractor_id
+join work_orders w on w.id = v.work_order_id
+left join standard_versions sv on sv.id = r.standard_id
+where i.transmittal_id = $1 and v.kind = $2 and i.ordinal > $3 and i.ordinal <= $4
+order by i.ordinal`;
+
+function recordRow(row: RecordRow): ExportRow {
+  return {
+    ...row.values,
+    recordNumber: row.record_number,
+    version: row.n,
+    voidFt3: row.derived.voidFt3,
+    placedFt3: row.derived.placedFt3,
+    fillRatio: row.derived.fillRatio,
+    fillRatioU: row.derived.fillRatioU,
+    dueFt: row.derived.dueFt,
+    waterWithPoleIn: row.derived.waterWithPoleIn,
+    leastAnnulusIn: row.derived.leastAnnulusIn,
+    conforms: row.nonconforming ? 'no' : 'yes',
+    concessions: row.concessions.join('; '),
+    standard: row.standard,
+    contractor: row.contractor,
+    workOrder: row.work_order,
+    batch: row.batch,
+    revision: row.revision,
+    photographs: row.photographs,
+    enteredOn: row.entered_on,
+  };
+}
+
+type PourRow = { ordinal: number; record_number: string; structure_number: string; kind: string } & Record<
+  string,
+  string | number | null
+>;
+
+const POURS = `
+select i.ordinal, v.record_number, v.structure_number, v.kind, p.pour_number, p.event, p.poured_wall, p.product_code, p.lot_text,
+  p.kit_ft3, p.quantity, p.wasted_quantity, p.component_a_temp_f, p.component_b_temp_f
+${ITEMS.replace('where', 'join pours p on p.record_id = r.id where')} and i.ordinal > $2 and i.ordinal <= $3
+order by i.ordinal, p.n`;
+
+function pourRow(row: PourRow): ExportRow {
+  return {
+    recordNumber: row.record_number,
+    structureNumber: row.structure_number,
+    kind: row.kind,
+    pourNumber: row['pour_number'],
+    event: row['event'],
+    pouredAt: row['poured_wall'],
+    product: row['product_code'],
+    lot: row['lot_text'],
+    kitFt3: row['kit_ft3'],
+    quantity: row['quantity'],
+    wastedQuantity: row['wasted_quantity'],
+    componentATempF: row['component_a_temp_f'],
+    componentBTempF: row['component_b_temp_f'],
+  };
+}
+
+type FindingRow = {
+  ordinal: number;
+  record_number: string;
+  state: string;
+  grounds: string | null;
+  reason: string | null;
+  decided_by: string | null;
+  concession: string | null;
+  condition: string | null;
+  ends_on: string | null;
+  code: string;
+  severity: Finding['severity'];
+  kind: Finding['kind'];
+  structure_number: string | null;
+  sheet: string | null;
+  row: number | null;
+  cell: string | null;
+  field: string | null;
+  measured: Finding['measured'];
+  limit_value: Finding['limit'];
+  margin: number | null;
+  unit: string | null;
+  uncertainty: number | null;
+  params: Finding['params'];
+};
+
+const FINDINGS = `
+select i.ordinal, v.record_number, s.state, s.grounds, d.reason, u.name as decided_by,
+  c.number as concession, c.condition, c.ends_on, f.code, f.severity, f.kind, f.structure_number, f.sheet, f.row, f.cell,
+  f.field, f.measured, f.limit_value, f.margin, f.unit, f.uncertainty, f.params
+${ITEMS.replace(
+  'where',
+  `join finding_states s on s.record_id = r.id
+join findings f on f.id = s.finding_id
+left join decisions d on d.finding_id = s.finding_id and d.seq = s.version
+left join users u on u.id = d.actor_id
+left join concession_current c on c.id = d.concession_id
+where`,
+)} and i.ordinal > $2 and i.ordinal <= $3
+order by i.ordinal, f.ordinal`;
+
+function findingRow(row: FindingRow): ExportRow {
+  const { title, message } = renderFinding({
+    ...row,
+    structureNumber: row.structure_number,
+    limit: row.limit_value,
+    occurrence: null,
+    // What concerns another contractor stays out of a document that goes to many.
+    ownerParams: {},
+    fingerprint: '',
+  });
+  return {
+    recordNumber: row.record_number,
+    structureNumber: row.structure_number,
+    code: row.code,
+    title,
+    severity: row.severity,
+    measured: row.measured,
+    limit: row.limit_value,
+    margin: row.margin,
+    unit: row.unit,
+    sentence: message,
+    decision: row.severity === 'note' ? '' : row.state,
+    grounds: row.grounds,
+    reason: row.reason,
+    decidedBy: row.decided_by,
+    concession: row.concession,
+    condition: row.condition,
+    endsOn: row.ends_on,
+  };
+}

@@ -1,0 +1,114 @@
+import type { Writable } from 'node:stream';
+import { serialOf, DAY_FORMAT, TIME_FORMAT } from '#server/workbook/excel-time.ts';
+import { HINT, TEXT, TITLE } from '#server/workbook/template-style.ts';
+import { streamWorkbook, type SheetWriter, type Writer } from '#server/workbook/workbook-writer.ts';
+import type { ExportColumn, ExportRow } from '#shared/export/as-built-columns.ts';
+import { neutral } from '#shared/export/csv.ts';
+import { writeCover, type Cover } from './write-cover.ts';
+import type { ContentSheet } from './read-content.ts';
+
+/** The writer hands its rows to a compressor that cannot say "wait": after so many the event loop gets a turn. */
+const BREATHE = 200;
+
+/**
+ * Writes an as-built: cover, one sheet a kind, pours, findings; keys in row 1 (hidden), data from row 4; print set-up.
+ * `onRow` is told how many structures are written.
+ */
+export async function writeAsBuilt(
+  target: Writable,
+  options: { cover: Cover; sheets: readonly ContentSheet[]; onRow: (structures: number) => Promise<void> },
+): Promise<void> {
+  const { cover, sheets, onRow } = options;
+  const head = {
+    keywords: `transmittal=${cover.number}; revision=${cover.revision}; digest=${cover.digest}`,
+    title: `${cover.number} ${cover.title}`,
+  };
+  await streamWorkbook(
+    target,
+    { ...head, sharedStrings: false, at: new Date(cover.issuedAt) },
+    async (writer) => {
+      writeCover(writer, cover);
+      let structures = 0;
+      for (const sheet of sheets) {
+        const isKind = sheet.columns.some((column) => column.key === 'conforms');
+        const written = openSheet(writer, sheet, cover);
+        let n = 0;
+        for await (const row of sheet.rows()) {
+          writeRow(written, sheet.columns, row);
+          n += 1;
+          if (isKind) structures += 1;
+          if (n % BREATHE === 0) await onRow(structures);
+        }
+        written.commit();
+      }
+      await onRow(structures);
+    },
+  );
+}
+
+function openSheet(writer: Writer, sheet: ContentSheet, cover: Cover): SheetWriter {
+  const written = writer.addWorksheet(sheet.name, {
+    views: [{ state: 'frozen', xSplit: 2, ySplit: 3 }],
+    pageSetup: {
+      orientation: 'landscape',
+      fitToPage: true,
+      fitToWidth: 1,
+      fitToHeight: 0,
+      printTitlesRow: '2:2',
+      margins: { left: 0.4, right: 0.4, top: 0.6, bottom: 0.6, header: 0.3, footer: 0.3 },
+    },
+    headerFooter: {
+      oddHeader: `&L${sheet.name}&R${cover.number} revision ${cover.revision}`,
+      oddFooter: `&L${cover.owner.replaceAll('&', '&&')}&RPage &P of &N`,
+    },
+  });
+  written.columns = sheet.columns.map((column) => ({ width: widthOf(column) }));
+  const keys = written.addRow(sheet.columns.map((column) => column.key));
+  keys.hidden = true;
+  keys.commit();
+  addStyled(
+    written,
+    sheet.columns.map((column) => column.heading),
+    TITLE,
+    32,
+  );
+  addStyled(
+    written,
+    sheet.columns.map((column) => column.hint),
+    HINT,
+    48,
+  );
+  return written;
+}
+
+function addStyled(sheet: SheetWriter, cells: readonly string[], style: object, height: number): void {
+  const row = sheet.addRow([...cells]);
+  row.height = height;
+  row.eachCell({ includeEmpty: true }, (cell) => Object.assign(cell, { style }));
+  row.commit();
+}
+
+const widthOf = (column: ExportColumn): number =>
+  column.key === 'sentence' || column.key === 'reason' || column.key === 'notes'
+    ? 48
+    : Math.min(26, Math.max(11, column.heading.length + 2));
+
+function writeRow(sheet: SheetWriter, columns: readonly ExportColumn[], values: ExportRow): void {
+  const row = sheet.addRow(columns.map((column) => cellOf(column, values[column.key])));
+  columns.forEach((column, index) => {
+    if (column.type === 'clock') row.getCell(index + 1).numFmt = TIME_FORMAT;
+    if (column.type === 'day') row.getCell(index + 1).numFmt = DAY_FORMAT;
+    if (column.key === 'sentence' || column.key === 'reason')
+      row.getCell(index + 1).alignment = TEXT.alignment ?? {};
+  });
+  row.commit();
+}
+
+/** Real dates as serials, numbers as numbers; text never as a formula. */
+function cellOf(column: ExportColumn, value: ExportRow[string]): string | number | boolean | null {
+  if (value === null || value === undefined) return null;
+  if (typeof value !== 'string') return value;
+  if (column.type === 'clock' || column.type === 'day')
+    return serialOf(value) ?? neutral(value.replaceAll('-', ' '));
+  return neutral(value);
+}
