@@ -8,6 +8,14 @@ import { peopleRoutes } from '#server/modules/people/routes.ts';
 import { photoRoutes } from '#server/modules/photos/routes.ts';
 import { recordRoutes } from '#server/modules/records/routes.ts';
 import { sessionRoutes } from '#server/modules/session/routes.ts';
+import { concessionRoutes } from '#server/modules/concessions/routes.ts';
+import { nonconformityRoutes } from '#server/modules/nonconformities/routes.ts';
+import { registerRoutes } from '#server/modules/register/routes.ts';
+import { reviewRoutes } from '#server/modules/review/routes.ts';
+import { standardRoutes } from '#server/modules/standard/routes.ts';
+import { trailRoutes } from '#server/modules/trail/routes.ts';
+import { transmittalRoutes } from '#server/modules/transmittals/routes.ts';
+import { workOrderRoutes } from '#server/modules/work-orders/routes.ts';
 
 /** Every route of the server. A module adds one line. */
 export const ROUTES: readonly Route[] = [
@@ -16,8 +24,16 @@ export const ROUTES: readonly Route[] = [
   ...homeRoutes,
   ...peopleRoutes,
   ...organisationRoutes,
+  ...workOrderRoutes,
   ...batchRoutes,
   ...photoRoutes,
   ...recordRoutes,
+  ...reviewRoutes,
+  ...concessionRoutes,
+  ...registerRoutes,
+  ...transmittalRoutes,
+  ...nonconformityRoutes,
+  ...standardRoutes,
+  ...trailRoutes,
   ...openapiRoutes(() => ROUTES),
 ];
