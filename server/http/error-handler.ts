@@ -6,7 +6,7 @@ import { Problem, problem } from '#server/http/problem.ts';
 /** Turns what was thrown into a problem reply. What is not known is answered with an id and nothing of its own. */
 export function errorHandler(log: Logger): ErrorRequestHandler {
   return (error: unknown, req, res, _next) => {
-    const known = toProblem(error);
+    const known = problemOf(error);
     if (res.headersSent) {
       // A stream that broke off: the only honest sign left is a connection that ends too early.
       log.error({ err: error, url: req.path }, 'an answer broke off');
@@ -34,7 +34,8 @@ function unexpected(log: Logger, error: unknown): Problem {
   );
 }
 
-function toProblem(error: unknown): Problem | null {
+/** Null for what is not known. */
+export function problemOf(error: unknown): Problem | null {
   if (error instanceof Problem) return error;
   return fromBodyReader(error) ?? fromDatabase(error);
 }
