@@ -37,7 +37,15 @@ end $$;
 
 /** Makes the application's role if it is missing, sets its password when one is given, and gives it what it needs and no more. */
 export async function grantToApp(client: pg.Client, appPassword?: string): Promise<void> {
-  await client.query(ROLE);
+  try {
+    await client.query(ROLE);
+  } catch (error) {
+    if ((error as { code?: string }).code !== '42501') throw error;
+    throw new Error(
+      `The account in DATABASE_URL may not make roles. Let an administrator of the server run: create role ${APP_ROLE} login password '…'; then start again.`,
+      { cause: error },
+    );
+  }
   if (appPassword !== undefined) {
     await client.query(`alter role ${APP_ROLE} login password ${client.escapeLiteral(appPassword)}`);
   }

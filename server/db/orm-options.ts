@@ -43,7 +43,13 @@ export function ormOptions(url: string, options: OrmOptions = {}) {
     forceUtcTimezone: true,
     pool: { min: 0, max: options.max ?? 10 },
     driverOptions: {
-      connection: { application_name: options.applicationName ?? 'upstand', connectionTimeoutMillis: 10_000 },
+      connection: {
+        application_name: options.applicationName ?? 'upstand',
+        connectionTimeoutMillis: 10_000,
+        keepAlive: true,
+        // A process that hangs in a transaction must not hold its locks for ever.
+        idle_in_transaction_session_timeout: 5 * 60_000,
+      },
     },
     // A query through the shared manager would mix what two requests have loaded.
     allowGlobalContext: false,

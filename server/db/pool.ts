@@ -9,6 +9,7 @@ export function createPool(url: string, options: { max?: number; applicationName
     application_name: options.applicationName ?? 'upstand',
     connectionTimeoutMillis: 10_000,
     idleTimeoutMillis: 30_000,
+    keepAlive: true,
     types: VALUE_TYPES,
   });
   // Without a listener the loss of an idle connection (a restart of PostgreSQL) would end the process.

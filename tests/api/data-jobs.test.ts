@@ -1,6 +1,7 @@
 import { afterAll, beforeAll, beforeEach, expect, it } from 'vitest';
 import { createServices, type Services } from '#server/container.ts';
 import { row, rows, run } from '#server/db/rows.ts';
+import { createQueue } from '#server/jobs/create-queue.ts';
 import { defineJob, type JobDefinition, type JobHandler } from '#server/jobs/define-job.ts';
 import { enqueue } from '#server/jobs/enqueue.ts';
 import { freeOrphans } from '#server/jobs/free-orphans.ts';
@@ -123,6 +124,28 @@ it('a job left running by a process that died is free again; one that is worked 
     { id: taken[0]?.id, state: 'active' },
     { id: taken[1]?.id, state: 'retry' },
   ]);
+});
+
+it('the queue’s own upkeep needs no more than the application’s rights', async () => {
+  handler = () => Promise.resolve();
+  await em().transactional((tx) => enqueue(tx, job, { n: 1 }));
+  await work();
+  await em().transactional((tx) => enqueue(tx, job, { n: 2 }));
+  await services.queue.boss.fetch(job.name);
+  await run(
+    em(),
+    `update pgboss.job set completed_on = completed_on - interval '9 days', started_on = started_on - interval '9 days'`,
+  );
+  // One that was stopped does no more upkeep.
+  const fresh = createQueue({ databaseUrl: database.appUrl, pool: services.pool, log: services.log });
+  await fresh.boss.start();
+  await fresh.boss.maintain();
+  await fresh.boss.stop({ graceful: false });
+  await fresh.close();
+  expect(await rows(em(), `select data -> 'n' as n, state::text from pgboss.job`)).toEqual([
+    { n: 2, state: 'retry' },
+  ]);
+  expect(await rows(em(), `select data -> 'n' as n from pgboss.archive`)).toEqual([{ n: 1 }]);
 });
 
 it('progress is kept and told, also after the connection that listens was cut', async () => {
