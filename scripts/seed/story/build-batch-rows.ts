@@ -35,7 +35,10 @@ export type StoryPhotograph = {
 
 /** Rows of a workbook by field key, times as wall clock `YYYY-MM-DDTHH:mm`, days as `YYYY-MM-DD`; blank fields absent. */
 export type BatchRows = {
-  readonly batch: Values;
+  readonly workOrder: string;
+  readonly contractor: string;
+  readonly foreman: string;
+  readonly notes: string | null;
   readonly set: readonly Values[];
   readonly pours: readonly PourValues[];
   readonly events: readonly Values[];
@@ -62,7 +65,10 @@ export function buildBatchRows({
     order.contractor === 'brindle' ? 'Brindle Line Constructors' : 'Tamsett Utility Services';
   const photographs = built.flatMap((line) => line.photographs);
   return {
-    batch: { workOrder, contractor, foreman: order.foreman, ...(notes ? { notes } : {}) },
+    workOrder,
+    contractor,
+    foreman: order.foreman,
+    notes: notes ?? null,
     set: built.map((line) => line.values),
     pours: built.flatMap((line) => line.pours),
     events: built.flatMap((line) => line.events),
