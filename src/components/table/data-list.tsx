@@ -4,13 +4,14 @@ import { columnsFit } from '#src/components/table/columns.ts';
 import { ListCard, ListRow } from '#src/components/table/list-row.tsx';
 import { ListHead } from '#src/components/table/list-head.tsx';
 import type { useColumns } from '#src/components/table/use-columns.ts';
-import { useListWindow, useWidth } from '#src/components/table/use-list-window.ts';
+import { useListWindow } from '#src/components/table/use-list-window.ts';
 import { ErrorState } from '#src/components/ui/error-state.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
 import type { KeysetList } from '#src/lib/api/use-keyset-list.ts';
 import { classNames } from '#src/lib/class-names.ts';
 import type { Filters } from '#src/lib/filters/use-filters.ts';
 import { useHotkeys } from '#src/lib/use-hotkeys.ts';
+import { useWidth } from '#src/lib/use-width.ts';
 
 type Props<Row extends object> = {
   readonly label: string;

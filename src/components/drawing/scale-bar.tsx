@@ -1,0 +1,20 @@
+/** One foot (or half a metre) at the drawing's scale. */
+export function ScaleBar({ x, y, scale, metric }: { x: number; y: number; scale: number; metric: boolean }) {
+  const unit = metric ? scale / 0.3048 / 2 : scale;
+  return (
+    <g>
+      <path
+        d={`M${x} ${y - 5}V${y + 5}M${x + unit / 2} ${y - 4}V${y + 4}M${x + unit} ${y - 5}V${y + 5}`}
+        className="stroke-ink"
+      />
+      <path d={`M${x} ${y}H${x + unit}`} className="stroke-ink" />
+      <path d={`M${x} ${y}H${x + unit / 2}`} className="stroke-ink" strokeWidth="4.5" />
+      <text x={x} y={y + 20} fontSize="11" className="fill-muted">
+        0
+      </text>
+      <text x={x + unit} y={y + 20} fontSize="11" textAnchor="middle" className="fill-muted">
+        {metric ? '0.5 m' : '1 ft'}
+      </text>
+    </g>
+  );
+}

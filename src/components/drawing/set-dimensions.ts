@@ -1,0 +1,258 @@
+import { positiveOf } from '#shared/calc/values.ts';
+import type { FieldValues } from '#shared/records/types.ts';
+import { crossText, dimensionText } from './dimension-text.ts';
+import { round, type SetGeometry } from './set-geometry.ts';
+import type { SetSection } from './set-section.ts';
+import { BALLOON_R, FONT, type SheetSpec } from './sheet-spec.ts';
+import { toneOf, type Run, type SheetFinding, type Tone } from './sheet-types.ts';
+import { textWidth } from './text-width.ts';
+
+/** A dimension across: extension lines from `fromY`, the line at `y`, its words at one side. */
+export type AcrossDimension = {
+  readonly id: string;
+  readonly y: number;
+  readonly x1: number;
+  readonly x2: number;
+  readonly fromY: number;
+  readonly textAt: 'left' | 'right';
+  /** The words' end next to the line. */
+  readonly textX: number;
+  readonly runs: readonly Run[];
+  /** The pole stands in front of the line. */
+  readonly gap: readonly [number, number] | null;
+};
+
+/** A dimension down the left side, its words along it. */
+export type DownDimension = {
+  readonly id: string;
+  readonly x: number;
+  readonly y1: number;
+  readonly y2: number;
+  /** Where the extension lines end, at the section. */
+  readonly toX1: number;
+  readonly toX2: number;
+  readonly textY: number;
+  readonly runs: readonly Run[];
+  readonly tone: Tone;
+  readonly balloon: { readonly finding: SheetFinding; readonly y: number } | null;
+};
+
+export type DueTick = {
+  readonly x1: number;
+  readonly x2: number;
+  readonly y: number;
+  readonly textX: number;
+  readonly textY: number;
+  readonly text: string;
+  readonly tone: Tone;
+};
+
+export type SetDimensions = {
+  readonly across: readonly AcrossDimension[];
+  readonly down: readonly DownDimension[];
+  readonly due: DueTick | null;
+};
+
+type Input = {
+  readonly section: SetSection;
+  readonly geometry: SetGeometry;
+  readonly spec: SheetSpec;
+  readonly values: FieldValues;
+  readonly findings: readonly SheetFinding[];
+  readonly metric: boolean;
+};
+
+const ROW = 25;
+
+export function setDimensions(input: Input): SetDimensions {
+  const due = dueTick(input);
+  return {
+    across: [...topDimension(input), ...bottomDimensions(input, due)],
+    down: downDimensions(input),
+    due,
+  };
+}
+
+function topDimension({ geometry, values, metric, spec }: Input): AcrossDimension[] {
+  const { bore, pole } = geometry;
+  const topIn = positiveOf(values, 'boreTopIn');
+  if (!bore || topIn === null) return [];
+  const across = positiveOf(values, 'boreTopAcrossIn');
+  const y = spec.groundY - 46;
+  return [
+    {
+      id: 'bore-top',
+      y,
+      x1: bore.left,
+      x2: bore.right,
+      fromY: Math.min(geometry.groundAt(bore.left), geometry.groundAt(bore.right)) - 7,
+      textAt: 'left',
+      textX: bore.left - 16,
+      runs: width(spec.compact ? '' : 'bore, top', [topIn, across ?? topIn], metric),
+      gap: pole ? [pole.left - 4, pole.right + 4] : null,
+    },
+  ];
+}
+
+function width(word: string, axes: readonly [number, number], metric: boolean): Run[] {
+  return [
+    ...(word === '' ? [] : [{ text: `${word} `, tone: 'muted' as const }]),
+    { text: crossText(axes, metric), bold: true },
+  ];
+}
+
+function bottomDimensions(
+  { section, geometry, metric, spec }: Input,
+  due: DueTick | null,
+): AcrossDimension[] {
+  const { bore, pole } = geometry;
+  const rows: Omit<AcrossDimension, 'y' | 'textX' | 'textAt' | 'gap'>[] = [];
+  if (pole && section.pole) {
+    rows.push({
+      id: 'butt',
+      x1: pole.buttLeft,
+      x2: pole.buttRight,
+      fromY: pole.buttY + 8,
+      runs: [
+        { text: 'butt ', tone: 'muted' },
+        { text: dimensionText(section.pole.buttIn, 'in', metric), bold: true },
+      ],
+    });
+  }
+  if (bore && section.bore) {
+    const shaft = section.bore.parts[0];
+    const bell = section.bore.parts[1];
+    const belled = bell !== undefined;
+    if (shaft) {
+      const half = (shaft.bottom.a / 24) * geometry.scale;
+      const axis = (bore.left + bore.right) / 2;
+      rows.push({
+        id: 'bore-bottom',
+        x1: axis - half,
+        x2: axis + half,
+        fromY: belled ? geometry.y(shaft.toFt) : bore.bottomY + 8,
+        runs: width(belled ? 'bore, above bell' : 'bore, bottom', [shaft.bottom.a, shaft.bottom.b], metric),
+      });
+    }
+    if (bell) {
+      rows.push({
+        id: 'bell',
+        x1: bore.bottomLeft,
+        x2: bore.bottomRight,
+        fromY: bore.bottomY + 8,
+        runs: width('bell', [bell.bottom.a, bell.bottom.b], metric),
+      });
+    }
+  }
+  const lowest = Math.max(bore?.bottomY ?? 0, pole?.buttY ?? 0);
+  // The words of the due depth keep their place; the rows begin below them.
+  const first = Math.max(
+    lowest + 40,
+    due === null ? 0 : due.textY + 18,
+    spec.compact ? spec.labels.bottom + 18 : 0,
+  );
+  const textAt = spec.compact ? 'right' : 'left';
+  const textX =
+    textAt === 'left'
+      ? Math.min(...rows.map((row) => row.x1)) - 14
+      : Math.max(...rows.map((row) => row.x2)) + 14;
+  return rows.map((row, index) => ({ ...row, y: round(first + index * ROW), textAt, textX, gap: null }));
+}
+
+/** The deeper of two stands outside. */
+function downDimensions(input: Input): DownDimension[] {
+  const { section, geometry, spec, findings, metric } = input;
+  const dimensions: DownDimension[] = [];
+  const { bore, pole } = geometry;
+  const both = hasBoreDepth(section) && section.embedmentFt !== null;
+  if (section.embedmentFt !== null) {
+    dimensions.push(
+      down(input, {
+        id: 'embedment',
+        x: embedmentX(section, spec),
+        toFt: section.embedmentFt,
+        toX2: (pole?.buttLeft ?? spec.axisX) - 8,
+        value: dimensionText(section.embedmentFt, 'ft', metric),
+        word: 'embedment',
+        finding: findings.find((one) => one.field === 'embedmentFt') ?? null,
+      }),
+    );
+  }
+  if (hasBoreDepth(section) && section.bore && bore) {
+    dimensions.push(
+      down(input, {
+        id: 'bore-depth',
+        x: both ? spec.dimensionX - spec.dimensionStep : spec.dimensionX,
+        toFt: section.bore.depthFt,
+        toX2: bore.bottomLeft - 4,
+        value: dimensionText(section.bore.depthFt, 'ft', metric),
+        word: 'bore',
+        finding: findings.find((one) => one.field === 'boreDepthFt') ?? null,
+      }),
+    );
+  }
+  return dimensions;
+}
+
+/** The bore is measured apart where it is not simply as deep as the pole. */
+function hasBoreDepth({ bore, embedmentFt }: SetSection): boolean {
+  return bore !== null && (embedmentFt === null || Math.abs(bore.depthFt - embedmentFt) > 0.02);
+}
+
+function embedmentX(section: SetSection, spec: SheetSpec): number {
+  return hasBoreDepth(section) ? spec.dimensionX + spec.dimensionStep : spec.dimensionX;
+}
+
+type Down = {
+  id: string;
+  x: number;
+  toFt: number;
+  toX2: number;
+  value: string;
+  word: string;
+  finding: SheetFinding | null;
+};
+
+/** Words above, balloon below them, both within the line. */
+function down({ geometry, spec }: Input, { id, x, toFt, toX2, value, word, finding }: Down): DownDimension {
+  const y1 = spec.groundY;
+  const y2 = geometry.y(toFt);
+  const tone = finding ? toneOf(finding) : 'ink';
+  const length = textWidth(value, FONT, true) + textWidth(` ${word}`, FONT);
+  const balloonRoom = finding ? 2 * BALLOON_R + 16 : 0;
+  const start = y1 + Math.max(4, (y2 - y1 - length - balloonRoom) / 2);
+  return {
+    id,
+    x,
+    y1,
+    y2,
+    toX1: spec.hatch.left - 26,
+    toX2,
+    textY: round(start + length / 2),
+    runs: [
+      { text: value, bold: true, tone },
+      { text: ` ${word}`, tone: 'muted' },
+    ],
+    tone,
+    balloon: finding ? { finding, y: round(start + length + 16 + BALLOON_R) } : null,
+  };
+}
+
+function dueTick({ section, geometry, spec, metric }: Input): DueTick | null {
+  const { dueFt, embedmentFt } = section;
+  if (dueFt === null) return null;
+  const y = round(geometry.y(dueFt));
+  const text = `due ${dimensionText(dueFt, 'ft', metric)}`;
+  const short = embedmentFt !== null && embedmentFt < dueFt - 1e-9;
+  const x = embedmentX(section, spec);
+  // Short: below everything, as what is lacking. Else beside the line, above the tick.
+  return {
+    x1: x - 17,
+    x2: short ? x + 38 : x + 14,
+    y,
+    textX: short ? x - 17 : x + 7,
+    textY: short ? y + 17 : y - 6,
+    text,
+    tone: short ? 'nonconform' : 'muted',
+  };
+}

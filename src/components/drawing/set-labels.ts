@@ -1,0 +1,123 @@
+import { numberOf } from '#shared/calc/values.ts';
+import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
+import { anchorOf, type AnchorName } from './anchors.ts';
+import { dimensionText } from './dimension-text.ts';
+import { findingText } from './finding-text.ts';
+import { missingName } from './missing-name.ts';
+import type { SetSection } from './set-section.ts';
+import { toneOf, type SheetFinding, type SheetLimits, type SheetRecord, type Tone } from './sheet-types.ts';
+
+/** What a label says, before it has a place. */
+export type LabelContent = {
+  readonly id: string;
+  readonly anchor: AnchorName | null;
+  readonly title: string;
+  readonly detail: string;
+  readonly tone: Tone;
+  readonly finding: SheetFinding | null;
+  readonly optional?: boolean;
+};
+
+type Input = {
+  readonly record: SheetRecord;
+  readonly section: SetSection;
+  readonly findings: readonly SheetFinding[];
+  readonly limits: SheetLimits;
+  readonly metric: boolean;
+};
+
+/** Findings first, each at what it concerns; then the measured facts that no finding speaks of; then what is missing. */
+export function setLabels(input: Input): LabelContent[] {
+  const found = input.findings.map((finding): LabelContent => ({
+    id: `finding ${finding.id}`,
+    anchor: anchorOf(finding.field, finding.code),
+    title: finding.title,
+    detail: findingText(finding, input.metric),
+    tone: toneOf(finding),
+    finding,
+  }));
+  const spoken = new Set(found.map((label) => label.anchor));
+  const facts = factLabels(input).filter((fact) => !spoken.has(fact.anchor));
+  const missing = input.section.missing
+    .filter((field) => !input.findings.some((finding) => finding.field === field))
+    .map((field): LabelContent => ({
+      id: `missing ${field}`,
+      anchor: anchorOf(field, ''),
+      title: `${missingName(field)} not given`,
+      detail: 'so it is not drawn',
+      tone: 'query',
+      finding: null,
+    }));
+  return [...found, ...missing, ...facts];
+}
+
+function factLabels({ record, section, limits, metric }: Input): LabelContent[] {
+  const { derived, values } = record;
+  const facts: LabelContent[] = [];
+  const add = (anchor: AnchorName, title: string, detail: string) =>
+    facts.push({ id: anchor, anchor, title, detail, tone: 'ink', finding: null, optional: true });
+  const text = (value: number, unit: 'ft' | 'in' | 'ft3') => dimensionText(value, unit, metric);
+
+  if (derived.placedFt3 !== null) {
+    add('foam', `Foam ${text(derived.placedFt3, 'ft3')} placed`, fillDetail(record, limits, metric));
+  }
+  if (derived.leastAnnulusIn !== null) {
+    add(
+      'annulus',
+      `Annulus ${text(derived.leastAnnulusIn, 'in')} at least`,
+      annulusDetail(derived.leastAnnulusIn, limits, metric),
+    );
+  }
+  if (derived.waterWithPoleIn !== null && derived.waterWithPoleIn > 0) {
+    const open = values['waterMeasured'] === 'with-pole' ? null : numberOf(values, 'waterIn');
+    const parts = [
+      open === null ? null : `${text(open, 'in')} measured open`,
+      limits.waterMostIn === undefined ? null : limitText(limits.waterMostIn, metric),
+    ];
+    add(
+      'water',
+      `Water ${text(derived.waterWithPoleIn, 'in')} with the pole in`,
+      parts.filter(Boolean).join('; '),
+    );
+  }
+  if (section.foam?.recordedTopFt !== null && section.foam) {
+    add(
+      'foam-top',
+      'Placed volume ends here',
+      `${text(section.foam.topFt, 'ft')} below grade; the top was recorded higher`,
+    );
+  }
+  if (section.rockFromFt !== null && section.rockFromFt > 0) {
+    add('rock', `Rock from ${text(section.rockFromFt, 'ft')}`, 'soil above it');
+  }
+  if (section.bed) {
+    add(
+      'bed',
+      `Bed ${text(section.bed.heightFt, 'ft')}`,
+      section.bed.material === 'native' ? 'native soil' : 'crushed stone',
+    );
+  }
+  return facts;
+}
+
+function fillDetail({ derived }: SheetRecord, limits: SheetLimits, metric: boolean): string {
+  if (derived.fillRatio === null || derived.voidFt3 === null) return 'the void cannot be computed';
+  const ratio = formatNumber(derived.fillRatio, { digits: 2, fixed: true });
+  const plusMinus =
+    derived.fillRatioU === null ? '' : ` ± ${formatNumber(derived.fillRatioU, { digits: 2, fixed: true })}`;
+  const limit =
+    limits.fillLeast === undefined
+      ? ''
+      : `, limit ${formatNumber(limits.fillLeast, { digits: 2, fixed: true })}`;
+  return `fill ratio ${ratio}${plusMinus} of void ${dimensionText(derived.voidFt3, 'ft3', metric)}${limit}`;
+}
+
+function annulusDetail(leastIn: number, { annulusLeastIn }: SheetLimits, metric: boolean): string {
+  if (annulusLeastIn === undefined) return 'between bore and pole';
+  const text = (value: number) => dimensionText(value, 'in', metric);
+  return `${limitText(annulusLeastIn, metric)}, margin\u00a0${text(leastIn - annulusLeastIn)}`;
+}
+
+function limitText(inches: number, metric: boolean): string {
+  return `limit ${formatQuantity(inches, 'in', { metric })}`.replaceAll(' ', '\u00a0');
+}
