@@ -1,5 +1,6 @@
 import { resolve } from 'node:path';
 import { installationSecret } from '#server/config/installation-secret.ts';
+import { appRoleUrl } from '#server/db/app-role-url.ts';
 import { APP_ROLE } from '#server/db/grants.ts';
 import { createReader, type Environment } from '#server/config/read-settings.ts';
 
@@ -47,9 +48,10 @@ export class ConfigError extends Error {
 
 const LEVELS = ['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'] as const;
 
-/** The same database under the application's role; without its password the owner's own address stands. */
+/** The same database under the application's role: its own sign-in with its password, else the owner's that takes the role on. */
 function asAppRole(databaseUrl: string, password: string): string {
-  if (password === '' || !URL.canParse(databaseUrl)) return databaseUrl;
+  if (!URL.canParse(databaseUrl)) return databaseUrl;
+  if (password === '') return appRoleUrl(databaseUrl);
   const url = new URL(databaseUrl);
   url.username = APP_ROLE;
   url.password = encodeURIComponent(password);

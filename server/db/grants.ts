@@ -35,6 +35,17 @@ exception when duplicate_object or unique_violation then null;
 end $$;
 `;
 
+/** So that the owner's own sign-in may take the role on, where the application has none of its own. An administrator who made the role may have to say this. */
+const MEMBER = `
+do $$
+begin
+  if not pg_has_role(current_user, '${APP_ROLE}', 'MEMBER') then
+    execute format('grant ${APP_ROLE} to %I', current_user);
+  end if;
+exception when insufficient_privilege then null;
+end $$;
+`;
+
 /** Makes the application's role if it is missing, sets its password when one is given, and gives it what it needs and no more. */
 export async function grantToApp(client: pg.Client, appPassword?: string): Promise<void> {
   try {
@@ -50,4 +61,5 @@ export async function grantToApp(client: pg.Client, appPassword?: string): Promi
     await client.query(`alter role ${APP_ROLE} login password ${client.escapeLiteral(appPassword)}`);
   }
   await client.query(GRANTS);
+  await client.query(MEMBER);
 }

@@ -44,6 +44,8 @@ export function ormOptions(url: string, options: OrmOptions = {}) {
     pool: { min: 0, max: options.max ?? 10 },
     driverOptions: {
       connection: {
+        // Whole, for what else it says: sslmode, options.
+        connectionString: url,
         application_name: options.applicationName ?? 'upstand',
         connectionTimeoutMillis: 10_000,
         keepAlive: true,

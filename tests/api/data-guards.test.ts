@@ -1,4 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { appRoleUrl } from '#server/db/app-role-url.ts';
+import { createOrm } from '#server/db/orm.ts';
 import { row, rows, run } from '#server/db/rows.ts';
 import { appendTrail } from '#server/trail/append-trail.ts';
 import { createOrganisation, createPerson } from '#tests/factories/people.ts';
@@ -79,6 +81,14 @@ describe('the role of the application', () => {
     'set role upstand',
   ])('is refused: %s', async (statement) => {
     await expect(run(data.orm.em.fork(), statement)).rejects.toMatchObject({ code: '42501' });
+  });
+
+  it('is taken on by the owner’s sign-in where it has none of its own', async () => {
+    const orm = await createOrm(appRoleUrl(data.database.ownerUrl), { max: 1 });
+    const em = orm.em.fork();
+    expect(await row(em, 'select current_user as who')).toEqual({ who: 'upstand_app' });
+    await expect(run(em, 'delete from trail')).rejects.toMatchObject({ code: '42501' });
+    await orm.close(true);
   });
 
   it('adds to them', async () => {
