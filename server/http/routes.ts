@@ -2,10 +2,12 @@ import type { Route } from '#server/http/define-route.ts';
 import { batchRoutes } from '#server/modules/batches/routes.ts';
 import { healthRoutes } from '#server/modules/health/routes.ts';
 import { homeRoutes } from '#server/modules/home/routes.ts';
+import { lotRoutes } from '#server/modules/lots/routes.ts';
 import { openapiRoutes } from '#server/modules/openapi/routes.ts';
 import { organisationRoutes } from '#server/modules/organisations/routes.ts';
 import { peopleRoutes } from '#server/modules/people/routes.ts';
 import { photoRoutes } from '#server/modules/photos/routes.ts';
+import { productRoutes } from '#server/modules/products/routes.ts';
 import { recordRoutes } from '#server/modules/records/routes.ts';
 import { sessionRoutes } from '#server/modules/session/routes.ts';
 import { concessionRoutes } from '#server/modules/concessions/routes.ts';
@@ -28,6 +30,8 @@ export const ROUTES: readonly Route[] = [
   ...batchRoutes,
   ...photoRoutes,
   ...recordRoutes,
+  ...lotRoutes,
+  ...productRoutes,
   ...reviewRoutes,
   ...concessionRoutes,
   ...registerRoutes,

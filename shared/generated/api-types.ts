@@ -202,6 +202,41 @@ export interface Concession {
   can: string[];
 }
 /**
+ * A new lot of a product.
+ */
+export interface CreateLotBody {
+  productId: string;
+  number: string;
+  expiresOn?: string | null;
+}
+/**
+ * A new work order with its design list.
+ */
+export interface CreateWorkOrderBody {
+  number: string;
+  title: string;
+  contractorId: string;
+  zone: string;
+  batchPrefix?: string;
+  /**
+   * @minItems 1
+   * @maxItems 5000
+   */
+  structures: {
+    structureNumber: string;
+    kind: 'set' | 'straighten' | 'relevel';
+    design: {
+      poleLengthFt?: number | null;
+      poleClass?: string | null;
+      poleMaterial?: string | null;
+      ground?: string | null;
+      embedmentFt?: number | null;
+      latitude?: number | null;
+      longitude?: number | null;
+    };
+  }[];
+}
+/**
  * Figures computed from a record. Null: cannot be computed from what is there.
  */
 export interface Derived {
@@ -330,6 +365,39 @@ export interface LineDecision {
   at: string;
 }
 /**
+ * A lot with what happened to it and every structure it went into.
+ */
+export interface LotDetail {
+  id: string;
+  number: string;
+  product: {
+    id: string;
+    code: string;
+  };
+  expiresOn: string | null;
+  status: 'in-use' | 'held' | 'recalled';
+  receivedFt3: number;
+  usedFt3: number;
+  balanceFt3: number;
+  structures: number;
+  version: number;
+  can: string[];
+  events: LotEvent[];
+  uses: {
+    recordId: string;
+    structureNumber: string;
+    kind: 'set' | 'straighten' | 'relevel';
+    state: 'undecided' | 'approved' | 'returned' | 'held' | 'on-record' | 'abandoned';
+    workDay: string | null;
+    batch: {
+      id: string;
+      number: string;
+    };
+    contractor: NamedRef;
+    usedFt3: number | null;
+  }[];
+}
+/**
  * What happened to a lot.
  */
 export interface LotEvent {
@@ -340,6 +408,15 @@ export interface LotEvent {
   reason: string | null;
   at: string;
   by: string;
+}
+/**
+ * Kits received of a lot, or the lot held, released or recalled.
+ */
+export interface LotEventBody {
+  type: 'received' | 'held' | 'released' | 'recalled';
+  kitFt3?: number | null;
+  quantity?: number | null;
+  reason?: string | null;
 }
 /**
  * A maker's batch of kits.

@@ -1,9 +1,9 @@
 import { randomInt } from 'node:crypto';
-import sharp from 'sharp';
+import sharp, { type Exif } from 'sharp';
 
 /** A small JPEG that no other is alike byte for byte. */
 export function photograph(
-  options: { width?: number; height?: number; exif?: sharp.Exif } = {},
+  options: { width?: number; height?: number; exif?: Exif } = {},
 ): Promise<Buffer> {
   const { width = 64, height = 48, exif } = options;
   const picture = sharp({
