@@ -42,14 +42,16 @@ export async function streamWorkbook(
   fill: (writer: Writer) => void | Promise<void>,
 ): Promise<void> {
   const stream = typeof target === 'string' ? createWriteStream(target) : target;
-  const failed = new Promise<never>((_, reject) => stream.once('error', reject));
-  const closed = new Promise<never>((_, reject) =>
+  const broken = new Promise<never>((_, reject) => {
+    stream.once('error', reject);
     stream.once('close', () => {
       // A target that took all of it may close before the writer hears so.
       if (!stream.writableFinished)
         reject(new Error('The target of the workbook was closed before it was written.'));
-    }),
-  );
+    });
+  });
+  // Heard below; not, should filling fail at once.
+  broken.catch(() => undefined);
   const writer = new ExcelJS.stream.xlsx.WorkbookWriter({
     stream,
     useStyles: true,
@@ -60,6 +62,9 @@ export async function streamWorkbook(
   writer.title = options.title;
   writer.keywords = options.keywords;
   if (options.at) writer.created = writer.modified = options.at;
-  const written = Promise.resolve(fill(writer)).then(() => writer.commit());
-  await Promise.race([written, failed, closed]);
+  const write = async (): Promise<void> => {
+    await fill(writer);
+    await writer.commit();
+  };
+  await Promise.race([write(), broken]);
 }

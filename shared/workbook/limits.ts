@@ -13,10 +13,10 @@ export const READER_LIMITS = {
   ratioFromBytes: 5_000_000,
   sheets: 250,
   rows: 200_000,
-  cells: 1_000_000,
+  cells: 600_000,
   sharedStrings: 500_000,
   /** Characters of the table of shared strings, and of all cells handed on (a string used twice counts twice). */
-  characters: 40_000_000,
+  characters: 20_000_000,
   /** Characters of one cell; Excel itself allows 32,767. */
   cellCharacters: 100_000,
   mergedRanges: 50_000,

@@ -12,13 +12,13 @@ const DOCUMENTS: Readonly<Record<string, string>> = {
 
 type Params = RefusalParams;
 
-const at = (params: Params): string =>
-  params['sheet'] === undefined
-    ? ''
-    : ` at ${String(params['address'] ?? '')} of sheet “${String(params['sheet'])}”`.replace(
-        ' at  of',
-        ' in',
-      );
+/** Where in the workbook it is, as far as it is known. */
+function at({ sheet, address }: Params): string {
+  if (sheet === undefined) return '';
+  return address === undefined
+    ? ` in sheet “${String(sheet)}”`
+    : ` at ${String(address)} of sheet “${String(sheet)}”`;
+}
 
 const SENTENCES: Readonly<Record<RefusalCode, (params: Params) => string>> = {
   'empty-file': () =>

@@ -76,7 +76,7 @@ export function readCell(
   }
   const word = wordOf(cell.raw, field.words);
   if (word !== null) return value(word);
-  const missing = wordOf(cell.raw, MISSING_WORDS);
-  if (missing !== null && field.read !== 'text') return unreadable('word', { word: missing });
+  const missing = field.read === 'text' ? null : wordOf(cell.raw, MISSING_WORDS);
+  if (missing !== null) return unreadable('word', { word: missing });
   return readTextCell(cell, field, date1904);
 }

@@ -1,10 +1,20 @@
 import { bareWord, trimText } from './clean-text.ts';
 import { type Reading, unreadable, value } from './reading.ts';
 
+/** Bare forms of each list of words, made once a list: a batch asks for them a hundred thousand times. */
+const bareForms = new WeakMap<readonly string[], ReadonlyMap<string, string>>();
+
+function formsOf(words: readonly string[]): ReadonlyMap<string, string> {
+  const held = bareForms.get(words);
+  if (held !== undefined) return held;
+  const made = new Map(words.map((word) => [bareWord(word), word]));
+  bareForms.set(words, made);
+  return made;
+}
+
 /** The word-code that a text means, as `Not by us` means `not-by-us`; null when it is none of them. */
 export function wordOf(text: string, words: readonly string[]): string | null {
-  const bare = bareWord(text);
-  return words.find((word) => bareWord(word) === bare) ?? null;
+  return words.length === 0 ? null : (formsOf(words).get(bareWord(text)) ?? null);
 }
 
 /** Words that stand for a missing value somewhere in the workbook, whether or not this column takes them. */

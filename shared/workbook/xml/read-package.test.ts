@@ -168,7 +168,7 @@ describe('the package', () => {
     const utf16 = Uint8Array.from([
       0xff,
       0xfe,
-      ...[...xml].flatMap((sign) => [sign.charCodeAt(0) & 255, sign.charCodeAt(0) >> 8]),
+      ...Array.from(xml).flatMap((sign) => [sign.charCodeAt(0) & 255, sign.charCodeAt(0) >> 8]),
     ]);
     expect(await readCells('', { 'xl/worksheets/sheet1.xml': utf16 })).toEqual([['A1', 'text', 'Ø½']]);
     const broken = Uint8Array.from([...new TextEncoder().encode('<worksheet>'), 0xff, 0xfe]);
