@@ -1,3 +1,4 @@
+import type { Severity } from '#shared/findings/types.ts';
 import { RECORD_FIELDS } from '#shared/records/field-meta.ts';
 import { conditionOf } from '#shared/records/conditions.ts';
 import { expectedParams, type RecordIssue } from '#shared/records/record-issue.ts';
@@ -25,10 +26,10 @@ export const duplicateEvent = (row: CleanRow): RecordIssue => ({
 });
 
 /** An event or a photograph of a structure that has no line here. A photograph may still be placed by hand. */
-export const orphanRow = (row: CleanRow): RecordIssue => ({
+export const orphanRow = (row: CleanRow, severity?: Severity): RecordIssue => ({
   ...plain,
   code: 'record-orphan',
-  ...(row.values['fileName'] === undefined ? {} : { severity: 'note' as const }),
+  ...(severity ? { severity } : {}),
   field: 'structureNumber',
   measured: row.values['structureNumber'] ?? null,
   params: STRUCTURE,

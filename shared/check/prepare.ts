@@ -1,6 +1,7 @@
 import { byText, canonical } from '#shared/records/canonical.ts';
 import { cleanRow, type CleanRow } from '#shared/records/clean-row.ts';
 import { linkRows, type LinkTarget } from '#shared/records/link-rows.ts';
+import { rowContent } from '#shared/records/row-content.ts';
 import { occurrences } from '#shared/records/occurrences.ts';
 import type { SourceBatch } from '#shared/records/types.ts';
 import { clockFields } from '#shared/rules/clock-chain.ts';
@@ -21,7 +22,10 @@ const contentOrder = (rows: readonly CleanRow[]): CleanRow[] => {
   const keys = new Map(
     rows.map((row) => {
       const { event = 1, pourNumber } = row.values;
-      return [row, `${numberText(event)} ${numberText(pourNumber)} ${canonical(row.values)}`];
+      return [
+        row,
+        `${numberText(event)} ${numberText(pourNumber)} ${canonical(row.values)} ${rowContent(row.source)}`,
+      ];
     }),
   );
   return rows.toSorted((a, b) => byText(keys.get(a) ?? '', keys.get(b) ?? ''));
@@ -91,8 +95,11 @@ export const prepare = (source: SourceBatch, context: CheckContext, clock: Clock
   for (const row of [batch, ...pourRows, ...eventRows, ...photoRows]) issues.push(...place(row));
   for (const { row } of [...pours.ambiguous, ...events.ambiguous])
     issues.push({ issue: ambiguousKind(row), row, line: null, part: rowPart(row) });
-  const strays = [...events.orphans, ...photos.orphans].filter((row) => !isSibling(context, row));
-  issues.push(...strays.map((row) => ({ issue: orphanRow(row), row, line: null, part: rowPart(row) })));
+  const strays = [
+    ...events.orphans.map((row) => ({ row, issue: orphanRow(row) })),
+    ...photos.orphans.map((row) => ({ row, issue: orphanRow(row, 'note') })),
+  ].filter(({ row }) => !isSibling(context, row));
+  issues.push(...strays.map(({ row, issue }) => ({ issue, row, line: null, part: rowPart(row) })));
 
   return {
     batch,

@@ -22,9 +22,9 @@ export type Found = {
   readonly part?: string;
 };
 
-/** A number that JSON can carry; null for what is none. */
+/** A number that JSON can carry (no minus zero either); null for what is none. */
 const finite = (value: number | null | undefined): number | null =>
-  typeof value === 'number' && Number.isFinite(value) ? value : null;
+  typeof value === 'number' && Number.isFinite(value) ? value + 0 : null;
 
 const told = (value: Scalar | undefined): number | string | null => {
   if (typeof value === 'number') return finite(value);
@@ -54,7 +54,7 @@ export const toFinding = (found: Found, cellOf: CellFinder): Finding => {
     ownerParams: found.ownerParams ?? {},
     fingerprint: fingerprint([
       code,
-      line?.kind,
+      line?.kind ?? source.sheet,
       line && structureKey(line.structureNumber),
       line?.occurrence,
       field,

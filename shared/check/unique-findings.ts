@@ -1,8 +1,8 @@
 import { byText, canonical } from '#shared/records/canonical.ts';
 import type { Finding } from '#shared/findings/types.ts';
 
-/** What a finding says, its place in the workbook apart. */
-const content = ({ row: _row, cell: _cell, sheet: _sheet, ...rest }: Finding): string => canonical(rest);
+/** What a finding says, its row apart. */
+const content = ({ row: _row, cell: _cell, ...rest }: Finding): string => canonical(rest);
 
 /** Findings that are the same in all but their row get numbers, in an order that rows have no say in. */
 export const uniqueFindings = (findings: readonly Finding[]): readonly Finding[] => {

@@ -65,7 +65,8 @@ export const cleanRow = (source: SourceRow, record: RecordName): CleanRow => {
   for (const [field, meta] of fields) {
     const value: unknown = Object.hasOwn(source.values, field) ? source.values[field] : null;
     if (broken.has(field) || value === null || value === undefined || value === '') continue;
-    if (isScalar(value)) values[field] = value;
+    // Minus zero is zero, and JSON would lose its sign.
+    if (isScalar(value)) values[field] = value === 0 ? 0 : value;
     else {
       broken.add(field);
       issues.push({

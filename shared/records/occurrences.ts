@@ -1,4 +1,5 @@
-import { byText, canonical } from './canonical.ts';
+import { byText } from './canonical.ts';
+import { rowContent } from './row-content.ts';
 import { kindKey } from './structure-key.ts';
 import type { SourceLine } from './types.ts';
 import { WORK_TIME } from './work-day.ts';
@@ -28,6 +29,5 @@ export const occurrences = (lines: readonly SourceLine[]): ReadonlyMap<SourceLin
 
 const sortKey = (line: SourceLine): string => {
   const at = line.values[WORK_TIME[line.kind]];
-  const raw = Object.fromEntries(Object.entries(line.cells).map(([field, cell]) => [field, cell.raw]));
-  return `${typeof at === 'string' ? at : '~'} ${canonical(line.values)} ${canonical(raw)}`;
+  return `${typeof at === 'string' ? at : '~'} ${rowContent(line)}`;
 };
