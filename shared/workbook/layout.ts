@@ -38,8 +38,12 @@ export const TEMPLATE_VERSIONS: readonly string[] = [v1.version, v2.version];
 
 export const HEADER_ROWS = { keys: 1, titles: 2, hints: 3, data: 4 } as const;
 
+const LONGEST_HEADING = 300;
+
 /** A heading as it is compared: without its unit in brackets, marks of required columns, case and spacing. */
 export function nameKey(heading: string): string {
+  // Whatever is longer is no heading of ours, and its brackets need not be looked for.
+  if (heading.length > LONGEST_HEADING) return '';
   return heading
     .replace(/\([^()]*\)\s*\*?\s*$/, '')
     .toLowerCase()

@@ -253,6 +253,16 @@ describe('cells that are no plain value', () => {
   });
 });
 
+describe('texts beyond all measure', () => {
+  it('are refused at once where a measure is expected, kept where a text is', () => {
+    const long = `(${' '.repeat(100_000)}1'`;
+    expect(read(long, FEET)).toBe('length');
+    expect(read(`1${' 1'.repeat(50_000)}`, field('clock'))).toBe('clock');
+    expect(read('9'.repeat(90_000), COUNT)).toBe('number');
+    expect(read('x'.repeat(90_000), TEXT)).toBe('x'.repeat(90_000));
+  });
+});
+
 describe('times', () => {
   const CLOCK = field('clock');
   const DAY = field('day');

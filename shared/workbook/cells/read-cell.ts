@@ -5,7 +5,7 @@ import { readDegrees } from './read-degrees.ts';
 import { readLengthFt, readLengthIn } from './read-length.ts';
 import { readQuantity } from './read-quantity.ts';
 import { MISSING_WORDS, numberAsText, readCode, readText, wordOf } from './read-words.ts';
-import { type ReadField, type Reading, unreadable, value } from './reading.ts';
+import { type ReadField, type Reading, type Unreadable, unreadable, value } from './reading.ts';
 
 const isTime = (field: ReadField): boolean => field.read === 'clock' || field.read === 'day';
 const isWritten = (field: ReadField): boolean => field.read === 'text' || field.read === 'code';
@@ -27,6 +27,18 @@ function readNumberCell(cell: Cell, field: ReadField, date1904: boolean): Readin
   return readCode(String(text.value), field.allowed ?? []);
 }
 
+/** No measure, time or code is longer; a stranger's megabyte of text is not worth a pattern's time. */
+const LONGEST_MEASURE = 200;
+
+const NO_SUCH: Readonly<Record<string, Unreadable>> = {
+  clock: 'clock',
+  day: 'day',
+  'length-ft': 'length',
+  'length-in': 'length',
+  degrees: 'degrees',
+  'temperature-f': 'temperature',
+};
+
 function readTextCell(cell: Cell, field: ReadField, date1904: boolean): Reading {
   switch (field.read) {
     case 'clock':
@@ -44,13 +56,10 @@ function readTextCell(cell: Cell, field: ReadField, date1904: boolean): Reading 
       const none = 'problem' in reading && reading.problem.params['why'] === 'number';
       return none ? unreadable('temperature') : reading;
     }
-    case 'number':
-    case 'integer':
-      return whole(field, readQuantity(cell.raw, field.unit));
     case 'code':
       return readCode(cell.raw, field.allowed ?? []);
     default:
-      return readText(cell.raw);
+      return whole(field, readQuantity(cell.raw, field.unit));
   }
 }
 
@@ -74,9 +83,11 @@ export function readCell(
   if (cell.kind === 'date' && !isTime(field)) {
     return unreadable(isWritten(field) ? 'date-for-text' : 'date-for-number');
   }
+  if (field.read === 'text') return readText(cell.raw);
+  if (trimText(cell.raw).length > LONGEST_MEASURE) return unreadable(NO_SUCH[field.read] ?? 'number');
   const word = wordOf(cell.raw, field.words);
   if (word !== null) return value(word);
-  const missing = field.read === 'text' ? null : wordOf(cell.raw, MISSING_WORDS);
+  const missing = wordOf(cell.raw, MISSING_WORDS);
   if (missing !== null) return unreadable('word', { word: missing });
   return readTextCell(cell, field, date1904);
 }

@@ -6,7 +6,7 @@ import type { Scalar } from '#shared/records/types.ts';
  * number, length, clock, day, degrees, temperature: no such value; separators: decimal comma or mixed marks; fraction: no proper fraction;
  * whole: not whole; boolean: TRUE or FALSE; date-for-number, date-for-text: the program made a date of it; time-only, day-only: half a date-time;
  * no-such-day: 30 February; inches: 12 or more beside feet; hemisphere: N, S, E or W that contradicts the column or the sign; digits-lost: more digits than the program keeps;
- * word: a word that this column does not take; long: more text than a cell of the record holds.
+ * word: a word that this column does not take.
  */
 export const UNREADABLE = [
   'number',
