@@ -2,9 +2,7 @@ import { randomInt } from 'node:crypto';
 import sharp, { type Exif } from 'sharp';
 
 /** A small JPEG that no other is alike byte for byte. */
-export function photograph(
-  options: { width?: number; height?: number; exif?: Exif } = {},
-): Promise<Buffer> {
+export function photograph(options: { width?: number; height?: number; exif?: Exif } = {}): Promise<Buffer> {
   const { width = 64, height = 48, exif } = options;
   const picture = sharp({
     create: {

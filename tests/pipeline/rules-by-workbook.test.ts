@@ -1,0 +1,125 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { FindingRow } from '#shared/generated/api-types.ts';
+import { createLot } from '#tests/factories/foam.ts';
+import { startBatch, uploadPhotographs, uploadWorkbook } from '#tests/factories/start-batch.ts';
+import { pourRow, pourRows, SET_VIEWS, setRow } from '#tests/factories/set-row.ts';
+import { createWorkSite } from '#tests/factories/work-site.ts';
+import { createHarness, type Harness } from '#tests/setup/api-harness.ts';
+import { LOT, poursOf, RULE_CASES, rowOf, type Expected } from './rule-cases.ts';
+
+const CASES = RULE_CASES.map((one, index) => ({ ...one, bad: `F-${index + 1}`, good: `P-${index + 1}` }));
+const TWICE = 'T-1';
+const UNPLANNED = 'U-1';
+const PHOTOGRAPHED = 'V-1';
+const PARTLY = 'V-2';
+
+let harness: Harness;
+let findings: FindingRow[];
+const on = (structure: string) => findings.filter((one) => one.structureNumber === structure);
+/** Photographs are handed in for two lines only; each other line lacks its four. */
+const codesOn = (structure: string) =>
+  on(structure).flatMap((one) => (one.code === 'photo-missing' ? [] : [one.code]));
+
+/** A ratio is worked out to four places. */
+const near = (expected: Expected) =>
+  Object.fromEntries(
+    Object.entries(expected).map(([key, value]) => [
+      key,
+      typeof value === 'number' ? expect.closeTo(value, 4) : value,
+    ]),
+  );
+
+beforeAll(async () => {
+  harness = await createHarness();
+  const numbers = [...CASES.flatMap(({ bad, good }) => [bad, good]), TWICE, PHOTOGRAPHED, PARTLY];
+  const site = await createWorkSite(harness, { planned: numbers });
+  await createLot(harness.em(), { productId: site.product.id, number: LOT });
+  const contractor = await harness.signIn(site.contractor);
+  const batch = await startBatch(contractor, site);
+  await uploadPhotographs(contractor, batch, [
+    ...SET_VIEWS.map((view) => `${PHOTOGRAPHED} ${view}.jpg`),
+    ...SET_VIEWS.filter((view) => view !== 'plumb').map((view) => `${PARTLY} ${view}.jpg`),
+  ]);
+  await uploadWorkbook(harness, contractor, {
+    batch,
+    site,
+    workbook: {
+      set: [
+        ...CASES.flatMap(({ bad, good, fails, passes }) => [rowOf(bad, fails), rowOf(good, passes)]),
+        setRow(TWICE),
+        setRow(TWICE, { setAt: '2026-04-14T09:45' }),
+        setRow(UNPLANNED),
+        setRow(PHOTOGRAPHED),
+        setRow(PARTLY),
+      ],
+      pours: [
+        ...CASES.flatMap(({ bad, good, fails, passes }) => [
+          ...poursOf(bad, fails),
+          ...poursOf(good, passes),
+        ]),
+        ...[TWICE, UNPLANNED, PHOTOGRAPHED, PARTLY].flatMap((structure) => pourRows(structure, LOT)),
+        pourRow('X-404', LOT),
+      ],
+    },
+  });
+  findings = [];
+  for (let cursor: string | null = ''; cursor !== null;) {
+    const query: string = cursor === '' ? '' : `&cursor=${cursor}`;
+    const page = await contractor.get(`${batch.path}/findings?limit=200${query}`);
+    findings.push(...page.body.items);
+    cursor = page.body.nextCursor;
+  }
+}, 120_000);
+afterAll(() => harness.close());
+
+describe('every rule through an uploaded workbook', () => {
+  it.each(CASES)('$code is found where it is not met, and alone', ({ code, bad, fails }) => {
+    expect(codesOn(bad)).toEqual([code]);
+    const [found] = on(bad).filter((one) => one.code === code);
+    expect(found).toMatchObject({ severity: 'nonconformity', ...near(fails.expected) });
+  });
+
+  it.each(CASES)('$code is not found where it is met', ({ good }) => {
+    expect(codesOn(good)).toEqual([]);
+  });
+
+  it('pour-orphan: a pour of a structure without a line belongs to the batch', () => {
+    expect(findings.filter((one) => one.code === 'pour-orphan')).toMatchObject([
+      {
+        recordId: null,
+        severity: 'nonconformity',
+        sheet: 'Pours',
+        measured: 'X-404',
+        limit: null,
+        margin: null,
+      },
+    ]);
+  });
+
+  it('not-on-order: a structure that is not planned, and none that is', () => {
+    expect(codesOn(UNPLANNED)).toEqual(['not-on-order']);
+    expect(findings.filter((one) => one.code === 'not-on-order')).toMatchObject([{ measured: UNPLANNED }]);
+  });
+
+  it('done-twice: the second line of a structure', () => {
+    // Two lines where one may be: 1 − 2 = −1.
+    expect(findings.filter((one) => one.code === 'done-twice')).toMatchObject([
+      { structureNumber: TWICE, measured: 2, limit: 1, margin: -1, unit: 'count' },
+    ]);
+  });
+
+  it('photo-missing: the one view that is lacking, and none where all are there', () => {
+    expect(on(PARTLY).map((one) => [one.code, one.limit])).toEqual([['photo-missing', 'plumb']]);
+    expect(on(PHOTOGRAPHED)).toEqual([]);
+    // Nothing recorded in the way of water asks for no picture of it.
+    expect(new Set(on('P-1').map((one) => one.limit))).toEqual(new Set(SET_VIEWS));
+  });
+
+  it('says each in words, with its remedy', () => {
+    for (const one of findings) {
+      expect(one.title).not.toBe('Finding');
+      expect(one.message).toMatch(/^\S.*[.!?]$/u);
+      expect(one.remedy).toMatch(/^\S.*\.$/u);
+    }
+  });
+});
