@@ -7,7 +7,7 @@ import { runAttempt } from '#server/jobs/run-attempt.ts';
 
 /** A notification wakes a loop at once; this only catches what one missed, and jobs whose pause is over. */
 const POLL_MS = 2_000;
-const CHORES_MS = 10_000;
+const CHORES_MS = 5_000;
 const GRACE_MS = 10_000;
 
 export type Worker = { stop(): Promise<void> };
