@@ -1,7 +1,8 @@
 import type { FieldFault, RecordName } from '#shared/generated/validators.mjs';
 import { validateRecord } from '#shared/generated/validators.mjs';
-import { ALTERNATIVE, conditionOf } from './conditions.ts';
-import { RECORD_FIELDS, type FieldMeta } from './field-meta.ts';
+import { ALTERNATIVE } from './conditions.ts';
+import { faultIssue } from './fault-issue.ts';
+import { RECORD_FIELDS } from './field-meta.ts';
 import { problemIssue } from './problem-issue.ts';
 import { expectedParams, type RecordIssue } from './record-issue.ts';
 import type { FieldValues, Scalar, SourceRow } from './types.ts';
@@ -15,7 +16,6 @@ export type CleanRow = {
   readonly issues: readonly RecordIssue[];
 };
 
-const RANGE: ReadonlySet<string> = new Set(['minimum', 'exclusiveMinimum', 'maximum', 'exclusiveMaximum']);
 /** Fields that choose the row of the class table: an unreadable one explains why the pole is not in it. */
 const CLASS_TABLE_FIELDS = ['poleLengthFt', 'poleClass', 'poleMaterial'] as const;
 
@@ -23,38 +23,6 @@ const isScalar = (value: unknown): value is Scalar =>
   typeof value === 'string' ||
   typeof value === 'boolean' ||
   (typeof value === 'number' && Number.isFinite(value));
-
-const faultIssue = (fault: FieldFault, field: string, meta: FieldMeta, value: Scalar): RecordIssue => {
-  const params = expectedParams(meta);
-  const plain = { field, measured: value, limit: null, margin: null, unit: null, params };
-  if (fault.keyword === 'required' || fault.keyword === 'dependentRequired') {
-    if (meta.required) return { ...plain, code: 'record-missing' };
-    const condition = conditionOf(field, fault.params['because']);
-    return { ...plain, code: 'record-conditional', params: { ...params, condition } };
-  }
-  if (RANGE.has(fault.keyword) && typeof value === 'number') {
-    const limit = Number(fault.params['limit']);
-    const least = fault.keyword === 'minimum' || fault.keyword === 'exclusiveMinimum';
-    const margin = least ? value - limit : limit - value;
-    const other = fault.params['of'];
-    const bound = typeof other === 'string' ? { ...params, of: other } : params;
-    return { ...plain, code: 'record-range', limit, margin, unit: meta.unit, params: bound };
-  }
-  if (fault.keyword === 'enum' || fault.keyword === 'const') {
-    // A code that is allowed as such does not go with the rest of the row.
-    if (typeof value === 'string' && meta.allowed?.includes(value) === true)
-      return {
-        ...plain,
-        code: 'record-conditional',
-        params: { ...params, condition: conditionOf(field, null) },
-      };
-    return { ...plain, code: 'record-code' };
-  }
-  if (fault.keyword === 'pattern') return { ...plain, code: 'record-unreadable' };
-  if (fault.keyword === 'maxLength' || fault.keyword === 'minLength')
-    return { ...plain, code: 'record-length' };
-  return { ...plain, code: 'record-type' };
-};
 
 /** Takes a row's values to what its schema allows. Total: whatever stands in the row, nothing is thrown. */
 export const cleanRow = (source: SourceRow, record: RecordName): CleanRow => {

@@ -19,8 +19,8 @@ describe('registry', () => {
   });
 
   it.each(folders)('%s has rule, test and README', (folder) => {
-    for (const file of ['rule.ts', 'rule.test.ts', 'README.md'])
-      expect(existsSync(new URL(`${folder}/${file}`, HERE)), file).toBe(true);
+    const files = ['rule.ts', 'rule.test.ts', 'README.md'];
+    expect(files.filter((file) => !existsSync(new URL(`${folder}/${file}`, HERE)))).toEqual([]);
     const readme = readFileSync(new URL(`${folder}/README.md`, HERE), 'utf8');
     for (const part of ['## What', '## Why', '## Source']) expect(readme).toContain(part);
   });

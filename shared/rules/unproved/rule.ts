@@ -16,7 +16,7 @@ export const unprovedRule: LineRule = {
   message: ({ params, measured }) =>
     measured === null
       ? `${say(params['title'], null)} was left blank, so what depends on it is not proven.`
-      : `${say(params['title'], null)} says "${say(measured, null)}", so what depends on it is not proven.`,
+      : `${say(params['title'], null)} says "${say(measured, null).replaceAll('-', ' ')}", so what depends on it is not proven.`,
   remedy: () =>
     'Fill it in if it is known; otherwise answer how it is otherwise known that the work is right.',
 };
