@@ -2,7 +2,8 @@ import { Arrow } from './arrow.tsx';
 import { Balloon } from './balloon.tsx';
 import { RunText } from './run-text.tsx';
 import { STROKE } from './sheet-classes.ts';
-import type { AcrossDimension, DownDimension, DueTick } from './set-dimensions.ts';
+import type { DownDimension } from './down-dimension.ts';
+import type { AcrossDimension, DueTick } from './set-dimensions.ts';
 import { BALLOON_R } from './sheet-spec.ts';
 
 const EXTENSION = 'stroke-ink-2';

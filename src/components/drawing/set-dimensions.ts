@@ -1,10 +1,11 @@
 import { positiveOf } from '#shared/calc/values.ts';
 import type { FieldValues } from '#shared/records/types.ts';
+import { downDimension, type DownDimension } from './down-dimension.ts';
 import { crossText, dimensionText } from './dimension-text.ts';
 import { round, type SetGeometry } from './set-geometry.ts';
 import type { SetSection } from './set-section.ts';
-import { BALLOON_R, FONT, type SheetSpec } from './sheet-spec.ts';
-import { toneOf, type Run, type SheetFinding, type Tone } from './sheet-types.ts';
+import { FONT, type SheetSpec } from './sheet-spec.ts';
+import type { Run, SheetFinding, Tone } from './sheet-types.ts';
 import { textWidth } from './text-width.ts';
 
 /** A dimension across: extension lines from `fromY`, the line at `y`, its words at one side. */
@@ -20,21 +21,6 @@ export type AcrossDimension = {
   readonly runs: readonly Run[];
   /** The pole stands in front of the line. */
   readonly gap: readonly [number, number] | null;
-};
-
-/** A dimension down the left side, its words along it. */
-export type DownDimension = {
-  readonly id: string;
-  readonly x: number;
-  readonly y1: number;
-  readonly y2: number;
-  /** Where the extension lines end, at the section. */
-  readonly toX1: number;
-  readonly toX2: number;
-  readonly textY: number;
-  readonly runs: readonly Run[];
-  readonly tone: Tone;
-  readonly balloon: { readonly finding: SheetFinding; readonly y: number } | null;
 };
 
 export type DueTick = {
@@ -87,8 +73,11 @@ function topDimension({ geometry, values, metric, spec }: Input): AcrossDimensio
       x2: bore.right,
       fromY: Math.min(geometry.groundAt(bore.left), geometry.groundAt(bore.right)) - 7,
       textAt: 'left',
-      textX: bore.left - 16,
-      runs: width(spec.compact ? '' : 'bore, top', [topIn, across ?? topIn], metric),
+      textX: bore.left - (spec.compact ? 9 : 16),
+      runs: fitting(
+        width('bore, top', [topIn, across ?? topIn], metric),
+        bore.left - (spec.compact ? 14 : 24),
+      ),
       gap: pole ? [pole.left - 4, pole.right + 4] : null,
     },
   ];
@@ -99,6 +88,12 @@ function width(word: string, axes: readonly [number, number], metric: boolean): 
     ...(word === '' ? [] : [{ text: `${word} `, tone: 'muted' as const }]),
     { text: crossText(axes, metric), bold: true },
   ];
+}
+
+/** The words go first where there is no room: the figure stands above the bore that it measures. */
+function fitting(runs: Run[], room: number): Run[] {
+  const wide = runs.reduce((sum, run) => sum + textWidth(run.text, FONT, run.bold), 0) > room;
+  return wide ? runs.filter((run) => run.bold) : runs;
 }
 
 function bottomDimensions(
@@ -167,10 +162,12 @@ function downDimensions(input: Input): DownDimension[] {
   const both = hasBoreDepth(section) && section.embedmentFt !== null;
   if (section.embedmentFt !== null) {
     dimensions.push(
-      down(input, {
+      downDimension({
         id: 'embedment',
         x: embedmentX(section, spec),
-        toFt: section.embedmentFt,
+        y1: spec.groundY,
+        y2: geometry.y(section.embedmentFt),
+        toX1: spec.hatch.left - 26,
         toX2: (pole?.buttLeft ?? spec.axisX) - 8,
         value: dimensionText(section.embedmentFt, 'ft', metric),
         word: 'embedment',
@@ -180,10 +177,12 @@ function downDimensions(input: Input): DownDimension[] {
   }
   if (hasBoreDepth(section) && section.bore && bore) {
     dimensions.push(
-      down(input, {
+      downDimension({
         id: 'bore-depth',
         x: both ? spec.dimensionX - spec.dimensionStep : spec.dimensionX,
-        toFt: section.bore.depthFt,
+        y1: spec.groundY,
+        y2: geometry.y(section.bore.depthFt),
+        toX1: spec.hatch.left - 26,
         toX2: bore.bottomLeft - 4,
         value: dimensionText(section.bore.depthFt, 'ft', metric),
         word: 'bore',
@@ -203,54 +202,20 @@ function embedmentX(section: SetSection, spec: SheetSpec): number {
   return hasBoreDepth(section) ? spec.dimensionX + spec.dimensionStep : spec.dimensionX;
 }
 
-type Down = {
-  id: string;
-  x: number;
-  toFt: number;
-  toX2: number;
-  value: string;
-  word: string;
-  finding: SheetFinding | null;
-};
-
-/** Words above, balloon below them, both within the line. */
-function down({ geometry, spec }: Input, { id, x, toFt, toX2, value, word, finding }: Down): DownDimension {
-  const y1 = spec.groundY;
-  const y2 = geometry.y(toFt);
-  const tone = finding ? toneOf(finding) : 'ink';
-  const length = textWidth(value, FONT, true) + textWidth(` ${word}`, FONT);
-  const balloonRoom = finding ? 2 * BALLOON_R + 16 : 0;
-  const start = y1 + Math.max(4, (y2 - y1 - length - balloonRoom) / 2);
-  return {
-    id,
-    x,
-    y1,
-    y2,
-    toX1: spec.hatch.left - 26,
-    toX2,
-    textY: round(start + length / 2),
-    runs: [
-      { text: value, bold: true, tone },
-      { text: ` ${word}`, tone: 'muted' },
-    ],
-    tone,
-    balloon: finding ? { finding, y: round(start + length + 16 + BALLOON_R) } : null,
-  };
-}
-
-function dueTick({ section, geometry, spec, metric }: Input): DueTick | null {
+function dueTick({ section, geometry, spec, metric, findings }: Input): DueTick | null {
   const { dueFt, embedmentFt } = section;
   if (dueFt === null) return null;
   const y = round(geometry.y(dueFt));
   const text = `due ${dimensionText(dueFt, 'ft', metric)}`;
   const short = embedmentFt !== null && embedmentFt < dueFt - 1e-9;
+  const onLine = findings.some((one) => one.field === 'embedmentFt');
   const x = embedmentX(section, spec);
   // Short: below everything, as what is lacking. Else beside the line, above the tick.
   return {
     x1: x - 17,
     x2: short ? x + 38 : x + 14,
     y,
-    textX: short ? x - 17 : x + 7,
+    textX: short ? x - 17 : x + (onLine ? 18 : 7),
     textY: short ? y + 17 : y - 6,
     text,
     tone: short ? 'nonconform' : 'muted',

@@ -2,21 +2,13 @@ import { numberOf } from '#shared/calc/values.ts';
 import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
 import { anchorOf, type AnchorName } from './anchors.ts';
 import { dimensionText } from './dimension-text.ts';
-import { findingText } from './finding-text.ts';
-import { missingName } from './missing-name.ts';
+import { findingLabels, missingLabels } from './finding-labels.ts';
+import type { ColumnLabel } from './label-column.ts';
 import type { SetSection } from './set-section.ts';
-import { toneOf, type SheetFinding, type SheetLimits, type SheetRecord, type Tone } from './sheet-types.ts';
+import type { SheetFinding, SheetLimits, SheetRecord } from './sheet-types.ts';
 
 /** What a label says, before it has a place. */
-export type LabelContent = {
-  readonly id: string;
-  readonly anchor: AnchorName | null;
-  readonly title: string;
-  readonly detail: string;
-  readonly tone: Tone;
-  readonly finding: SheetFinding | null;
-  readonly optional?: boolean;
-};
+export type LabelContent = ColumnLabel & { readonly anchor: AnchorName | null };
 
 type Input = {
   readonly record: SheetRecord;
@@ -28,26 +20,16 @@ type Input = {
 
 /** Findings first, each at what it concerns; then the measured facts that no finding speaks of; then what is missing. */
 export function setLabels(input: Input): LabelContent[] {
-  const found = input.findings.map((finding): LabelContent => ({
-    id: `finding ${finding.id}`,
-    anchor: anchorOf(finding.field, finding.code),
-    title: finding.title,
-    detail: findingText(finding, input.metric),
-    tone: toneOf(finding),
-    finding,
+  const found = findingLabels(input.findings, input.metric).map((label): LabelContent => ({
+    ...label,
+    anchor: label.finding && anchorOf(label.finding.field, label.finding.code),
   }));
   const spoken = new Set(found.map((label) => label.anchor));
   const facts = factLabels(input).filter((fact) => !spoken.has(fact.anchor));
-  const missing = input.section.missing
-    .filter((field) => !input.findings.some((finding) => finding.field === field))
-    .map((field): LabelContent => ({
-      id: `missing ${field}`,
-      anchor: anchorOf(field, ''),
-      title: `${missingName(field)} not given`,
-      detail: 'so it is not drawn',
-      tone: 'query',
-      finding: null,
-    }));
+  const missing = missingLabels(input.section.missing, input.findings).map((label): LabelContent => ({
+    ...label,
+    anchor: anchorOf(label.id.replace('missing ', ''), ''),
+  }));
   return [...found, ...missing, ...facts];
 }
 

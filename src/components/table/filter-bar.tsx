@@ -48,7 +48,7 @@ function FilterControl({ definition, filters }: { definition: FilterDefinition; 
   const shown = options?.find((option) => option.value === value)?.label ?? value;
   const trigger = (
     <button type="button" className="min-h-6 text-left pointer-coarse:min-h-11">
-      <span className="text-muted">{label} </span>
+      <span className="text-muted">{label}</span>{' '}
       <span className="border-b border-rule font-semibold text-ink hover:border-ink">{shown || any}</span>
     </button>
   );

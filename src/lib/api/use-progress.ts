@@ -3,8 +3,10 @@ import { useEffect, useRef, useState } from 'react';
 export type JobProgress = {
   readonly state: 'queued' | 'running' | 'done' | 'failed' | 'issued';
   readonly done: number;
-  readonly total: number;
-  readonly problem: string | null;
+  /** Null: not known yet. */
+  readonly total: number | null;
+  /** Written for people. */
+  readonly problem?: unknown;
 };
 
 const POLL_MS = 2_000;
@@ -21,9 +23,15 @@ export function isFinal(progress: JobProgress): boolean {
  */
 export function useProgress(
   subject: string | null,
-  options: { readonly poll: () => Promise<JobProgress>; readonly onFinal?: (progress: JobProgress) => void },
+  options: {
+    readonly poll: () => Promise<JobProgress>;
+    readonly onFinal?: (progress: JobProgress) => void;
+    /** Another number: the same subject is at work anew. */
+    readonly turn?: number;
+  },
 ): JobProgress | null {
-  const [seen, setSeen] = useState<{ subject: string; progress: JobProgress } | null>(null);
+  const { turn = 0 } = options;
+  const [seen, setSeen] = useState<{ subject: string; turn: number; progress: JobProgress } | null>(null);
   const current = useRef(options);
   useEffect(() => {
     current.current = options;
@@ -33,13 +41,13 @@ export function useProgress(
     const following = follow(subject, {
       poll: () => current.current.poll(),
       onProgress: (progress) => {
-        setSeen({ subject, progress });
+        setSeen({ subject, turn, progress });
         if (isFinal(progress)) current.current.onFinal?.(progress);
       },
     });
     return following;
-  }, [subject]);
-  return seen && seen.subject === subject ? seen.progress : null;
+  }, [subject, turn]);
+  return seen && seen.subject === subject && seen.turn === turn ? seen.progress : null;
 }
 
 type Following = {

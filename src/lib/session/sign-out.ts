@@ -1,6 +1,7 @@
 import type { QueryClient } from '@tanstack/react-query';
 import { api } from '#src/lib/api/client.ts';
 import { setCsrfToken } from '#src/lib/api/csrf-token.ts';
+import { stopUploads } from '#src/lib/api/use-upload-queue.ts';
 import { clearDrafts } from '#src/lib/session/drafts.ts';
 import { sessionQuery } from '#src/lib/session/session.ts';
 
@@ -13,6 +14,7 @@ export async function signOut(queryClient: QueryClient): Promise<void> {
 export function forgetSession(queryClient: QueryClient): void {
   setCsrfToken(null);
   clearDrafts();
+  stopUploads();
   queryClient.clear();
   queryClient.setQueryData(sessionQuery.queryKey, null);
 }

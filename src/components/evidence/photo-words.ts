@@ -1,0 +1,40 @@
+import { formatWallClock } from '#src/lib/formats.ts';
+import { formatQuantity } from '#shared/units/format-quantity.ts';
+import type { Photo } from '#shared/generated/api-types.ts';
+
+const VIEW_WORDS: Readonly<Record<string, string>> = {
+  'bore-depth': 'Bore depth',
+  water: 'Water',
+  kits: 'Kits',
+  finish: 'Finish',
+  plumb: 'Plumb',
+  brand: 'Brand',
+  before: 'Before',
+  gap: 'Gap',
+  after: 'After',
+  'level-after': 'Level after',
+  rework: 'Rework',
+  other: 'Other',
+};
+
+export function viewWord(view: string | null): string {
+  return view === null ? 'Not placed' : (VIEW_WORDS[view] ?? view);
+}
+
+/** `10:19, 11 ft from position`: the wall clock of the camera, and how far from the structure it stood. */
+export function photoFacts(
+  photo: Pick<Photo, 'takenAt' | 'distanceFt'>,
+  { metric, withDay = false }: { readonly metric: boolean; readonly withDay?: boolean },
+): string {
+  const clock = photo.takenAt === null ? 'no capture time' : formatWallClock(photo.takenAt);
+  const time = withDay ? clock : clock.replace(/^.*, /, '');
+  const from =
+    photo.distanceFt === null
+      ? 'no position'
+      : `${formatQuantity(photo.distanceFt, 'ft', { metric, digits: metric ? 1 : 0 })} from position`;
+  return `${time}, ${from}`;
+}
+
+export function photoAddress(id: string, size: 'thumb' | 'display' | 'original'): string {
+  return `/api/photos/${encodeURIComponent(id)}/file?size=${size}`;
+}
