@@ -7,6 +7,8 @@ const SEXAGESIMAL = /^(\d{1,3}) ?° ?(\d{1,2}(?:\.\d+)?) ?'(?: ?(\d{1,2}(?:\.\d+
 const HEMISPHERES: Readonly<Record<string, string>> = { latitude: 'ns', longitude: 'ew' };
 
 function unsigned(text: string): Reading {
+  // One sign was taken off, or a letter stands for it.
+  if (/^[+-]/.test(text)) return unreadable('degrees');
   const match = SEXAGESIMAL.exec(text);
   if (!match) {
     const parsed = parseNumber(text.replace(/ ?°$/, ''));
@@ -26,13 +28,13 @@ export function readDegrees(text: string, key: string): Reading {
   const [, before = '', middle = '', after = ''] = /^([nsew]?) ?(.*?) ?([nsew]?)$/.exec(clean) ?? [];
   const letter = before || after;
   if (letter === '') {
-    const signed = /^- ?/.exec(clean)?.[0] ?? '';
+    const signed = /^[+-] ?/.exec(clean)?.[0] ?? '';
     const reading = unsigned(clean.slice(signed.length));
-    return signed !== '' && 'value' in reading ? value(-Number(reading.value) || 0) : reading;
+    return signed.startsWith('-') && 'value' in reading ? value(-Number(reading.value) || 0) : reading;
   }
   const reading = unsigned(middle);
-  if ('problem' in reading) return unreadable('degrees');
+  if ('problem' in reading) return /^[+-]/.test(middle) ? unreadable('hemisphere') : unreadable('degrees');
   const fits = (HEMISPHERES[key] ?? '').includes(letter) && !(before !== '' && after !== '');
-  if (!fits || Number(reading.value) < 0) return unreadable('hemisphere');
+  if (!fits) return unreadable('hemisphere');
   return value(letter === 's' || letter === 'w' ? -Number(reading.value) || 0 : reading.value);
 }

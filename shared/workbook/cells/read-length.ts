@@ -14,7 +14,8 @@ function readFeetInches(match: RegExpExecArray): Reading {
   if ('fault' in feet) return unreadable(feet.fault);
   if ('fault' in inches) return unreadable(inches.fault);
   // 5.5' 6" says two things about the half foot; 5' 14" is a slip of some kind.
-  if (!Number.isInteger(feet.number)) return unreadable('length');
+  // 1'000 is somebody's thousand.
+  if (!Number.isInteger(feet.number) || /^\d{3}/.test(inchText)) return unreadable('length');
   if (inches.number >= 12) return unreadable('inches');
   const total = feet.number + inches.number / 12;
   return value(sign === '-' && total !== 0 ? -total : total);

@@ -11,6 +11,8 @@ function builtIn(id: number): DateFormat {
 /** What a number format shows. `code` is the custom format code, if there is one for the id. */
 export function dateFormatOf(id: number, code: string | undefined): DateFormat {
   if (code === undefined) return builtIn(id);
+  // Programs write 255 characters at most.
+  if (code.length > 1000) return 'none';
   const section = code
     .replace(/"[^"]*"?/g, '')
     .replace(/[\\_*]./g, '')
