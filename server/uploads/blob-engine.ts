@@ -3,6 +3,7 @@ import type { Request } from 'express';
 import type { StorageEngine } from 'multer';
 import { BlobTooLarge, type BlobStore } from '#server/storage/blob-store.ts';
 
+import { createSlots } from '#server/workbook/slots.ts';
 import { safeFileName } from './safe-file-name.ts';
 
 export type FileRefusal = { readonly code: string; readonly detail: string };
@@ -27,13 +28,19 @@ export type EngineOptions = {
   readonly received: ReceivedFile[];
 };
 
-/** Multer's storage as a stream into the blob store: no file is held in memory or left in a folder. */
+/** Files of one request on their way at once: the rest waits unread, so that memory does not grow with their number. */
+const AT_ONCE = 3;
+
+/** Multer's storage as a stream into the blob store: no file is held in memory or left in a folder. Files stand in `received` in the order of the request. */
 export function blobEngine(options: EngineOptions): StorageEngine {
+  const inSlot = createSlots(AT_ONCE);
+  let files = 0;
   return {
     _handleFile(_req: Request, file, done) {
-      receive(file.stream, safeFileName(file.originalname), options).then(
+      const place = files++;
+      inSlot(() => receive(file.stream, safeFileName(file.originalname), options)).then(
         (received) => {
-          options.received.push(received);
+          options.received[place] = received;
           done(null, {});
         },
         (error: Error) => done(error),
