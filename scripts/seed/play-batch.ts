@@ -3,6 +3,7 @@ import type {
   CloseReviewReply,
   Concession,
   FindingRow,
+  RecordRow,
   RegisterEntriesReply,
   Transmittal,
 } from '#shared/generated/api-types.ts';
@@ -13,7 +14,7 @@ import type { StoryBatch, StoryDecision } from './story/batches.ts';
 
 export type Cast = { contractor: ApiClient; inspector: ApiClient; engineer: ApiClient; clerk: ApiClient };
 
-const DUE_ON = '2026-07-15';
+const DAYS_TO_MEND = 30;
 
 /** Takes one batch of the story from its beginning to its state, each step as the person whose step it is. */
 export async function playBatch(
@@ -29,14 +30,13 @@ export async function playBatch(
   if (story.state === 'submitted') return;
   await review(cast, { batchId, story });
   if (story.state === 'in-review') return;
-  const closed = await cast.inspector.post<CloseReviewReply>(`/api/batches/${batchId}/close-review`);
+  await cast.inspector.post<CloseReviewReply>(`/api/batches/${batchId}/close-review`);
   if (story.next) {
     const rows = buildBatchRows({ workOrder: story.workOrder, lines: story.next.lines });
     await handIn(cast.contractor, { batchId, rows, fileName: `${batch.number}-1.xlsx` });
     if (story.next.state === 'submitted') await answerAndSubmit(cast.contractor, { batchId, answers: {} });
   }
-  if (story.state === 'on-record')
-    await record(cast.clerk, { recordIds: closed.approved, issue: story.transmittal === true });
+  if (story.state === 'on-record') await record(cast.clerk, { batchId, issue: story.transmittal === true });
 }
 
 async function answerAndSubmit(
@@ -68,7 +68,7 @@ async function decide(cast: Cast, found: FindingRow, story: StoryDecision): Prom
     return;
   }
   if (story.decision === 'reject') {
-    const body = { decision: 'reject', action: story.action, reason: story.reason, dueOn: DUE_ON };
+    const body = { decision: 'reject', action: story.action, reason: story.reason, dueOn: dueDay() };
     await cast.inspector.put(`${path}/decision`, body, found.version);
     return;
   }
@@ -83,10 +83,17 @@ async function decide(cast: Cast, found: FindingRow, story: StoryDecision): Prom
   await cast.engineer.put(`/api/concessions/${concession.id}/decision`, answer, concession.version);
 }
 
+/** The work is of the story's spring, the review of today: what is due lies ahead. */
+function dueDay(): string {
+  return new Date(Date.now() + DAYS_TO_MEND * 86_400_000).toISOString().slice(0, 10);
+}
+
 async function record(
   clerk: ApiClient,
-  { recordIds, issue }: { recordIds: readonly string[]; issue: boolean },
+  { batchId, issue }: { batchId: string; issue: boolean },
 ): Promise<void> {
+  const { items } = await clerk.get<{ items: RecordRow[] }>(`/api/batches/${batchId}/records?limit=200`);
+  const recordIds = items.filter((record) => record.state === 'approved').map((record) => record.id);
   const { entries } = await clerk.post<RegisterEntriesReply>('/api/register/entries', { recordIds });
   if (!issue) return;
   const recordNumbers = entries.map((entry) => entry.recordNumber);

@@ -149,7 +149,7 @@ export const BATCHES: readonly StoryBatch[] = [
     ]),
     answers: {
       '17-0422 unproved':
-        'The foreman did not note when the pole was let go; the crew says about ten minutes.',
+        'The foreman did not note when framing began; the crew says after lunch, some two hours later.',
     },
   },
   {

@@ -62,7 +62,7 @@ export const DEVIATIONS = {
     values['setAt'] = after(String(values['boredAt']), -25);
   },
   'lot-unknown': ({ pours }) => {
-    for (const pour of pours) pour['lot'] = 'LK-2219';
+    pours[0]!['lot'] = 'LK-2219';
   },
   'kit-unknown': ({ pours }) => {
     pours[0]!.kitFt3 = 5;
@@ -71,7 +71,7 @@ export const DEVIATIONS = {
     line.views = line.views.filter((view) => view !== 'finish');
   },
   unproved: ({ values }) => {
-    delete values['letGoAt'];
+    delete values['hardwareAt'];
   },
   'record-unreadable': ({ values }) => {
     values['embedmentFt'] = '5.5.8';
