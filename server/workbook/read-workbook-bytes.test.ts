@@ -43,7 +43,7 @@ describe('what a file is, by its content', () => {
   });
 });
 
-describe('the zip file', () => {
+describe('the zip file', { timeout: 30_000 }, () => {
   it('may use backslashes and any case in its names', async () => {
     const { [SHEET]: sheet, ...rest } = parts();
     expect(await refused(zipParts({ ...rest, 'xl\\Worksheets\\Sheet1.xml': sheet! }))).toBe('read');

@@ -23,7 +23,7 @@ async function smallWorkbook(): Promise<string> {
   return save('small.xlsx', Buffer.from(await workbook.xlsx.writeBuffer()));
 }
 
-describe('reading in a process of its own', () => {
+describe('reading in a process of its own', { timeout: 30_000 }, () => {
   it('hands over the cells', async () => {
     const { sheets } = await readWorkbookFile(await smallWorkbook());
     expect(sheets[0]?.rows[0]?.cells).toEqual([

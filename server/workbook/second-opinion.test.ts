@@ -48,7 +48,7 @@ async function agree(bytes: Buffer): Promise<Seen> {
   return seen;
 }
 
-describe('another reader sees the same cells', () => {
+describe('another reader sees the same cells', { timeout: 30_000 }, () => {
   it('in a workbook with every kind of cell', async () => {
     const workbook = new ExcelJS.Workbook();
     const sheet = workbook.addWorksheet('Set & Straighten');

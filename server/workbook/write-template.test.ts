@@ -52,7 +52,7 @@ function columnOf(sheet: ExcelJS.Worksheet, key: string): number {
   return keys.indexOf(key);
 }
 
-describe('the template', () => {
+describe('the template', { timeout: 30_000 }, () => {
   it('as handed out holds no line and raises no notice but that', async () => {
     const source = readSource(await readWorkbookBytes(await template()));
     expect(source.batch.values).toEqual({

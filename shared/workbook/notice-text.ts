@@ -45,6 +45,16 @@ const SENTENCES: Readonly<Record<NoticeCode, Say>> = {
         : `Column ${column} of ${sheet}, “${heading}”, is no part of the template; it is kept as written and not checked.`,
     remedy: NOTHING_DUE,
   }),
+  'workbook-other-order': ({ written, order }) => ({
+    title: 'Another work order',
+    message: `The workbook says that it is for work order “${written}”; this batch belongs to ${order}.`,
+    remedy: 'Hand it in with the batch of its own order, or copy the rows into this order’s template.',
+  }),
+  'workbook-not-returned': ({ structures, more }) => ({
+    title: 'Lines not returned',
+    message: `This revision takes the returned lines only; not taken again: ${structures}${more === '0' || !more ? '' : ` and ${more} more`}.`,
+    remedy: 'Nothing: lines that were approved stand as they are.',
+  }),
   'workbook-column-twice': ({ title }, sheet) => ({
     title: 'Column twice',
     message: `The sheet ${sheet} has the column “${title}” more than once; only the first was read.`,

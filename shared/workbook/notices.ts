@@ -15,6 +15,8 @@ export const NOTICE_SEVERITY = {
   'workbook-template-old': 'note',
   'workbook-template-unknown': 'query',
   'workbook-keywords-differ': 'query',
+  'workbook-other-order': 'nonconformity',
+  'workbook-not-returned': 'note',
 } as const satisfies Record<string, WorkbookNotice['severity']>;
 export type NoticeCode = keyof typeof NOTICE_SEVERITY;
 

@@ -8,6 +8,7 @@ import {
   CLASS,
   TEXT,
   numberCell,
+  textCell,
   SYSTEM,
   short,
   read,

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { Cell } from '#shared/workbook/types.ts';
-import { field, numberCell, SYSTEM, short, read } from './cells-for-tests.ts';
+import { field, numberCell, textCell, SYSTEM, short, read } from './cells-for-tests.ts';
 import { readCell } from './read-cell.ts';
 
 describe('times', () => {
