@@ -36,6 +36,8 @@ export type BatchDbRow = {
   file_name: string | null;
   sha256: string | null;
   decided: number;
+  /** Lines that came back and wait for this revision. */
+  returned: number;
   photos: number;
   unplaced: number;
   version: number;
@@ -50,7 +52,7 @@ select b.id, b.number, b.created_at, b.contractor_id, o.name as contractor_name,
   w.id as work_order_id, w.number as work_order_number, w.title as work_order_title,
   v.id as revision_id, v.n, v.status, v.due_on, v.submitted_at, v.taken_at, v.decided_at, v.inspector_id,
   u.name as inspector_name, v.input, run.input as run_input, run.counts,
-  workbook.file_name, workbook.sha256, decided.n as decided, photo.n as photos, photo.unplaced, versions.n as version
+  workbook.file_name, workbook.sha256, decided.n as decided, returned.n as returned, photo.n as photos, photo.unplaced, versions.n as version
 from batches b
 join organisations o on o.id = b.contractor_id
 join work_orders w on w.id = b.work_order_id
@@ -64,6 +66,9 @@ left join lateral (
 cross join lateral (
   select count(*) filter (where l.state <> 'undecided') as n from lines l where l.revision_id = v.id
 ) decided
+cross join lateral (
+  select count(*) as n from lines l where l.batch_id = b.id and l.state = 'returned'
+) returned
 cross join lateral (
   select count(*) as n, count(*) filter (where placed.removed is not false) as unplaced
   from photos p

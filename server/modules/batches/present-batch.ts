@@ -28,7 +28,7 @@ export function presentBatch(row: BatchDbRow, viewer: { actor: Actor; ability: A
     input: row.input,
     workbook: { fileName: hidden ? null : row.file_name, sha256: hidden ? null : row.sha256 },
     counts: {
-      lines: counts?.lines ?? 0,
+      lines: counts?.lines ?? (row.n > 0 ? row.returned : 0),
       decided: hidden ? 0 : row.decided,
       nonconformity: counts?.nonconformity ?? 0,
       query: counts?.query ?? 0,

@@ -9,6 +9,7 @@ import type { CheckRevisionPayload } from './check-revision.job.ts';
 import { failCheck, type CheckProblem } from './fail-check.ts';
 import { finishEmpty } from './finish-empty.ts';
 import { loadContext } from './load-context.ts';
+import { nameOtherOrder } from './name-other-order.ts';
 import { newestWorkbook } from './newest-workbook.ts';
 import { readStoredWorkbook } from './read-stored-workbook.ts';
 import { scopeToReturned } from './scope-to-returned.ts';
@@ -45,7 +46,8 @@ async function check(
   const workbook = await readStoredWorkbook(services.blobs, stored.sha256, signal);
   const whole = readSource(workbook);
   const loaded = await loadContext(em, run, whole);
-  const source = run.n === 0 ? whole : scopeToReturned(whole, loaded.returned);
+  const named = nameOtherOrder(whole, loaded.orderNumber);
+  const source = run.n === 0 ? named : scopeToReturned(named, loaded.returned);
   const report = services.orm.em.fork();
   const progress = (done: number) =>
     setProgress(report, {

@@ -12,6 +12,7 @@ import type { StartedRun } from './start-run.ts';
 
 export type LoadedContext = {
   readonly context: CheckContext;
+  readonly orderNumber: string;
   readonly lots: readonly LotRow[];
   readonly placing: Placing;
   /** `kind|STRUCTURE` of the lines that came back with an earlier revision. */
@@ -25,9 +26,9 @@ export async function loadContext(
   run: StartedRun,
   source: SourceBatch,
 ): Promise<LoadedContext> {
-  const order = await row<{ zone: string; first_submitted: string | null }>(
+  const order = await row<{ number: string; zone: string; first_submitted: string | null }>(
     em,
-    `select w.zone, (
+    `select w.number, w.zone, (
        select v.submitted_at from revisions v where v.batch_id = $2 and v.n = 0
      ) as first_submitted from work_orders w where w.id = $1`,
     [run.workOrderId, run.batchId],
@@ -42,6 +43,7 @@ export async function loadContext(
   const lines = await loadLines(em, run.batchId);
   const placing = placePhotos({ photos: await loadPhotos(em, run.batchId), source, known: lines });
   return {
+    orderNumber: order.number,
     context: {
       zone: order.zone,
       asOfMs: run.asOfMs,

@@ -5,7 +5,7 @@ import {
   type NamedLine,
   type NameIndex,
 } from '#server/modules/photos/match-by-name.ts';
-import { VIEWS, VIEWS_OF_KIND } from '#server/modules/photos/views.ts';
+import { VIEWS, VIEWS_OF_KIND } from '#shared/records/photo-views.ts';
 import { occurrences } from '#shared/records/occurrences.ts';
 import { lineKey, structureKey } from '#shared/records/structure-key.ts';
 import type { SourceBatch } from '#shared/records/types.ts';

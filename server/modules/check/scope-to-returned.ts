@@ -1,5 +1,8 @@
 import { kindKey } from '#shared/records/structure-key.ts';
 import type { SourceBatch } from '#shared/records/types.ts';
+import { notice } from '#shared/workbook/notices.ts';
+
+const NAMED = 5;
 
 /**
  * A later revision takes the returned lines only: others in the workbook are named in a note and no line. Their pours
@@ -15,13 +18,11 @@ export function scopeToReturned(source: SourceBatch, returned: ReadonlySet<strin
     lines: inScope,
     notices: [
       ...source.notices,
-      {
-        code: 'workbook-not-returned',
-        severity: 'note',
-        sheet: outside[0]?.sheet ?? null,
-        address: null,
-        params: { count: outside.length, structures: named.slice(0, 5).join(', ') },
-      },
+      notice(
+        'workbook-not-returned',
+        { sheet: outside[0]?.sheet ?? null },
+        { structures: named.slice(0, NAMED).join(', '), more: Math.max(0, named.length - NAMED) },
+      ),
     ],
   };
 }

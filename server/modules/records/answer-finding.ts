@@ -3,6 +3,7 @@ import { row, run } from '#server/db/rows.ts';
 import { storableText } from '#server/db/storable-text.ts';
 import { contractorWall } from '#server/http/contractor-wall.ts';
 import { conflict, notFound } from '#server/http/problem.ts';
+import { addInput } from '#server/modules/batches/add-input.ts';
 import { appendTrail } from '#server/trail/append-trail.ts';
 import type { Ability, Actor } from '#shared/permissions/ability.ts';
 
@@ -39,9 +40,9 @@ export async function answerFinding(
     if (!finding) throw notFound();
     if (finding.severity === 'note')
       throw conflict('finding.note', 'A note is information and needs no answer.');
-    const open = await row<{ id: string; n: number }>(
+    const open = await row<{ id: string; n: number; input: number }>(
       tx,
-      `select id, n from revisions where batch_id = $1 and status in ('draft', 'checking', 'checked') for update`,
+      `select id, n, input from revisions where batch_id = $1 and status in ('draft', 'checking', 'checked') for update`,
       [finding.batch_id],
     );
     if (!open)
@@ -56,6 +57,13 @@ export async function answerFinding(
        ), $4, $5)`,
       [open.id, finding.fingerprint, findingId, text, actor.id],
     );
+    // A revision that came back may be answered alone: its lines are looked at again as they stand.
+    if (open.n > 0 && open.input === 0)
+      await addInput(
+        tx,
+        { id: open.id, input: 0, status: 'checking' },
+        { kind: 'recheck', actorId: actor.id },
+      );
     await appendTrail(tx, {
       actor,
       action: 'finding.answered',

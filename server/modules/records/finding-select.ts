@@ -1,6 +1,6 @@
 import type { Severity, Params } from '#shared/findings/types.ts';
 import type { Kind } from '#shared/records/types.ts';
-import type { ActionDue, Grounds, RevisionStatus } from '#shared/review/states.ts';
+import type { ActionDue, Grounds, LineState, RevisionStatus } from '#shared/review/states.ts';
 
 export type FindingDbRow = {
   id: string;
@@ -36,12 +36,16 @@ export type FindingDbRow = {
   answer_text: string | null;
   answer_by: string | null;
   answer_at: string | null;
+  /** Given in a revision that is not handed in: the contractor's own until it is. */
+  answer_open: boolean | null;
   concession_id: string | null;
   concession_number: string | null;
   concession_type: 'asked' | 'granted' | 'refused' | 'withdrawn' | null;
   contractor_id: string;
   revision_status: RevisionStatus;
   inspector_id: string | null;
+  /** State of its line while the line stands on this finding's record; null for another's. */
+  line_state: LineState | null;
   /** The batch's newest revision is still the contractor's to work on. */
   open_revision_id: string | null;
 };
@@ -55,9 +59,10 @@ select f.id, f.record_id, f.line_id, f.ordinal, f.code, f.severity, f.kind, f.st
   f.row, f.cell, f.field, f.measured, f.limit_value, f.margin, f.unit, f.uncertainty, f.params, f.owner_params,
   f.fingerprint, coalesce(s.state, 'open') as state, coalesce(s.version, 0) as version,
   d.decision, d.grounds, d.action, d.due_on, d.reason, du.name as decided_by, d.at as decided_at,
-  a.text as answer_text, a.by as answer_by, a.at as answer_at,
+  a.text as answer_text, a.by as answer_by, a.at as answer_at, a.open as answer_open,
   c.id as concession_id, c.number as concession_number, c.type as concession_type,
-  b.contractor_id, v.status as revision_status, v.inspector_id, open.id as open_revision_id
+  b.contractor_id, v.status as revision_status, v.inspector_id,
+  (select l.state from lines l where l.id = f.line_id and l.record_id = f.record_id) as line_state, open.id as open_revision_id
 from findings f
 join revisions v on v.id = f.revision_id
 join batches b on b.id = v.batch_id
@@ -68,7 +73,7 @@ left join lateral (
 ) d on true
 left join users du on du.id = d.actor_id
 left join lateral (
-  select x.text, x.at, coalesce(ux.name, '') as by
+  select x.text, x.at, coalesce(ux.name, '') as by, rx.submitted_at is null as open
   from revisions rx join answers x on x.revision_id = rx.id and x.fingerprint = f.fingerprint
   left join users ux on ux.id = x.actor_id
   where rx.batch_id = v.batch_id and rx.n between v.n and v.n + 1 order by rx.n desc, x.seq desc limit 1

@@ -13,6 +13,7 @@ export type FindingQuery = PageQuery & {
   state?: FindingRow['state'][];
   structure?: string;
   recordId?: string;
+  withoutLine?: boolean;
 };
 
 const STORED = {
@@ -28,7 +29,8 @@ where f.run_id = $1
   and ($3::text[] is null or f.severity = any($3))
   and ($4::text[] is null or coalesce(s.state, 'open') = any($4))
   and ($5::text is null or upper(f.structure_number) = upper($5))
-  and ($6::uuid is null or f.record_id = $6)`;
+  and ($6::uuid is null or f.record_id = $6)
+  and ($7::boolean is not true or f.record_id is null)`;
 
 /** Findings of a shown revision in the check's order: by line, then those that belong to none. */
 export async function listFindings(
@@ -45,10 +47,11 @@ export async function listFindings(
     query.state?.map((state) => STORED[state]) ?? null,
     query.structure ?? null,
     query.recordId ?? null,
+    query.withoutLine ?? null,
   ];
   const found = await rows<FindingDbRow>(
     em,
-    `${FINDING_SELECT} ${WHERE} and ($7::int is null or f.ordinal > $7) order by f.ordinal limit $8`,
+    `${FINDING_SELECT} ${WHERE} and ($8::int is null or f.ordinal > $8) order by f.ordinal limit $9`,
     [...filter, after?.[0] ?? null, limit + 1],
   );
   const total = after === null ? await countFindings(em, filter) : null;

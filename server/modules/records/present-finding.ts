@@ -40,10 +40,7 @@ export function presentFinding(row: FindingDbRow, viewer: { actor: Actor; abilit
     params: { ...row.params, ...(owner ? row.owner_params : {}) },
     message,
     remedy,
-    answer:
-      row.answer_text === null
-        ? null
-        : { text: row.answer_text, by: row.answer_by ?? '', at: row.answer_at ?? '' },
+    answer: answerOf(row, owner),
     state: told ? STATES[row.state] : 'undecided',
     decision: told ? decisionOf(row) : null,
     concession: told ? concessionOf(row) : null,
@@ -74,6 +71,11 @@ export function toFinding(row: FindingDbRow, owner: boolean): Finding {
   };
 }
 
+function answerOf(row: FindingDbRow, owner: boolean): FindingRow['answer'] {
+  if (row.answer_text === null || row.answer_at === null || (owner && row.answer_open)) return null;
+  return { text: row.answer_text, by: row.answer_by ?? '', at: row.answer_at };
+}
+
 function decisionOf(row: FindingDbRow): FindingRow['decision'] {
   const { decision } = row;
   if ((decision !== 'approve' && decision !== 'reject') || row.decided_at === null) return null;
@@ -100,8 +102,10 @@ function findingCan(row: FindingDbRow, { actor, ability }: { actor: Actor; abili
   if (row.severity === 'note') return can;
   if (row.open_revision_id && may(ability, 'hand-in', 'Finding', owned)) can.push('answer');
   const holds = row.revision_status === 'in-review' && row.inspector_id === actor.id;
-  if (!holds || !may(ability, 'review', 'Finding', owned)) return can;
+  // A line reopened after the review closed is decided by any inspector.
+  const reopened = row.revision_status === 'decided' && row.line_state === 'undecided';
+  if (!(holds || reopened) || !may(ability, 'review', 'Finding', owned)) return can;
   if (row.state !== 'held') can.push('decide', 'ask-concession');
-  if (row.state === 'approved' || row.state === 'rejected') can.push('undo');
+  if (row.state !== 'open') can.push('undo');
   return can;
 }

@@ -38,7 +38,8 @@ function recordCan(row: RecordDbRow, { actor, ability }: { actor: Actor; ability
   const can: string[] = [];
   const closed = row.revision_status === 'decided' || row.revision_status === 'on-record';
   if (may(ability, 'review', 'Record', owned)) {
-    if (row.revision_status === 'in-review' && row.inspector_id === actor.id) can.push('decide');
+    const holds = row.revision_status === 'in-review' && row.inspector_id === actor.id;
+    if (holds || (row.revision_status === 'decided' && row.state === 'undecided')) can.push('decide');
     if (closed && row.state === 'approved') can.push('reopen');
   }
   if (closed && row.state === 'returned' && may(ability, 'assign', 'Record', owned)) can.push('abandon');

@@ -59,6 +59,7 @@ export const recordRoutes: readonly Route[] = [
       ...FILTERS,
       state: many({ enum: ['undecided', 'approved', 'rejected', 'concession-asked'] }),
       recordId: { type: 'string', format: 'uuid' },
+      withoutLine: { type: 'boolean' },
     },
     reply: pageSchema(findingRowSchema),
     handler: async (ctx) => {
