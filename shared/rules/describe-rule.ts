@@ -30,7 +30,7 @@ export const describeRule = (
   rule: LineRule,
   { valid, invalid }: { readonly valid: readonly Case[]; readonly invalid: readonly Invalid[] },
 ): void => {
-  describe(`${rule.code}`, () => {
+  describe(`rule ${rule.code}`, () => {
     it.each(valid)('meets: $name', (one) => {
       expect(run(rule, one)).toEqual([]);
     });

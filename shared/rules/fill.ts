@@ -2,7 +2,8 @@ import type { FindingDraft, LineView, Pour } from './types.ts';
 import { unproved } from './need.ts';
 
 type Fill = {
-  readonly ratio: number;
+  /** Null where the readings leave no void to speak of. */
+  readonly ratio: number | null;
   readonly placedFt3: number;
   readonly voidFt3: number;
   readonly smallestKitFt3: number | null;
@@ -29,7 +30,7 @@ export const fillOf = (
   | { readonly fill: null; readonly missing: readonly FindingDraft[] } => {
   if (line.pours.length === 0) return { fill: null, missing: [] };
   const { fillRatio, placedFt3, voidFt3 } = line.derived;
-  if (fillRatio === null || placedFt3 === null || voidFt3 === null) {
+  if (placedFt3 === null || voidFt3 === null) {
     return { fill: null, missing: missingTemperatures(line.pours) };
   }
   const kits = line.product?.kitsFt3 ?? [];

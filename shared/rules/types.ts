@@ -39,9 +39,9 @@ export type CheckContext = {
   readonly products: readonly ProductInForce[];
   readonly lots: readonly LotFact[] | null;
   readonly design: readonly DesignFact[] | null;
-  /** Photographs by line key `kind|structureNumber|occurrence`. */
+  /** Photographs by the key of shared/records/structure-key.ts `lineKey`: `kind|STRUCTURE|occurrence`. */
   readonly photos: ReadonlyMap<string, readonly PhotoFact[]> | null;
-  /** Approved lines of earlier revisions of this batch, `kind|structureNumber`. */
+  /** Approved lines of earlier revisions of this batch, by `kindKey`: `kind|STRUCTURE`. */
   readonly siblings: ReadonlySet<string> | null;
 };
 

@@ -22,5 +22,10 @@ describeRule(fillExcess, {
       line: { pours, derived: fill(2.25, 0.5) },
       expected: [{ measured: 4.5, limit: 1.5, margin: -3 }],
     },
+    {
+      name: 'foam where the readings leave no void',
+      line: { pours, derived: { placedFt3: 8, voidFt3: 0, fillRatio: null } },
+      expected: [{ measured: null, limit: 1.5, margin: null, params: { surplusFt3: 8 } }],
+    },
   ],
 });

@@ -25,27 +25,33 @@ export const fillExcess: LineRule = {
   field: 'boreDepthFt',
   needs: [],
   paramsSchema: schema,
-  check: (line, params) => {
+  check: (line, settings) => {
     const { fill, missing } = fillOf(line);
     if (missing) return missing;
+    const limit = numberOf(settings, schema, 'greatestRatio');
     const surplusFt3 = fill.placedFt3 - fill.voidFt3;
     // One kit is the least a crew can add: what is left of it is no sign of anything.
     if (fill.smallestKitFt3 !== null && atMost(surplusFt3, fill.smallestKitFt3)) return [];
+    const params = {
+      placedFt3: fill.placedFt3,
+      voidFt3: fill.voidFt3,
+      surplusFt3,
+      measureAgain: line.derived.worstReading,
+    };
+    if (fill.ratio === null)
+      return [{ field: fill.field, measured: null, limit, margin: null, unit: 'ratio', params }];
     return aboveLimit({
       field: fill.field,
       measured: fill.ratio,
-      limit: numberOf(params, schema, 'greatestRatio'),
+      limit,
       unit: 'ratio',
       uncertainty: line.derived.fillRatioU,
-      params: {
-        placedFt3: fill.placedFt3,
-        voidFt3: fill.voidFt3,
-        surplusFt3,
-        measureAgain: line.derived.worstReading,
-      },
+      params,
     });
   },
   message: ({ measured, limit, params }) =>
-    `${say(params['placedFt3'], 'ft3')} of foam was placed for a void of ${say(params['voidFt3'], 'ft3')}: fill ratio ${say(measured, 'ratio')}, over ${say(limit, 'ratio')}. The bore may be larger than written down, or foam ran off.`,
+    measured === null
+      ? `${say(params['placedFt3'], 'ft3')} of foam was placed where the readings leave no void at all.`
+      : `${say(params['placedFt3'], 'ft3')} of foam was placed for a void of ${say(params['voidFt3'], 'ft3')}: fill ratio ${say(measured, 'ratio')}, over ${say(limit, 'ratio')}. The bore may be larger than written down, or foam ran off.`,
   remedy: () => 'Check the bore sizes and the kits poured, or say where the foam went.',
 };

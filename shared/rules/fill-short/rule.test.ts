@@ -14,6 +14,7 @@ describeRule(fillShort, {
   valid: [
     { name: 'full', line: { pours, derived: fill(8, 8) } },
     { name: 'more than full', line: { pours, derived: fill(9.5, 8) } },
+    { name: 'no void to fill', line: { pours, derived: { placedFt3: 8, voidFt3: 0 } } },
     { name: 'no pours: another rule says so', line: { derived: { voidFt3: 8 } } },
     { name: 'void not known for a reading with a finding', line: { pours, broken: ['boreTopIn'] } },
   ],

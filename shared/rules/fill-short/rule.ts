@@ -27,6 +27,8 @@ export const fillShort: LineRule = {
   check: (line, params) => {
     const { fill, missing } = fillOf(line);
     if (missing) return missing;
+    // Where there is no void nothing is short; that there is none is told by fill-excess.
+    if (fill.ratio === null) return [];
     return belowLimit({
       field: fill.field,
       measured: fill.ratio,
