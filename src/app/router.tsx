@@ -15,6 +15,8 @@ const OPEN: RouteObject[] = [
 /** Pages inside the shell; each route module exports `Component` and is fetched when first visited. */
 const SIGNED_IN: RouteObject[] = [
   { path: paths.home.path, lazy: () => import('#src/features/home/routes/home.tsx') },
+  { path: paths.review.path, lazy: () => import('#src/features/review/routes/review-queue.tsx') },
+  { path: paths.reviewBatch.path, lazy: () => import('#src/features/review/routes/review-batch.tsx') },
   { path: '*', Component: NotFound },
 ];
 

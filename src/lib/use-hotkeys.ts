@@ -1,7 +1,7 @@
 import { useEffect, useRef } from 'react';
 import { isTyping } from '#src/lib/is-typing.ts';
 
-/** Single keys for the page, by `KeyboardEvent.key` in lower case (`j`, `?`, `enter`). Silent while somebody types or a dialog is open. */
+/** Single keys for the page, by `KeyboardEvent.key` in lower case (`j`, `?`, `enter`, `shift+n`). Silent while somebody types or a dialog is open. */
 export function useHotkeys(actions: Readonly<Record<string, () => void>>): void {
   const current = useRef(actions);
   useEffect(() => {
@@ -13,7 +13,8 @@ export function useHotkeys(actions: Readonly<Record<string, () => void>>): void 
       // A focused link or button answers Enter and Space itself.
       const own = event.key === 'Enter' || event.key === ' ';
       if (own && event.target instanceof Element && event.target.closest('a, button, summary, input')) return;
-      const action = current.current[event.key.toLowerCase()];
+      const key = event.key.toLowerCase();
+      const action = (event.shiftKey && current.current[`shift+${key}`]) || current.current[key];
       if (!action) return;
       event.preventDefault();
       action();

@@ -25,6 +25,7 @@ type ReviewLineRow = {
 /**
  * Ends the review: logs what each line has come to, opens the actions due, makes the next revision of what came back,
  * and writes to the contractor.
+ * @returns ids of the lines
  * @throws Problem 404; 409 naming the undecided lines in `undecided`
  */
 export async function closeReview(
@@ -49,8 +50,9 @@ export async function closeReview(
       const undecided = lines.filter((line) => line.state === 'undecided');
       throw conflict(closing.refused, closing.detail, {
         extra: {
-          undecided: undecided.map(({ id, structure_number }) => ({
+          undecided: undecided.map(({ id, recordId, structure_number }) => ({
             lineId: id,
+            recordId,
             structureNumber: structure_number,
           })),
         },

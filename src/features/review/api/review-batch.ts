@@ -1,0 +1,9 @@
+import { queryOptions } from '@tanstack/react-query';
+import { api } from '#src/lib/api/client.ts';
+import type { Batch } from '#shared/generated/api-types.ts';
+
+export const reviewBatchQuery = (batchId: string) =>
+  queryOptions({
+    queryKey: ['review', batchId],
+    queryFn: ({ signal }) => api<Batch>(`/api/batches/${batchId}`, { signal }),
+  });

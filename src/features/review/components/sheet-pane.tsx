@@ -1,0 +1,57 @@
+import { useQuery } from '@tanstack/react-query';
+import { lineStamp } from '#src/components/evidence/line-stamp.ts';
+import { titleBlockData } from '#src/components/evidence/title-block-data.ts';
+import { sheetFindings } from '#src/components/evidence/number-findings.ts';
+import { RecordSheet } from '#src/components/drawing/record-sheet.tsx';
+import { EmptyState } from '#src/components/ui/empty-state.tsx';
+import { ErrorState } from '#src/components/ui/error-state.tsx';
+import { Skeleton } from '#src/components/ui/skeleton.tsx';
+import { TextLink } from '#src/components/ui/text-link.tsx';
+import { paths } from '#src/config/paths.ts';
+import { findingElementId } from '#src/features/review/components/finding-item.tsx';
+import type { DeskModel } from '#src/features/review/desk/use-desk.ts';
+import { sheetLimitsQuery } from '#src/lib/api/sheet-limits.ts';
+
+/** The drawing of the line in hand. */
+export function SheetPane({ desk, onShowEvidence }: { desk: DeskModel; onShowEvidence: () => void }) {
+  const { sheet, whole, hand } = desk;
+  const limits = useQuery(sheetLimitsQuery(sheet.data?.record.standard ?? 0));
+  if (whole) {
+    return (
+      <EmptyState title="Findings of the batch itself">
+        They concern the workbook as a whole, so there is no drawing. They are beside this, and the review
+        cannot be closed while one is undecided.
+      </EmptyState>
+    );
+  }
+  if (sheet.isError)
+    return <ErrorState error={sheet.error} what="The record" onRetry={() => void sheet.refetch()} />;
+  if (!sheet.data) return <Skeleton lines={14} label="Loading the record sheet" />;
+  const { record, findings, titleBlock } = sheet.data;
+  return (
+    <div className="px-3 py-2.5">
+      <RecordSheet
+        record={{
+          ...record,
+          values: record.values as Readonly<Record<string, string | number | boolean | null>>,
+        }}
+        findings={sheetFindings(findings)}
+        titleBlock={titleBlockData(titleBlock)}
+        limits={limits.data}
+        stamp={lineStamp(record, findings)}
+        activeFinding={hand.marked}
+        onActive={hand.hover}
+        onPick={(id) => {
+          hand.take(id);
+          onShowEvidence();
+          requestAnimationFrame(() => document.getElementById(findingElementId(id))?.focus());
+        }}
+        caution={false}
+      />
+      <p className="mt-1 text-small text-ink-2">
+        <TextLink to={paths.record.to(record.id)}>Open the record page</TextLink>: measurements, pours and
+        history.
+      </p>
+    </div>
+  );
+}
