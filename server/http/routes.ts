@@ -2,7 +2,9 @@ import type { Route } from '#server/http/define-route.ts';
 import { batchRoutes } from '#server/modules/batches/routes.ts';
 import { healthRoutes } from '#server/modules/health/routes.ts';
 import { homeRoutes } from '#server/modules/home/routes.ts';
+import { jobRoutes } from '#server/modules/jobs/routes.ts';
 import { lotRoutes } from '#server/modules/lots/routes.ts';
+import { mailCaptureRoutes } from '#server/modules/mail-capture/routes.ts';
 import { openapiRoutes } from '#server/modules/openapi/routes.ts';
 import { organisationRoutes } from '#server/modules/organisations/routes.ts';
 import { peopleRoutes } from '#server/modules/people/routes.ts';
@@ -39,5 +41,7 @@ export const ROUTES: readonly Route[] = [
   ...nonconformityRoutes,
   ...standardRoutes,
   ...trailRoutes,
+  ...mailCaptureRoutes,
+  ...jobRoutes,
   ...openapiRoutes(() => ROUTES),
 ];

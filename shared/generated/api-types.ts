@@ -143,6 +143,29 @@ export interface NamedRef {
   name: string;
 }
 /**
+ * A message kept by the local capture instead of being sent.
+ */
+export interface CapturedMail {
+  id: string;
+  subject: string;
+  sender: string;
+  recipients: string[];
+  at: string;
+}
+/**
+ * A captured message with its two forms.
+ */
+export interface CapturedMessage {
+  id: string;
+  subject: string;
+  sender: string;
+  recipients: string[];
+  at: string;
+  messageId: string | null;
+  text: string | null;
+  html: string | null;
+}
+/**
  * How far the check of the newest upload is.
  */
 export interface CheckProgress {
@@ -522,6 +545,32 @@ export interface Organisation {
   version: number;
 }
 /**
+ * A job whose attempts are used up.
+ */
+export interface ParkedJob {
+  id: string;
+  name: string;
+  /**
+   * What the job does, in words.
+   */
+  title: string;
+  /**
+   * What it means that it did not run.
+   */
+  meaning: string;
+  /**
+   * What its last attempt said.
+   */
+  problem: string;
+  payload: {
+    [k: string]: unknown;
+  };
+  attempts: number;
+  createdAt: string;
+  failedAt: string | null;
+  can: string[];
+}
+/**
  * Whom a link for a new password belongs to.
  */
 export interface PasswordResetLink {
@@ -874,11 +923,16 @@ export interface StandardDraftBody {
 export interface StandardVersion {
   id: string;
   n: number;
+  title: string;
   state: 'draft' | 'published';
   effectiveOn: string | null;
   body: {
     [k: string]: unknown;
   };
+  /**
+   * Why this version was drafted.
+   */
+  note: string | null;
   author: string;
   approver: string | null;
   publishedAt: string | null;

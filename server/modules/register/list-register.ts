@@ -8,35 +8,43 @@ import { presentRegister } from './present-register.ts';
 import { registerConditions, type RegisterFilter } from './register-filter.ts';
 import { REGISTER_COLUMNS, REGISTER_FROM, type RegisterDbRow } from './register-select.ts';
 
-export type RegisterQuery = PageQuery & RegisterFilter & { sort?: 'entered' | 'installed' | 'structure' };
+/** A leading minus sorts the other way: latest first, Z to A. */
+export const REGISTER_SORTS = [
+  'entered',
+  'installed',
+  'structure',
+  '-entered',
+  '-installed',
+  '-structure',
+] as const;
+type RegisterSort = (typeof REGISTER_SORTS)[number];
+type SortKey = 'entered' | 'installed' | 'structure';
+
+export type RegisterQuery = PageQuery & RegisterFilter & { sort?: RegisterSort };
 
 type Sort = {
   sql: string;
   cast: string;
   type: CursorType;
-  direction: 'asc' | 'desc';
   key: (row: RegisterDbRow) => string;
 };
-const SORTS: Readonly<Record<NonNullable<RegisterQuery['sort']>, Sort>> = {
+const SORTS: Readonly<Record<SortKey, Sort>> = {
   entered: {
     sql: 'v.entered_at',
     cast: 'timestamptz',
     type: 'instant',
-    direction: 'desc',
     key: (row) => row.entered_at,
   },
   installed: {
     sql: `coalesce(v.work_day, date '0001-01-01')`,
     cast: 'date',
     type: 'day',
-    direction: 'desc',
     key: (row) => row.work_day ?? '0001-01-01',
   },
   structure: {
     sql: 'v.structure_number',
     cast: 'text',
     type: 'string',
-    direction: 'asc',
     key: (row) => row.structure_number,
   },
 };
@@ -49,16 +57,18 @@ export async function listRegister(
   options: { query: RegisterQuery; ability: Ability },
 ): Promise<Page<RegisterRow>> {
   const { query, ability } = options;
-  const sort = SORTS[query.sort ?? 'entered'];
+  const asked = query.sort ?? '-entered';
+  const sort = SORTS[asked.replace('-', '') as SortKey];
+  const direction = asked.startsWith('-') ? 'desc' : 'asc';
   const { limit, after } = parsePage(query, [sort.type, 'uuid']);
   const where = registerConditions(query, { contractorId: contractorWall(ability, 'read', 'RegisterEntry') });
   const next = where.values.length + 1;
-  const beyond = sort.direction === 'desc' ? '<' : '>';
+  const beyond = direction === 'desc' ? '<' : '>';
   const found = await rows<RegisterDbRow>(
     em,
     `select ${REGISTER_COLUMNS} ${REGISTER_FROM} where ${where.sql}
        and ($${next}::${sort.cast} is null or (${sort.sql}, v.id) ${beyond} ($${next}::${sort.cast}, $${next + 1}::uuid))
-     order by ${sort.sql} ${sort.direction}, v.id ${sort.direction} limit $${next + 2}`,
+     order by ${sort.sql} ${direction}, v.id ${direction} limit $${next + 2}`,
     [...where.values, after?.[0] ?? null, after?.[1] ?? null, limit + 1],
   );
   return toPage({

@@ -13,7 +13,7 @@ import type {
 import { enterRecords } from './enter-records.ts';
 import { exportRegister } from './export-register.ts';
 import { listCandidates, type CandidateQuery } from './list-candidates.ts';
-import { listRegister, type RegisterQuery } from './list-register.ts';
+import { listRegister, REGISTER_SORTS, type RegisterQuery } from './list-register.ts';
 import { readVersions } from './read-versions.ts';
 import { REGISTER_FILTER_QUERY, type RegisterFilter } from './register-filter.ts';
 
@@ -28,7 +28,7 @@ export const registerRoutes: readonly Route[] = [
     query: {
       ...PAGE_QUERY,
       ...REGISTER_FILTER_QUERY,
-      sort: { type: 'string', enum: ['entered', 'installed', 'structure'] },
+      sort: { type: 'string', enum: [...REGISTER_SORTS] },
     },
     reply: pageSchema(registerSchema),
     handler: ({ em, query, ability }) => listRegister(em, { query, ability }),

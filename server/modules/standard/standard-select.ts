@@ -11,6 +11,7 @@ export type StandardDbRow = {
   state: 'draft' | 'published';
   effective_on: string;
   body: Record<string, unknown>;
+  note: string | null;
   author_id: string | null;
   author: string | null;
   approver: string | null;
@@ -19,7 +20,7 @@ export type StandardDbRow = {
 };
 
 export const STANDARD_SELECT = `
-select s.id, s.n, s.title, s.state, s.effective_on, s.body, s.author_id, a.name as author, p.name as approver, s.published_at, s.version
+select s.id, s.n, s.title, s.state, s.effective_on, s.body, s.note, s.author_id, a.name as author, p.name as approver, s.published_at, s.version
 from standard_versions s left join users a on a.id = s.author_id left join users p on p.id = s.approver_id`;
 
 /** A version of the standard on the wire. A draft is published by another engineer than its author. */
@@ -29,9 +30,11 @@ export function presentStandard(item: StandardDbRow, actor: Actor): StandardVers
   return {
     id: item.id,
     n: item.n,
+    title: item.title,
     state: item.state,
     effectiveOn: item.effective_on,
     body: item.body,
+    note: item.note,
     author: item.author ?? '',
     approver: item.approver,
     publishedAt: item.published_at,

@@ -26,7 +26,8 @@ export const issueTransmittal: JobHandler<IssueTransmittalPayload> = async ({ tr
   const { services, em, job, signal } = context;
   const head = await row<TransmittalHead>(
     em,
-    `update transmittals set state = 'running' where id = $1 and state in ('queued', 'running')
+    // A failed one comes here again only when an administrator tries its parked job again.
+    `update transmittals set state = 'running', problem = null where id = $1 and state <> 'issued'
      returning id, number, revision, title, scope, requested_by`,
     [transmittalId],
   );

@@ -15,7 +15,7 @@ import type { Actor } from '#shared/permissions/ability.ts';
 import { issueTransmittalJob } from './issue-transmittal.job.ts';
 
 type Scope = TransmittalBody['scope'];
-type Before = { id: string; number: string; revision: number; state: string; superseded: boolean };
+type Before = { id: string; number: string; state: string; superseded: boolean; latest: number };
 
 /**
  * Fixes what an as-built is issued of (the versions on record now) and queues the writing of it.
@@ -38,7 +38,7 @@ export async function requestTransmittal(
        returning id, number, revision`,
       [
         before?.number ?? null,
-        before ? before.revision + 1 : 0,
+        before ? before.latest + 1 : 0,
         before?.id ?? null,
         JSON.stringify(body.scope),
         title,
@@ -62,7 +62,9 @@ export async function requestTransmittal(
 async function lockBefore(em: EntityManager, id: string): Promise<Before> {
   const before = await row<Before>(
     em,
-    `select t.id, t.number, t.revision, t.state,
+    `select t.id, t.number, t.state,
+       -- a revision that failed keeps its number
+       (select max(each.revision) from transmittals each where each.number = t.number) as latest,
        exists (select 1 from transmittals later where later.supersedes_id = t.id and later.state <> 'failed') as superseded
      from transmittals t where t.id = $1 for update of t`,
     [id],
