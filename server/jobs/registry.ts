@@ -3,6 +3,7 @@ import { tidyJob } from '#server/jobs/tidy.job.ts';
 import { sendMailJob } from '#server/mail/send-mail.job.ts';
 import { checkRevisionJob } from '#server/modules/check/check-revision.job.ts';
 import { preparePhotosJob } from '#server/modules/photos/prepare-photos.job.ts';
+import { freeIdleReviewsJob } from '#server/modules/review/free-idle-reviews.job.ts';
 import { issueTransmittalJob } from '#server/modules/transmittals/issue-transmittal.job.ts';
 import { sweepBlobsJob } from '#server/storage/sweep-blobs.job.ts';
 
@@ -14,4 +15,5 @@ export const JOBS: readonly JobDefinition<never>[] = [
   checkRevisionJob,
   preparePhotosJob,
   issueTransmittalJob,
+  freeIdleReviewsJob,
 ];

@@ -112,8 +112,13 @@ export const RECORD_TEXT: ReadonlyMap<string, FindingText> = new Map<string, Fin
     {
       title: 'Formula without a value',
       message: (finding) =>
-        `${Cell(finding)} (${name(finding)}) holds ${finding.params['formula'] === true ? 'a formula that ends in an error' : 'an error'}, ${say(finding.params['error'] ?? finding.measured, null)}, and no reading.`,
-      remedy: write,
+        finding.params['error'] === ''
+          ? `${Cell(finding)} (${name(finding)}) holds a formula whose result was never stored.`
+          : `${Cell(finding)} (${name(finding)}) holds ${finding.params['formula'] === true ? 'a formula that ends in an error' : 'an error'}, ${say(finding.params['error'] ?? finding.measured, null)}, and no reading.`,
+      remedy: (finding) =>
+        finding.params['error'] === ''
+          ? 'Open the workbook in a spreadsheet program, save it there and hand it in again, or type the value.'
+          : write(finding),
     },
   ],
   [
