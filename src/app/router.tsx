@@ -17,6 +17,8 @@ const SIGNED_IN: RouteObject[] = [
   { path: paths.home.path, lazy: () => import('#src/features/home/routes/home.tsx') },
   { path: paths.review.path, lazy: () => import('#src/features/review/routes/review-queue.tsx') },
   { path: paths.reviewBatch.path, lazy: () => import('#src/features/review/routes/review-batch.tsx') },
+  { path: paths.batches.path, lazy: () => import('#src/features/batches/routes/batches.tsx') },
+  { path: paths.batch.path, lazy: () => import('#src/features/batches/routes/batch.tsx') },
   { path: '*', Component: NotFound },
 ];
 

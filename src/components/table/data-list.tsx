@@ -19,13 +19,23 @@ type Props<Row extends object> = {
   /** From `useColumns`, shared with a `ColumnChooser`. */
   readonly columns: ReturnType<typeof useColumns<Row>>;
   readonly rowTo?: (row: Row) => string;
+  /** Further keys that act on the row one stands on; `enter` here goes before `rowTo`. */
+  readonly rowKeys?: Readonly<Record<string, (row: Row) => void>>;
   readonly filters?: Filters;
   /** An EmptyState that says what to do next. */
   readonly empty: ReactNode;
 };
 
 /** A list of any length: sticky head, window of rows, J / K / Enter, cards where the columns do not fit. */
-export function DataList<Row extends object>({ label, list, columns, rowTo, filters, empty }: Props<Row>) {
+export function DataList<Row extends object>({
+  label,
+  list,
+  columns,
+  rowTo,
+  rowKeys = {},
+  filters,
+  empty,
+}: Props<Row>) {
   const frame = useRef<HTMLDivElement>(null);
   const body = useRef<HTMLDivElement>(null);
   const width = useWidth(frame);
@@ -53,6 +63,15 @@ export function DataList<Row extends object>({ label, list, columns, rowTo, filt
       const row = rows[active];
       if (row && rowTo) void navigate(rowTo(row.original));
     },
+    ...Object.fromEntries(
+      Object.entries(rowKeys).map(([key, act]) => [
+        key,
+        () => {
+          const row = rows[active];
+          if (row) act(row.original);
+        },
+      ]),
+    ),
   });
 
   const Row: typeof ListRow<Row> = cards ? ListCard : ListRow;

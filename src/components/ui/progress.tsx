@@ -7,16 +7,22 @@ type Props = {
   /** What is counted, plural: "rows", "photographs". */
   readonly things: string;
   readonly label: string;
+  /** The words stand elsewhere: the bar alone. */
+  readonly bare?: boolean;
 };
 
 /** Real progress: so many of so many, in words and as a bar. */
-export function Progress({ done, total, things, label }: Props) {
+export function Progress({ done, total, things, label, bare }: Props) {
   const share = total > 0 ? Math.min(1, done / total) : 0;
   return (
     <div>
-      <p className="text-table text-muted" aria-hidden="true">
-        {total > 0 ? `${done.toLocaleString('en-US')} of ${total.toLocaleString('en-US')} ${things}` : label}
-      </p>
+      {bare ? null : (
+        <p className="text-table text-muted" aria-hidden="true">
+          {total > 0
+            ? `${done.toLocaleString('en-US')} of ${total.toLocaleString('en-US')} ${things}`
+            : label}
+        </p>
+      )}
       <div
         role="progressbar"
         aria-label={label}

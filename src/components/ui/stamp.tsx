@@ -17,7 +17,7 @@ const TONES = {
 /** Outlined capitals, as on a checked drawing. */
 export function Stamp({ word, tone, detail }: Props) {
   return (
-    <span className={classNames('inline-block border-2 p-0.5', TONES[tone])}>
+    <span className={classNames('inline-block self-start border-2 p-0.5', TONES[tone])}>
       <span className="block border border-current px-2.5 py-1 text-center">
         <span className="block text-table font-semibold tracking-stamp uppercase">{word}</span>
         {detail ? <span className="block text-micro">{detail}</span> : null}

@@ -33,7 +33,7 @@ export const SEVERITY_WORDS: Record<Severity, Word> = {
 /** A state: shape and word, never colour alone. `children` replaces the word ("concession C-0031"). */
 export function StateWord({ glyph, word, children }: Word & { children?: ReactNode }) {
   return (
-    <span className="inline-flex items-center gap-1.5 whitespace-nowrap">
+    <span className="inline-flex items-center gap-1.5 align-bottom whitespace-nowrap">
       <Glyph name={glyph} />
       {children ?? word}
     </span>

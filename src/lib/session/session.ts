@@ -1,7 +1,7 @@
 import { queryOptions, useQuery } from '@tanstack/react-query';
 import { api } from '#src/lib/api/client.ts';
 import { ApiProblem } from '#src/lib/api/api-problem.ts';
-import { setCsrfToken } from '#src/lib/api/csrf-token.ts';
+import { csrfToken, setCsrfToken } from '#src/lib/api/csrf-token.ts';
 import type { Actor, Role } from '#shared/permissions/ability.ts';
 
 export type SessionUser = {
@@ -18,11 +18,17 @@ export type Session = {
   readonly csrfToken: string;
 };
 
-/** Null: nobody is signed in, which is an answer and not a fault. */
+/**
+ * Null: nobody is signed in, which is an answer and not a fault. Where somebody was, the session has ended
+ * and the page waits for them to sign in again instead of throwing away what stands on it.
+ */
 async function fetchSession(signal: AbortSignal): Promise<Session | null> {
+  const fresh = csrfToken() === null;
+  // Asked first, so that a visitor's page does not begin with a refused request.
+  if (fresh && !(await api<{ signedIn: boolean }>('/api/app', { withoutSession: true, signal })).signedIn)
+    return null;
   try {
-    const session = await api<Session | { user: null }>('/api/session', { withoutSession: true, signal });
-    if (session.user === null) return null;
+    const session = await api<Session>('/api/session', { withoutSession: fresh, signal });
     setCsrfToken(session.csrfToken);
     return session;
   } catch (error) {

@@ -2,7 +2,12 @@ import { queryOptions } from '@tanstack/react-query';
 import { api } from '#src/lib/api/client.ts';
 import type { Role } from '#shared/permissions/ability.ts';
 
-export type DemoAccount = { readonly email: string; readonly role: Role; readonly name: string };
+export type DemoAccount = {
+  readonly email: string;
+  readonly role: Role;
+  readonly name: string;
+  readonly organisation: string;
+};
 export type AppInfo = {
   readonly owner: string;
   /** Only where the demo is seeded. */

@@ -1,73 +1,47 @@
+import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { useForm } from 'react-hook-form';
 import { useParams } from 'react-router-dom';
-import { AppForm } from '#src/components/form/app-form.tsx';
-import { TextField } from '#src/components/form/text-field.tsx';
-import { Button, ButtonLink } from '#src/components/ui/button.tsx';
+import { ButtonLink } from '#src/components/ui/button.tsx';
 import { Callout } from '#src/components/ui/callout.tsx';
+import { ErrorState } from '#src/components/ui/error-state.tsx';
+import { Skeleton } from '#src/components/ui/skeleton.tsx';
+import { TextLink } from '#src/components/ui/text-link.tsx';
 import { paths } from '#src/config/paths.ts';
-import { setPassword } from '#src/features/session/api/password-reset.ts';
+import { resetLinkQuery } from '#src/features/session/api/password-reset.ts';
 import { Entrance } from '#src/features/session/components/entrance.tsx';
+import { NewPasswordForm } from '#src/features/session/components/new-password-form.tsx';
 
 export function Component() {
   const { token = '' } = useParams();
-  const form = useForm({ defaultValues: { password: '', again: '' } });
+  const link = useQuery(resetLinkQuery(token));
   const [done, setDone] = useState(false);
-  return (
-    <Entrance title="Set a new password">
-      {done ? (
+  const title = link.data?.purpose === 'invitation' ? 'Choose a password' : 'Set a new password';
+  if (done) {
+    return (
+      <Entrance title={title}>
         <div role="status" className="grid gap-4">
-          <Callout tone="conform" title="The new password is set">
+          <Callout tone="conform" title="The password is set">
             Every session of this account has ended. Sign in with the new password.
           </Callout>
           <ButtonLink kind="primary" size="large" wide to={paths.signIn.to()}>
             Sign in
           </ButtonLink>
         </div>
-      ) : (
-        <AppForm
-          form={form}
-          label="Set a new password"
-          onSubmit={async ({ password }) => {
-            await setPassword({ token, password });
-            setDone(true);
-          }}
-        >
-          <TextField
-            name="password"
-            label="New password"
-            hint="At least 12 characters; a few words in a row are good."
-            type="password"
-            autoComplete="new-password"
-            autoFocus
-            rules={{
-              required: 'Enter a new password',
-              minLength: { value: 12, message: 'The password is shorter than 12 characters: make it longer' },
-            }}
-          />
-          <TextField
-            name="again"
-            label="New password, once more"
-            type="password"
-            autoComplete="new-password"
-            rules={{
-              validate: (value, values) =>
-                value === values.password || 'The two passwords differ: type them again',
-            }}
-          />
-          <div>
-            <Button
-              type="submit"
-              kind="primary"
-              size="large"
-              wide
-              busy={form.formState.isSubmitting && 'Saving…'}
-            >
-              Set the password
-            </Button>
-          </div>
-        </AppForm>
-      )}
+      </Entrance>
+    );
+  }
+  return (
+    <Entrance title={title}>
+      {link.isPending ? <Skeleton lines={3} /> : null}
+      {link.isError ? (
+        <>
+          <ErrorState error={link.error} what="This link" />
+          <TextLink to={paths.requestReset.to()}>Ask for a new link</TextLink>
+        </>
+      ) : null}
+      {link.data ? (
+        <NewPasswordForm token={token} email={link.data.email} onDone={() => setDone(true)} />
+      ) : null}
     </Entrance>
   );
 }
