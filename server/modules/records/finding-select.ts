@@ -44,6 +44,8 @@ export type FindingDbRow = {
   contractor_id: string;
   revision_status: RevisionStatus;
   inspector_id: string | null;
+  /** Null for a finding that belongs to no line. */
+  line_state: LineState | null;
   /** State of its line while the line stands on this finding's record; null for another's. */
   line_state: LineState | null;
   /** The batch's newest revision is still the contractor's to work on. */
@@ -68,6 +70,7 @@ join revisions v on v.id = f.revision_id
 join batches b on b.id = v.batch_id
 left join revisions open on open.batch_id = b.id and open.status in ('draft', 'checking', 'checked')
 left join finding_states s on s.finding_id = f.id
+left join lines line on line.id = f.line_id and line.record_id = f.record_id
 left join lateral (
   select * from decisions x where s.version > 0 and x.finding_id = f.id order by x.seq desc limit 1
 ) d on true
