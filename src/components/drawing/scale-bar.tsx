@@ -1,6 +1,8 @@
-/** One foot (or half a metre) at the drawing's scale. */
+import { M_PER_FT } from '#shared/units/convert.ts';
+
+/** One foot (or two tenths of a metre) at the drawing's scale, which is given per foot. */
 export function ScaleBar({ x, y, scale, metric }: { x: number; y: number; scale: number; metric: boolean }) {
-  const unit = metric ? scale / 0.3048 / 2 : scale;
+  const unit = metric ? (0.2 / M_PER_FT) * scale : scale;
   return (
     <g>
       <path
@@ -13,7 +15,7 @@ export function ScaleBar({ x, y, scale, metric }: { x: number; y: number; scale:
         0
       </text>
       <text x={x + unit} y={y + 20} fontSize="11" textAnchor="middle" className="fill-muted">
-        {metric ? '0.5 m' : '1 ft'}
+        {metric ? '0.2 m' : '1 ft'}
       </text>
     </g>
   );
