@@ -1,5 +1,5 @@
 import type { Kind } from '#shared/records/types.ts';
-import { VIEWS, VIEWS_OF_KIND } from './views.ts';
+import { VIEWS, VIEWS_OF_KIND } from '#shared/records/photo-views.ts';
 
 export type NamedLine = {
   readonly lineId: string;

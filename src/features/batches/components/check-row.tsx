@@ -1,0 +1,43 @@
+import type { CheckState } from '../api/use-check.ts';
+import { IntakeRow } from './intake-row.tsx';
+import { Progress } from '#src/components/ui/progress.tsx';
+import { counted } from '#src/lib/formats.ts';
+import type { Batch } from '#shared/generated/api-types.ts';
+
+/** The check of the newest upload: how far, or what it came to. */
+export function CheckRow({ batch, check }: { batch: Batch; check: CheckState | null }) {
+  const running = check?.state === 'queued' || check?.state === 'running';
+  return (
+    <IntakeRow
+      glyph={check?.state === 'failed' ? 'triangle' : batch.counts.lines > 0 && !running ? 'tick' : 'dotted'}
+      title="Check"
+    >
+      <div aria-live="polite">
+        {running ? (
+          <Progress
+            done={check.done}
+            total={check.total}
+            things="rows checked"
+            label={check.state === 'queued' ? 'Waits for its turn' : 'The workbook is being read'}
+          />
+        ) : (
+          <p>{resultWords(batch, check)}</p>
+        )}
+        {running ? <p className="mt-1">It goes on when you leave this page.</p> : null}
+      </div>
+    </IntakeRow>
+  );
+}
+
+function resultWords(batch: Batch, check: CheckState | null): string {
+  if (check?.state === 'failed') return 'It ended without a result; see the workbook above.';
+  const { lines } = batch.counts;
+  if (lines === 0) {
+    return batch.workbook.fileName
+      ? 'No line was found in the workbook.'
+      : 'Begins when the workbook is here.';
+  }
+  const { standards } = batch.revision;
+  const on = standards.length > 0 ? `, on standard ${standards.join(' and ')}` : '';
+  return `${counted(lines, 'line')} checked${on}`;
+}
