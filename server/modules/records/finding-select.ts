@@ -44,8 +44,6 @@ export type FindingDbRow = {
   contractor_id: string;
   revision_status: RevisionStatus;
   inspector_id: string | null;
-  /** Null for a finding that belongs to no line. */
-  line_state: LineState | null;
   /** State of its line while the line stands on this finding's record; null for another's. */
   line_state: LineState | null;
   /** The batch's newest revision is still the contractor's to work on. */
