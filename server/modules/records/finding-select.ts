@@ -62,7 +62,7 @@ select f.id, f.record_id, f.line_id, f.ordinal, f.code, f.severity, f.kind, f.st
   a.text as answer_text, a.by as answer_by, a.at as answer_at, a.open as answer_open,
   c.id as concession_id, c.number as concession_number, c.type as concession_type,
   b.contractor_id, v.status as revision_status, v.inspector_id,
-  (select l.state from lines l where l.id = f.line_id and l.record_id = f.record_id) as line_state, open.id as open_revision_id
+  line.state as line_state, open.id as open_revision_id
 from findings f
 join revisions v on v.id = f.revision_id
 join batches b on b.id = v.batch_id
