@@ -207,6 +207,11 @@ export interface Concession {
     structureNumber: string | null;
     title: string;
     message: string;
+    measured: string | number | null;
+    limit: string | number | null;
+    margin: number | null;
+    unit: string | null;
+    uncertainty: number | null;
   }[];
   batch: {
     id: string;

@@ -19,6 +19,19 @@ const SIGNED_IN: RouteObject[] = [
   { path: paths.reviewBatch.path, lazy: () => import('#src/features/review/routes/review-batch.tsx') },
   { path: paths.batches.path, lazy: () => import('#src/features/batches/routes/batches.tsx') },
   { path: paths.batch.path, lazy: () => import('#src/features/batches/routes/batch.tsx') },
+  { path: paths.record.path, lazy: () => import('#src/features/records/routes/record.tsx') },
+  { path: paths.concessions.path, lazy: () => import('#src/features/concessions/routes/concessions.tsx') },
+  { path: paths.concession.path, lazy: () => import('#src/features/concessions/routes/concession.tsx') },
+  { path: paths.register.path, lazy: () => import('#src/features/register/routes/register.tsx') },
+  { path: paths.registerEnter.path, lazy: () => import('#src/features/register/routes/enter-records.tsx') },
+  {
+    path: paths.registerRecord.path,
+    lazy: () => import('#src/features/register/routes/register-record.tsx'),
+  },
+  {
+    path: paths.nonconformities.path,
+    lazy: () => import('#src/features/nonconformities/routes/nonconformities.tsx'),
+  },
   { path: '*', Component: NotFound },
 ];
 

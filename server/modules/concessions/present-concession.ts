@@ -31,5 +31,6 @@ export function presentConcession(
 
 function presentFinding(row: ConcessionFindingRow): Concession['findings'][number] {
   const { title, message } = renderFinding({ ...row, occurrence: null, ownerParams: {}, fingerprint: '' });
-  return { id: row.id, recordId: row.recordId, structureNumber: row.structureNumber, title, message };
+  const { id, recordId, structureNumber, measured, limit, margin, unit, uncertainty } = row;
+  return { id, recordId, structureNumber, title, message, measured, limit, margin, unit, uncertainty };
 }

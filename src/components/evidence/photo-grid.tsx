@@ -13,12 +13,7 @@ type Props = {
 export function PhotoGrid({ photos, onOpen, wide }: Props) {
   const metric = useUnitSystem() === 'metric';
   return (
-    <ul
-      className={classNames(
-        'grid gap-2 px-3 py-2.5',
-        wide ? 'grid-cols-[repeat(auto-fill,minmax(11rem,1fr))]' : 'grid-cols-2',
-      )}
-    >
+    <ul className={classNames('grid gap-2 px-3 py-2.5', columnsFor(photos.length, wide))}>
       {photos.map((photo, index) => (
         <li key={photo.id} className="min-w-0">
           <button
@@ -29,13 +24,21 @@ export function PhotoGrid({ photos, onOpen, wide }: Props) {
             <Picture photo={photo} />
             <span className="block px-1.5 py-1">
               <span className="block truncate text-small font-semibold">{viewWord(photo.view)}</span>
-              <span className="block text-micro text-ink-2">{photoFacts(photo, { metric })}</span>
+              <span className="block text-micro text-ink-2">
+                {photoFacts(photo, { metric, short: !wide && photos.length > 4 })}
+              </span>
             </span>
           </button>
         </li>
       ))}
     </ul>
   );
+}
+
+/** More prints stand closer, so that what is said of them stays in sight. */
+function columnsFor(count: number, wide = false): string {
+  if (wide) return 'grid-cols-[repeat(auto-fill,minmax(11rem,1fr))]';
+  return count > 4 ? 'grid-cols-3' : 'grid-cols-2';
 }
 
 function Picture({ photo }: { photo: Photo }) {

@@ -51,18 +51,14 @@ export function Desk({
       <DeskBand batch={batch} counts={counts} onClose={() => setClosing(true)} move={move} />
       <DeskNotices desk={desk} moveError={move.error} />
       <DeskSteps desk={desk} lines={lines.length} />
-      <div className="grid min-h-0 flex-1 lg:grid-cols-[15rem_minmax(0,1fr)_21rem] xl:grid-cols-[17rem_minmax(0,1fr)_24rem]">
+      <div className="grid min-h-0 flex-1 lg:grid-cols-[15rem_minmax(0,1fr)_21rem] xl:grid-cols-[19.5rem_minmax(0,1fr)_24rem]">
         <section
           aria-label="Lines of the batch"
           className={classNames(pane('lines'), 'bg-sheet lg:border-r')}
         >
           <LinesPane desk={desk} batch={batch} lines={lines} clean={counts.clean} />
         </section>
-        <section
-          aria-label="Record sheet"
-          // The list beside it has the keyboard; this one only scrolls.
-          className={classNames(pane('sheet'), 'overflow-y-auto')}
-        >
+        <section aria-label="Record sheet" className={classNames(pane('sheet'), 'overflow-y-auto')}>
           <SheetPane desk={desk} onShowEvidence={() => desk.place.setStep('evidence')} />
         </section>
         <section

@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { FindingFacts } from '#src/components/evidence/finding-facts.tsx';
 import { Glyph } from '#src/components/ui/glyph.tsx';
 import { classNames } from '#src/lib/class-names.ts';
@@ -30,9 +30,14 @@ export function findingElementId(id: string): string {
 /** A finding beside the drawing: its number is its balloon's, and each marks the other. */
 export function FindingItem({ finding, number, inHand, marked, onTake, onHover, children }: Props) {
   const settled = finding.state === 'approved';
+  const item = useRef<HTMLLIElement>(null);
+  useEffect(() => {
+    if (inHand) item.current?.scrollIntoView({ block: 'nearest' });
+  }, [inHand]);
   return (
     // oxlint-disable-next-line jsx-a11y/no-noninteractive-element-interactions -- the pointer only marks; the button inside does the same by focus
     <li
+      ref={item}
       aria-current={inHand ? 'true' : undefined}
       onMouseEnter={() => onHover(true)}
       onMouseLeave={() => onHover(false)}

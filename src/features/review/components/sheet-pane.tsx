@@ -29,7 +29,7 @@ export function SheetPane({ desk, onShowEvidence }: { desk: DeskModel; onShowEvi
   if (!sheet.data) return <Skeleton lines={14} label="Loading the record sheet" />;
   const { record, findings, titleBlock } = sheet.data;
   return (
-    <div className="px-3 py-2.5">
+    <div className="px-3 py-2.5 lg:[&_figure_svg]:max-h-[calc(100dvh-11rem)]">
       <RecordSheet
         record={{
           ...record,

@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { ColumnChooser } from '#src/components/table/column-chooser.tsx';
 import { DataList } from '#src/components/table/data-list.tsx';
 import { FilterBar, type FilterDefinition } from '#src/components/table/filter-bar.tsx';
@@ -12,6 +13,7 @@ import { useReviewQueue } from '#src/features/review/api/review-queue.ts';
 import { QUEUE_COLUMNS } from '#src/features/review/components/queue-columns.tsx';
 import { useFilters } from '#src/lib/filters/use-filters.ts';
 import { counted } from '#src/lib/formats.ts';
+import { useCan } from '#src/lib/session/use-can.ts';
 import type { Batch } from '#shared/generated/api-types.ts';
 
 const FILTERS: readonly FilterDefinition[] = [
@@ -36,8 +38,10 @@ export function Component() {
   const filters = useFilters(NAMES);
   const status = filters.values['status'];
   const list = useReviewQueue(status === 'submitted' || status === 'in-review' ? status : undefined);
+  const mayTake = useCan('review', 'Batch');
+  const shown = useMemo(() => QUEUE_COLUMNS.filter(({ id }) => id !== 'take' || mayTake), [mayTake]);
   const columns = useColumns<Batch>({
-    columns: QUEUE_COLUMNS,
+    columns: shown,
     rows: list.rows,
     rowKey: (batch) => batch.id,
     storageKey: 'review-queue',
@@ -48,7 +52,7 @@ export function Component() {
       <PageBand
         title="Review desk"
         facts={list.total === null ? null : <Fact>{counted(list.total, 'batch', 'batches')}</Fact>}
-        actions={<ColumnChooser columns={QUEUE_COLUMNS} {...columns} />}
+        actions={<ColumnChooser columns={shown} {...columns} />}
       />
       <FilterBar filters={filters} define={FILTERS} />
       <DataList<Batch>

@@ -1,0 +1,117 @@
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { lineStamp } from '#src/components/evidence/line-stamp.ts';
+import { lineState } from '#src/components/evidence/line-words.ts';
+import { HistoryList } from '#src/components/evidence/history-list.tsx';
+import { sheetFindings } from '#src/components/evidence/number-findings.ts';
+import { PhotoGrid } from '#src/components/evidence/photo-grid.tsx';
+import { PhotoViewer } from '#src/components/evidence/photo-viewer.tsx';
+import { titleBlockData } from '#src/components/evidence/title-block-data.ts';
+import { RecordSheet } from '#src/components/drawing/record-sheet.tsx';
+import { Button } from '#src/components/ui/button.tsx';
+import { Cautions } from '#src/components/ui/caution.tsx';
+import { Fact, PageBand, SectionHead } from '#src/components/ui/page-band.tsx';
+import { StateWord } from '#src/components/ui/state-word.tsx';
+import { TextLink } from '#src/components/ui/text-link.tsx';
+import { paths } from '#src/config/paths.ts';
+import { DerivedFigures } from '#src/features/records/components/derived-figures.tsx';
+import { LineMoves } from '#src/features/records/components/line-moves.tsx';
+import { Measurements } from '#src/features/records/components/measurements.tsx';
+import { PoursTable } from '#src/features/records/components/pours-table.tsx';
+import { RecordFindings } from '#src/features/records/components/record-findings.tsx';
+import { sheetLimitsQuery } from '#src/lib/api/sheet-limits.ts';
+import { counted } from '#src/lib/formats.ts';
+import { useUser } from '#src/lib/session/session.ts';
+import type { RecordSheetData } from '#shared/generated/api-types.ts';
+import type { FieldValues } from '#shared/records/types.ts';
+
+/** One structure: its drawing, all that was written of it, and what became of it. Printed, it is the sheet alone. */
+export function RecordPage({ data }: { data: RecordSheetData }) {
+  const { record, findings, photos, batch, registerEntry } = data;
+  const user = useUser();
+  const limits = useQuery(sheetLimitsQuery(record.standard));
+  const [photo, setPhoto] = useState<number | null>(null);
+  const [marked, setMarked] = useState<string | null>(null);
+  const batchTo = user.role === 'contractor' ? paths.batch.to(batch.id) : paths.reviewBatch.to(batch.id);
+  return (
+    <>
+      <div className="print:hidden">
+        <PageBand
+          title={record.structureNumber}
+          facts={
+            <>
+              <Fact>
+                <StateWord {...lineState(record)} />
+              </Fact>
+              <Fact word="batch">
+                <TextLink to={user.role === 'contractor' ? batchTo : `${batchTo}?line=${record.id}&tab=all`}>
+                  {batch.number}
+                </TextLink>
+              </Fact>
+              <Fact word="work order">
+                {batch.workOrder.number} · {batch.workOrder.title}
+              </Fact>
+              <Fact word="from">{batch.contractor.name}</Fact>
+              {registerEntry ? (
+                <Fact word="on record as">
+                  <TextLink to={paths.registerRecord.to(registerEntry.recordNumber)}>
+                    {registerEntry.recordNumber}
+                  </TextLink>
+                  , version {registerEntry.version}
+                </Fact>
+              ) : null}
+            </>
+          }
+          actions={
+            <>
+              <LineMoves record={record} />
+              <Button size="small" onClick={() => window.print()}>
+                Print the sheet
+              </Button>
+            </>
+          }
+        />
+      </div>
+      <div className="grid flex-1 lg:grid-cols-[minmax(0,1fr)_26rem] print:block">
+        <div className="min-w-0 lg:border-r print:border-none">
+          <div className="mx-auto max-w-5xl px-3 py-2.5 print:max-w-none print:p-0">
+            <RecordSheet
+              record={{ ...record, values: record.values as FieldValues }}
+              findings={sheetFindings(findings)}
+              titleBlock={titleBlockData(data.titleBlock)}
+              limits={limits.data}
+              stamp={lineStamp(record, findings)}
+              activeFinding={marked}
+              onActive={setMarked}
+              onPick={(id) => document.getElementById(`finding-${id}`)?.focus()}
+            />
+          </div>
+          <div className="border-t border-hairline print:hidden">
+            <DerivedFigures record={record} />
+            <Measurements data={data} />
+            <PoursTable pours={data.pours} />
+          </div>
+        </div>
+        <div className="min-w-0 print:hidden">
+          <RecordFindings findings={findings} marked={marked} onMark={setMarked} />
+          <section aria-labelledby="photographs">
+            <SectionHead
+              title="Photographs"
+              id="photographs"
+              aside={photos.length === 0 ? 'none' : counted(photos.length, 'photograph')}
+            />
+            {photos.length > 0 ? <PhotoGrid photos={photos} onOpen={setPhoto} wide /> : null}
+          </section>
+          <section aria-labelledby="history">
+            <SectionHead title="History" id="history" />
+            <HistoryList entries={data.history} />
+          </section>
+          <div className="px-gutter py-4">
+            <Cautions />
+          </div>
+        </div>
+      </div>
+      <PhotoViewer photos={photos} index={photo} onIndex={setPhoto} title={record.structureNumber} />
+    </>
+  );
+}

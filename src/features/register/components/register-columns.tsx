@@ -1,0 +1,78 @@
+import type { DataColumn } from '#src/components/table/columns.ts';
+import { Figure } from '#src/components/ui/figure.tsx';
+import { Day, Moment } from '#src/components/ui/moment.tsx';
+import { Quantity } from '#src/components/ui/quantity.tsx';
+import { kindWord } from '#src/lib/filters/rule-options.ts';
+import type { RegisterRow } from '#shared/generated/api-types.ts';
+import { Conformity } from './conformity.tsx';
+
+export const REGISTER_COLUMNS: readonly DataColumn<RegisterRow>[] = [
+  {
+    id: 'structure',
+    title: 'Structure',
+    sort: 'structure',
+    min: 6,
+    main: true,
+    cell: (row) => row.structureNumber,
+  },
+  { id: 'record', title: 'Record', min: 6, cell: (row) => row.recordNumber },
+  {
+    id: 'version',
+    title: 'Version',
+    min: 4,
+    grow: 0,
+    figures: true,
+    cell: (row) => (row.current ? row.version : `${row.version}, old`),
+  },
+  { id: 'kind', title: 'Kind', min: 4.5, cell: (row) => kindWord(row.kind) },
+  { id: 'pole', title: 'Pole', min: 7.5, cell: (row) => row.pole ?? '–' },
+  {
+    id: 'embedment',
+    title: 'Embedment',
+    unit: 'ft',
+    figures: true,
+    min: 6,
+    cell: (row) => <Figure value={row.embedmentFt} unit="ft" />,
+  },
+  {
+    id: 'due',
+    title: 'Due',
+    unit: 'ft',
+    figures: true,
+    min: 4,
+    cell: (row) => <Figure value={row.dueFt} unit="ft" />,
+  },
+  {
+    id: 'fill',
+    title: 'Fill ratio',
+    figures: true,
+    min: 6,
+    cell: (row) =>
+      row.fillRatio === null ? (
+        <Figure value={null} unit="ratio" />
+      ) : (
+        <Quantity value={row.fillRatio} unit="ratio" plusMinus={row.fillRatioU} />
+      ),
+  },
+  { id: 'state', title: 'State', min: 10, grow: 1.4, cell: (row) => <Conformity row={row} /> },
+  { id: 'lots', title: 'Lot', min: 5.5, cell: (row) => row.lots.join(', ') || '–' },
+  { id: 'contractor', title: 'Contractor', min: 8, grow: 1.4, cell: (row) => row.contractor.name },
+  { id: 'order', title: 'Work order', min: 5, off: true, cell: (row) => row.workOrder.number },
+  {
+    id: 'installed',
+    title: 'Installed',
+    sort: 'installed',
+    figures: true,
+    min: 6.5,
+    cell: (row) => (row.installedOn ? <Day on={row.installedOn} /> : '–'),
+  },
+  {
+    id: 'entered',
+    title: 'Entered',
+    sort: 'entered',
+    min: 9.5,
+    off: true,
+    cell: (row) => <Moment at={row.enteredAt} />,
+  },
+  { id: 'by', title: 'Entered by', min: 6.5, off: true, cell: (row) => row.enteredBy },
+];
