@@ -25,7 +25,7 @@ function Tick({ row }: { row: RegisterCandidate }) {
         className="size-4 accent-ink"
         checked={selection.has(row.recordId)}
         onChange={(event) =>
-          toggle(row.recordId, { through: (event.nativeEvent as MouseEvent).shiftKey === true })
+          toggle(row.recordId, { through: (event.nativeEvent as MouseEvent).shiftKey })
         }
       />
       {row.structureNumber}
