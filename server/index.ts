@@ -3,6 +3,7 @@ import { createApp } from '#server/app.ts';
 import { ConfigError, loadConfig } from '#server/config/config.ts';
 import { createServices } from '#server/container.ts';
 import { startCapture } from '#server/mail/capture-server.ts';
+import { closeEventStreams } from '#server/modules/events/send-events.ts';
 import { startWorker } from '#server/worker.ts';
 
 /** How long requests under way may take after the process was told to stop. */
@@ -26,6 +27,7 @@ async function main(): Promise<void> {
     stopping = true;
     log.info({ signal }, 'stopping');
     if (web) web.app.locals.stopping = true;
+    closeEventStreams(services);
     if (server?.listening) {
       const closed = new Promise((resolve) => void server.close(resolve));
       server.closeIdleConnections();

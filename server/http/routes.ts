@@ -1,5 +1,6 @@
 import type { Route } from '#server/http/define-route.ts';
 import { batchRoutes } from '#server/modules/batches/routes.ts';
+import { eventRoutes } from '#server/modules/events/routes.ts';
 import { healthRoutes } from '#server/modules/health/routes.ts';
 import { homeRoutes } from '#server/modules/home/routes.ts';
 import { jobRoutes } from '#server/modules/jobs/routes.ts';
@@ -32,6 +33,7 @@ export const ROUTES: readonly Route[] = [
   ...batchRoutes,
   ...photoRoutes,
   ...recordRoutes,
+  ...eventRoutes,
   ...lotRoutes,
   ...productRoutes,
   ...reviewRoutes,

@@ -24,6 +24,7 @@ const TITLES: Readonly<Record<string, string>> = {
   'batch.checked': 'Batch checked',
   'batch.check-failed': 'Check failed',
   'batch.submitted': 'Batch submitted',
+  'batch.checked-again': 'Batch checked again',
   'batch.withdrawn': 'Batch withdrawn',
   'batch.taken': 'Batch taken for review',
   'batch.released': 'Batch given back to the queue',

@@ -26,6 +26,7 @@ import { presentBatch } from './present-batch.ts';
 import { readBatch } from './read-batch.ts';
 import { readChanges } from './read-changes.ts';
 import { readCheck } from './read-check.ts';
+import { recheckBatch } from './recheck-batch.ts';
 import { submitBatch } from './submit-batch.ts';
 import { uploadPhotos } from './upload-photos.ts';
 import { uploadWorkbook } from './upload-workbook.ts';
@@ -151,6 +152,19 @@ export const batchRoutes: readonly Route[] = [
     permission: { action: 'read', subject: 'Batch' },
     reply: batchChangesSchema,
     handler: async (ctx) => readChanges(ctx.em, { batch: await seen(ctx, ctx.params.id), actor: ctx.actor }),
+  }),
+  defineRoute<{ reply: Batch }>({
+    method: 'post',
+    path: '/api/batches/:id/recheck',
+    summary: 'Check the same files again, on what is in force now',
+    permission: { action: 'hand-in', subject: 'Batch' },
+    status: 202,
+    reply: batchSchema,
+    handler: async (ctx) => {
+      const contractorId = contractorWall(ctx.ability, 'hand-in', 'Batch');
+      await recheckBatch(ctx.em, { batchId: ctx.params.id, contractorId, actor: ctx.actor });
+      return shown(ctx, ctx.params.id);
+    },
   }),
   defineRoute<{ reply: Batch }>({
     method: 'post',

@@ -1,3 +1,4 @@
+import { formatDay, formatWallClock } from '#src/lib/formats.ts';
 import { Quantity } from '#src/components/ui/quantity.tsx';
 
 type Props = {
@@ -36,7 +37,11 @@ function Part({ word, value, unit, plusMinus }: PartProps) {
   return (
     <span>
       <span className="text-muted">{word} </span>
-      {typeof value === 'number' ? <Quantity value={value} unit={unit ?? ''} plusMinus={plusMinus} /> : value}
+      {typeof value === 'number' ? (
+        <Quantity value={value} unit={unit ?? ''} plusMinus={plusMinus} />
+      ) : (
+        formatDay(formatWallClock(value))
+      )}
     </span>
   );
 }

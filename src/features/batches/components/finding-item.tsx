@@ -6,7 +6,8 @@ import type { LineView } from '../lib/line-view.ts';
 import { Glyph } from '#src/components/ui/glyph.tsx';
 import { MeasuredAgainst } from '#src/components/ui/measured-against.tsx';
 import { SEVERITY_WORDS } from '#src/components/ui/state-word.tsx';
-import { classNames } from '#src/lib/class-names.ts';
+import { TextLink } from '#src/components/ui/text-link.tsx';
+import { paths } from '#src/config/paths.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 
 export type FindingActions = {
@@ -20,10 +21,12 @@ type Props = FindingActions & {
   readonly finding: FindingRow;
   /** Absent: it belongs to the workbook as a whole. */
   readonly line?: LineView;
+  /** On a phone its head names the line. */
+  readonly named?: boolean;
 };
 
 /** One finding in full: what, how far from the limit, where it stands in the workbook, what puts it right. */
-export function FindingItem({ finding, line, batchId, open, onPhotograph }: Props) {
+export function FindingItem({ finding, line, named, batchId, open, onPhotograph }: Props) {
   const severity = SEVERITY_WORDS[finding.severity];
   const [missing] = line ? missingPhotographs([{ ...line, findings: [finding] }]) : [];
   return (
@@ -31,7 +34,17 @@ export function FindingItem({ finding, line, batchId, open, onPhotograph }: Prop
       <Glyph name={severity.glyph} className="mt-1" label={severity.word} />
       <div>
         <h4 className="text-base font-semibold">
-          {line ? <span className="lg:hidden">{line.record.structureNumber} · </span> : null}
+          {line && named ? (
+            <span className="lg:hidden">
+              <TextLink
+                to={paths.record.to(line.record.id)}
+                className="no-underline hover:underline pointer-coarse:inline-block pointer-coarse:py-1"
+              >
+                {line.record.structureNumber}
+              </TextLink>
+              {' · '}
+            </span>
+          ) : null}
           {finding.title}
         </h4>
         <p className="text-ink-2">{finding.message}</p>
@@ -62,7 +75,7 @@ export function FindingItem({ finding, line, batchId, open, onPhotograph }: Prop
           ) : null}
           <AnswerBox finding={finding} batchId={batchId} />
         </div>
-        <FindingDecision finding={finding} className={classNames('mt-1')} />
+        <FindingDecision finding={finding} className="mt-1" />
       </div>
     </li>
   );

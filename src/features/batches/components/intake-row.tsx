@@ -13,16 +13,12 @@ export function IntakeRow({ glyph, title, action, children }: Props) {
   return (
     <section
       aria-label={title}
-      className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-2.5 border-b border-hairline px-gutter py-3"
+      className="grid grid-cols-[auto_minmax(0,1fr)_auto] gap-x-2.5 border-b border-hairline px-gutter py-3"
     >
       <Glyph name={glyph} className="mt-1" />
-      <div>
-        <div className="flex items-start justify-between gap-3">
-          <h2 className="text-base font-semibold">{title}</h2>
-          {action}
-        </div>
-        <div className="text-table text-muted">{children}</div>
-      </div>
+      <h2 className="text-base font-semibold">{title}</h2>
+      <div className="row-span-2 self-start pointer-coarse:self-center">{action}</div>
+      <div className="col-start-2 text-table text-muted">{children}</div>
     </section>
   );
 }

@@ -2,7 +2,7 @@ import { FindingItem, type FindingActions } from './finding-item.tsx';
 import { describeLine } from '../lib/describe-line.ts';
 import { wantsLook, worstSeverity, type LineView } from '../lib/line-view.ts';
 import { Glyph, type GlyphName } from '#src/components/ui/glyph.tsx';
-import { LINE_WORDS, SEVERITY_WORDS, StateWord } from '#src/components/ui/state-word.tsx';
+import { LINE_WORDS, SEVERITY_WORDS } from '#src/components/ui/state-word.tsx';
 import { TextLink } from '#src/components/ui/text-link.tsx';
 import { paths } from '#src/config/paths.ts';
 import { classNames } from '#src/lib/class-names.ts';
@@ -32,6 +32,8 @@ export function LineItem({ line, active, onActive, decided, ...actions }: Props)
         className={classNames(
           'flex flex-wrap items-baseline gap-x-2 lg:block lg:py-3',
           findings.length > 0 ? 'pt-2.5' : 'py-2.5',
+          // On a phone the head of each finding names the line already.
+          findings.length > 0 && !decided && 'max-lg:hidden',
         )}
       >
         <h3 className="flex items-center gap-2 text-base">
@@ -48,13 +50,11 @@ export function LineItem({ line, active, onActive, decided, ...actions }: Props)
           </span>
         </h3>
         <p className="ml-auto text-table text-ink-2 lg:ml-6">
-          {decided ? (
-            <StateWord {...LINE_WORDS[record.state]} />
-          ) : findings.length === 0 ? (
-            'no findings'
-          ) : (
-            <span className="max-lg:sr-only">{countWords(line)}</span>
-          )}
+          {decided
+            ? LINE_WORDS[record.state].word
+            : findings.length === 0
+              ? 'no findings'
+              : counted(findings.length, 'finding')}
           <span className="text-muted max-lg:hidden">
             {decided ? ' · ' : <br />}
             {counted(record.photos.length, 'photograph')}, row {record.row}
@@ -67,7 +67,7 @@ export function LineItem({ line, active, onActive, decided, ...actions }: Props)
       {findings.length > 0 ? (
         <ul aria-label={`Findings on ${record.structureNumber}`}>
           {findings.map((finding) => (
-            <FindingItem key={finding.id} finding={finding} line={line} {...actions} />
+            <FindingItem key={finding.id} finding={finding} line={line} named={!decided} {...actions} />
           ))}
         </ul>
       ) : null}
@@ -80,8 +80,4 @@ function lineGlyph(line: LineView, decided: boolean): GlyphName {
   if (!wantsLook(line)) return 'tick';
   const worst = worstSeverity(line.findings);
   return worst ? SEVERITY_WORDS[worst].glyph : 'tick';
-}
-
-function countWords({ findings }: LineView): string {
-  return counted(findings.length, 'finding');
 }

@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
 import { FindingItem, type FindingActions } from './finding-item.tsx';
 import { LineList } from './line-list.tsx';
 import { ShowBar } from './show-bar.tsx';
@@ -19,15 +19,23 @@ type Props = FindingActions & {
 
 export function LinesPanel({ view, filters, decided, ...actions }: Props) {
   const shown = useMemo(() => filterLines(view, filters.values), [view, filters.values]);
+  const [filtering, setFiltering] = useState(filters.count > 1);
   const define = useMemo(() => definitions(view, decided), [view, decided]);
   return (
     <>
-      <ShowBar
-        view={view}
-        show={shownOf(filters.values, view)}
-        onShow={(show) => filters.set('show', show)}
-      />
-      <FilterBar filters={filters} define={define} />
+      <ShowBar view={view} show={shownOf(filters.values, view)} onShow={(show) => filters.set('show', show)}>
+        <button
+          type="button"
+          aria-expanded={filtering}
+          onClick={() => setFiltering(!filtering)}
+          className="ml-auto min-h-7 text-muted underline underline-offset-4 lg:hidden pointer-coarse:min-h-11"
+        >
+          Filters
+        </button>
+      </ShowBar>
+      <div className={filtering ? undefined : 'max-lg:hidden'}>
+        <FilterBar filters={filters} define={define} />
+      </div>
       {shown.loose.length > 0 ? (
         <section aria-label="Findings of the workbook as a whole">
           <SectionHead title="The workbook as a whole" aside={`${shown.loose.length}`} />

@@ -18,7 +18,7 @@ export function PhotoTile({ photo, onOpen }: Props) {
       <PhotoPicture photo={photo} />
       <span className="block px-2 py-1.5">
         <span className="block truncate text-table font-semibold first-letter:uppercase">{title}</span>
-        <span className="block truncate text-small text-muted">
+        <span className="block text-small text-muted">
           {photo.takenAt ? formatWallClock(photo.takenAt) : 'time not known'}
           {photo.distanceFt === null ? null : (
             <>

@@ -1,12 +1,18 @@
+import type { ReactNode } from 'react';
 import type { Show } from '../lib/filter-lines.ts';
 import { isIncomplete, wantsLook, type BatchView } from '../lib/line-view.ts';
 import { classNames } from '#src/lib/class-names.ts';
 import { counted } from '#src/lib/formats.ts';
 
-type Props = { readonly view: BatchView; readonly show: Show; readonly onShow: (show: Show) => void };
+type Props = {
+  readonly view: BatchView;
+  readonly show: Show;
+  readonly onShow: (show: Show) => void;
+  readonly children?: ReactNode;
+};
 
 /** `5 lines want a look   17 lines clean   all 22`: each shows its own. */
-export function ShowBar({ view, show, onShow }: Props) {
+export function ShowBar({ view, show, onShow, children }: Props) {
   const want = view.lines.filter(wantsLook).length;
   const incomplete = [...view.loose, ...view.lines.flatMap((line) => line.findings)].filter(
     isIncomplete,
@@ -39,6 +45,7 @@ export function ShowBar({ view, show, onShow }: Props) {
           {text}
         </button>
       ))}
+      {children}
     </div>
   );
 }

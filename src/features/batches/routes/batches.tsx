@@ -33,8 +33,9 @@ export function Component() {
   const filters = useFilters(FILTERS);
   const list = useKeysetList<Batch>({ key: 'batches', path: '/api/batches', query: filters.values });
   const own = user.role === 'contractor';
+  const offered = useMemo(() => BATCH_COLUMNS.filter((column) => !own || column.id !== 'contractor'), [own]);
   const columns = useColumns<Batch>({
-    columns: useMemo(() => BATCH_COLUMNS.filter((column) => !own || column.id !== 'contractor'), [own]),
+    columns: offered,
     rows: list.rows,
     rowKey: (row) => row.id,
     storageKey: 'batches',
@@ -45,7 +46,7 @@ export function Component() {
       <PageBand
         title="Batches"
         facts={list.total === null ? null : <Fact>{counted(list.total, 'batch', 'batches')}</Fact>}
-        actions={<ColumnChooser {...columns} columns={BATCH_COLUMNS} />}
+        actions={<ColumnChooser {...columns} columns={offered} />}
       />
       <FilterBar filters={filters} define={DEFINE} />
       <DataList
