@@ -886,6 +886,15 @@ export interface RegisterRow {
   can: string[];
 }
 /**
+ * A foam product, or its next version, in force from a work day on.
+ */
+export interface SaveProductBody {
+  effectiveOn: string;
+  body: {
+    [k: string]: unknown;
+  };
+}
+/**
  * Who is signed in, what they may do, and the token that every write must carry.
  */
 export interface Session {

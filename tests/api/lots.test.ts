@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { rows } from '#server/db/rows.ts';
+import { DEMO_PRODUCT } from '#shared/standard/demo.ts';
 import { pourRows, setRow } from '#tests/factories/set-row.ts';
 import { createWorkSite, type WorkSite } from '#tests/factories/work-site.ts';
 import { workbookFile } from '#tests/factories/workbook-file.ts';
@@ -102,6 +103,30 @@ describe('lots', () => {
     expect((await contractor.get('/api/lots')).status).toBe(403);
     expect((await contractor.get(`/api/lots/${site.lot.id}`)).status).toBe(403);
     expect((await contractor.get('/api/products')).body.items).toMatchObject([{ code: 'EP-15', n: 1 }]);
+  });
+
+  it('belong to products that an administrator enters by versions', async () => {
+    const body = { ...DEMO_PRODUCT, code: 'EP-20', name: 'EP-20 foam' };
+    const made = await administrator.post('/api/products').send({ effectiveOn: '2026-01-01', body });
+    expect(made.status).toBe(201);
+    expect(made.body).toMatchObject({ code: 'EP-20', n: 1 });
+    const next = await administrator.post('/api/products').send({ effectiveOn: '2026-06-01', body });
+    expect(next.body).toMatchObject({ id: made.body.id, n: 2 });
+    const taken = await administrator.post('/api/products').send({ effectiveOn: '2026-06-01', body });
+    expect(taken.body).toMatchObject({ status: 409, code: 'product.day-taken' });
+    const { kitsFt3: _, ...lacking } = body;
+    const refused = await administrator
+      .post('/api/products')
+      .send({ effectiveOn: '2026-07-01', body: lacking });
+    expect(refused.body).toMatchObject({
+      status: 422,
+      errors: [{ pointer: '/body/kitsFt3', code: 'required' }],
+    });
+    const inspector = await harness.signIn('inspector');
+    expect((await inspector.post('/api/products').send({ effectiveOn: '2026-08-01', body })).status).toBe(
+      403,
+    );
+    expect((await inspector.get(`/api/products/${made.body.id}`)).body.n).toBe(2);
   });
 
   it('answer 400 to a cursor that was not given out', async () => {

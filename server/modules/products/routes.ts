@@ -1,7 +1,9 @@
 import { defineRoute, type Route } from '#server/http/define-route.ts';
 import productSchema from '#schemas/api/product.schema.json' with { type: 'json' };
-import type { Product } from '#shared/generated/api-types.ts';
-import { listProducts } from './list-products.ts';
+import saveProductBodySchema from '#schemas/api/save-product-body.schema.json' with { type: 'json' };
+import type { Product, SaveProductBody } from '#shared/generated/api-types.ts';
+import { listProducts, readProduct } from './list-products.ts';
+import { saveProduct } from './save-product.ts';
 
 export const productRoutes: readonly Route[] = [
   defineRoute<{ reply: { items: Product[] } }>({
@@ -15,5 +17,23 @@ export const productRoutes: readonly Route[] = [
       required: ['items'],
     },
     handler: async ({ em }) => listProducts(em),
+  }),
+  defineRoute<{ reply: Product }>({
+    method: 'get',
+    path: '/api/products/:id',
+    summary: 'One foam product with its newest version',
+    permission: { action: 'read', subject: 'Product' },
+    reply: productSchema,
+    handler: async ({ em, params }) => readProduct(em, params.id),
+  }),
+  defineRoute<{ body: SaveProductBody; reply: Product }>({
+    method: 'post',
+    path: '/api/products',
+    summary: 'Enter a foam product, or its next version',
+    permission: { action: 'create', subject: 'Product' },
+    creates: true,
+    body: saveProductBodySchema,
+    reply: productSchema,
+    handler: async ({ em, body, actor }) => readProduct(em, await saveProduct(em, { body, actor })),
   }),
 ];
