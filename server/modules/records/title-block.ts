@@ -80,14 +80,15 @@ function doneAt({ kind, values, workDay }: Line): string | null {
   return typeof clock === 'string' ? clock : workDay;
 }
 
-/** `40 ft class 4, southern pine`; null where neither length nor class is written. */
+/** `40 ft class 4, pine`; null where neither length nor class is written. */
 function poleOf(values: Readonly<Record<string, unknown>>): string | null {
   const { poleLengthFt, poleClass, poleMaterial } = values;
   const size = [
     typeof poleLengthFt === 'number' ? `${poleLengthFt} ft` : null,
     typeof poleClass === 'string' && poleClass !== 'other' ? `class ${poleClass}` : null,
   ].filter((part) => part !== null);
-  const material = typeof poleMaterial === 'string' ? poleMaterial.replaceAll('-', ' ') : null;
+  // The corner of a drawing has room for the wood, not for where it grew.
+  const material = typeof poleMaterial === 'string' ? (poleMaterial.split('-').at(-1) ?? null) : null;
   const parts = [size.join(' '), material].filter(Boolean);
   return parts.length === 0 ? null : parts.join(', ');
 }

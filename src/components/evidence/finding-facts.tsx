@@ -1,6 +1,5 @@
-import { findingWord } from '#src/components/evidence/decision-words.ts';
+import { DecisionLine } from '#src/components/evidence/decision-line.tsx';
 import { MeasuredAgainst } from '#src/components/ui/measured-against.tsx';
-import { StateWord } from '#src/components/ui/state-word.tsx';
 import { formatInstant } from '#src/lib/formats.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 
@@ -13,8 +12,7 @@ export function cellOf({ sheet, cell }: Pick<FindingRow, 'sheet' | 'cell'>): str
 /** What a finding says below its title: figures, place and words; the answer and the decision once there are any. */
 export function FindingFacts({ finding, remedy }: { finding: FindingRow; remedy: boolean }) {
   const cell = cellOf(finding);
-  const word = findingWord(finding);
-  const { decision, answer } = finding;
+  const { answer } = finding;
   return (
     <div className="grid gap-0.5 text-table">
       <MeasuredAgainst
@@ -37,21 +35,7 @@ export function FindingFacts({ finding, remedy }: { finding: FindingRow; remedy:
           </span>
         </p>
       ) : null}
-      {word ? (
-        <p className="flex flex-wrap items-baseline gap-x-2">
-          <span className="font-semibold">
-            <StateWord {...word} />
-          </span>
-          {decision ? (
-            <span className="text-ink-2">
-              {decision.reason ? `${decision.reason} ` : ''}
-              <span className="text-muted">
-                {decision.by}, {formatInstant(decision.at)}
-              </span>
-            </span>
-          ) : null}
-        </p>
-      ) : null}
+      <DecisionLine finding={finding} />
     </div>
   );
 }

@@ -61,6 +61,11 @@ export function PhotoViewer({ photos, index, onIndex, title }: Props) {
         <Radix.Content
           aria-describedby={undefined}
           onKeyDown={onKey}
+          // The window itself has the keyboard, so that the arrows act at once and no button looks chosen.
+          onOpenAutoFocus={(event) => {
+            event.preventDefault();
+            if (event.currentTarget instanceof HTMLElement) event.currentTarget.focus();
+          }}
           className="fixed inset-0 z-50 flex flex-col bg-sheet outline-none"
         >
           {photo && index !== null ? (

@@ -51,7 +51,7 @@ export function Desk({
       <DeskBand batch={batch} counts={counts} onClose={() => setClosing(true)} move={move} />
       <DeskNotices desk={desk} moveError={move.error} />
       <DeskSteps desk={desk} lines={lines.length} />
-      <div className="grid min-h-0 flex-1 lg:grid-cols-[15rem_minmax(0,1fr)_21rem] xl:grid-cols-[19.5rem_minmax(0,1fr)_24rem]">
+      <div className="grid min-h-0 flex-1 lg:grid-cols-[15rem_minmax(0,1fr)_21rem] xl:grid-cols-[19.5rem_minmax(0,1fr)_25rem]">
         <section
           aria-label="Lines of the batch"
           className={classNames(pane('lines'), 'bg-sheet lg:border-r')}

@@ -1,4 +1,4 @@
-import { FindingFacts } from '#src/components/evidence/finding-facts.tsx';
+import { DecisionLine } from '#src/components/evidence/decision-line.tsx';
 import { Callout } from '#src/components/ui/callout.tsx';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 
@@ -11,7 +11,7 @@ export function NewerState({ finding }: { finding: FindingRow }) {
           <p>It is undecided now. What you typed is below; send it again if it still holds.</p>
         ) : (
           <>
-            <FindingFacts finding={{ ...finding, answer: null }} remedy={false} />
+            <DecisionLine finding={finding} />
             <p className="mt-1">
               What you typed is below. Send it again to replace that decision, or cancel.
             </p>

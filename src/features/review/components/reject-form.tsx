@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { RadioField } from '#src/components/form/radio-field.tsx';
 import { TextArea } from '#src/components/form/text-area.tsx';
@@ -19,6 +19,8 @@ const USUAL_DAYS = 14;
 export function RejectForm({ finding, onSend, ...frame }: Props) {
   const [dueOn] = useState(() => dayFrom(new Date(), USUAL_DAYS));
   const form = useForm<Values>({ defaultValues: { action: '', dueOn, reason: '' } });
+  const { setFocus } = form;
+  useEffect(() => setFocus('action'), [setFocus]);
   return (
     <DecisionForm
       {...frame}
