@@ -12,6 +12,7 @@ import { peopleRoutes } from '#server/modules/people/routes.ts';
 import { photoRoutes } from '#server/modules/photos/routes.ts';
 import { productRoutes } from '#server/modules/products/routes.ts';
 import { recordRoutes } from '#server/modules/records/routes.ts';
+import { searchRoutes } from '#server/modules/search/routes.ts';
 import { sessionRoutes } from '#server/modules/session/routes.ts';
 import { concessionRoutes } from '#server/modules/concessions/routes.ts';
 import { nonconformityRoutes } from '#server/modules/nonconformities/routes.ts';
@@ -43,6 +44,7 @@ export const ROUTES: readonly Route[] = [
   ...nonconformityRoutes,
   ...standardRoutes,
   ...trailRoutes,
+  ...searchRoutes,
   ...mailCaptureRoutes,
   ...jobRoutes,
   ...openapiRoutes(() => ROUTES),

@@ -895,6 +895,17 @@ export interface SaveProductBody {
   };
 }
 /**
+ * What the search box found, by kind of thing; each with where it opens.
+ */
+export interface SearchReply {
+  items: {
+    type: 'record' | 'batch' | 'work-order' | 'structure' | 'lot' | 'concession' | 'transmittal';
+    id: string;
+    label: string;
+    detail: string;
+  }[];
+}
+/**
  * Who is signed in, what they may do, and the token that every write must carry.
  */
 export interface Session {

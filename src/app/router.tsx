@@ -32,6 +32,7 @@ const SIGNED_IN: RouteObject[] = [
     path: paths.nonconformities.path,
     lazy: () => import('#src/features/nonconformities/routes/nonconformities.tsx'),
   },
+  { path: paths.search.path, lazy: () => import('#src/features/search/routes/search.tsx') },
   { path: '*', Component: NotFound },
 ];
 
