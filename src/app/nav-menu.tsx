@@ -30,6 +30,9 @@ export function NavMenu({ items }: { items: readonly NavItem[] }) {
             {item.label}
           </MenuLink>
         ))}
+        <MenuLink to={paths.search.to()} active={pathname.startsWith(paths.search.path)}>
+          Search
+        </MenuLink>
       </Menu>
     </nav>
   );

@@ -9,7 +9,7 @@ export const paths = {
   },
   requestReset: { path: '/password-reset', to: () => '/password-reset' },
   setPassword: { path: '/password-reset/:token', to: (token: string) => `/password-reset/${encode(token)}` },
-  search: { path: '/search', to: (q: string) => `/search?q=${encode(q)}` },
+  search: { path: '/search', to: (q = '') => (q ? `/search?q=${encode(q)}` : '/search') },
   workOrders: { path: '/work-orders', to: () => '/work-orders' },
   workOrder: { path: '/work-orders/:id', to: (id: string) => `/work-orders/${encode(id)}` },
   batches: { path: '/batches', to: () => '/batches' },

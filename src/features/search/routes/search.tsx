@@ -30,7 +30,7 @@ export function Component() {
       <PageBand title="Search" facts={hits ? <Fact>{counted(hits.length, 'hit')}</Fact> : null} />
       <Form
         role="search"
-        action={paths.search.to('').split('?')[0]}
+        action={paths.search.to()}
         className="flex gap-2 border-b border-hairline px-4 py-3"
       >
         <input
