@@ -11,6 +11,7 @@ const TITLES: Readonly<Record<string, string>> = {
   'work-order.created': 'Work order created',
   'work-order.template-fetched': 'Workbook template downloaded',
   'product.created': 'Product created',
+  'product.version-added': 'Version of a product entered',
   'lot.created': 'Lot created',
   'lot.received': 'Kits of a lot received',
   'lot.held': 'Lot held',

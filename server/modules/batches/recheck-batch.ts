@@ -20,7 +20,7 @@ export async function recheckBatch(
   await em.transactional(async (tx) => {
     const revision = await lockRevision(tx, { id: batchId, contractorId });
     const moved = accepted(moveRevision(stateOf(revision), { type: 'upload' }, actor));
-    if (revision.input === 0)
+    if (revision.input === 0 && revision.n === 0)
       throw conflict('revision.empty', 'There is nothing to check yet. Upload a filled workbook first.');
     const added = await addInput(
       tx,
