@@ -32,10 +32,11 @@ export function followProgress({ subject, listener, em, tell, onError }: Followi
         again = false;
         const progress = await readProgress(em(), subject);
         const text = JSON.stringify(progress);
-        if (over || !progress || text === last) continue;
+        if (over) return;
+        if (!progress || text === last) continue;
         last = text;
         tell(progress);
-      } while (again && !over);
+      } while (again);
     } catch (error) {
       onError(error);
     } finally {

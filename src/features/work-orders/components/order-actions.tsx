@@ -1,0 +1,44 @@
+import { useNavigate } from 'react-router-dom';
+import { useStartBatch } from '../api/start-batch.ts';
+import { Button, ButtonLink } from '#src/components/ui/button.tsx';
+import { paths } from '#src/config/paths.ts';
+import type { WorkOrder } from '#shared/generated/api-types.ts';
+
+/** The template to fill in, and the batch to hand it in with. */
+export function OrderActions({ order, mayContinue }: { order: WorkOrder; mayContinue: boolean }) {
+  const start = useStartBatch();
+  const navigate = useNavigate();
+  const open = mayContinue ? order.openBatch : null;
+  return (
+    <>
+      {start.isError ? (
+        <p role="alert" className="text-table text-nonconform">
+          {start.error.message}
+        </p>
+      ) : null}
+      <a
+        href={`/api/work-orders/${order.id}/template.xlsx`}
+        download
+        className="inline-flex min-h-8.5 items-center border border-ink px-3.5 text-table font-semibold whitespace-nowrap hover:bg-sunk pointer-coarse:min-h-11"
+      >
+        Download workbook template
+      </a>
+      {open ? (
+        <ButtonLink kind="primary" to={paths.batch.to(open)}>
+          Continue the open batch
+        </ButtonLink>
+      ) : null}
+      {order.can.includes('create-batch') ? (
+        <Button
+          kind={open ? 'secondary' : 'primary'}
+          busy={start.isPending ? 'Opening' : false}
+          onClick={() =>
+            start.mutate(order.id, { onSuccess: (batch) => void navigate(paths.batch.to(batch.id)) })
+          }
+        >
+          Open a new batch
+        </Button>
+      ) : null}
+    </>
+  );
+}
