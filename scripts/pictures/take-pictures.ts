@@ -1,0 +1,63 @@
+/**
+ * Takes the pictures of the README from the running demo: `npm start` in one terminal, `npm run pictures` in another.
+ * The address may be given: `npm run pictures -- http://127.0.0.1:4610`.
+ */
+import { chromium, type Browser, type Page } from 'playwright-core';
+import type { AppInfo } from '#shared/generated/api-types.ts';
+
+const FOLDER = new URL('../../docs/pictures/', import.meta.url).pathname;
+const base = process.argv[2] ?? 'http://127.0.0.1:4600';
+const executablePath = process.env['CHROMIUM_PATH'] ?? '/usr/bin/chromium';
+
+type Listed = {
+  items: { id: string; status: string; structureNumber?: string; counts?: { nonconformity: number } }[];
+};
+
+const browser = await chromium.launch({ executablePath, args: ['--no-sandbox', '--disable-dev-shm-usage'] });
+try {
+  await takeAll(browser);
+} finally {
+  await browser.close();
+}
+
+async function takeAll(using: Browser): Promise<void> {
+  const info = (await (await fetch(`${base}/api/app`)).json()) as AppInfo;
+  if (!info.demo) throw new Error(`${base} does not serve the demo: start it with npm start.`);
+  for (const theme of ['light', 'dark'] as const) {
+    const page = await using.newPage({ viewport: { width: 1440, height: 900 }, colorScheme: theme });
+    await signIn(page, 'inspector@larkmoor.example', info.demo.password);
+    const batches = await read<Listed>(page, '/api/batches?limit=200');
+    const batch = batches.items.find((one) => one.status === 'in-review');
+    if (!batch) throw new Error('The demo has no batch in review any more: npm run reset, then npm start.');
+    await take(page, `/review/${batch.id}`, `review-desk-${theme}`);
+    const records = await read<Listed>(page, `/api/batches/${batch.id}/records?limit=200`);
+    const worst = records.items.toSorted(
+      (a, b) => (b.counts?.nonconformity ?? 0) - (a.counts?.nonconformity ?? 0),
+    )[0];
+    await take(page, `/records/${worst?.id}`, `record-sheet-${theme}`);
+    await page.close();
+  }
+}
+
+async function signIn(page: Page, email: string, password: string): Promise<void> {
+  await page.goto(`${base}/sign-in`);
+  await page.getByLabel('E-mail').fill(email);
+  await page.getByLabel('Password').fill(password);
+  await page.keyboard.press('Enter');
+  await page.waitForURL(`${base}/`);
+}
+
+async function read<T>(page: Page, path: string): Promise<T> {
+  return (await (await page.request.get(base + path)).json()) as T;
+}
+
+async function take(page: Page, path: string, name: string): Promise<void> {
+  await page.goto(base + path);
+  await page
+    .getByRole('img', { name: /section|drawing/i })
+    .first()
+    .waitFor();
+  await page.waitForLoadState('networkidle');
+  await page.screenshot({ path: `${FOLDER}${name}.png` });
+  console.log(`docs/pictures/${name}.png`);
+}
