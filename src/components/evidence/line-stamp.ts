@@ -16,7 +16,7 @@ export function lineStamp(record: RecordRow, findings: readonly FindingRow[]): S
         ? { word: 'Concession', tone: 'concession', detail }
         : { word: 'Approved', tone: 'conform', detail };
     case 'on-record':
-      return { word: 'On record', tone: conceded ? 'concession' : 'conform', detail };
+      return { word: 'On record', tone: conceded ? 'concession' : 'conform' };
     case 'returned':
       return { word: 'Returned', tone: 'nonconform', detail };
     case 'held':

@@ -6,6 +6,7 @@ import { TextLink } from '#src/components/ui/text-link.tsx';
 import { MeasuredAgainst } from '#src/components/ui/measured-against.tsx';
 import { paths } from '#src/config/paths.ts';
 import { AnswerForm } from '#src/features/concessions/components/answer-form.tsx';
+import { ConcessionSheet } from '#src/features/concessions/components/concession-sheet.tsx';
 import { CONCESSION_WORDS } from '#src/features/concessions/components/concession-words.ts';
 import { counted } from '#src/lib/formats.ts';
 import { useUser } from '#src/lib/session/session.ts';
@@ -15,6 +16,7 @@ import type { Concession } from '#shared/generated/api-types.ts';
 export function ConcessionPage({ concession }: { concession: Concession }) {
   const user = useUser();
   const { findings, batch } = concession;
+  const recordId = findings.find((finding) => finding.recordId !== null)?.recordId ?? null;
   const batchTo = user.role === 'contractor' ? paths.batch.to(batch.id) : paths.reviewBatch.to(batch.id);
   return (
     <>
@@ -32,7 +34,7 @@ export function ConcessionPage({ concession }: { concession: Concession }) {
           </>
         }
       />
-      <div className="grid max-w-6xl items-start lg:grid-cols-[minmax(0,1fr)_26rem]">
+      <div className="grid flex-1 lg:grid-cols-[minmax(0,1fr)_28rem]">
         <section aria-labelledby="asked-for">
           <SectionHead
             title="What is to be accepted as built"
@@ -70,6 +72,7 @@ export function ConcessionPage({ concession }: { concession: Concession }) {
             </p>
             <p className="mt-0.5 text-lead">{concession.askedReason}</p>
           </div>
+          {recordId ? <ConcessionSheet recordId={recordId} /> : null}
         </section>
         <section aria-labelledby="answer" className="lg:border-l">
           <SectionHead title="Answer" id="answer" />

@@ -58,10 +58,18 @@ const COLUMNS: readonly DataColumn<Concession>[] = [
   {
     id: 'answered',
     title: 'Answered by',
+    off: true,
     min: 7,
     cell: (row) => row.answeredBy ?? '',
   },
-  { id: 'ends', title: 'Ends', min: 7, grow: 0, cell: (row) => (row.endsOn ? <Day on={row.endsOn} /> : '') },
+  {
+    id: 'ends',
+    title: 'Ends',
+    off: true,
+    min: 7,
+    grow: 0,
+    cell: (row) => (row.endsOn ? <Day on={row.endsOn} /> : ''),
+  },
 ];
 
 export function Component() {

@@ -1,5 +1,5 @@
 import { FIELD_GROUPS } from '#src/features/records/components/field-groups.ts';
-import { formatWallClock } from '#src/lib/formats.ts';
+import { formatDay, formatWallClock } from '#src/lib/formats.ts';
 import type { RecordSheetData } from '#shared/generated/api-types.ts';
 import { RECORD_FIELDS } from '#shared/records/field-meta.ts';
 import { formatQuantity } from '#shared/units/format-quantity.ts';
@@ -48,7 +48,7 @@ function rowOf(
     field,
     title: meta?.title ?? field,
     value: shown ?? 'cannot be read',
-    written: raw !== null && raw !== shown && raw !== String(value) ? raw : null,
+    written: raw !== null && raw !== shown && raw.replace(' ', 'T') !== String(value) ? raw : null,
     cell: isCell(cell) ? `${record.sheet}!${cell.address}` : null,
   };
 }
@@ -59,6 +59,7 @@ function show(value: unknown, unit: string | null, metric: boolean): string | nu
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (typeof value !== 'string') return null;
   if (/^\d{4}-\d{2}-\d{2}T/.test(value)) return formatWallClock(value);
+  if (/^\d{4}-\d{2}-\d{2}$/.test(value)) return formatDay(value);
   return /^[a-z]+(-[a-z]+)+$/.test(value) ? value.replaceAll('-', ' ') : value;
 }
 

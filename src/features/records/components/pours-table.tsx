@@ -3,7 +3,7 @@ import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { useUnitSystem } from '#src/lib/settings/unit-system.ts';
 import { counted, formatWallClock } from '#src/lib/formats.ts';
 import type { PourRow } from '#shared/generated/api-types.ts';
-import { formatNumber, formatQuantity, unitWord } from '#shared/units/format-quantity.ts';
+import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
 
 /** Pours of the line; a later event is rework or repair. */
 export function PoursTable({ pours }: { pours: readonly PourRow[] }) {
@@ -25,13 +25,13 @@ export function PoursTable({ pours }: { pours: readonly PourRow[] }) {
     { id: 'wasted', title: 'Wasted', figures: true, cell: (pour) => formatNumber(pour.wastedQuantity) },
     {
       id: 'a',
-      title: `Component A, ${unitWord('degF', { metric })}`,
+      title: 'Component A',
       figures: true,
       cell: (pour) => figure(pour.componentATempF, 'degF'),
     },
     {
       id: 'b',
-      title: `Component B, ${unitWord('degF', { metric })}`,
+      title: 'Component B',
       figures: true,
       cell: (pour) => figure(pour.componentBTempF, 'degF'),
     },

@@ -1,4 +1,5 @@
 import { SectionHead } from '#src/components/ui/page-band.tsx';
+import { formatWallClock } from '#src/lib/formats.ts';
 import type { BatchChanges } from '#shared/generated/api-types.ts';
 
 /** Values that differ from the check before: both are shown. */
@@ -13,12 +14,11 @@ export function ValueChanges({ items }: { items: BatchChanges['items'] }) {
             key={`${item.field} ${item.cell ?? item.title}`}
             className="border-b border-hairline py-1 last:border-b-0"
           >
-            <span className="font-semibold">{item.title}</span>{' '}
-            <del className="text-muted">{item.before ?? 'blank'}</del>{' '}
+            <Title text={item.title} /> <del className="text-muted">{words(item.before)}</del>{' '}
             <ins className="no-underline">
               <span className="sr-only">now </span>
               <span aria-hidden="true">→ </span>
-              {item.after ?? 'blank'}
+              {words(item.after)}
             </ins>
             {item.cell ? <span className="text-muted"> {item.cell.replace(' ', '!')}</span> : null}
           </li>
@@ -26,4 +26,21 @@ export function ValueChanges({ items }: { items: BatchChanges['items'] }) {
       </ul>
     </section>
   );
+}
+
+/** `Kit size (event 2, pour 1)`: the thing in bold, which one of several beside it. */
+function Title({ text }: { text: string }) {
+  const at = text.indexOf(' (');
+  if (at < 0) return <span className="font-semibold">{text}</span>;
+  return (
+    <>
+      <span className="font-semibold">{text.slice(0, at)}</span>
+      <span className="text-muted">{text.slice(at)}</span>
+    </>
+  );
+}
+
+function words(value: string | number | null): string {
+  if (value === null || value === '') return 'blank';
+  return typeof value === 'string' ? formatWallClock(value) : String(value);
 }
