@@ -35,6 +35,13 @@ const SIGNED_IN: RouteObject[] = [
     lazy: () => import('#src/features/nonconformities/routes/nonconformities.tsx'),
   },
   { path: paths.search.path, lazy: () => import('#src/features/search/routes/search.tsx') },
+  {
+    path: paths.transmittals.path,
+    lazy: () => import('#src/features/transmittals/routes/transmittals.tsx'),
+  },
+  { path: paths.transmittal.path, lazy: () => import('#src/features/transmittals/routes/transmittal.tsx') },
+  { path: paths.lots.path, lazy: () => import('#src/features/lots/routes/lots.tsx') },
+  { path: paths.lot.path, lazy: () => import('#src/features/lots/routes/lot.tsx') },
   { path: '*', Component: NotFound },
 ];
 

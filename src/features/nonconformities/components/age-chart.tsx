@@ -16,11 +16,7 @@ export function AgeChart({ buckets }: { buckets: NonconformitySummary['openActio
       <ul className="grid gap-y-3 pt-2 text-table">
         {buckets.map((bucket, index) => (
           <li key={bucket.bucket} className="grid grid-cols-[5rem_minmax(0,1fr)] items-center gap-x-3">
-            <span>
-              {bucket.bucket === 'over 30' || bucket.bucket.includes('days')
-                ? bucket.bucket
-                : `${bucket.bucket} days`}
-            </span>
+            <span className="whitespace-nowrap">{bucket.bucket}</span>
             <span className="flex items-center gap-2">
               <span
                 aria-hidden="true"

@@ -12,6 +12,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     id: 'structure',
     title: 'Structure',
     min: 5.5,
+    grow: 0.7,
     main: true,
     cell: (row) => row.structureNumber ?? `batch ${row.batch.number}`,
   },
@@ -27,6 +28,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     title: 'Measured',
     figures: true,
     min: 7,
+    grow: 0.6,
     cell: (row) => <ComparedValue value={row.measured} unit={row.unit} plusMinus={row.uncertainty} />,
   },
   {
@@ -34,6 +36,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     title: 'Limit',
     figures: true,
     min: 5.5,
+    grow: 0.6,
     cell: (row) => <ComparedValue value={row.limit} unit={row.unit} />,
   },
   {
@@ -41,6 +44,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     title: 'Margin',
     figures: true,
     min: 5,
+    grow: 0.6,
     cell: (row) =>
       row.margin === null ? (
         <span className="text-muted">–</span>
@@ -60,10 +64,10 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     id: 'due',
     title: 'Action due',
     min: 8,
-    grow: 1.6,
+    grow: 2.2,
     cell: (row) => <span title={actionDue(row)}>{actionDue(row)}</span>,
   },
-  { id: 'contractor', title: 'Contractor', min: 6.5, grow: 1.2, cell: (row) => row.contractor.name },
+  { id: 'contractor', title: 'Contractor', min: 6.5, grow: 2, cell: (row) => row.contractor.name },
   { id: 'lot', title: 'Lot', min: 5, cell: (row) => row.lots.join(', ') || '–' },
   {
     id: 'installed',

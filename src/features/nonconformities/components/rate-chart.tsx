@@ -18,7 +18,7 @@ export function RateChart({ contractors }: { contractors: readonly Contractor[] 
   return (
     <ChartFigure
       title="Rate by contractor, 95 % interval"
-      note="red: all of the interval is above the rate of all"
+      note={shown.some((one) => one.low > all) ? 'red: its whole interval is above all' : undefined}
     >
       {shown.length === 0 ? <p className="text-table text-ink-2">No records yet.</p> : null}
       {shown.length > 0 ? (

@@ -24,9 +24,7 @@ function Tick({ row }: { row: RegisterCandidate }) {
         type="checkbox"
         className="size-4 accent-ink"
         checked={selection.has(row.recordId)}
-        onChange={(event) =>
-          toggle(row.recordId, { through: (event.nativeEvent as MouseEvent).shiftKey })
-        }
+        onChange={(event) => toggle(row.recordId, { through: (event.nativeEvent as MouseEvent).shiftKey })}
       />
       {row.structureNumber}
     </label>

@@ -9,7 +9,9 @@ import { formatQuantity } from '#shared/units/format-quantity.ts';
 import { projectPositions, roundLength } from './project-positions.ts';
 
 type Placed = RegisterRow & { latitude: number; longitude: number };
-const HEIGHT = 300;
+const HEIGHT = 260;
+/** More names than this would only cover each other. */
+const NAMED = 40;
 const FEET_A_METRE = 1 / 0.3048;
 
 /** Where the structures of the rows loaded stand, to scale, north up; each mark leads to its record. */
@@ -30,7 +32,14 @@ export function PositionPlot({ rows }: { rows: readonly RegisterRow[] }) {
           <>
             <svg width={width} height={HEIGHT} aria-hidden="true" className="absolute inset-0">
               {plot.points.map(({ x, y, item }) => (
-                <Mark key={item.id} x={x} y={y} row={item} />
+                <g key={item.id}>
+                  <Mark x={x} y={y} row={item} />
+                  {placed.length <= NAMED ? (
+                    <text x={x} y={y - 10} textAnchor="middle" className="fill-ink-2 text-micro">
+                      {item.structureNumber}
+                    </text>
+                  ) : null}
+                </g>
               ))}
               <ScaleBar feetPerPx={plot.feetPerPx} metric={metric} />
               <g transform={`translate(${width - 26} 20)`} className="fill-ink stroke-ink">

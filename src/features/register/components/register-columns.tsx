@@ -11,7 +11,7 @@ export const REGISTER_COLUMNS: readonly DataColumn<RegisterRow>[] = [
     id: 'structure',
     title: 'Structure',
     sort: 'structure',
-    min: 6,
+    min: 5.5,
     main: true,
     cell: (row) => row.structureNumber,
   },
@@ -24,8 +24,8 @@ export const REGISTER_COLUMNS: readonly DataColumn<RegisterRow>[] = [
     figures: true,
     cell: (row) => (row.current ? row.version : `${row.version}, old`),
   },
-  { id: 'kind', title: 'Kind', min: 4.5, cell: (row) => kindWord(row.kind) },
-  { id: 'pole', title: 'Pole', min: 7.5, cell: (row) => row.pole ?? '–' },
+  { id: 'kind', title: 'Kind', min: 4, cell: (row) => kindWord(row.kind) },
+  { id: 'pole', title: 'Pole', min: 7.5, grow: 1.6, cell: (row) => row.pole ?? '–' },
   {
     id: 'embedment',
     title: 'Embedment',
@@ -39,14 +39,14 @@ export const REGISTER_COLUMNS: readonly DataColumn<RegisterRow>[] = [
     title: 'Due',
     unit: 'ft',
     figures: true,
-    min: 4,
+    min: 3.5,
     cell: (row) => <Figure value={row.dueFt} unit="ft" />,
   },
   {
     id: 'fill',
     title: 'Fill ratio',
     figures: true,
-    min: 6,
+    min: 5.5,
     cell: (row) =>
       row.fillRatio === null ? (
         <Figure value={null} unit="ratio" />
@@ -54,7 +54,7 @@ export const REGISTER_COLUMNS: readonly DataColumn<RegisterRow>[] = [
         <Quantity value={row.fillRatio} unit="ratio" plusMinus={row.fillRatioU} />
       ),
   },
-  { id: 'state', title: 'State', min: 10, grow: 1.4, cell: (row) => <Conformity row={row} /> },
+  { id: 'state', title: 'State', min: 9.5, grow: 1.2, cell: (row) => <Conformity row={row} /> },
   { id: 'lots', title: 'Lot', min: 5.5, cell: (row) => row.lots.join(', ') || '–' },
   { id: 'contractor', title: 'Contractor', min: 8, grow: 1.4, cell: (row) => row.contractor.name },
   { id: 'order', title: 'Work order', min: 5, off: true, cell: (row) => row.workOrder.number },

@@ -23,7 +23,7 @@ import {
   REGISTER_FILTERS,
   REGISTER_SORTS,
   useRegisterFilterDefinitions,
-} from '../components/register-filters.ts';
+} from '#src/lib/filters/register-filters.ts';
 
 const KEYS = [
   { keys: ['J', 'K'], does: 'row' },
