@@ -11,6 +11,7 @@ import {
   type HandedIn,
 } from '#tests/factories/start-batch.ts';
 import { createWorkSite, type WorkSite } from '#tests/factories/work-site.ts';
+import { workbookFile } from '#tests/factories/workbook-file.ts';
 import { createHarness, type Agent, type Harness } from '#tests/setup/api-harness.ts';
 
 let harness: Harness;
@@ -88,6 +89,9 @@ describe('submitting', () => {
   });
 
   it('is refused before there is a line, while a check is due, and while a record is incomplete', async () => {
+    expect((await submit()).body).toMatchObject({ status: 409, code: 'revision.empty' });
+    const bytes = await workbookFile({ workOrder: site.order.number, set: [setRow('L-1')] });
+    await contractor.put(`${batch.path}/workbook`).attach('workbook', bytes, 'b.xlsx');
     expect((await submit()).body).toMatchObject({ status: 409, code: 'revision.check-running' });
     await upload({ leanInPer10Ft: null });
     expect((await submit()).body).toMatchObject({ status: 409, code: 'revision.incomplete' });

@@ -89,7 +89,7 @@ describe('a workbook', () => {
     expect((await contractor.get(batch.path)).body).toMatchObject({ status: 'draft', can: ['upload'] });
     expect((await contractor.post(`${batch.path}/submit`)).body).toMatchObject({
       status: 409,
-      code: 'revision.check-running',
+      code: 'revision.empty',
     });
     await put(await book());
     await harness.drain();

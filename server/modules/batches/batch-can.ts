@@ -36,6 +36,7 @@ export function revisionState(
     inspectorId: row.inspector_id,
     lines: row.counts?.lines ?? 0,
     incomplete: row.counts?.incomplete ?? 0,
-    checkCurrent: row.run_input !== null && row.run_input === row.input,
+    // Nothing is being checked in a draft: it has no lines yet, or its last upload could not be read.
+    checkCurrent: row.status === 'draft' || (row.run_input !== null && row.run_input === row.input),
   };
 }
