@@ -42,6 +42,11 @@ const SIGNED_IN: RouteObject[] = [
   { path: paths.transmittal.path, lazy: () => import('#src/features/transmittals/routes/transmittal.tsx') },
   { path: paths.lots.path, lazy: () => import('#src/features/lots/routes/lots.tsx') },
   { path: paths.lot.path, lazy: () => import('#src/features/lots/routes/lot.tsx') },
+  { path: paths.standard.path, lazy: () => import('#src/features/standard/routes/standard.tsx') },
+  {
+    path: paths.standardVersion.path,
+    lazy: () => import('#src/features/standard/routes/standard-version.tsx'),
+  },
   { path: '*', Component: NotFound },
 ];
 

@@ -1,5 +1,6 @@
 import { StateWord } from '#src/components/ui/state-word.tsx';
 import { formatDay } from '#src/lib/formats.ts';
+import { localToday } from '#src/lib/local-today.ts';
 import type { Lot, LotEvent } from '#shared/generated/api-types.ts';
 
 const STATUS = {
@@ -19,15 +20,8 @@ export const EVENT_WORDS: Readonly<Record<LotEvent['type'], string>> = {
   recalled: 'Recalled',
 };
 
-/** The reader's own calendar day: an expiry is a day, not an instant. */
-export function today(): string {
-  const now = new Date();
-  const two = (part: number) => String(part).padStart(2, '0');
-  return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
-}
-
 export function Expiry({ on }: { on: string | null }) {
   if (on === null) return <span className="text-muted">none given</span>;
-  if (on >= today()) return <>{formatDay(on)}</>;
+  if (on >= localToday()) return <>{formatDay(on)}</>;
   return <StateWord glyph="triangle" word={`expired ${formatDay(on)}`} />;
 }

@@ -1,0 +1,50 @@
+import { PlainTable, type PlainColumn } from '#src/components/table/plain-table.tsx';
+import { Quantity } from '#src/components/ui/quantity.tsx';
+import { SEVERITY_WORDS, StateWord } from '#src/components/ui/state-word.tsx';
+import type { RuleRow } from './rule-table.ts';
+
+const COLUMNS: readonly PlainColumn<RuleRow>[] = [
+  { id: 'title', title: 'Rule', cell: (row) => <b className="whitespace-nowrap">{row.title}</b> },
+  {
+    id: 'code',
+    title: 'Code',
+    cell: (row) => <span className="whitespace-nowrap text-muted">{row.code}</span>,
+  },
+  {
+    id: 'compares',
+    title: 'Compares with',
+    cell: (row) =>
+      row.limits.length === 0 ? (
+        <span className="text-muted">the record itself</span>
+      ) : (
+        row.limits.map((limit) => (
+          <span key={limit.key} className="block">
+            {limit.title}
+          </span>
+        ))
+      ),
+  },
+  {
+    id: 'limit',
+    title: 'Limit',
+    figures: true,
+    cell: (row) =>
+      row.limits.map((limit) => (
+        <span key={limit.key} className="block">
+          <Quantity value={limit.value} unit={limit.unit} />
+        </span>
+      )),
+  },
+  { id: 'severity', title: 'Severity', cell: (row) => <StateWord {...SEVERITY_WORDS[row.severity]} /> },
+  {
+    id: 'on',
+    title: 'Checked',
+    cell: (row) => (row.on ? <StateWord glyph="tick" word="on" /> : <StateWord glyph="dotted" word="off" />),
+  },
+];
+
+export function RulesView({ rows }: { rows: readonly RuleRow[] }) {
+  return (
+    <PlainTable caption="Rules of this version" columns={COLUMNS} rows={rows} rowKey={(row) => row.code} />
+  );
+}
