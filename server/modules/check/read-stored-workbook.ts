@@ -1,7 +1,6 @@
-import { mkdtemp, rm } from 'node:fs/promises';
-import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { BlobStore } from '#server/storage/blob-store.ts';
+import { withTempFolder } from '#server/uploads/temp-folder.ts';
 import { readWorkbookFile } from '#server/workbook/read-workbook-file.ts';
 import type { Workbook } from '#shared/workbook/types.ts';
 
@@ -14,12 +13,9 @@ export async function readStoredWorkbook(
   sha256: string,
   signal: AbortSignal,
 ): Promise<Workbook> {
-  const folder = await mkdtemp(join(tmpdir(), 'upstand-check-'));
-  try {
+  return withTempFolder('upstand-check-', async (folder) => {
     const path = join(folder, 'workbook.xlsx');
     await blobs.readTo(sha256, path, { signal });
-    return await readWorkbookFile(path);
-  } finally {
-    await rm(folder, { recursive: true, force: true });
-  }
+    return readWorkbookFile(path);
+  });
 }

@@ -1,5 +1,4 @@
-import { mkdtemp, rm } from 'node:fs/promises';
-import { tmpdir } from 'node:os';
+import { rm } from 'node:fs/promises';
 import { join } from 'node:path';
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { Services } from '#server/container.ts';
@@ -8,6 +7,7 @@ import type { JobHandler } from '#server/jobs/define-job.ts';
 import { setProgress } from '#server/jobs/progress.ts';
 import { BlobMissing } from '#server/storage/blob-store.ts';
 import { rememberBlob } from '#server/storage/remember-blob.ts';
+import { withTempFolder } from '#server/uploads/temp-folder.ts';
 import type { PictureAnswer } from './picture-messages.ts';
 import { PictureProcess } from './picture-process.ts';
 import { PHOTO_PIPELINE } from './pipeline.ts';
@@ -30,17 +30,17 @@ export const preparePhotos: JobHandler<PreparePhotosPayload> = async (
   );
   if (waiting.length === 0) return;
   const process = new PictureProcess();
-  const folder = await mkdtemp(join(tmpdir(), 'upstand-photos-'));
   try {
-    for (const [index, { sha256 }] of waiting.entries()) {
-      await preparePhoto({ em, services, process, folder, sha256, signal });
-      const done = index + 1;
-      const state = done < waiting.length ? 'running' : 'done';
-      await setProgress(em, { subject: `photos:${batchId}`, state, done, total: waiting.length });
-    }
+    await withTempFolder('upstand-photos-', async (folder) => {
+      for (const [index, { sha256 }] of waiting.entries()) {
+        await preparePhoto({ em, services, process, folder, sha256, signal });
+        const done = index + 1;
+        const state = done < waiting.length ? 'running' : 'done';
+        await setProgress(em, { subject: `photos:${batchId}`, state, done, total: waiting.length });
+      }
+    });
   } finally {
     process.close();
-    await rm(folder, { recursive: true, force: true });
   }
 };
 
