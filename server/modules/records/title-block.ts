@@ -30,7 +30,7 @@ const STATE_WORD: Readonly<Record<LineState, string>> = {
   undecided: 'not yet',
   approved: 'approved',
   returned: 'returned',
-  held: 'concession asked',
+  held: 'held',
   'on-record': 'on record',
   abandoned: 'abandoned',
 };

@@ -69,5 +69,5 @@ export const NARROW: SheetSpec = {
   labels: { x: 262, width: 132, top: 20, bottom: 512, mostLines: 3 },
   title: { right: 388, bottom: 788, width: 376 },
   scaleBar: { x: 28, y: 566 },
-  stamp: { x: 216, y: 542 },
+  stamp: { x: 216, y: 584 },
 };

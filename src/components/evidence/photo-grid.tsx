@@ -37,7 +37,7 @@ export function PhotoGrid({ photos, onOpen, wide }: Props) {
 
 /** More prints stand closer, so that what is said of them stays in sight. */
 function columnsFor(count: number, wide = false): string {
-  if (wide) return 'grid-cols-[repeat(auto-fill,minmax(11rem,1fr))]';
+  if (wide) return 'grid-cols-[repeat(auto-fill,minmax(9rem,1fr))]';
   return count > 4 ? 'grid-cols-3' : 'grid-cols-2';
 }
 

@@ -18,6 +18,7 @@ import { DerivedFigures } from '#src/features/records/components/derived-figures
 import { LineMoves } from '#src/features/records/components/line-moves.tsx';
 import { Measurements } from '#src/features/records/components/measurements.tsx';
 import { PoursTable } from '#src/features/records/components/pours-table.tsx';
+import { PrintFindings } from '#src/features/records/components/print-findings.tsx';
 import { RecordFindings } from '#src/features/records/components/record-findings.tsx';
 import { sheetLimitsQuery } from '#src/lib/api/sheet-limits.ts';
 import { counted } from '#src/lib/formats.ts';
@@ -85,6 +86,7 @@ export function RecordPage({ data }: { data: RecordSheetData }) {
               onActive={setMarked}
               onPick={(id) => document.getElementById(`finding-${id}`)?.focus()}
             />
+            <PrintFindings findings={findings} />
           </div>
           <div className="border-t border-hairline print:hidden">
             <DerivedFigures record={record} />

@@ -61,7 +61,10 @@ export function followFindings(record: RecordRow, findings: readonly FindingRow[
   };
 }
 
-export function withFinding(sheet: RecordSheetData, finding: FindingRow): RecordSheetData {
+export function withFinding<T extends Pick<RecordSheetData, 'record' | 'findings'>>(
+  sheet: T,
+  finding: FindingRow,
+): T {
   const findings = sheet.findings.map((one) => (one.id === finding.id ? finding : one));
   return { ...sheet, findings, record: followFindings(sheet.record, findings) };
 }
