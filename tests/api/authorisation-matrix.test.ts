@@ -1,3 +1,5 @@
+import type { IncomingMessage } from 'node:http';
+import { buffer } from 'node:stream/consumers';
 import supertest from 'supertest';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { ROUTES } from '#server/http/routes.ts';
@@ -46,8 +48,22 @@ function send(agent: Agent, method: string, spec: RequestSpec): supertest.Test {
   const verb = method.toLowerCase() as 'get' | 'post' | 'put' | 'patch' | 'delete';
   const request = agent[verb](spec.path);
   if (spec.ifMatch !== undefined) request.set('If-Match', `"${spec.ifMatch}"`);
+  if (spec.stream) request.buffer(true).parse(firstWord);
   if (spec.form) return request.field('note', 'a form without a file');
   return spec.body ? request.send(spec.body) : request;
+}
+
+/** Reads no more than that it was let in: the stream would go on as long as the session. */
+function firstWord(res: supertest.Response, done: (error: Error | null, body: unknown) => void): void {
+  if (res.statusCode === 200) {
+    done(null, null);
+    (res as unknown as IncomingMessage).destroy();
+    return;
+  }
+  buffer(res as unknown as IncomingMessage).then(
+    (bytes) => done(null, JSON.parse(bytes.toString('utf8'))),
+    (error: Error) => done(error, null),
+  );
 }
 
 /** What a refusal at the wall says; any other refusal comes from behind it. */

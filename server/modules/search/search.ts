@@ -23,7 +23,8 @@ const SOURCES: readonly Source[] = [
   {
     subject: 'Record',
     sql: `select 'structure' as type, r.id::text, r.structure_number as label,
-            'batch ' || b.number || ', revision ' || v.n || ', ' || l.state as detail
+            'batch ' || b.number || ', revision ' || v.n || ', ' ||
+              case when $2::uuid is not null and v.status = 'in-review' then 'in review' else replace(l.state, '-', ' ') end as detail
           from lines l join records r on r.id = l.record_id join revisions v on v.id = r.revision_id join batches b on b.id = l.batch_id
           where l.structure_number ilike $1 and ($2::uuid is null or b.contractor_id = $2) and v.submitted_at is not null
           order by l.structure_number, b.number limit $3`,

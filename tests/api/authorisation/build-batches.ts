@@ -1,4 +1,4 @@
-import type { FindingRow, Photo, RecordRow } from '#shared/generated/api-types.ts';
+import type { Batch, FindingRow, Photo, RecordRow } from '#shared/generated/api-types.ts';
 import type { RowInput } from '#server/workbook/write-workbook.ts';
 import { photograph } from '#tests/factories/photograph.ts';
 import { pourRows, SET_VIEWS, setRow } from '#tests/factories/set-row.ts';
@@ -66,6 +66,7 @@ async function upload(options: {
 /** What the contractor's own lists name. Throws where they name nothing: a wall needs something behind it. */
 async function readObjects(agent: Agent, batch: { id: string; number: string }): Promise<BatchObjects> {
   const path = `/api/batches/${batch.id}`;
+  const { revision } = await ok<Batch>(agent.get(path), 200);
   const records = (await ok<{ items: RecordRow[] }>(agent.get(`${path}/records`), 200)).items;
   const findings = (await ok<{ items: FindingRow[] }>(agent.get(`${path}/findings`), 200)).items;
   const photos = (await ok<{ items: Photo[] }>(agent.get(`${path}/photos`), 200)).items;
@@ -77,6 +78,7 @@ async function readObjects(agent: Agent, batch: { id: string; number: string }):
   return {
     id: batch.id,
     number: batch.number,
+    revisionId: revision.id,
     lineId: record.lineId,
     recordId: record.id,
     recordIds: records.map((one) => one.id),

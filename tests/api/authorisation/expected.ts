@@ -37,6 +37,7 @@ export const EXPECTED: readonly Row[] = [
   ['410 410 410  410 410 410 410 410 410', 'GET /api/password-resets/:token', 'token.unusable'],
   ['410 410 410  410 410 410 410 410 410', 'PUT /api/password-resets/:token', 'token.unusable'],
   ['401 ok  ok   ok  ok  ok  ok  ok  ok ', 'GET /api/home'],
+  ['401 ok  ok   ok  ok  ok  ok  ok  ok ', 'GET /api/search'],
 
   // People and organisations: the administrator's; the auditor reads who is who.
   ['401 403 403  403 403 403 403 ok  ok ', 'GET /api/people'],
@@ -62,6 +63,7 @@ export const EXPECTED: readonly Row[] = [
   ['401 400 404  403 403 403 403 403 403', 'PUT /api/batches/:id/workbook', 'upload.broken'],
   ['401 400 404  403 403 403 403 403 403', 'POST /api/batches/:id/photos', 'upload.broken'],
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/batches/:id/check'],
+  ['401 409 404  403 403 403 403 403 403', 'POST /api/batches/:id/recheck', 'revision.frozen'],
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/batches/:id/inputs'],
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/batches/:id/revisions'],
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/batches/:id/changes'],
@@ -128,6 +130,11 @@ export const EXPECTED: readonly Row[] = [
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/transmittals/:id/file'],
   ['401 403 403  403 403 403 422 403 403', 'POST /api/transmittals', 'transmittal.unknown-record'],
 
+  // Progress is followed by whom the thing itself is open to.
+  ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/events (check)'],
+  ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/events (batch)'],
+  ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/events (transmittal)'],
+
   // What did not conform, and the trail: the owner's people; the chain is verified by auditor and administrator.
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/nonconformities'],
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/nonconformities/summary'],
@@ -137,6 +144,8 @@ export const EXPECTED: readonly Row[] = [
 
   // Foam and standard. Lots tell of every contractor's use; products and the published standard are for all.
   ['401 ok  ok   ok  ok  ok  ok  ok  ok ', 'GET /api/products'],
+  ['401 ok  ok   ok  ok  ok  ok  ok  ok ', 'GET /api/products/:id'],
+  ['401 403 403  403 403 403 403 403 422', 'POST /api/products', 'product.invalid'],
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/lots'],
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/lots/:id'],
   ['401 403 403  403 403 403 403 403 409', 'POST /api/lots', 'lot.number-taken'],

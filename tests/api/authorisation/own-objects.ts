@@ -19,6 +19,7 @@ export type OwnObjects = {
 export type BatchObjects = {
   readonly id: string;
   readonly number: string;
+  readonly revisionId: string;
   /** Of the first line. */
   readonly lineId: string;
   readonly recordId: string;

@@ -17,6 +17,8 @@ export type RequestSpec = {
   readonly form?: boolean;
   /** On a session of its own, since it ends it. */
   readonly fresh?: boolean;
+  /** An answer that does not end by itself. */
+  readonly stream?: boolean;
 };
 
 const NOBODY_HAS_THIS = '00000000-0000-4000-8000-000000000000';
@@ -25,6 +27,8 @@ const TOKEN = 'a-token-that-was-never-sent-to-anybody';
 const STALE = 999;
 const reason = { reason: 'To see whether it is let in.' };
 const evidence = { decision: 'approve', grounds: 'evidence', ...reason };
+
+const events = (subject: string): RequestSpec => ({ path: `/api/events?subject=${subject}`, stream: true });
 
 /** How each row is asked. Every request is complete, so that only the wall or the state behind it can refuse it. */
 export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = {
@@ -49,6 +53,7 @@ export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = 
     body: { password: 'gravel lantern otter 17' },
   }),
   'GET /api/home': () => ({ path: '/api/home' }),
+  'GET /api/search': ({ own }) => ({ path: `/api/search?q=${own.queued.number}` }),
 
   'GET /api/people': () => ({ path: '/api/people' }),
   'GET /api/people/:id': ({ shared }) => ({ path: `/api/people/${shared.personId}` }),
@@ -97,6 +102,7 @@ export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = 
   }),
   'POST /api/batches/:id/photos': ({ own }) => ({ path: `/api/batches/${own.draft.id}/photos`, form: true }),
   'GET /api/batches/:id/check': ({ own }) => ({ path: `/api/batches/${own.queued.id}/check` }),
+  'POST /api/batches/:id/recheck': ({ own }) => ({ path: `/api/batches/${own.queued.id}/recheck` }),
   'GET /api/batches/:id/inputs': ({ own }) => ({ path: `/api/batches/${own.queued.id}/inputs` }),
   'GET /api/batches/:id/revisions': ({ own }) => ({ path: `/api/batches/${own.queued.id}/revisions` }),
   'GET /api/batches/:id/changes': ({ own }) => ({ path: `/api/batches/${own.queued.id}/changes` }),
@@ -193,6 +199,10 @@ export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = 
     body: { scope: { recordNumbers: ['R-999999'] } },
   }),
 
+  'GET /api/events (check)': ({ own }) => events(`check:${own.queued.revisionId}`),
+  'GET /api/events (batch)': ({ own }) => events(`batch:${own.queued.id}`),
+  'GET /api/events (transmittal)': ({ own }) => events(`transmittal:${own.transmittalId}`),
+
   'GET /api/nonconformities': () => ({ path: '/api/nonconformities' }),
   'GET /api/nonconformities/summary': () => ({ path: '/api/nonconformities/summary' }),
   'GET /api/nonconformities/export.csv': () => ({ path: '/api/nonconformities/export.csv' }),
@@ -200,6 +210,8 @@ export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = 
   'GET /api/trail/verify': () => ({ path: '/api/trail/verify' }),
 
   'GET /api/products': () => ({ path: '/api/products' }),
+  'GET /api/products/:id': ({ shared }) => ({ path: `/api/products/${shared.productId}` }),
+  'POST /api/products': () => ({ path: '/api/products', body: { effectiveOn: '2099-02-01', body: {} } }),
   'GET /api/lots': () => ({ path: '/api/lots' }),
   'GET /api/lots/:id': ({ shared }) => ({ path: `/api/lots/${shared.lotId}` }),
   'POST /api/lots': ({ shared }) => ({
