@@ -1,5 +1,5 @@
 import { ApiProblem } from '#src/lib/api/api-problem.ts';
-import { upload } from '#src/lib/api/upload.ts';
+import { upload, type UploadRequest } from '#src/lib/api/upload.ts';
 import type { UploadReply } from '#shared/generated/api-types.ts';
 
 export type QueuedFile = {
@@ -34,6 +34,8 @@ export type UploadQueue = {
   readonly onStored: (listener: () => void) => () => void;
 };
 
+export type SendFile = (request: UploadRequest) => Promise<UploadReply>;
+
 /** Two at a time: one waits for the server while the other uses the line. */
 const AT_ONCE = 2;
 
@@ -41,7 +43,7 @@ const AT_ONCE = 2;
  * Sends many files one request each, so that a refusal or a lost connection costs one file. Lives outside the page
  * that shows it: going to another page does not stop it.
  */
-export function createUploadQueue(target: UploadTarget): UploadQueue {
+export function createUploadQueue(target: UploadTarget, sendFile: SendFile = upload): UploadQueue {
   let files: readonly QueuedFile[] = [];
   let nextId = 1;
   let running = 0;
@@ -61,7 +63,7 @@ export function createUploadQueue(target: UploadTarget): UploadQueue {
   async function send({ id, file }: QueuedFile): Promise<void> {
     patch(id, { state: 'sending', sent: 0, problem: null, offline: false });
     try {
-      const reply = await upload<UploadReply>({
+      const reply = await sendFile({
         ...target,
         files: [file],
         signal: abort.signal,

@@ -1,0 +1,72 @@
+import { beforeEach, expect, it, vi } from 'vitest';
+import { ApiProblem, unreachable } from '#src/lib/api/api-problem.ts';
+import { countUploads, createUploadQueue, type SendFile } from '#src/lib/api/upload-queue.ts';
+import type { UploadReply } from '#shared/generated/api-types.ts';
+
+const sent: string[] = [];
+let answer: (name: string) => UploadReply | Error;
+const send: SendFile = ({ files }) => {
+  const name = files[0]?.name ?? '';
+  sent.push(name);
+  const reply = answer(name);
+  return reply instanceof Error ? Promise.reject(reply) : Promise.resolve(reply);
+};
+
+const file = (name: string) => new File(['x'], name);
+const reply = (id: string, error: { code: string; detail: string } | null = null): UploadReply => ({
+  input: 1,
+  files: [{ id: error ? null : id, fileName: id, sha256: null, error }],
+});
+const queue = () => createUploadQueue({ path: '/p', method: 'POST', field: 'photos' }, send);
+const settled = (one: ReturnType<typeof queue>) =>
+  vi.waitFor(() => expect(countUploads(one.files()).busy).toBe(false));
+
+beforeEach(() => {
+  sent.length = 0;
+  answer = (name) => reply(name);
+});
+
+it('stores each file, and tells the same bytes again as a duplicate', async () => {
+  const one = queue();
+  const stored = vi.fn<() => void>();
+  one.onStored(stored);
+  one.know(['known']);
+  one.add([file('a'), file('known'), file('b')]);
+  await settled(one);
+  expect(countUploads(one.files())).toMatchObject({ all: 3, stored: 2, duplicate: 1, failed: 0 });
+  expect(stored).toHaveBeenCalledTimes(2);
+  one.clearDone();
+  expect(one.files()).toEqual([]);
+  one.stop();
+});
+
+it('a refusal costs one file, says why, and can be tried again', async () => {
+  const one = queue();
+  answer = (name) => reply(name, name === 'bad' ? { code: 'photo.kind', detail: 'Not a picture.' } : null);
+  one.add([file('bad'), file('good')]);
+  await settled(one);
+  expect(one.files().map(({ state, problem }) => [state, problem])).toEqual([
+    ['failed', 'Not a picture.'],
+    ['stored', null],
+  ]);
+  answer = (name) => reply(name);
+  one.retry();
+  await settled(one);
+  expect(countUploads(one.files()).stored).toBe(2);
+  expect(sent).toEqual(['bad', 'good', 'bad']);
+  one.stop();
+});
+
+it('goes on by itself when the network is back, and only with what waited for it', async () => {
+  const one = queue();
+  const full = new ApiProblem({ status: 413, code: 'photo.too-large', detail: 'Too large.' });
+  answer = (name) => (name === 'large' ? full : unreachable());
+  one.add([file('a'), file('large')]);
+  await settled(one);
+  expect(one.files().map((each) => each.offline)).toEqual([true, false]);
+  answer = (name) => reply(name);
+  globalThis.dispatchEvent(new Event('online'));
+  await settled(one);
+  expect(one.files().map((each) => each.state)).toEqual(['stored', 'failed']);
+  one.stop();
+});
