@@ -82,6 +82,14 @@ export function createListener(url: string, onError: (error: Error) => void = ()
     return connecting;
   };
 
+  // One connection takes one statement at a time; those that come meanwhile wait their turn.
+  let turn: Promise<unknown> = Promise.resolve();
+  const inTurn = <T>(task: (connection: pg.Client) => Promise<T>): Promise<T> => {
+    const mine = turn.then(connect).then(task);
+    turn = mine.catch(() => undefined);
+    return mine;
+  };
+
   return {
     on(channel, handler) {
       if (!CHANNEL.test(channel)) throw new Error(`"${channel}" is not a name of a channel.`);
@@ -89,8 +97,7 @@ export function createListener(url: string, onError: (error: Error) => void = ()
       const set = known ?? new Set();
       handlers.set(channel, set.add(handler));
       if (known === undefined) {
-        connect()
-          .then((connection) => connection.query(`listen ${channel}`))
+        inTurn((connection) => connection.query(`listen ${channel}`))
           .then(() => handler(null))
           .catch((error: Error) => {
             if (closed) return;
@@ -101,10 +108,10 @@ export function createListener(url: string, onError: (error: Error) => void = ()
       return () => void set.delete(handler);
     },
     async hold(key) {
-      const connection = await connect();
-      const { rows } = await connection.query<{ got: boolean }>(
-        'select pg_try_advisory_lock(hashtextextended($1, 0)) as got',
-        [key],
+      const { rows } = await inTurn((connection) =>
+        connection.query<{ got: boolean }>('select pg_try_advisory_lock(hashtextextended($1, 0)) as got', [
+          key,
+        ]),
       );
       const got = rows[0]?.got === true;
       if (got) held.add(key);
@@ -113,7 +120,10 @@ export function createListener(url: string, onError: (error: Error) => void = ()
     async letGo(key) {
       held.delete(key);
       // A connection that was lost has let go already.
-      await client?.query('select pg_advisory_unlock(hashtextextended($1, 0))', [key]).catch(() => undefined);
+      if (client === null) return;
+      await inTurn((connection) =>
+        connection.query('select pg_advisory_unlock(hashtextextended($1, 0))', [key]),
+      ).catch(() => undefined);
     },
     async close() {
       closed = true;
