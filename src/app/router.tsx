@@ -47,6 +47,11 @@ const SIGNED_IN: RouteObject[] = [
     path: paths.standardVersion.path,
     lazy: () => import('#src/features/standard/routes/standard-version.tsx'),
   },
+  { path: paths.trail.path, lazy: () => import('#src/features/trail/routes/trail.tsx') },
+  { path: paths.people.path, lazy: () => import('#src/features/people/routes/people.tsx') },
+  { path: paths.mail.path, lazy: () => import('#src/features/mail/routes/mail.tsx') },
+  { path: paths.mailMessage.path, lazy: () => import('#src/features/mail/routes/message.tsx') },
+  { path: paths.jobs.path, lazy: () => import('#src/features/jobs/routes/jobs.tsx') },
   { path: '*', Component: NotFound },
 ];
 

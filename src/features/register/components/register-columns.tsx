@@ -31,7 +31,7 @@ export const REGISTER_COLUMNS: readonly DataColumn<RegisterRow>[] = [
     title: 'Embedment',
     unit: 'ft',
     figures: true,
-    min: 6,
+    min: 6.6,
     cell: (row) => <Figure value={row.embedmentFt} unit="ft" />,
   },
   {

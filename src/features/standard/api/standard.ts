@@ -1,4 +1,4 @@
-import { queryOptions, useQueryClient } from '@tanstack/react-query';
+import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import { useCallback, useRef } from 'react';
 import { api, newIdempotencyKey } from '#src/lib/api/client.ts';
 import type { StandardDraftBody, StandardVersion } from '#shared/generated/api-types.ts';
@@ -29,19 +29,12 @@ export function useDraftStandard(): (body: StandardDraftBody) => Promise<Standar
   );
 }
 
-export function usePublishStandard(): (one: StandardVersion) => Promise<StandardVersion> {
+/** Whatever comes of it, the versions are read again: a refusal tells that they have changed. */
+export function usePublishStandard() {
   const client = useQueryClient();
-  return useCallback(
-    async ({ n, version }) => {
-      try {
-        return await api<StandardVersion>(`/api/standard/versions/${n}/publish`, {
-          method: 'POST',
-          ifMatch: version,
-        });
-      } finally {
-        await client.invalidateQueries({ queryKey: ['standard'] });
-      }
-    },
-    [client],
-  );
+  return useMutation({
+    mutationFn: ({ n, version }: StandardVersion) =>
+      api<StandardVersion>(`/api/standard/versions/${n}/publish`, { method: 'POST', ifMatch: version }),
+    onSettled: () => client.invalidateQueries({ queryKey: ['standard'] }),
+  });
 }

@@ -1,9 +1,17 @@
-import { PlainTable } from '#src/components/table/plain-table.tsx';
+import { PlainTable, type PlainColumn } from '#src/components/table/plain-table.tsx';
 import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { counted } from '#src/lib/formats.ts';
 import type { RuleChange } from './rule-changes.ts';
 
 type Props = { readonly changes: readonly RuleChange[]; readonly before: string; readonly after: string };
+
+function columnsOf(before: string, after: string): readonly PlainColumn<RuleChange>[] {
+  return [
+    { id: 'rule', title: 'Rule', cell: (row) => row.title },
+    { id: 'before', title: `In ${before}`, cell: (row) => row.before },
+    { id: 'after', title: `In ${after}`, cell: (row) => row.after },
+  ];
+}
 
 export function ChangesView({ changes, before, after }: Props) {
   return (
@@ -16,11 +24,7 @@ export function ChangesView({ changes, before, after }: Props) {
           caption={`What differs between ${before} and ${after}`}
           rows={changes}
           rowKey={(row) => row.code}
-          columns={[
-            { id: 'rule', title: 'Rule', cell: (row) => <b>{row.title}</b> },
-            { id: 'before', title: `In ${before}`, cell: (row) => row.before },
-            { id: 'after', title: `In ${after}`, cell: (row) => row.after },
-          ]}
+          columns={columnsOf(before, after)}
         />
       )}
     </div>

@@ -11,23 +11,7 @@ import { usePublishStandard } from '../api/standard.ts';
 export function PublishPanel({ one }: { one: StandardVersion }) {
   const publish = usePublishStandard();
   const [asking, setAsking] = useState(false);
-  const [busy, setBusy] = useState(false);
-  const [error, setError] = useState<unknown>(null);
   const day = one.effectiveOn ? formatDay(one.effectiveOn) : 'its day';
-
-  async function put(): Promise<void> {
-    setBusy(true);
-    setError(null);
-    try {
-      await publish(one);
-      setAsking(false);
-    } catch (refused) {
-      setError(refused);
-    } finally {
-      setBusy(false);
-    }
-  }
-
   return (
     <div className="max-w-3xl px-gutter py-4">
       <Callout tone="query" title={`A draft by ${one.author}; it checks nothing yet`}>
@@ -50,9 +34,13 @@ export function PublishPanel({ one }: { one: StandardVersion }) {
         title={`Publish version ${one.n}`}
         description={`From ${day} on, work is checked on it. It cannot be changed or taken back afterwards, only followed by a further version. What was submitted before keeps its own version.`}
       >
-        {error ? <ErrorState error={error} what="The draft" /> : null}
+        {publish.error ? <ErrorState error={publish.error} what="The draft" /> : null}
         <div className="flex flex-wrap gap-3">
-          <Button kind="primary" busy={busy && 'Publishing…'} onClick={() => void put()}>
+          <Button
+            kind="primary"
+            busy={publish.isPending && 'Publishing…'}
+            onClick={() => publish.mutate(one, { onSuccess: () => setAsking(false) })}
+          >
             Publish version {one.n}
           </Button>
           <Button onClick={() => setAsking(false)}>Not yet</Button>

@@ -4,15 +4,14 @@ import { ButtonLink } from '#src/components/ui/button.tsx';
 import { DocumentTitle } from '#src/components/ui/document-title.tsx';
 import { EmptyState } from '#src/components/ui/empty-state.tsx';
 import { ErrorState } from '#src/components/ui/error-state.tsx';
-import { Day, Moment } from '#src/components/ui/moment.tsx';
 import { Fact, PageBand } from '#src/components/ui/page-band.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
-import { TextLink } from '#src/components/ui/text-link.tsx';
 import { paths } from '#src/config/paths.ts';
 import { useCan } from '#src/lib/session/use-can.ts';
 import { localToday } from '#src/lib/local-today.ts';
 import { standardVersionsQuery } from '../api/standard.ts';
-import { standOf, StandardState } from '../components/standard-state.tsx';
+import { standOf } from '../components/standard-state.tsx';
+import { VERSION_COLUMNS } from '../components/version-columns.tsx';
 
 /** Versions of the construction standard, newest first. */
 export function Component() {
@@ -54,46 +53,9 @@ export function Component() {
       {all.length > 0 ? (
         <PlainTable
           caption="Versions of the standard"
-          rows={all}
+          rows={all.map((one) => ({ ...one, stand: standOf(one, { all, today }) }))}
           rowKey={(row) => row.id}
-          columns={[
-            {
-              id: 'n',
-              title: 'Version',
-              cell: (row) => (
-                <TextLink to={paths.standardVersion.to(row.n)} className="font-semibold whitespace-nowrap">
-                  Version {row.n}
-                </TextLink>
-              ),
-            },
-            { id: 'title', title: 'Title', cell: (row) => row.title },
-            {
-              id: 'state',
-              title: 'State',
-              cell: (row) => <StandardState stand={standOf(row, { all, today })} />,
-            },
-            {
-              id: 'day',
-              title: 'Takes effect',
-              figures: true,
-              cell: (row) => (row.effectiveOn ? <Day on={row.effectiveOn} /> : '–'),
-            },
-            { id: 'author', title: 'Drafted by', cell: (row) => row.author || '–' },
-            {
-              id: 'published',
-              title: 'Published',
-              cell: (row) =>
-                row.publishedAt ? (
-                  <span className="whitespace-nowrap">
-                    <Moment at={row.publishedAt} />
-                    {row.approver ? ` by ${row.approver}` : ''}
-                  </span>
-                ) : (
-                  'not yet'
-                ),
-            },
-            { id: 'note', title: 'Why', cell: (row) => row.note ?? '' },
-          ]}
+          columns={VERSION_COLUMNS}
         />
       ) : null}
       <p className="max-w-prose px-gutter py-4 text-ink-2">
