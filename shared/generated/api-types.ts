@@ -501,18 +501,28 @@ export interface NonconformitySummary {
 export interface Nonconformity {
   id: string;
   recordId: string | null;
+  lineId: string | null;
   code: string;
   title: string;
   severity: 'nonconformity' | 'query' | 'note';
   structureNumber: string | null;
   kind: 'set' | 'straighten' | 'relevel' | null;
+  sheet: string | null;
+  row: number | null;
+  cell: string | null;
+  field: string | null;
   measured: string | number | null;
   limit: string | number | null;
   margin: number | null;
   unit: string | null;
   uncertainty: number | null;
+  params: {
+    [k: string]: unknown;
+  };
   message: string;
+  remedy: string;
   state: 'undecided' | 'approved' | 'rejected' | 'concession-asked';
+  decision: FindingDecision | null;
   grounds: 'evidence' | 'answer' | 'concession' | null;
   action: 'correct' | 'rework' | 'repair' | null;
   dueOn: string | null;
@@ -532,6 +542,7 @@ export interface Nonconformity {
   lots: string[];
   decidedBy: string | null;
   recordNumber: string | null;
+  version: number;
 }
 /**
  * A contractor to add.

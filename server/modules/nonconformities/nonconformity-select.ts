@@ -5,6 +5,7 @@ import type { ActionDue, Grounds } from '#shared/review/states.ts';
 export type NonconformityDbRow = {
   id: string;
   record_id: string | null;
+  line_id: string | null;
   sort_day: string;
   code: string;
   severity: Severity;
@@ -26,6 +27,10 @@ export type NonconformityDbRow = {
   action: ActionDue | null;
   due_on: string | null;
   decided_by: string | null;
+  decision: string | null;
+  reason: string | null;
+  decided_at: string | null;
+  version: number;
   concession: string | null;
   condition: string | null;
   contractor_id: string;
@@ -42,9 +47,10 @@ export type NonconformityDbRow = {
 
 /** Over a page of finding_states `s`, so that what is joined is joined for the rows shown only. */
 export const NONCONFORMITY_COLUMNS = `
-select f.id, f.record_id, s.sort_day, f.code, f.severity, f.structure_number, f.kind, f.sheet, f.row, f.cell, f.field,
+select f.id, f.record_id, f.line_id, s.sort_day, f.code, f.severity, f.structure_number, f.kind, f.sheet, f.row, f.cell, f.field,
   f.measured, f.limit_value, f.margin, f.unit, f.uncertainty, f.params, f.owner_params,
   s.state, s.grounds, s.action, s.due_on, u.name as decided_by, k.number as concession, k.condition,
+  k.decision, k.reason, k.at as decided_at, s.version,
   s.contractor_id, o.name as contractor_name, s.work_order_id, w.number as work_order_number,
   b.id as batch_id, b.number as batch_number, v.n as revision, s.work_day,
   array(select distinct p.lot_text from pours p where p.record_id = s.record_id and p.lot_text is not null order by 1) as lots,
@@ -58,6 +64,7 @@ join batches b on b.id = s.batch_id
 join revisions v on v.id = s.revision_id
 left join users u on u.id = s.decided_by
 left join lateral (
-  select c.number, c.condition from decisions d join concession_current c on c.id = d.concession_id
+  select d.decision, d.reason, d.at, c.number, c.condition
+  from decisions d left join concession_current c on c.id = d.concession_id
   where s.version > 0 and d.finding_id = s.finding_id and d.seq = s.version
 ) k on true`;

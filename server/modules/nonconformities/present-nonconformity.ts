@@ -11,7 +11,7 @@ const STATES = {
 
 /** A finding as the auditor sees it. Only the owner's people and auditors come here, so nothing is held back. */
 export function presentNonconformity(row: NonconformityDbRow): Nonconformity {
-  const { title, message } = renderFinding({
+  const { title, message, remedy } = renderFinding({
     code: row.code,
     severity: row.severity,
     kind: row.kind,
@@ -33,18 +33,26 @@ export function presentNonconformity(row: NonconformityDbRow): Nonconformity {
   return {
     id: row.id,
     recordId: row.record_id,
+    lineId: row.line_id,
     code: row.code,
     title,
     severity: row.severity,
     structureNumber: row.structure_number,
     kind: row.kind,
+    sheet: row.sheet,
+    row: row.row,
+    cell: row.cell,
+    field: row.field,
     measured: row.measured,
     limit: row.limit_value,
     margin: row.margin,
     unit: row.unit,
     uncertainty: row.uncertainty,
+    params: { ...row.params, ...row.owner_params },
     message,
+    remedy,
     state: STATES[row.state],
+    decision: decisionOf(row),
     grounds: row.grounds,
     action: row.action,
     dueOn: row.due_on,
@@ -57,5 +65,20 @@ export function presentNonconformity(row: NonconformityDbRow): Nonconformity {
     lots: row.lots,
     decidedBy: row.decided_by,
     recordNumber: row.record_number,
+    version: row.version,
+  };
+}
+
+function decisionOf(row: NonconformityDbRow): Nonconformity['decision'] {
+  const { decision } = row;
+  if ((decision !== 'approve' && decision !== 'reject') || row.decided_at === null) return null;
+  return {
+    decision,
+    grounds: row.grounds,
+    action: row.action,
+    dueOn: row.due_on,
+    reason: row.reason,
+    by: row.decided_by ?? '',
+    at: row.decided_at,
   };
 }
