@@ -3,7 +3,7 @@ import { batchKey } from './batch.ts';
 import { everyPage } from '#src/lib/api/every-page.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 
-export const batchFindingsQuery = (batchId: string, revision: number | null) =>
+export const batchFindingsQuery = (batchId: string, revision: number) =>
   queryOptions({
     queryKey: [...batchKey(batchId), 'findings', revision],
     queryFn: ({ signal }) =>

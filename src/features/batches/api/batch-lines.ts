@@ -3,8 +3,8 @@ import { batchKey } from './batch.ts';
 import { everyPage } from '#src/lib/api/every-page.ts';
 import type { RecordRow } from '#shared/generated/api-types.ts';
 
-/** Lines of one revision in the workbook's order; null: of the newest that was checked. */
-export const batchLinesQuery = (batchId: string, revision: number | null) =>
+/** Lines of one revision in the workbook's order. */
+export const batchLinesQuery = (batchId: string, revision: number) =>
   queryOptions({
     queryKey: [...batchKey(batchId), 'lines', revision],
     queryFn: ({ signal }) =>

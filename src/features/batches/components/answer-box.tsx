@@ -17,7 +17,7 @@ export function AnswerBox({ finding, batchId }: Props) {
   const [writing, setWriting] = useState(() => mayAnswer && readDraft(draftKey) !== null);
   const { answer } = finding;
   return (
-    <div className="w-full">
+    <div className={answer || writing ? 'w-full' : undefined}>
       {answer && !writing ? (
         <blockquote className="border-l-[3px] border-hairline pl-3 text-table">
           <p className="whitespace-pre-wrap text-ink">{answer.text}</p>

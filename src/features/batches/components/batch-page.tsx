@@ -29,8 +29,10 @@ export function BatchPage({ batch }: { batch: Batch }) {
   const filters = useFilters(LINE_FILTERS);
   const [dialog, setDialog] = useState<'submit' | 'withdraw' | null>(null);
   const revision = readRevision(search.get('revision'), batch);
-  const lines = useQuery(batchLinesQuery(batch.id, revision));
-  const findings = useQuery(batchFindingsQuery(batch.id, revision));
+  // By its number: asked without one, a revision that was not checked yet would show the lines of the one before.
+  const n = revision ?? batch.revision.number;
+  const lines = useQuery(batchLinesQuery(batch.id, n));
+  const findings = useQuery(batchFindingsQuery(batch.id, n));
   const photos = useQuery(batchPhotosQuery(batch.id));
   const check = useCheck(batch);
   const intake = useIntake(batch, photos.data);

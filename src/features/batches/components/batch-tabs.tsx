@@ -72,7 +72,7 @@ function Panel({ tab, batch, revision, view, queries, filters, onPhotograph }: P
     );
   }
   if (!lines.data || !findings.data) return <Skeleton lines={8} />;
-  if (tab === 'photos') return <PhotosPanel batchId={batch.id} records={lines.data} />;
+  if (tab === 'photos') return <PhotosPanel batch={batch} records={lines.data} />;
   if (view.lines.length === 0 && view.loose.length === 0) return <FirstSteps batch={batch} />;
   return <LinesPanel view={view} filters={filters} decided={!newest || isHandedIn(batch)} {...actions} />;
 }

@@ -11,6 +11,14 @@ export function FirstSteps({ batch }: { batch: Batch }) {
       </EmptyState>
     );
   }
+  if (batch.revision.number > 0) {
+    return (
+      <EmptyState title={`Revision ${batch.revision.number} waits for its workbook`}>
+        Correct the lines that came back, in the workbook of the revision before or in a fresh template, and
+        hand it in. Only those lines are taken; the approved ones stand as they are.
+      </EmptyState>
+    );
+  }
   return (
     <>
       <EmptyState

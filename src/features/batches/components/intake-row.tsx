@@ -17,8 +17,8 @@ export function IntakeRow({ glyph, title, action, children }: Props) {
     >
       <Glyph name={glyph} className="mt-1" />
       <h2 className="text-base font-semibold">{title}</h2>
-      <div className="row-span-2 self-start pointer-coarse:self-center">{action}</div>
-      <div className="col-start-2 text-table text-muted">{children}</div>
+      <div className="pointer-coarse:-my-2.5">{action}</div>
+      <div className="col-span-2 col-start-2 text-table text-muted">{children}</div>
     </section>
   );
 }

@@ -2,6 +2,7 @@ import type { CheckState } from '../api/use-check.ts';
 import { CameraButton } from './camera-button.tsx';
 import { CheckRow } from './check-row.tsx';
 import { PhotographsRow } from './photographs-row.tsx';
+import { ReviewRow } from './review-row.tsx';
 import type { useIntake } from './use-intake.ts';
 import { WorkbookRow } from './workbook-row.tsx';
 import type { BatchView } from '../lib/line-view.ts';
@@ -42,6 +43,7 @@ export function Intake({ batch, view, check, intake, onUnplaced }: Props) {
         onUnplaced={onUnplaced}
       />
       <CheckRow batch={batch} check={check} />
+      <ReviewRow batch={batch} />
       {intake.told.map((text) => (
         <p key={text} role="alert" className="border-b border-hairline px-gutter py-2 text-table text-query">
           {text}

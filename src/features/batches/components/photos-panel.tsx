@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { useId, useMemo, useState } from 'react';
+import { batchLinesQuery } from '../api/batch-lines.ts';
 import { batchPhotosQuery } from '../api/batch-photos.ts';
 import { PhotoDialog } from './photo-dialog.tsx';
 import { PhotoPicture, PhotoTile } from './photo-tile.tsx';
@@ -10,15 +11,23 @@ import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
 import { Button } from '#src/components/ui/button.tsx';
 import { counted, formatWallClock } from '#src/lib/formats.ts';
-import type { Photo, RecordRow } from '#shared/generated/api-types.ts';
+import type { Batch, Photo, RecordRow } from '#shared/generated/api-types.ts';
 
-type Props = { readonly batchId: string; readonly records: readonly RecordRow[] };
+type Props = { readonly batch: Batch; readonly records: readonly RecordRow[] };
 
 /** Lines drawn at once; more on demand, so that thousands of pictures do not stall a phone. */
 const STEP = 40;
 
 /** Photographs by line, and first those that lie on none. */
-export function PhotosPanel({ batchId, records }: Props) {
+export function PhotosPanel({ batch, records: checked }: Props) {
+  const batchId = batch.id;
+  const { number } = batch.revision;
+  // Before the first check of a later revision, photographs go on the lines that came back.
+  const before = useQuery({
+    ...batchLinesQuery(batchId, number - 1),
+    enabled: checked.length === 0 && number > 0,
+  });
+  const records = checked.length > 0 ? checked : (before.data ?? checked);
   const photos = useQuery(batchPhotosQuery(batchId));
   const listId = useId();
   const [openId, setOpenId] = useState<string | null>(null);

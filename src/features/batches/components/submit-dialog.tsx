@@ -5,6 +5,7 @@ import { Refusal } from './refusal.tsx';
 import { Button } from '#src/components/ui/button.tsx';
 import { Callout } from '#src/components/ui/callout.tsx';
 import { Dialog } from '#src/components/ui/dialog.tsx';
+import { classNames } from '#src/lib/class-names.ts';
 import { counted } from '#src/lib/formats.ts';
 import type { Batch } from '#shared/generated/api-types.ts';
 
@@ -53,12 +54,12 @@ export function SubmitDialog({ batch, view, hindrances, onClose, onShow }: Props
         {blocked ? null : (
           <dl className="grid grid-cols-[1fr_auto] gap-x-6 gap-y-1">
             <Row word="Lines handed in" figure={lines} />
-            <Row word="of them clean" figure={clean} />
+            <Row part word="of them clean" figure={clean} />
             <Row word="Nonconformities that stand" figure={nonconformity} />
             <Row word="Queries that stand" figure={query} />
-            <Row word="of these not answered in writing" figure={unanswered} />
+            <Row part word="of these not answered in writing" figure={unanswered} />
             <Row word="Photographs" figure={photos} />
-            <Row word="of them on no line" figure={unplacedPhotos} />
+            <Row part word="of them on no line" figure={unplacedPhotos} />
           </dl>
         )}
         {!blocked && unanswered > 0 ? (
@@ -87,10 +88,10 @@ export function SubmitDialog({ batch, view, hindrances, onClose, onShow }: Props
   );
 }
 
-function Row({ word, figure }: { word: string; figure: number }) {
+function Row({ word, figure, part }: { word: string; figure: number; part?: boolean }) {
   return (
     <>
-      <dt className="text-ink-2">{word}</dt>
+      <dt className={classNames('text-ink-2', part && 'pl-4 text-muted')}>{word}</dt>
       <dd className="text-right font-semibold">{figure.toLocaleString('en-US')}</dd>
     </>
   );

@@ -3,7 +3,9 @@ import { Glyph } from '#src/components/ui/glyph.tsx';
 import { TextLink } from '#src/components/ui/text-link.tsx';
 import { paths } from '#src/config/paths.ts';
 import type { GlyphName } from '#src/components/ui/glyph.tsx';
+import type { DesignRow } from '../lib/with-due.ts';
 import { StructureFigure } from './structure-figure.tsx';
+import { formatNumber } from '#shared/units/format-quantity.ts';
 import type { PlannedStructure } from '#shared/generated/api-types.ts';
 
 export const KIND_WORDS = { set: 'set', straighten: 'straighten', relevel: 're-level' } as const;
@@ -33,17 +35,20 @@ function PlanState({ row }: { row: PlannedStructure }) {
   );
 }
 
+/** About a yard. */
+const DEGREES = { digits: 5, fixed: true };
+
 function Position({ row }: { row: PlannedStructure }) {
   const { latitude, longitude } = row.design;
   if (latitude === null || longitude === null) return words(null);
   return (
     <span className="whitespace-nowrap">
-      {latitude.toFixed(5)}, {longitude.toFixed(5)}
+      {formatNumber(latitude, DEGREES)}, {formatNumber(longitude, DEGREES)}
     </span>
   );
 }
 
-export const STRUCTURE_COLUMNS: readonly DataColumn<PlannedStructure>[] = [
+export const STRUCTURE_COLUMNS: readonly DataColumn<DesignRow>[] = [
   {
     id: 'structure',
     title: 'Structure',
@@ -85,10 +90,10 @@ export const STRUCTURE_COLUMNS: readonly DataColumn<PlannedStructure>[] = [
     title: 'Embedment due',
     unit: 'ft',
     figures: true,
-    min: 8.5,
+    min: 10.5,
     grow: 0.5,
     sort: 'due',
-    cell: (row) => <StructureFigure value={row.design.embedmentFt} digits={2} />,
+    cell: (row) => <StructureFigure value={row.dueFt} digits={2} />,
   },
   { id: 'position', title: 'Position, °', figures: true, min: 11, cell: (row) => <Position row={row} /> },
   { id: 'state', title: 'State', min: 7, sort: 'state', cell: (row) => <PlanState row={row} /> },

@@ -1,8 +1,10 @@
 import { useQuery } from '@tanstack/react-query';
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
+import { standardInForceQuery } from '../api/standard-in-force.ts';
 import { structuresQuery } from '../api/structures.ts';
 import { KIND_WORDS, PLAN_WORDS, STRUCTURE_COLUMNS } from './structure-columns.tsx';
 import { arrange, occurring } from '../lib/sort-structures.ts';
+import { withDue, type DesignRow } from '../lib/with-due.ts';
 import { ColumnChooser } from '#src/components/table/column-chooser.tsx';
 import { DataList } from '#src/components/table/data-list.tsx';
 import { FilterBar, type FilterDefinition } from '#src/components/table/filter-bar.tsx';
@@ -11,25 +13,29 @@ import { EmptyState } from '#src/components/ui/empty-state.tsx';
 import { SectionHead } from '#src/components/ui/page-band.tsx';
 import type { KeysetList } from '#src/lib/api/use-keyset-list.ts';
 import type { Filters } from '#src/lib/filters/use-filters.ts';
-import type { PlannedStructure } from '#shared/generated/api-types.ts';
 
-const NONE: readonly PlannedStructure[] = [];
+const NONE: readonly DesignRow[] = [];
 const IDLE = { isStale: false, hasMore: false, isLoadingMore: false, loadMore: () => undefined };
 
 /** The design list: what is planned, and how far each structure is. */
 export function StructureList({ orderId, filters }: { orderId: string; filters: Filters }) {
   const structures = useQuery(structuresQuery(orderId));
-  const all = structures.data ?? NONE;
+  const [today] = useState(() => new Date().toLocaleDateString('en-CA'));
+  const standard = useQuery(standardInForceQuery(today));
+  const all = useMemo(
+    () => (structures.data ? withDue(structures.data, standard.data ?? null) : NONE),
+    [structures.data, standard.data],
+  );
   const { values, sort } = filters;
   const rows = useMemo(() => arrange(all, { values, sort }), [all, values, sort]);
   const define = useMemo(() => definitions(all), [all]);
-  const columns = useColumns<PlannedStructure>({
+  const columns = useColumns<DesignRow>({
     columns: STRUCTURE_COLUMNS,
     rows,
     rowKey: (row) => row.id,
     storageKey: 'structures',
   });
-  const list: KeysetList<PlannedStructure> = {
+  const list: KeysetList<DesignRow> = {
     ...IDLE,
     rows,
     total: rows.length,
@@ -68,7 +74,7 @@ export function StructureList({ orderId, filters }: { orderId: string; filters: 
   );
 }
 
-function definitions(rows: readonly PlannedStructure[]): FilterDefinition[] {
+function definitions(rows: readonly DesignRow[]): FilterDefinition[] {
   return [
     {
       name: 'state',

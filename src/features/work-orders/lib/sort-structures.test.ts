@@ -1,18 +1,14 @@
 import { expect, it } from 'vitest';
 import { arrange, occurring } from './sort-structures.ts';
-import type { PlannedStructure } from '#shared/generated/api-types.ts';
+import type { DesignRow } from './with-due.ts';
 
-const row = (
-  structureNumber: string,
-  poleLengthFt: number | null,
-  state: PlannedStructure['state'] = 'planned',
-) =>
+const row = (structureNumber: string, poleLengthFt: number | null, state: DesignRow['state'] = 'planned') =>
   ({
     structureNumber,
     kind: 'set',
     state,
     design: { poleLengthFt, poleClass: poleLengthFt === null ? null : 'H1', ground: 'soil' },
-  }) as PlannedStructure;
+  }) as DesignRow;
 const ROWS = [row('17-10', 40), row('17-9', null, 'on-record'), row('17-2', 45, 'in-batch')];
 const numbers = (key: string, descending: boolean) =>
   arrange(ROWS, { values: {}, sort: { key, descending } }).map((one) => one.structureNumber);

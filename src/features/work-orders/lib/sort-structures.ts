@@ -1,5 +1,5 @@
 import type { FilterValues, Sort } from '#src/lib/filters/filter-params.ts';
-import type { PlannedStructure } from '#shared/generated/api-types.ts';
+import type { DesignRow } from './with-due.ts';
 
 export const STRUCTURE_FILTERS = ['state', 'kind', 'class', 'ground', 'structure'] as const;
 export const STRUCTURE_SORTS = [
@@ -16,14 +16,14 @@ export const STRUCTURE_SORTS = [
 const STATES = ['planned', 'in-batch', 'approved', 'on-record'] as const;
 
 type Value = string | number | null;
-const VALUES: Readonly<Record<string, (row: PlannedStructure) => Value>> = {
+const VALUES: Readonly<Record<string, (row: DesignRow) => Value>> = {
   structure: (row) => row.structureNumber,
   kind: (row) => row.kind,
   length: (row) => row.design.poleLengthFt,
   class: (row) => row.design.poleClass,
   material: (row) => row.design.poleMaterial,
   ground: (row) => row.design.ground,
-  due: (row) => row.design.embedmentFt,
+  due: (row) => row.dueFt,
   state: (row) => STATES.indexOf(row.state),
 };
 
@@ -36,9 +36,9 @@ function compare(a: Value, b: Value): number {
 
 /** The rows that pass, in the order asked for. What is not known stands last, whichever way it is sorted. */
 export function arrange(
-  rows: readonly PlannedStructure[],
+  rows: readonly DesignRow[],
   { values, sort }: { readonly values: FilterValues; readonly sort: Sort | null },
-): readonly PlannedStructure[] {
+): readonly DesignRow[] {
   const wanted = values['structure']?.toLowerCase();
   const passing = rows.filter(
     (row) =>
@@ -60,8 +60,8 @@ export function arrange(
 
 /** The values that occur, for the choice of a filter. */
 export function occurring(
-  rows: readonly PlannedStructure[],
-  of: (row: PlannedStructure) => string | null,
+  rows: readonly DesignRow[],
+  of: (row: DesignRow) => string | null,
 ): { value: string; label: string }[] {
   const found = new Set(rows.flatMap((row) => of(row) ?? []));
   return [...found].sort(natural.compare).map((value) => ({ value, label: value }));

@@ -40,10 +40,14 @@ export function Component() {
       <div className="border-b border-hairline px-gutter py-2 text-table">
         <PlanProgress order={order.data} words />
       </div>
-      <SectionHead title="Batches" />
-      <OrderBatches orderId={id} />
-      <div className="px-gutter py-4">
-        <Cautions />
+      <div className="grid lg:grid-cols-[minmax(0,1fr)_27rem]">
+        <section aria-label="Batches">
+          <SectionHead title="Batches" />
+          <OrderBatches orderId={id} />
+        </section>
+        <div className="border-hairline p-4 lg:border-l">
+          <Cautions />
+        </div>
       </div>
       <StructureList orderId={id} filters={filters} />
     </>
