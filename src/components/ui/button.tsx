@@ -17,17 +17,19 @@ const KINDS: Record<ButtonKind, string> = {
     'text-ink underline decoration-rule underline-offset-4 hover:decoration-ink disabled:text-muted disabled:no-underline',
 };
 const SIZES: Record<ButtonSize, string> = {
-  small: 'min-h-7 px-2.5 text-small',
-  base: 'min-h-8.5 px-3.5 text-table',
+  small: 'min-h-7 px-2.5 text-small pointer-coarse:min-h-11',
+  base: 'min-h-8.5 px-3.5 text-table pointer-coarse:min-h-11',
   large: 'min-h-13 px-5 text-lead',
 };
 
 function look({ kind = 'secondary', size = 'base', wide }: Look): string {
   return classNames(
     'inline-flex items-center justify-center gap-2.5 font-semibold whitespace-nowrap select-none',
-    'disabled:cursor-not-allowed disabled:border-rule pointer-coarse:min-h-11 print:hidden',
+    'disabled:cursor-not-allowed disabled:border-rule print:hidden',
     KINDS[kind],
-    kind === 'quiet' ? classNames('min-h-7', size === 'small' ? 'text-small' : 'text-table') : SIZES[size],
+    kind === 'quiet'
+      ? classNames('min-h-7 pointer-coarse:min-h-11', size === 'small' ? 'text-small' : 'text-table')
+      : SIZES[size],
     wide && 'w-full',
   );
 }

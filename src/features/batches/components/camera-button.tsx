@@ -1,6 +1,7 @@
 import { FileButton } from './file-button.tsx';
 import { missingPhotographs } from '../lib/next-photograph.ts';
 import type { LineView } from '../lib/line-view.ts';
+import { counted } from '#src/lib/formats.ts';
 import type { QueuedFile } from '#src/lib/api/upload-queue.ts';
 
 type Props = {
@@ -43,7 +44,7 @@ export function CameraButton({ lines, files, onPhotograph }: Props) {
       </FileButton>
       {missing.length > 1 ? (
         <p className="mt-1.5 text-small text-muted">
-          {missing.length - 1} more views are missing after this one.
+          After it, {counted(missing.length - 1, 'more view is', 'more views are')} missing.
         </p>
       ) : null}
     </div>

@@ -11,6 +11,7 @@ export function CheckRow({ batch, check }: { batch: Batch; check: CheckState | n
     <IntakeRow
       glyph={check?.state === 'failed' ? 'triangle' : batch.counts.lines > 0 && !running ? 'tick' : 'dotted'}
       title="Check"
+      settled={!running && check?.state !== 'failed'}
     >
       <div aria-live="polite">
         {running ? (

@@ -33,7 +33,7 @@ export function FindingItem({ finding, line, named, batchId, open, onPhotograph 
     <li className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-2 border-b border-hairline py-3 last:border-b-0">
       <Glyph name={severity.glyph} className="mt-1" label={severity.word} />
       <div>
-        <h4 className="text-base font-semibold">
+        <h3 className="text-base font-semibold">
           {line && named ? (
             <span className="lg:hidden">
               <TextLink
@@ -46,7 +46,7 @@ export function FindingItem({ finding, line, named, batchId, open, onPhotograph 
             </span>
           ) : null}
           {finding.title}
-        </h4>
+        </h3>
         <p className="text-ink-2">{finding.message}</p>
         {finding.margin === null && typeof finding.measured !== 'number' ? null : (
           <MeasuredAgainst {...finding} />

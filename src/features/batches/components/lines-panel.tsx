@@ -30,7 +30,7 @@ export function LinesPanel({ view, filters, decided, ...actions }: Props) {
           onClick={() => setFiltering(!filtering)}
           className="ml-auto min-h-7 text-muted underline underline-offset-4 lg:hidden pointer-coarse:min-h-11"
         >
-          Filters
+          Filter
         </button>
       </ShowBar>
       <div className={filtering ? undefined : 'max-lg:hidden'}>
