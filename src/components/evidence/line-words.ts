@@ -33,6 +33,7 @@ export function lineState(record: RecordRow): { readonly glyph: GlyphName; reado
   const due = counts.nonconformity + counts.query;
   const glyph = counts.nonconformity > 0 ? 'triangle' : counts.query > 0 ? 'circle' : 'dotted';
   if (due === 0) return { glyph, word: 'no findings' };
+  if (counts.undecided === 0) return { glyph: 'dotted', word: 'reopened' };
   if (counts.undecided < due) return { glyph, word: `${counts.undecided} of ${due} open` };
   const word = counts.nonconformity > 0 ? counted(due, 'finding') : counted(due, 'query', 'queries');
   return { glyph, word };

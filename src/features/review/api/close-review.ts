@@ -10,6 +10,9 @@ export function useCloseReview(batchId: string) {
     mutationFn: () => api<CloseReviewReply>(`/api/batches/${batchId}/close-review`, { method: 'POST' }),
     onSuccess: async () => {
       await Promise.all([
+        client.invalidateQueries({ queryKey: ['records'] }),
+        // The desk behind the result stays as it is until the result has been read.
+        client.invalidateQueries({ queryKey: ['review', batchId], refetchType: 'none' }),
         client.invalidateQueries({ queryKey: ['review-queue'] }),
         client.invalidateQueries({ queryKey: ['home'] }),
         client.invalidateQueries({ queryKey: ['concessions'] }),

@@ -19,6 +19,8 @@ export function DeskBand({ batch, counts, onClose, move }: Props) {
   const { revision, workOrder, contractor, can } = batch;
   const user = useUser();
   const holder = revision.inspector;
+  // What is shown is what was submitted; a newer revision is the contractor's until they submit it.
+  const open = isOpen(batch.status);
   const settled = counts.lines > 0 && counts.undecided === 0;
   return (
     <PageBand
@@ -29,12 +31,13 @@ export function DeskBand({ batch, counts, onClose, move }: Props) {
             Work order {workOrder.number} · {workOrder.title}
           </Fact>
           <Fact word="from">{contractor.name}</Fact>
-          <Fact word="revision">{revision.number}</Fact>
+          <Fact word="revision">{open ? revision.number - 1 : revision.number}</Fact>
           {revision.standards.length > 0 ? (
             <Fact word="standard">{revision.standards.join(', ')}</Fact>
           ) : null}
           {holder && holder.id !== user.id ? <Fact word="held by">{holder.name}</Fact> : null}
-          {batch.status === 'in-review' ? null : (
+          {open ? <Fact>revision {revision.number} is with the contractor</Fact> : null}
+          {open || batch.status === 'in-review' ? null : (
             <Fact>
               <StateWord {...STATUS_WORDS[batch.status]} />
             </Fact>
@@ -78,4 +81,8 @@ export function DeskBand({ batch, counts, onClose, move }: Props) {
       }
     />
   );
+}
+
+function isOpen(status: Batch['status']): boolean {
+  return status === 'draft' || status === 'checking' || status === 'checked';
 }

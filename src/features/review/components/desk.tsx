@@ -37,7 +37,7 @@ export function Desk({
   const move = useMoveBatch(batch.id);
   const photos = desk.whole ? [] : (desk.sheet.data?.photos ?? []);
   const counts = deskCounts(lines);
-  const holds = batch.can.includes('close-review');
+  const decides = batch.can.includes('close-review') || desk.record?.can.includes('decide') === true;
   useDeskKeys(desk, {
     onPhoto: () => photos.length > 0 && setPhoto(0),
     onKeys: () => setKeys(true),
@@ -68,7 +68,7 @@ export function Desk({
           <EvidencePane desk={desk} onPhoto={setPhoto} />
         </section>
       </div>
-      <StatusBar keys={holds ? DESK_KEYS : MOVE_KEYS} right={WHO_DECIDES} />
+      <StatusBar keys={decides ? DESK_KEYS : MOVE_KEYS} right={WHO_DECIDES} />
       <PhotoViewer
         photos={photos}
         index={photo}

@@ -2,6 +2,7 @@ import { Button } from '#src/components/ui/button.tsx';
 import { StateWord, LINE_WORDS } from '#src/components/ui/state-word.tsx';
 import { ReasonForm } from '#src/features/review/components/reason-form.tsx';
 import type { Decision } from '#src/features/review/api/send-decision.ts';
+import { mayApproveLine } from '#src/features/review/desk/desk-tabs.ts';
 import type { Saying } from '#src/features/review/desk/use-hand.ts';
 import { formatInstant } from '#src/lib/formats.ts';
 import type { RecordRow } from '#shared/generated/api-types.ts';
@@ -18,7 +19,7 @@ type Props = {
 
 /** The word on the line itself: approve one without findings, return any. */
 export function LineDecision({ record, saying, sending, say, send, sendPlain }: Props) {
-  const due = record.counts.nonconformity + record.counts.query;
+  const approvable = mayApproveLine(record);
   const mayDecide = record.can.includes('decide');
   const { decision } = record;
   if (!mayDecide && decision === null) return null;
@@ -41,7 +42,7 @@ export function LineDecision({ record, saying, sending, say, send, sendPlain }: 
       ) : null}
       {mayDecide && saying !== 'return' ? (
         <div className="mt-1 flex flex-wrap items-center gap-2">
-          {decision === null && due === 0 ? (
+          {approvable ? (
             <Button
               size="small"
               kind="primary"
@@ -54,8 +55,8 @@ export function LineDecision({ record, saying, sending, say, send, sendPlain }: 
           {decision === null ? (
             <Button
               size="small"
-              kind={due === 0 ? 'secondary' : 'quiet'}
-              hotkey={due === 0 ? 'R' : undefined}
+              kind={approvable ? 'secondary' : 'quiet'}
+              hotkey={approvable ? 'R' : undefined}
               onClick={() => say('return')}
             >
               Return the line…

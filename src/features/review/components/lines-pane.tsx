@@ -47,7 +47,13 @@ export function LinesPane({ desk, batch, lines, clean }: Props) {
               {approve.error.message}
             </p>
           ) : null}
-          <Button size="small" wide busy={approve.isPending && 'Approving…'} onClick={() => approve.mutate()}>
+          <Button
+            size="small"
+            wide
+            className="py-1 whitespace-normal!"
+            busy={approve.isPending && 'Approving…'}
+            onClick={() => approve.mutate()}
+          >
             Approve {clean === 1 ? 'the one line' : `all ${counted(clean, 'line')}`} without findings
           </Button>
         </div>

@@ -36,6 +36,16 @@ export function isClean(line: RecordRow): boolean {
   return line.state === 'undecided' && line.counts.nonconformity + line.counts.query === 0;
 }
 
+/** A line that waits for the inspector's own word: none of its findings is open. One that was reopened may have findings. */
+export function mayApproveLine(line: RecordRow): boolean {
+  return (
+    line.can.includes('decide') &&
+    line.state === 'undecided' &&
+    line.decision === null &&
+    line.counts.undecided === 0
+  );
+}
+
 export type DeskCounts = {
   readonly lines: number;
   readonly approved: number;

@@ -1,3 +1,4 @@
+import { mayApproveLine } from '#src/features/review/desk/desk-tabs.ts';
 import type { DeskModel } from '#src/features/review/desk/use-desk.ts';
 import { useHotkeys } from '#src/lib/use-hotkeys.ts';
 
@@ -9,16 +10,16 @@ export function useDeskKeys(
   const { hand, sheet } = desk;
   const record = sheet.data?.record ?? null;
   const finding = hand.finding;
-  const lineOnly = desk.due.length === 0 && record !== null && record.can.includes('decide');
+  const open = finding?.state === 'undecided';
+  const lineWaits = record !== null && mayApproveLine(record);
 
   function approve(): void {
-    if (finding?.can.includes('decide')) hand.say('approve');
-    else if (lineOnly && record.decision === null)
-      desk.sendPlain({ type: 'line', record, request: { decision: 'approve' } });
+    if (open && finding.can.includes('decide')) hand.say('approve');
+    else if (lineWaits) desk.sendPlain({ type: 'line', record, request: { decision: 'approve' } });
   }
   function reject(): void {
-    if (finding?.can.includes('decide')) hand.say('reject');
-    else if (lineOnly && record.decision === null) hand.say('return');
+    if (open && finding.can.includes('decide')) hand.say('reject');
+    else if (lineWaits) hand.say('return');
   }
   function undo(): void {
     if (finding?.can.includes('undo') && finding.state !== 'undecided')
@@ -33,7 +34,7 @@ export function useDeskKeys(
     a: approve,
     r: reject,
     c: () => {
-      if (finding?.can.includes('ask-concession')) hand.say('concession');
+      if (open && finding.can.includes('ask-concession')) hand.say('concession');
     },
     u: undo,
     p: also.onPhoto,
