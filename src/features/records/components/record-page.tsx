@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { lineStamp } from '#src/components/evidence/line-stamp.ts';
+import { LineRevisions } from '#src/components/evidence/line-revisions.tsx';
 import { lineState } from '#src/components/evidence/line-words.ts';
 import { HistoryList } from '#src/components/evidence/history-list.tsx';
 import { sheetFindings } from '#src/components/evidence/number-findings.ts';
@@ -106,6 +107,7 @@ export function RecordPage({ data }: { data: RecordSheetData }) {
           </section>
           <section aria-labelledby="history">
             <SectionHead title="History" id="history" />
+            <LineRevisions batch={batch} record={record} />
             <HistoryList entries={data.history} />
           </section>
           <div className="px-gutter py-4">

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { lineState } from '#src/components/evidence/line-words.ts';
 import { PhotoViewer } from '#src/components/evidence/photo-viewer.tsx';
 import { WHO_DECIDES } from '#src/components/ui/caution.tsx';
 import { StatusBar } from '#src/components/ui/status-bar.tsx';
@@ -68,7 +69,11 @@ export function Desk({
           <EvidencePane desk={desk} onPhoto={setPhoto} />
         </section>
       </div>
-      <StatusBar keys={decides ? DESK_KEYS : MOVE_KEYS} right={WHO_DECIDES} />
+      <StatusBar
+        left={<span className="sr-only">{spoken(desk.record)}</span>}
+        keys={decides ? DESK_KEYS : MOVE_KEYS}
+        right={WHO_DECIDES}
+      />
       <PhotoViewer
         photos={photos}
         index={photo}
@@ -88,4 +93,9 @@ export function Desk({
       />
     </div>
   );
+}
+
+/** What a decision did, for those who hear the page. */
+function spoken(line: RecordRow | null): string {
+  return line ? `${line.structureNumber}: ${lineState(line).word}` : '';
 }

@@ -1,4 +1,5 @@
 import { HistoryList } from '#src/components/evidence/history-list.tsx';
+import { LineRevisions } from '#src/components/evidence/line-revisions.tsx';
 import { PhotoGrid } from '#src/components/evidence/photo-grid.tsx';
 import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { FindingDecision } from '#src/features/review/components/finding-decision.tsx';
@@ -85,6 +86,7 @@ export function EvidencePane({ desk, onPhoto }: { desk: DeskModel; onPhoto: (ind
           <summary className="px-gutter py-2.5 text-table font-semibold text-ink-2">
             History, {counted(sheet.data.history.length, 'entry', 'entries')}
           </summary>
+          <LineRevisions batch={sheet.data.batch} record={sheet.data.record} />
           <HistoryList entries={sheet.data.history} />
         </details>
       ) : null}

@@ -4,6 +4,7 @@ import { NewerState } from '#src/features/review/components/newer-state.tsx';
 import { ReasonForm } from '#src/features/review/components/reason-form.tsx';
 import { RejectForm } from '#src/features/review/components/reject-form.tsx';
 import type { Decision } from '#src/features/review/api/send-decision.ts';
+import { restoreFocus } from '#src/features/review/desk/restore-focus.ts';
 import type { Saying } from '#src/features/review/desk/use-hand.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 
@@ -26,7 +27,10 @@ export function FindingDecision({ finding, saying, sending, stale, say, send, se
   const frame = {
     draftKey: `${finding.id}.${saying ?? ''}`,
     sending,
-    onCancel: () => say(null),
+    onCancel: () => {
+      say(null);
+      restoreFocus(finding.id);
+    },
   };
   return (
     <>

@@ -1,6 +1,7 @@
 import { useEffect, useRef, type ReactNode } from 'react';
 import { FindingFacts } from '#src/components/evidence/finding-facts.tsx';
 import { Glyph } from '#src/components/ui/glyph.tsx';
+import { findingElementId } from '#src/features/review/desk/restore-focus.ts';
 import { classNames } from '#src/lib/class-names.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 
@@ -22,10 +23,6 @@ const RINGS = {
   note: 'border-rule text-ink-2',
 } as const;
 const SPOKEN = { nonconformity: 'Nonconformity', query: 'Query', note: 'Note' } as const;
-
-export function findingElementId(id: string): string {
-  return `finding-${id}`;
-}
 
 /** A finding beside the drawing: its number is its balloon's, and each marks the other. */
 export function FindingItem({ finding, number, inHand, marked, onTake, onHover, children }: Props) {

@@ -8,7 +8,7 @@ import { ErrorState } from '#src/components/ui/error-state.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
 import { TextLink } from '#src/components/ui/text-link.tsx';
 import { paths } from '#src/config/paths.ts';
-import { findingElementId } from '#src/features/review/components/finding-item.tsx';
+import { findingElementId } from '#src/features/review/desk/restore-focus.ts';
 import type { DeskModel } from '#src/features/review/desk/use-desk.ts';
 import { sheetLimitsQuery } from '#src/lib/api/sheet-limits.ts';
 

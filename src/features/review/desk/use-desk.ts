@@ -4,6 +4,7 @@ import { batchChangesQuery } from '#src/features/review/api/batch-changes.ts';
 import { batchFindingsQuery } from '#src/features/review/api/batch-findings.ts';
 import type { Decision } from '#src/features/review/api/send-decision.ts';
 import { changedKeys, changesOf, isUnder } from '#src/features/review/desk/desk-tabs.ts';
+import { restoreFocus } from '#src/features/review/desk/restore-focus.ts';
 import { stepTo, stepToFinding } from '#src/features/review/desk/steps.ts';
 import { useDecide } from '#src/features/review/desk/use-decide.ts';
 import { useHand, type Saying } from '#src/features/review/desk/use-hand.ts';
@@ -62,6 +63,7 @@ export function useDesk(batch: Batch, lines: readonly RecordRow[]) {
     await decide.mutateAsync(decision);
     setStale(null);
     hand.said(targetOf(decision).line);
+    if ('finding' in decision) restoreFocus(decision.finding.id);
   }
   /** For decisions without a form: what is refused is told by the notice. */
   const sendPlain = (decision: Decision): void => void send(decision).catch(() => undefined);
