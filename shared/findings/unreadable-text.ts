@@ -10,7 +10,7 @@ const BECAUSE: Readonly<Record<Unreadable, string>> = {
   day: 'which is no date',
   degrees: 'which is no angle in degrees',
   temperature: 'which is no temperature',
-  separators: 'in which point and comma cannot be told apart (a point parts decimals, a comma thousands)',
+  separators: 'whose points and commas make no number (a point parts decimals, a comma thousands)',
   fraction: 'which holds no proper fraction',
   whole: 'which is not a whole number',
   boolean: 'which is TRUE or FALSE and no reading',
