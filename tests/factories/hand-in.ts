@@ -1,5 +1,5 @@
 import type { RowInput } from '#server/workbook/write-workbook.ts';
-import type { Agent, Harness } from '#tests/setup/api-harness.ts';
+import type { Agent, Stage } from '#tests/setup/api-harness.ts';
 import { photograph } from './photograph.ts';
 import { pourRows, SET_VIEWS } from './set-row.ts';
 import type { WorkSite } from './work-site.ts';
@@ -9,7 +9,7 @@ export type HandedIn = { readonly id: string; readonly number: string };
 
 /** A new batch of these lines, handed in by the contractor through the API with every photograph, checked and submitted. */
 export async function handIn(
-  harness: Harness,
+  harness: Stage,
   options: { site: WorkSite; agent: Agent; set: readonly RowInput[] },
 ): Promise<HandedIn> {
   const { site, agent } = options;
@@ -23,7 +23,7 @@ export async function handIn(
 
 /** Workbook and photographs of these lines on an open batch, checked. */
 export async function uploadLines(
-  harness: Harness,
+  harness: Stage,
   options: { site: WorkSite; agent: Agent; set: readonly RowInput[]; batchId: string },
 ): Promise<void> {
   const { site, agent, set, batchId } = options;

@@ -1,5 +1,5 @@
 import type { Actor } from '#shared/permissions/ability.ts';
-import type { Harness } from '#tests/setup/api-harness.ts';
+import type { Stage } from '#tests/setup/api-harness.ts';
 import { createLot, createProduct, type FoamProduct, type Lot } from './foam.ts';
 import { createStandard } from './standards.ts';
 import { createWorkOrder, type PlannedStructure, type WorkOrder } from './work-orders.ts';
@@ -13,7 +13,7 @@ export type WorkSite = {
 
 /** The demo's standard in force, its product with one lot, and a work order of one contractor with these structures planned. */
 export async function createWorkSite(
-  harness: Harness,
+  harness: Stage,
   options: { planned: readonly (string | PlannedStructure)[]; contractor?: Actor; number?: string },
 ): Promise<WorkSite> {
   const em = harness.em();

@@ -30,6 +30,9 @@ export type Harness = {
   close(): Promise<void>;
 };
 
+/** What factories need: a harness, or a server in a process of its own. */
+export type Stage = Pick<Harness, 'em' | 'owner' | 'person' | 'signIn' | 'drain'>;
+
 /** The whole server on a database of its own, without a port. Jobs rest until `drain`. */
 export async function createHarness(
   options: { settings?: Readonly<Record<string, string>> } = {},

@@ -4,7 +4,7 @@ import { photograph } from '#tests/factories/photograph.ts';
 import { pourRows, SET_VIEWS, setRow } from '#tests/factories/set-row.ts';
 import type { WorkSite } from '#tests/factories/work-site.ts';
 import { workbookFile } from '#tests/factories/workbook-file.ts';
-import type { Agent, Harness } from '#tests/setup/api-harness.ts';
+import type { Agent, Stage } from '#tests/setup/api-harness.ts';
 import type { BatchObjects } from './own-objects.ts';
 
 type Name = 'draft' | 'queued' | 'open' | 'done';
@@ -15,7 +15,7 @@ const short = (structureNumber: string): RowInput => setRow(structureNumber, { e
 
 /** Four batches of one contractor, each with photographs and checked; three are handed in. */
 export async function buildBatches(
-  harness: Harness,
+  harness: Stage,
   options: { site: WorkSite; agent: Agent; prefix: string },
 ): Promise<HandedInBatches> {
   const { site, agent, prefix } = options;

@@ -1,7 +1,7 @@
 import { createWorkOrder } from '#tests/factories/work-orders.ts';
 import { createWorkSite, type WorkSite } from '#tests/factories/work-site.ts';
 import type { Actor } from '#shared/permissions/ability.ts';
-import type { Agent, Harness } from '#tests/setup/api-harness.ts';
+import type { Agent, Stage } from '#tests/setup/api-harness.ts';
 import { buildBatches } from './build-batches.ts';
 import type { OwnObjects } from './own-objects.ts';
 import { reviewBatches } from './review-batches.ts';
@@ -32,7 +32,7 @@ export type Shared = {
 };
 
 export type World = {
-  readonly harness: Harness;
+  readonly harness: Stage;
   readonly people: Readonly<Record<Caller, Actor>>;
   readonly agents: Readonly<Record<Caller, Agent>>;
   /** Objects of each contractor, alike in every way but whose they are. */
@@ -41,7 +41,7 @@ export type World = {
 };
 
 /** One of everything for each of two contractors, made through the API; nothing of it is changed by the table's requests. */
-export async function buildWorld(harness: Harness): Promise<World> {
+export async function buildWorld(harness: Stage): Promise<World> {
   const first = await createWorkSite(harness, { planned: plannedFor('A'), number: '17' });
   const contractor = await harness.person('contractor');
   const order = await createWorkOrder(harness.em(), {
@@ -73,7 +73,7 @@ export const plannedFor = (prefix: string): string[] =>
   ['draft', 'queued', 'open-1', 'open-2', 'done-1', 'done-2', 'spare'].map((name) => `${prefix}-${name}`);
 
 async function readShared(made: {
-  harness: Harness;
+  harness: Stage;
   people: Readonly<Record<Caller, Actor>>;
   agents: Readonly<Record<Caller, Agent>>;
   site: WorkSite;
