@@ -81,6 +81,10 @@ export interface ValueChange {
   title: string;
   before: string | number | null;
   after: string | number | null;
+  /**
+   * Unit of a value that is a number.
+   */
+  unit: string | null;
   cell: string | null;
 }
 /**

@@ -7,7 +7,7 @@ import { findingTitle } from '#shared/findings/render.ts';
 import type { Finding } from '#shared/findings/types.ts';
 import type { BatchChanges } from '#shared/generated/api-types.ts';
 import type { Actor } from '#shared/permissions/ability.ts';
-import { fieldTitle } from '#shared/records/field-meta.ts';
+import { fieldTitle, RECORD_FIELDS } from '#shared/records/field-meta.ts';
 import { kindKey } from '#shared/records/structure-key.ts';
 import { loadRun } from './load-run.ts';
 
@@ -69,7 +69,8 @@ function narrow(whole: CheckResult, after: CheckResult): CheckResult {
 }
 
 function toItem(change: ValueChange): BatchChanges['items'][number] {
-  const title = fieldTitle(recordNameOf(change.sheet, change.kind), change.field);
+  const name = recordNameOf(change.sheet, change.kind);
+  const title = fieldTitle(name, change.field);
   return {
     structureNumber: change.structureNumber,
     kind: change.kind,
@@ -77,7 +78,8 @@ function toItem(change: ValueChange): BatchChanges['items'][number] {
     title: change.part === null ? title : `${title} (${change.part})`,
     before: plain(change.before),
     after: plain(change.after),
-    cell: change.cell === null ? null : `${change.sheet} ${change.cell}`,
+    unit: RECORD_FIELDS[name].get(change.field)?.unit ?? null,
+    cell: change.cell === null ? null : `${change.sheet}!${change.cell}`,
   };
 }
 

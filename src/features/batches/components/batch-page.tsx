@@ -7,6 +7,7 @@ import { batchPhotosQuery } from '../api/batch-photos.ts';
 import { useCheck } from '../api/use-check.ts';
 import { BatchHead } from './batch-head.tsx';
 import { BatchTabs, readTab, type BatchTab } from './batch-tabs.tsx';
+import { EarlierRevision } from './earlier-revision.tsx';
 import { Intake } from './intake.tsx';
 import { SubmitBar } from './submit-bar.tsx';
 import { SubmitDialog } from './submit-dialog.tsx';
@@ -78,13 +79,21 @@ export function BatchPage({ batch }: { batch: Batch }) {
           aria-label="Files and check"
           className="lg:sticky lg:top-band lg:max-h-[calc(100dvh-2.75rem)] lg:self-start lg:overflow-y-auto"
         >
-          <Intake
-            batch={newest ? batch : { ...batch, can: NONE }}
-            view={view}
-            check={newest ? check : null}
-            intake={intake}
-            onUnplaced={() => go({ tab: 'photos' })}
-          />
+          {revision === null ? (
+            <Intake
+              batch={batch}
+              view={view}
+              check={check}
+              intake={intake}
+              onUnplaced={() => go({ tab: 'photos' })}
+            />
+          ) : (
+            <EarlierRevision
+              batchId={batch.id}
+              revision={revision}
+              onNewest={() => go({ revision: null, tab: null, show: null })}
+            />
+          )}
         </aside>
         <div className="flex min-h-[50dvh] min-w-0 flex-col border-hairline lg:border-l">
           <BatchTabs

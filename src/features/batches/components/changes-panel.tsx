@@ -5,10 +5,15 @@ import { EmptyState } from '#src/components/ui/empty-state.tsx';
 import { ErrorState } from '#src/components/ui/error-state.tsx';
 import { Glyph } from '#src/components/ui/glyph.tsx';
 import { SectionHead } from '#src/components/ui/page-band.tsx';
+import { Quantity } from '#src/components/ui/quantity.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
+import { formatWallClock } from '#src/lib/formats.ts';
 import type { BatchChanges, ValueChange } from '#shared/generated/api-types.ts';
 
-const say = (value: ValueChange['before']): string => (value === null ? 'blank' : String(value));
+function Said({ value, unit }: { value: ValueChange['before']; unit: string | null }) {
+  if (value === null) return 'blank';
+  return typeof value === 'number' ? <Quantity value={value} unit={unit ?? ''} /> : formatWallClock(value);
+}
 
 const COLUMNS: readonly PlainColumn<ValueChange>[] = [
   {
@@ -17,12 +22,21 @@ const COLUMNS: readonly PlainColumn<ValueChange>[] = [
     cell: (row) => <b className="font-semibold">{row.structureNumber}</b>,
   },
   { id: 'title', title: 'Value', cell: (row) => row.title },
-  { id: 'before', title: 'Before', figures: true, cell: (row) => say(row.before) },
+  {
+    id: 'before',
+    title: 'Before',
+    figures: true,
+    cell: (row) => <Said value={row.before} unit={row.unit} />,
+  },
   {
     id: 'after',
     title: 'Now',
     figures: true,
-    cell: (row) => <b className="font-semibold">{say(row.after)}</b>,
+    cell: (row) => (
+      <b className="font-semibold">
+        <Said value={row.after} unit={row.unit} />
+      </b>
+    ),
   },
   { id: 'cell', title: 'Cell', cell: (row) => row.cell ?? '' },
 ];

@@ -11,11 +11,13 @@ export function describeLine({ kind, values, occurrence }: RecordRow): string {
     return `${KIND_WORDS[kind]}${pad}${again}`;
   }
   const { poleLengthFt, poleClass } = values;
-  const pole = [
-    typeof poleLengthFt === 'number' ? `${poleLengthFt} ft` : '',
-    typeof poleClass === 'string' || typeof poleClass === 'number' ? `cl ${poleClass}` : '',
-  ]
+  const pole = [typeof poleLengthFt === 'number' ? `${poleLengthFt} ft` : '', classWord(poleClass)]
     .filter(Boolean)
     .join(' ');
   return `${pole ? `${pole}, ` : ''}${KIND_WORDS[kind]}${again}`;
+}
+
+function classWord(poleClass: unknown): string {
+  if (poleClass === 'other') return 'other class';
+  return typeof poleClass === 'string' || typeof poleClass === 'number' ? `cl ${poleClass}` : '';
 }

@@ -14,7 +14,7 @@ describe('lines under the tabs', () => {
   const changed = changedKeys({
     from: 1,
     to: 2,
-    items: [{ ...change, before: 5.8, after: 6.1, cell: 'Set H9' }],
+    items: [{ ...change, before: 5.8, after: 6.1, unit: 'ft', cell: 'Set!H9' }],
     added: [],
     removed: [],
     findings: { gone: [], new: [] },

@@ -110,5 +110,5 @@ function faultsOf(text: string): true | string {
     );
   }
   if (structures.length === 0) return 'Give at least one structure.';
-  return structures.length > 5000 || 'A work order has at most 5,000 structures: part it.';
+  return structures.length <= 5000 || 'A work order has at most 5,000 structures: part it.';
 }
