@@ -28,7 +28,8 @@ const NO_FINDINGS: readonly FindingRow[] = [];
 export function useDesk(batch: Batch, lines: readonly RecordRow[]) {
   const client = useQueryClient();
   const place = usePlace();
-  const own = useQuery(batchFindingsQuery(batch.id)).data ?? NO_FINDINGS;
+  const ownQuery = useQuery(batchFindingsQuery(batch.id));
+  const own = ownQuery.data ?? NO_FINDINGS;
   const changes = useQuery(batchChangesQuery(batch.id)).data;
   const changed = changedKeys(changes);
 
@@ -37,7 +38,7 @@ export function useDesk(batch: Batch, lines: readonly RecordRow[]) {
   const { line: asked, setLine } = place;
   // The line that was chosen for the person is named too: else a decision on it would choose another.
   useEffect(() => {
-    if (line !== null && line !== asked) setLine(line);
+    if (line !== null && line !== asked && !ownQuery.isPending) setLine(line);
   });
   const record = lines.find((one) => one.id === line) ?? null;
   // The line in hand stays in sight under every tab, though its decision may have taken it from there.
