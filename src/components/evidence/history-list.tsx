@@ -7,7 +7,7 @@ export function HistoryList({ entries }: { entries: readonly HistoryEntry[] }) {
     <ol className="text-table">
       {entries.map((entry) => (
         <li
-          key={`${entry.at} ${entry.title}`}
+          key={`${entry.at} ${entry.title} ${entry.revision} ${entry.detail}`}
           className="grid grid-cols-[9.5rem_minmax(0,1fr)] gap-x-4 border-b border-hairline px-gutter py-1.5 max-sm:grid-cols-1"
         >
           <span className="text-muted">

@@ -47,7 +47,7 @@ export function PoursTable({ pours }: { pours: readonly PourRow[] }) {
           caption="Pours of this line"
           columns={columns}
           rows={pours}
-          rowKey={(pour) => `${pour.sheet} ${pour.row} ${pour.pourNumber}`}
+          rowKey={(pour) => `${pour.sheet} ${pour.row} ${pour.event} ${pour.pourNumber}`}
         />
       )}
     </section>

@@ -11,7 +11,7 @@ export function ValueChanges({ items }: { items: BatchChanges['items'] }) {
       <ul className="px-3 py-1.5 text-table">
         {items.map((item) => (
           <li
-            key={`${item.field} ${item.cell ?? item.title}`}
+            key={`${item.title} ${item.cell} ${item.before} ${item.after}`}
             className="border-b border-hairline py-1 last:border-b-0"
           >
             <Title text={item.title} /> <del className="text-muted">{words(item.before)}</del>{' '}
