@@ -181,7 +181,7 @@ export interface CheckProgress {
   problem: unknown;
 }
 /**
- * What closing a review did; ids are line ids.
+ * What closing a review did; ids are those of records, as the register takes them.
  */
 export interface CloseReviewReply {
   approved: string[];

@@ -2,7 +2,7 @@ import { accept, refuse, type Outcome } from './outcome.ts';
 import type { LineState } from './states.ts';
 
 export type ReviewLine = {
-  readonly lineId: string;
+  readonly recordId: string;
   readonly structureNumber: string;
   readonly state: LineState;
 };
@@ -15,7 +15,7 @@ export type Closing = {
   readonly nextRevision: boolean;
 };
 
-/** What closing the review does, or which lines still keep it open. Line ids in the order given. */
+/** What closing the review does, or which lines still keep it open. Record ids in the order given. */
 export function closeReview(lines: readonly ReviewLine[], undecidedFindings: number): Outcome<Closing> {
   const open = lines.filter((line) => line.state === 'undecided');
   if (open.length > 0) {
@@ -31,7 +31,7 @@ export function closeReview(lines: readonly ReviewLine[], undecidedFindings: num
       'review.undecided',
       `${undecidedFindings === 1 ? 'One finding that belongs' : `${undecidedFindings} findings that belong`} to no line ${undecidedFindings === 1 ? 'is' : 'are'} not decided.`,
     );
-  const ids = (state: LineState) => lines.filter((line) => line.state === state).map((line) => line.lineId);
+  const ids = (state: LineState) => lines.filter((line) => line.state === state).map((line) => line.recordId);
   const returned = ids('returned');
   return accept({
     approved: ids('approved'),

@@ -45,9 +45,9 @@ describe('state of a line', () => {
 });
 
 describe('closing a review', () => {
-  const line = (lineId: string, state: 'approved' | 'returned' | 'held' | 'undecided') => ({
-    lineId,
-    structureNumber: `17-${lineId}`,
+  const line = (recordId: string, state: 'approved' | 'returned' | 'held' | 'undecided') => ({
+    recordId,
+    structureNumber: `17-${recordId}`,
     state,
   });
 

@@ -141,7 +141,7 @@ describe('the shape of', () => {
     );
     await expectReply(inspector.put(path).set('If-Match', '"2"').send(reject), 200, shapes.finding);
     const closed = await expectReply(inspector.post(close), 200, shapes.closed);
-    expect(closed.body).toMatchObject({ returned: [open.lineId], held: [], nextRevision: 1 });
+    expect(closed.body).toMatchObject({ returned: [open.recordId], held: [], nextRevision: 1 });
   });
 
   it('the register and a transmittal', async () => {

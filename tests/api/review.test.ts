@@ -212,11 +212,11 @@ describe('a review', () => {
 
   it('closes: approved stand, returned make the next revision, held wait for the engineer', async () => {
     const closed = await inspector.post(`/api/batches/${batch.id}/close-review`);
-    const lineOf = async (number: string) => (await recordOf(number)).lineId;
+    const idOf = async (number: string) => (await recordOf(number)).id;
     expect(closed.body).toEqual({
-      approved: [await lineOf('L-1'), await lineOf('L-3')],
-      returned: [await lineOf('L-2')],
-      held: [await lineOf('L-4')],
+      approved: [await idOf('L-1'), await idOf('L-3')],
+      returned: [await idOf('L-2')],
+      held: [await idOf('L-4')],
       nextRevision: 1,
     });
     const shown = await contractor.get(`/api/batches/${batch.id}`);

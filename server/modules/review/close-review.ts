@@ -43,7 +43,11 @@ export async function closeReview(
       [revision.id],
     );
     const closing = close(
-      lines.map((line) => ({ lineId: line.id, structureNumber: line.structure_number, state: line.state })),
+      lines.map((line) => ({
+        recordId: line.recordId,
+        structureNumber: line.structure_number,
+        state: line.state,
+      })),
       await openBatchFindings(tx, revision.id),
     );
     if (isRefusal(closing)) {
