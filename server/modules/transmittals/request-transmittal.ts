@@ -1,5 +1,5 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
-import { row, run } from '#server/db/rows.ts';
+import { row, rows as queryRows, run } from '#server/db/rows.ts';
 import { badQuery } from '#server/http/page.ts';
 import { conflict, notFound, problem } from '#server/http/problem.ts';
 import { enqueue } from '#server/jobs/enqueue.ts';
@@ -112,21 +112,7 @@ async function fixItems(em: EntityManager, transmittalId: string, scope: Scope):
      from register_versions v left join register_current c on c.version_id = v.id where ${where.sql}`,
     [transmittalId, ...where.values],
   );
-  if ('recordNumbers' in scope && rows < new Set(scope.recordNumbers).size)
-    throw problem(
-      422,
-      'transmittal.unknown-record',
-      'Not every record number of the scope is on the register.',
-      {
-        errors: [
-          {
-            pointer: '/scope/recordNumbers',
-            code: 'recordNumbers.unknown',
-            detail: 'One or more are not on the register.',
-          },
-        ],
-      },
-    );
+  if ('recordNumbers' in scope) await refuseUnknown(em, scope.recordNumbers);
   if (rows === 0)
     throw problem(
       422,
@@ -137,6 +123,22 @@ async function fixItems(em: EntityManager, transmittalId: string, scope: Scope):
       },
     );
   return rows;
+}
+
+/** Names what is not on the register: a number mistyped among thousands is not found by looking. */
+async function refuseUnknown(em: EntityManager, recordNumbers: readonly string[]): Promise<void> {
+  const unknown = await queryRows<{ number: string }>(
+    em,
+    `select number from unnest($1::text[]) number
+     where not exists (select 1 from register_current c where c.record_number = number) limit 6`,
+    [recordNumbers],
+  );
+  if (unknown.length === 0) return;
+  const named = unknown.slice(0, 5).map((one) => one.number);
+  const detail = `Not on the register: ${named.join(', ')}${unknown.length > 5 ? ' and more' : ''}.`;
+  throw problem(422, 'transmittal.unknown-record', detail, {
+    errors: [{ pointer: '/scope/recordNumbers', code: 'recordNumbers.unknown', detail }],
+  });
 }
 
 function readFilter(filter: Readonly<Record<string, string>>): RegisterFilter {

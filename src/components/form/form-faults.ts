@@ -31,7 +31,7 @@ export function placeProblem<T extends FieldValues>(form: UseFormReturn<T>, erro
   let placed = 0;
   for (const [index, entry] of error.errors.entries()) {
     const name = fieldOfPointer(entry.pointer);
-    if (name in form.getValues()) {
+    if (hasField(form.getValues(), name)) {
       form.setError(name as Path<T>, { type: entry.code, message: entry.detail });
       placed += 1;
     } else {
@@ -41,4 +41,14 @@ export function placeProblem<T extends FieldValues>(form: UseFormReturn<T>, erro
   if (placed < error.errors.length || error.errors.length === 0) {
     form.setError('root.problem', { type: error.code, message: error.message });
   }
+}
+
+/** `scope.workOrder` is a field where the form's values hold it. */
+function hasField(values: FieldValues, name: string): boolean {
+  let at: unknown = values;
+  return name.split('.').every((part) => {
+    if (typeof at !== 'object' || at === null || !Object.hasOwn(at, part)) return false;
+    at = (at as Record<string, unknown>)[part];
+    return true;
+  });
 }

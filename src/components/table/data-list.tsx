@@ -55,6 +55,9 @@ export function DataList<Row extends object>({
     const next = Math.max(0, Math.min(rows.length - 1, active + step));
     setActive(next);
     virtualizer.scrollToIndex(next);
+    // Enter is for the row now, not for a button that was used before.
+    const focused = document.activeElement;
+    if (focused instanceof HTMLElement && !body.current?.contains(focused)) focused.blur();
   }
   useHotkeys({
     j: () => move(1),

@@ -61,8 +61,7 @@ function Body({ message }: { message: CapturedMessage }) {
           title={`Message: ${message.subject}`}
           sandbox="allow-top-navigation-by-user-activation"
           srcDoc={framedHtml(message.html)}
-          // Written for the light page that mail readers show.
-          className="h-[calc(100dvh-9rem)] w-full bg-white"
+          className="h-[calc(100dvh-9rem)] w-full"
         />
       ) : (
         <pre className="max-w-3xl px-gutter py-4 font-sans whitespace-pre-wrap">

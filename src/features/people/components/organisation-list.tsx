@@ -21,7 +21,7 @@ export function OrganisationList({ organisations }: { organisations: readonly Or
   const mayAdd = useCan('create', 'Organisation');
   const form = useForm({ defaultValues: { name: '' } });
   return (
-    <section aria-label="Organisations" className="mt-6 border-t border-hairline">
+    <div className="mt-6 border-t border-hairline">
       <SectionHead title="Organisations" aside={counted(organisations.length, 'organisation')} />
       <PlainTable caption="Organisations" columns={COLUMNS} rows={organisations} rowKey={(row) => row.id} />
       {mayAdd ? (
@@ -49,6 +49,6 @@ export function OrganisationList({ organisations }: { organisations: readonly Or
           </AppForm>
         </div>
       ) : null}
-    </section>
+    </div>
   );
 }

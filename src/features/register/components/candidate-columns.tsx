@@ -19,7 +19,7 @@ export const ChosenCandidates = createContext<Chosen>({ selection: new Set(), to
 function Tick({ row }: { row: RegisterCandidate }) {
   const { selection, toggle } = useContext(ChosenCandidates);
   return (
-    <label className="inline-flex items-center gap-2.5 pointer-coarse:min-h-11">
+    <label className="inline-flex items-center gap-2.5 align-middle pointer-coarse:min-h-11">
       <input
         type="checkbox"
         className="size-4 accent-ink"

@@ -51,11 +51,17 @@ export function ruleTitle(code: string): string {
   return words.charAt(0).toUpperCase() + words.slice(1);
 }
 
-/** The rules of a version in the standard's order, each with what it compares with. A body of another shape has none. */
+const ORDER = new Map(Object.keys(RULE_SCHEMAS).map((code, index) => [code, index]));
+const orderOf = (code: string): number => ORDER.get(code) ?? ORDER.size;
+
+/** The rules of a version in the schema's order, which is the trade's (the database keeps none), each with what it compares with. A body of another shape has none. */
 export function ruleRows(body: Readonly<Record<string, unknown>>): readonly RuleRow[] {
   const rules = body['rules'];
   if (typeof rules !== 'object' || rules === null) return [];
-  return Object.entries(rules as Readonly<Record<string, RuleSetting>>).map(([code, setting]) => ({
+  const settings = Object.entries(rules as Readonly<Record<string, RuleSetting>>).toSorted(
+    ([a], [b]) => orderOf(a) - orderOf(b),
+  );
+  return settings.map(([code, setting]) => ({
     code,
     title: ruleTitle(code),
     severity: setting.severity,

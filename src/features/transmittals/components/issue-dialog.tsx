@@ -13,10 +13,10 @@ import { useIssueTransmittal } from '../api/issue-transmittal.ts';
 import { readRecordNumbers } from './scope-text.ts';
 import { useScopeWords } from './use-scope-words.ts';
 
+/** Named as the request names them, so that a refusal lands beside its field. */
 type Values = {
-  scope: 'workOrder' | 'recordNumbers' | 'filter';
-  workOrder: string;
-  numbers: string;
+  of: 'workOrder' | 'recordNumbers' | 'filter';
+  scope: { workOrder: string; recordNumbers: string };
   title: string;
 };
 type Props = {
@@ -28,9 +28,9 @@ type Props = {
 };
 
 function scopeOf(values: Values, filter: FilterValues | null): TransmittalBody['scope'] {
-  if (values.scope === 'workOrder') return { workOrder: values.workOrder };
-  if (values.scope === 'filter') return { filter: { ...filter } };
-  const [first = '', ...rest] = readRecordNumbers(values.numbers);
+  if (values.of === 'workOrder') return { workOrder: values.scope.workOrder };
+  if (values.of === 'filter') return { filter: { ...filter } };
+  const [first = '', ...rest] = readRecordNumbers(values.scope.recordNumbers);
   return { recordNumbers: [first, ...rest] };
 }
 
@@ -39,9 +39,13 @@ export function IssueDialog({ open, onOpenChange, filter, onIssued }: Props) {
   const workOrders = useWorkOrderOptions();
   const words = useScopeWords();
   const form = useForm<Values>({
-    defaultValues: { scope: filter ? 'filter' : 'workOrder', workOrder: '', numbers: '', title: '' },
+    defaultValues: {
+      of: filter ? 'filter' : 'workOrder',
+      scope: { workOrder: '', recordNumbers: '' },
+      title: '',
+    },
   });
-  const scope = useWatch({ control: form.control, name: 'scope' });
+  const of = useWatch({ control: form.control, name: 'of' });
   return (
     <Dialog
       open={open}
@@ -59,7 +63,7 @@ export function IssueDialog({ open, onOpenChange, filter, onIssued }: Props) {
         }}
       >
         <RadioField
-          name="scope"
+          name="of"
           label="Of what"
           options={[
             { value: 'workOrder', label: 'A work order' },
@@ -73,17 +77,17 @@ export function IssueDialog({ open, onOpenChange, filter, onIssued }: Props) {
             },
           ]}
         />
-        {scope === 'workOrder' ? (
+        {of === 'workOrder' ? (
           <SelectField
-            name="workOrder"
+            name="scope.workOrder"
             label="Work order"
             options={workOrders}
             rules={{ required: 'Choose the work order.', shouldUnregister: true }}
           />
         ) : null}
-        {scope === 'recordNumbers' ? (
+        {of === 'recordNumbers' ? (
           <TextArea
-            name="numbers"
+            name="scope.recordNumbers"
             label="Record numbers"
             hint="As R-000017, parted by blanks, commas or lines."
             rows={4}
