@@ -45,7 +45,7 @@ export function BatchPage({ batch }: { batch: Batch }) {
   const open = newest && batch.can.includes('upload');
   const over = useFileDrop(open ? intake.take : null);
   const returned = open && batch.revision.number > 0;
-  const tab = readTab(search.get('tab'), { returned, checked: batch.counts.lines > 0 });
+  const tab = readTab(search.get('tab'), { returned, checked: batch.status !== 'draft' });
 
   function go(changes: Readonly<Record<string, string | null>>): void {
     setSearch(

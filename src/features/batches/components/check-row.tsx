@@ -9,7 +9,13 @@ export function CheckRow({ batch, check }: { batch: Batch; check: CheckState | n
   const running = check?.state === 'queued' || check?.state === 'running';
   return (
     <IntakeRow
-      glyph={check?.state === 'failed' ? 'triangle' : batch.counts.lines > 0 && !running ? 'tick' : 'dotted'}
+      glyph={
+        check?.state === 'failed'
+          ? 'triangle'
+          : batch.input > 0 && batch.counts.lines > 0 && !running
+            ? 'tick'
+            : 'dotted'
+      }
       title="Check"
       settled={!running && check?.state !== 'failed'}
     >
@@ -32,6 +38,8 @@ export function CheckRow({ batch, check }: { batch: Batch; check: CheckState | n
 
 function resultWords(batch: Batch, check: CheckState | null): string {
   if (check?.state === 'failed') return 'It ended without a result; see the workbook above.';
+  // A later revision begins with the files of the one before, and none of its own to check.
+  if (batch.input === 0) return 'Begins when the workbook is here.';
   const { lines } = batch.counts;
   if (lines === 0) {
     return batch.workbook.fileName

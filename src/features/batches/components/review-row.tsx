@@ -1,5 +1,7 @@
 import { IntakeRow } from './intake-row.tsx';
 import { Moment } from '#src/components/ui/moment.tsx';
+import { TextLink } from '#src/components/ui/text-link.tsx';
+import { paths } from '#src/config/paths.ts';
 import { counted } from '#src/lib/formats.ts';
 import type { Batch } from '#shared/generated/api-types.ts';
 
@@ -13,7 +15,12 @@ export function ReviewRow({ batch }: { batch: Batch }) {
       <p>
         Submitted <Moment at={revision.submittedAt} />
       </p>
-      {status === 'submitted' ? <p>No inspector has taken it yet; until then you can withdraw it.</p> : null}
+      {status === 'submitted' ? (
+        <p>
+          No inspector has taken it yet
+          {batch.can.includes('withdraw') ? '; until then you can withdraw it.' : '.'}
+        </p>
+      ) : null}
       {status === 'in-review' ? (
         <p>{by} looks at it. What is decided is told when the review is closed.</p>
       ) : null}
@@ -30,6 +37,11 @@ export function ReviewRow({ batch }: { batch: Batch }) {
         </p>
       ) : null}
       {status === 'on-record' ? <p>Every approved line is on record.</p> : null}
+      {batch.can.includes('take') || batch.can.includes('close-review') ? (
+        <TextLink to={paths.reviewBatch.to(batch.id)} className="inline-block pointer-coarse:py-2">
+          Open it on the review desk
+        </TextLink>
+      ) : null}
     </IntakeRow>
   );
 }

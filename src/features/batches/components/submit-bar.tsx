@@ -18,7 +18,7 @@ export function SubmitBar({ batch, onSubmit, onWithdraw }: Props) {
   return (
     <footer className="sticky bottom-0 z-10 mt-auto flex min-h-14 items-center justify-between gap-4 border-t-[1.5px] border-ink bg-sheet px-gutter py-2 print:hidden">
       <p className="text-table text-ink-2" aria-live="polite">
-        {batch.counts.lines === 0
+        {batch.counts.lines === 0 || batch.status === 'draft'
           ? 'Nothing to submit yet'
           : `${counted(nonconformity, 'nonconformity', 'nonconformities')}, ${counted(query, 'query', 'queries')}`}
       </p>

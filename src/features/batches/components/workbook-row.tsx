@@ -19,10 +19,12 @@ const KB = 1024;
 
 export function WorkbookRow({ batch, open, sent, error, refused, onFile }: Props) {
   const { fileName } = batch.workbook;
+  // Lines came back, and nothing was handed in since: the workbook shown is that of the revision before.
+  const due = open && batch.revision.number > 0 && batch.input === 0;
   const bad = error !== null || refused !== null;
   return (
     <IntakeRow
-      glyph={bad ? 'triangle' : fileName ? 'tick' : 'dotted'}
+      glyph={bad ? 'triangle' : fileName && !due ? 'tick' : 'dotted'}
       title="Workbook"
       action={
         open ? (
@@ -30,16 +32,20 @@ export function WorkbookRow({ batch, open, sent, error, refused, onFile }: Props
             kind="quiet"
             size="small"
             accept=".xlsx"
-            label={fileName ? 'Replace the workbook' : 'Choose the workbook'}
+            label={fileName && !due ? 'Replace the workbook' : 'Choose the workbook'}
             busy={sent ? 'sending' : false}
             onFiles={([file]) => file && onFile(file)}
           >
-            {fileName ? 'replace' : 'choose'}
+            {fileName && !due ? 'replace' : 'choose'}
           </FileButton>
         ) : null
       }
     >
-      {fileName ? (
+      {due ? (
+        <p>
+          The corrected one is not here yet; {counted(batch.counts.lines, 'line waits', 'lines wait')} for it.
+        </p>
+      ) : fileName ? (
         <p className="break-words">
           {fileName}
           {batch.counts.lines > 0 ? `, ${counted(batch.counts.lines, 'line')}` : ''}

@@ -25,7 +25,7 @@ export function whyNotSubmit(
     found.push({ code: 'checking', text: 'The newest upload is still being checked. Wait for the result.' });
     return found;
   }
-  if (batch.counts.lines === 0) {
+  if (batch.status === 'draft' || batch.counts.lines === 0) {
     found.push({ code: 'empty', text: 'There are no lines to submit. Hand in a filled workbook first.' });
     return found;
   }
