@@ -81,7 +81,11 @@ describe('npm run check', { timeout: 60_000 }, () => {
       'not-on-order S-2',
       'lot-unknown P-1',
     ]);
-    expect(skipped).toEqual([{ code: 'photo-missing', reason: 'no-photos' }]);
+    expect(skipped).toEqual([
+      { code: 'brand-differs', reason: 'off' },
+      { code: 'clock-future', reason: 'no-time' },
+      { code: 'photo-missing', reason: 'no-photos' },
+    ]);
   });
 
   it.each([

@@ -10,6 +10,7 @@ const WIDTH = 100;
 
 const REASON: Readonly<Record<Skipped['reason'], string>> = {
   off: 'off in the standard',
+  'no-time': 'the time of hand-in is not known here',
   'no-lots': 'the lots are not known here',
   'no-design': 'the work order is not known here',
   'no-photos': 'photographs are not known here',

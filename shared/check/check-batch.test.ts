@@ -37,8 +37,11 @@ describe('a clean batch of the three kinds', () => {
 
   it('says what did not run', () => {
     expect(result.skipped).toEqual([
+      { code: 'brand-differs', reason: 'off' },
+      { code: 'clock-future', reason: 'no-time' },
       { code: 'lot-unknown', reason: 'no-lots' },
       { code: 'not-on-order', reason: 'no-design' },
+      { code: 'design-differs', reason: 'no-design' },
       { code: 'photo-missing', reason: 'no-photos' },
     ]);
   });
@@ -159,7 +162,14 @@ describe('linking', () => {
 
   it('a top-up by an event fills what the first pour left', () => {
     const topUp = { ...pours[1], event: 2, pouredAt: '2026-05-01T08:30', kitFt3: 1.5 };
-    const event = { structureNumber: 'S-1', event: 2, beganAt: '2026-05-01T08:00', hardwareAt: 'not-by-us' };
+    const event = {
+      structureNumber: 'S-1',
+      event: 2,
+      beganAt: '2026-05-01T08:00',
+      hardwareAt: 'not-by-us',
+      letGoAt: 'not-by-us',
+      loadAt: 'not-yet',
+    };
     const lines = [{ kind: 'set' as const, values: set }];
     expect(codes(batchOf({ lines, pours: pours.slice(0, 1) }))).toEqual(['fill-short']);
     expect(codes(batchOf({ lines, pours: [pours[0]!, topUp], events: [event] }))).toEqual([]);
@@ -186,7 +196,7 @@ describe('standard and context', () => {
     const after = {
       boredAt: '2026-04-15T09:00',
       setAt: '2026-04-15T09:40',
-      letGoAt: null,
+      letGoAt: 'not-by-us',
       hardwareAt: 'not-yet',
     };
     const late = pours.map((pour) => ({ ...pour, pouredAt: '2026-04-15T10:00' }));

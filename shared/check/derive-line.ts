@@ -1,6 +1,13 @@
 import { deriveRelevel } from '#shared/calc/derive-relevel.ts';
 import { deriveSet } from '#shared/calc/derive-set.ts';
 import { deriveStraighten } from '#shared/calc/derive-straighten.ts';
+import {
+  BORE_FIELDS,
+  CLASS_FIELDS,
+  GROUND_LINE_SIZE_FIELDS,
+  POLE_FIELDS,
+  SIZE_FIELDS,
+} from '#shared/records/size-fields.ts';
 import type { Derived, FieldValues, Kind } from '#shared/records/types.ts';
 import type { LineEvent, Pour } from '#shared/rules/types.ts';
 import type { Product, Standard } from '#shared/standard/types.ts';
@@ -18,13 +25,8 @@ type Line = {
 
 const DERIVE = { set: deriveSet, straighten: deriveStraighten, relevel: deriveRelevel };
 
-const BORE = ['boreTopIn', 'boreTopAcrossIn', 'boreBottomIn', 'boreBottomAcrossIn'];
-const GROUND_LINE = ['girthGroundLineIn', 'diameterGroundLineIn', 'poleSection'];
-const CLASS_TABLE = ['poleLengthFt', 'poleClass', 'poleMaterial'];
-const POLE = [...GROUND_LINE, ...CLASS_TABLE, 'girthButtIn', 'diameterButtIn', 'embedmentFt'];
-const SIZES = [...BORE, ...POLE];
 const SPACE = [
-  ...SIZES,
+  ...SIZE_FIELDS,
   'bellIn',
   'bellHeightFt',
   'boreDepthFt',
@@ -37,7 +39,14 @@ const SPACE = [
 /** What each void is made of. */
 const VOID: Readonly<Record<Kind, readonly string[]>> = {
   set: [...SPACE, 'slopeRiseIn', 'foamTopBelowGradeIn'],
-  straighten: ['gapAtGradeIn', 'gapAtDepthIn', 'gapDepthFt', 'gapWidthIn', ...GROUND_LINE, ...CLASS_TABLE],
+  straighten: [
+    'gapAtGradeIn',
+    'gapAtDepthIn',
+    'gapDepthFt',
+    'gapWidthIn',
+    ...GROUND_LINE_SIZE_FIELDS,
+    ...CLASS_FIELDS,
+  ],
   relevel: [
     'padLengthIn',
     'padWidthIn',
@@ -57,14 +66,14 @@ const withoutBroken = (
 ): Derived => {
   const any = (fields: readonly string[]): boolean => fields.some((field) => broken.has(field));
   const noVoid = any(VOID[kind]) || events.some((event) => event.broken.has('foamTopBelowGradeIn'));
-  const due = ['ground', 'rockFromFt', 'poleLengthFt', ...(values['ground'] === 'soil' ? [] : BORE)];
+  const due = ['ground', 'rockFromFt', 'poleLengthFt', ...(values['ground'] === 'soil' ? [] : BORE_FIELDS)];
   return {
     ...derived,
     ...(noVoid ? { voidFt3: null, fillRatio: null, fillRatioU: null, worstReading: null } : {}),
     ...(kind === 'set' && any([...SPACE, 'waterIn', 'waterMeasured']) ? { waterWithPoleIn: null } : {}),
-    ...(any([...SIZES, 'leastGapIn']) ? { leastAnnulusIn: null } : {}),
+    ...(any([...SIZE_FIELDS, 'leastGapIn']) ? { leastAnnulusIn: null } : {}),
     ...(any(due) ? { dueFt: null } : {}),
-    ...(any(POLE) ? { poleTaped: null } : {}),
+    ...(any(POLE_FIELDS) ? { poleTaped: null } : {}),
   };
 };
 

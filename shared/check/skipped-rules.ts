@@ -1,13 +1,14 @@
-import type { CheckContext, Rule, StandardInForce } from '#shared/rules/types.ts';
+import type { CheckContext, ContextPart, Rule, StandardInForce } from '#shared/rules/types.ts';
 import { ruleSetting } from '#shared/standard/rule-setting.ts';
 import type { Skipped } from './types.ts';
 
-const REASON = {
+const REASON: Readonly<Record<ContextPart, Skipped['reason']>> = {
+  asOfMs: 'no-time',
   lots: 'no-lots',
   design: 'no-design',
   photos: 'no-photos',
   siblings: 'no-siblings',
-} as const;
+};
 
 /** Rules that did not run: a part of their context is not known here, or a standard used has them off. */
 export const skippedRules = (

@@ -134,6 +134,9 @@ export type BatchView = {
   readonly batch: SourceRow;
 };
 
+/** Parts of the context that may be unknown. */
+export type ContextPart = 'asOfMs' | 'lots' | 'design' | 'photos' | 'siblings';
+
 type RuleBase = {
   readonly code: string;
   readonly title: string;
@@ -142,7 +145,7 @@ type RuleBase = {
   /** Field key of the primary cell. */
   readonly field: string;
   /** Parts of the context without which the rule is skipped. */
-  readonly needs: readonly ('lots' | 'design' | 'photos' | 'siblings')[];
+  readonly needs: readonly ContextPart[];
   /** JSON Schema (2020-12) of the rule's parameters, each with title, unit, default and range. */
   readonly paramsSchema: Readonly<Record<string, unknown>>;
   /** One sentence of what is wrong, from the finding's data alone. */

@@ -1,24 +1,7 @@
 import type { RowInput } from '#server/workbook/write-workbook.ts';
-import type { FindingRow } from '#shared/generated/api-types.ts';
-import { pourRow, pourRows, setRow } from '#tests/factories/set-row.ts';
+import { pourRow } from '#tests/factories/set-row.ts';
+import { kits, LOT, type RuleCase } from './rule-case.ts';
 
-export type Expected = Partial<
-  Pick<FindingRow, 'measured' | 'limit' | 'margin' | 'unit' | 'cell' | 'severity' | 'field'>
->;
-type Line = { readonly values?: RowInput; readonly pours?: (structure: string) => readonly RowInput[] };
-export type RuleCase = {
-  readonly code: string;
-  /** Breaks this rule alone. Numbers are worked out by hand beside it; ± 0.0001 on ratios. */
-  readonly fails: Line & { readonly expected: Expected };
-  /** Meets it by as little as can be written down. */
-  readonly passes: Line;
-};
-
-export const LOT = 'LOT-1';
-const kits =
-  (...sizes: number[]) =>
-  (structure: string) =>
-    sizes.map((kitFt3) => pourRow(structure, LOT, { kitFt3 }));
 /** A 12 in pole as a cylinder in an 18 in bore, 6 ft deep: void 5.8905 ft³ (worked record WR-08). */
 const CYLINDER = {
   boreTopIn: 18,
@@ -112,7 +95,10 @@ export const RULE_CASES: readonly RuleCase[] = [
       pours: (structure) => lift(structure, '2026-04-14T10:02'),
       expected: { measured: 2, limit: 3, margin: -1, unit: 'min' },
     },
-    passes: { pours: (structure) => lift(structure, '2026-04-14T10:03') },
+    passes: {
+      values: { letGoAt: '2026-04-14T10:06' },
+      pours: (structure) => lift(structure, '2026-04-14T10:03'),
+    },
   },
   {
     // Set at 08:30, half an hour before it was bored.
@@ -127,10 +113,10 @@ export const RULE_CASES: readonly RuleCase[] = [
     // Chicago, 2026-03-08: clocks went from 02:00 to 03:00 (second Sunday of March, 15 U.S.C. 260a).
     code: 'clock-unreal',
     fails: {
-      values: { boredAt: '2026-03-08T02:30' },
+      values: { boredAt: '2026-03-08T02:30', locateFrom: '2026-03-01' },
       expected: { measured: '2026-03-08T02:30', limit: null, margin: null, field: 'boredAt' },
     },
-    passes: { values: { boredAt: '2026-03-08T03:00' } },
+    passes: { values: { boredAt: '2026-03-08T03:00', locateFrom: '2026-03-01' } },
   },
   {
     code: 'pour-none',
@@ -194,7 +180,3 @@ export const RULE_CASES: readonly RuleCase[] = [
 function lift(structure: string, pouredAt: string): RowInput[] {
   return [pourRow(structure, LOT), pourRow(structure, LOT, { pourNumber: 2, pouredAt, kitFt3: 1.5 })];
 }
-
-export const rowOf = (structure: string, line: Line): RowInput => setRow(structure, line.values);
-export const poursOf = (structure: string, line: Line): readonly RowInput[] =>
-  line.pours?.(structure) ?? pourRows(structure, LOT);

@@ -1,13 +1,28 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { FindingRow } from '#shared/generated/api-types.ts';
-import { createLot } from '#tests/factories/foam.ts';
+import type { Kind } from '#shared/records/types.ts';
+import { DEMO_PRODUCT } from '#shared/standard/demo.ts';
+import { createLot, createProduct } from '#tests/factories/foam.ts';
 import { startBatch, uploadPhotographs, uploadWorkbook } from '#tests/factories/start-batch.ts';
 import { pourRow, pourRows, SET_VIEWS, setRow } from '#tests/factories/set-row.ts';
 import { createWorkSite } from '#tests/factories/work-site.ts';
 import { createHarness, type Harness } from '#tests/setup/api-harness.ts';
-import { LOT, poursOf, RULE_CASES, rowOf, type Expected } from './rule-cases.ts';
+import { LOT, OTHER_LOT, OTHER_PRODUCT, poursOf, rowOf, type Expected } from './rule-case.ts';
+import { MEASURE_CASES } from './rule-cases-measures.ts';
+import { TIME_CASES } from './rule-cases-times.ts';
+import { RULE_CASES } from './rule-cases.ts';
 
-const CASES = RULE_CASES.map((one, index) => ({ ...one, bad: `F-${index + 1}`, good: `P-${index + 1}` }));
+const CASES = [...RULE_CASES, ...MEASURE_CASES, ...TIME_CASES].map((one, index) => ({
+  kind: 'set' as Kind,
+  ...one,
+  bad: `F-${index + 1}`,
+  good: `P-${index + 1}`,
+}));
+const linesOf = (kind: Kind) =>
+  CASES.filter((one) => one.kind === kind).flatMap(({ bad, good, fails, passes }) => [
+    rowOf(bad, kind, fails),
+    rowOf(good, kind, passes),
+  ]);
 const TWICE = 'T-1';
 const UNPLANNED = 'U-1';
 const PHOTOGRAPHED = 'V-1';
@@ -31,9 +46,17 @@ const near = (expected: Expected) =>
 
 beforeAll(async () => {
   harness = await createHarness();
-  const numbers = [...CASES.flatMap(({ bad, good }) => [bad, good]), TWICE, PHOTOGRAPHED, PARTLY];
-  const site = await createWorkSite(harness, { planned: numbers });
+  const cases = CASES.flatMap(({ kind, bad, good }) => [
+    { kind, structureNumber: bad },
+    { kind, structureNumber: good },
+  ]);
+  const site = await createWorkSite(harness, { planned: [...cases, TWICE, PHOTOGRAPHED, PARTLY] });
   await createLot(harness.em(), { productId: site.product.id, number: LOT });
+  const other = await createProduct(harness.em(), {
+    code: OTHER_PRODUCT,
+    body: { ...DEMO_PRODUCT, code: OTHER_PRODUCT },
+  });
+  await createLot(harness.em(), { productId: other.id, number: OTHER_LOT });
   const contractor = await harness.signIn(site.contractor);
   const batch = await startBatch(contractor, site);
   await uploadPhotographs(contractor, batch, [
@@ -45,17 +68,19 @@ beforeAll(async () => {
     site,
     workbook: {
       set: [
-        ...CASES.flatMap(({ bad, good, fails, passes }) => [rowOf(bad, fails), rowOf(good, passes)]),
+        ...linesOf('set'),
         setRow(TWICE),
         setRow(TWICE, { setAt: '2026-04-14T09:45' }),
         setRow(UNPLANNED),
         setRow(PHOTOGRAPHED),
         setRow(PARTLY),
       ],
+      straighten: linesOf('straighten'),
+      relevel: linesOf('relevel'),
       pours: [
-        ...CASES.flatMap(({ bad, good, fails, passes }) => [
-          ...poursOf(bad, fails),
-          ...poursOf(good, passes),
+        ...CASES.flatMap(({ kind, bad, good, fails, passes }) => [
+          ...poursOf(bad, kind, fails),
+          ...poursOf(good, kind, passes),
         ]),
         ...[TWICE, UNPLANNED, PHOTOGRAPHED, PARTLY].flatMap((structure) => pourRows(structure, LOT)),
         pourRow('X-404', LOT),

@@ -1,0 +1,58 @@
+import { productInForce } from '#shared/check/in-force.ts';
+import { say } from '#shared/findings/say.ts';
+import type { Finding } from '#shared/findings/types.ts';
+import type { Product } from '#shared/standard/types.ts';
+import { cToF } from '#shared/units/convert.ts';
+import { missingTemperatures } from './fill.ts';
+import { pourPart } from './pour-part.ts';
+import type { CheckContext, FindingDraft, LineView } from './types.ts';
+
+const COMPONENTS = [
+  ['A', 'componentATempF'],
+  ['B', 'componentBTempF'],
+] as const;
+
+type Reading = {
+  readonly measured: number;
+  readonly product: Product;
+  /** What is the same in every finding on this reading. */
+  readonly draft: Pick<FindingDraft, 'source' | 'field' | 'part' | 'params'>;
+};
+
+/** Each component temperature of a line's pours, in °F, against its product's band; `unproved` for what was not measured. */
+export const againstBand = (
+  line: LineView,
+  context: CheckContext,
+  judge: (reading: Reading) => readonly FindingDraft[],
+): readonly FindingDraft[] => {
+  const drafts = line.pours.flatMap((pour) => {
+    const version =
+      pour.product === null ? null : productInForce(context.products, pour.product, line.workDay);
+    if (!version) return [];
+    const product = version.body;
+    return COMPONENTS.flatMap(([component, field]) => {
+      const measured = pour[field];
+      if (measured === null) return [];
+      const part = `${component} ${pourPart(pour)}`;
+      const params = {
+        component,
+        pourNumber: pour.pourNumber,
+        product: product.code,
+        lowF: product.fullYieldF.lowF,
+        highF: product.fullYieldF.highF,
+      };
+      return judge({ measured, product, draft: { source: pour.source, field, part, params } });
+    });
+  });
+  return [...drafts, ...missingTemperatures(line.pours)];
+};
+
+/** For a reading that would be a usual one in °C: says so. */
+export const celsiusHint = ({ measured, params }: Finding): string => {
+  const { lowF, highF } = params;
+  if (typeof measured !== 'number' || typeof lowF !== 'number' || typeof highF !== 'number') return '';
+  const converted = cToF(measured);
+  return converted >= lowF && converted <= highF
+    ? ` (${say(measured, null)} °C would be ${say(converted, 'degF')})`
+    : '';
+};
