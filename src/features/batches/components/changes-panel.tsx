@@ -67,7 +67,7 @@ export function ChangesPanel({ batchId }: { batchId: string }) {
   }
   return (
     <>
-      <SectionHead title="Values" aside={`${items.length} changed`} />
+      {items.length > 0 ? <SectionHead title="Values" aside={`${items.length} changed`} /> : null}
       {items.length > 0 ? (
         <PlainTable
           caption="Values changed"
@@ -112,7 +112,7 @@ function Findings({ title, gone, list }: FindingsProps) {
       <ul className="border-b border-hairline px-gutter py-2">
         {list.map((one, index) => (
           <li key={`${one.code} ${one.structureNumber} ${index}`} className="flex items-center gap-2 py-0.5">
-            <Glyph name={gone ? 'tick' : 'triangle'} />
+            <Glyph name={gone ? 'tick' : 'info'} />
             <span className="font-semibold">{one.structureNumber ?? 'The workbook'}</span> {one.title}
           </li>
         ))}

@@ -12,7 +12,15 @@ const COLUMNS: readonly PlainColumn<InputRow>[] = [
   { id: 'kind', title: 'Kind', cell: (row) => (row.kind === 'workbook' ? 'workbook' : 'photograph') },
   { id: 'revision', title: 'Revision', figures: true, cell: (row) => row.revision },
   { id: 'n', title: 'Upload', figures: true, cell: (row) => row.n },
-  { id: 'at', title: 'Handed in', cell: (row) => <Moment at={row.at} /> },
+  {
+    id: 'at',
+    title: 'Handed in',
+    cell: (row) => (
+      <span className="whitespace-nowrap">
+        <Moment at={row.at} />
+      </span>
+    ),
+  },
   { id: 'by', title: 'By', cell: (row) => row.by },
   {
     id: 'sha',
