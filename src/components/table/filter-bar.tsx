@@ -2,7 +2,7 @@ import { useRef } from 'react';
 import { FilterEntry } from '#src/components/table/filter-entry.tsx';
 import { Menu, MenuChoice } from '#src/components/ui/menu.tsx';
 import type { Filters } from '#src/lib/filters/use-filters.ts';
-import { counted } from '#src/lib/formats.ts';
+import { counted, formatDay } from '#src/lib/formats.ts';
 import { useHotkeys } from '#src/lib/use-hotkeys.ts';
 
 export type FilterDefinition = {
@@ -45,7 +45,8 @@ export function FilterBar({ filters, define }: { filters: Filters; define: reado
 function FilterControl({ definition, filters }: { definition: FilterDefinition; filters: Filters }) {
   const { name, label, any = 'any', options, type = 'text' } = definition;
   const value = filters.values[name] ?? '';
-  const shown = options?.find((option) => option.value === value)?.label ?? value;
+  const shown =
+    options?.find((option) => option.value === value)?.label ?? (type === 'date' ? formatDay(value) : value);
   const trigger = (
     <button type="button" className="min-h-6 text-left pointer-coarse:min-h-11">
       <span className="text-muted">{label}</span>{' '}

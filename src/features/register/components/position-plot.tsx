@@ -6,12 +6,12 @@ import { useUnitSystem } from '#src/lib/settings/unit-system.ts';
 import { useWidth } from '#src/lib/use-width.ts';
 import type { RegisterRow } from '#shared/generated/api-types.ts';
 import { formatQuantity } from '#shared/units/format-quantity.ts';
-import { projectPositions, roundLength } from './project-positions.ts';
+import { namedPoints, projectPositions, roundLength } from './project-positions.ts';
 
 type Placed = RegisterRow & { latitude: number; longitude: number };
 const HEIGHT = 260;
-/** More names than this would only cover each other. */
-const NAMED = 40;
+/** What a name takes, in px. */
+const NAME = { width: 58, height: 15 };
 const FEET_A_METRE = 1 / 0.3048;
 
 /** Where the structures of the rows loaded stand, to scale, north up; each mark leads to its record. */
@@ -21,6 +21,7 @@ export function PositionPlot({ rows }: { rows: readonly RegisterRow[] }) {
   const metric = useUnitSystem() === 'metric';
   const placed = rows.filter((row): row is Placed => row.latitude !== null && row.longitude !== null);
   const plot = width > 0 ? projectPositions(placed, { width, height: HEIGHT, pad: 36 }) : null;
+  const named = namedPoints(plot?.points ?? [], NAME);
   const away = rows.length - placed.length;
   const extent = plot
     ? `, over ${formatQuantity(plot.widthFt, 'ft', { metric, digits: 0 })} west to east and ${formatQuantity(plot.heightFt, 'ft', { metric, digits: 0 })} south to north`
@@ -34,7 +35,7 @@ export function PositionPlot({ rows }: { rows: readonly RegisterRow[] }) {
               {plot.points.map(({ x, y, item }) => (
                 <g key={item.id}>
                   <Mark x={x} y={y} row={item} />
-                  {placed.length <= NAMED ? (
+                  {named.has(item) ? (
                     <text x={x} y={y - 10} textAnchor="middle" className="fill-ink-2 text-micro">
                       {item.structureNumber}
                     </text>

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { projectPositions, roundLength } from './project-positions.ts';
+import { namedPoints, projectPositions, roundLength } from './project-positions.ts';
 
 const BOX = { width: 220, height: 220, pad: 10 };
 
@@ -48,4 +48,13 @@ describe('roundLength', () => {
     [49.9, 20],
     [730, 500],
   ])('%d -> %d', (most, length) => expect(roundLength(most)).toBe(length));
+});
+
+it('a name that would cover one before it is left out', () => {
+  const at = (item: string, x: number, y: number) => ({ item, x, y });
+  const named = namedPoints([at('a', 0, 0), at('b', 30, 4), at('c', 60, 0), at('d', 30, 20)], {
+    width: 50,
+    height: 15,
+  });
+  expect([...named]).toEqual(['a', 'c', 'd']);
 });

@@ -45,6 +45,21 @@ export function projectPositions<T extends Position>(
   };
 }
 
+/** Which points can carry a name that does not cover the name of one before it. */
+export function namedPoints<T>(
+  points: readonly { readonly x: number; readonly y: number; readonly item: T }[],
+  room: { readonly width: number; readonly height: number },
+): ReadonlySet<T> {
+  const kept: { x: number; y: number; item: T }[] = [];
+  for (const point of points) {
+    const free = kept.every(
+      (other) => Math.abs(other.x - point.x) >= room.width || Math.abs(other.y - point.y) >= room.height,
+    );
+    if (free) kept.push(point);
+  }
+  return new Set(kept.map((point) => point.item));
+}
+
 /** The longest of 1, 2, 5 × 10ⁿ that is no longer than `most`. */
 export function roundLength(most: number): number {
   const power = 10 ** Math.floor(Math.log10(most));

@@ -4,11 +4,15 @@ import { SEVERITY_WORDS, StateWord } from '#src/components/ui/state-word.tsx';
 import type { RuleRow } from './rule-table.ts';
 
 const COLUMNS: readonly PlainColumn<RuleRow>[] = [
-  { id: 'title', title: 'Rule', cell: (row) => <b className="whitespace-nowrap">{row.title}</b> },
   {
-    id: 'code',
-    title: 'Code',
-    cell: (row) => <span className="whitespace-nowrap text-muted">{row.code}</span>,
+    id: 'title',
+    title: 'Rule and its code',
+    cell: (row) => (
+      <span className="flex flex-wrap gap-x-3 sm:w-80">
+        <b>{row.title}</b>
+        <span className="text-muted">{row.code}</span>
+      </span>
+    ),
   },
   {
     id: 'compares',
