@@ -3,26 +3,23 @@ import { useCallback, useRef } from 'react';
 import { api, newIdempotencyKey } from '#src/lib/api/client.ts';
 import type { Transmittal, TransmittalBody } from '#shared/generated/api-types.ts';
 
-/** Asks for an as-built to be issued; the same request sent twice is issued once. */
+/** Asks for an as-built to be issued. Sent again after no answer came, it is issued once; after an answer it is another one. */
 export function useIssueTransmittal(): (body: TransmittalBody) => Promise<Transmittal> {
   const client = useQueryClient();
-  const key = useRef<string | null>(null);
+  const intent = useRef({ text: '', key: '' });
   return useCallback(
     async (body) => {
-      key.current ??= newIdempotencyKey();
-      try {
-        const made = await api<Transmittal>('/api/transmittals', {
-          method: 'POST',
-          body,
-          idempotencyKey: key.current,
-        });
-        client.setQueryData(['transmittals', 'one', made.id], made);
-        return made;
-      } finally {
-        // What comes next, after a refusal or a success, is another request.
-        key.current = null;
-        await client.invalidateQueries({ queryKey: ['transmittals', 'list'] });
-      }
+      const text = JSON.stringify(body);
+      if (intent.current.text !== text) intent.current = { text, key: newIdempotencyKey() };
+      const made = await api<Transmittal>('/api/transmittals', {
+        method: 'POST',
+        body,
+        idempotencyKey: intent.current.key,
+      });
+      intent.current = { text: '', key: '' };
+      client.setQueryData(['transmittals', 'one', made.id], made);
+      await client.invalidateQueries({ queryKey: ['transmittals', 'list'] });
+      return made;
     },
     [client],
   );
