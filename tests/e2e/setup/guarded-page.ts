@@ -3,10 +3,10 @@ import type { Browser, BrowserContextOptions, ConsoleMessage, Page } from 'playw
 export type GuardedPage = {
   readonly page: Page;
   /** A refusal that the test provokes: the browser writes each to its console. */
-  expectRefusal(status: number, path: RegExp): void;
+  readonly expectRefusal: (status: number, path: RegExp) => void;
   /** What went wrong on the page since it was opened. Empty in a test that passes. */
-  faults(): string[];
-  close(): Promise<void>;
+  readonly faults: () => string[];
+  readonly close: () => Promise<void>;
 };
 
 const LOCAL = /^(?:https?:\/\/127\.0\.0\.1(?::\d+)?\/|data:|blob:|about:)/;

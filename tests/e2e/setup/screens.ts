@@ -1,0 +1,88 @@
+import type { Caller, World } from '#tests/api/authorisation/world.ts';
+
+export type Screen = {
+  readonly name: string;
+  readonly as: Caller | 'nobody';
+  readonly path: (world: World) => string;
+  /** The control that brings up what is to be looked at. */
+  readonly press?: RegExp;
+};
+
+/** Every screen with something on it, as the role that works with it. */
+export const SCREENS: readonly Screen[] = [
+  { name: 'sign in', as: 'nobody', path: () => '/sign-in' },
+  { name: 'forgotten password', as: 'nobody', path: () => '/password-reset' },
+  { name: 'home of a contractor', as: 'first', path: () => '/' },
+  { name: 'home of an inspector', as: 'inspector', path: () => '/' },
+  { name: 'home of a clerk', as: 'clerk', path: () => '/' },
+  { name: 'work orders', as: 'first', path: () => '/work-orders' },
+  { name: 'work order', as: 'first', path: ({ of }) => `/work-orders/${of.first.orderId}` },
+  { name: 'new work order', as: 'administrator', path: () => '/work-orders', press: /^New work order/ },
+  { name: 'batches', as: 'first', path: () => '/batches' },
+  { name: 'draft batch', as: 'first', path: ({ of }) => `/batches/${of.first.draft.id}` },
+  { name: 'submitting', as: 'first', path: ({ of }) => `/batches/${of.first.draft.id}`, press: /^Submit/ },
+  {
+    name: 'photographs of a batch',
+    as: 'first',
+    path: ({ of }) => `/batches/${of.first.draft.id}?tab=photos`,
+  },
+  { name: 'changes of a batch', as: 'first', path: ({ of }) => `/batches/${of.first.draft.id}?tab=changes` },
+  { name: 'files of a batch', as: 'first', path: ({ of }) => `/batches/${of.first.draft.id}?tab=files` },
+  { name: 'batch on record', as: 'first', path: ({ of }) => `/batches/${of.first.done.id}` },
+  { name: 'review queue', as: 'inspector', path: () => '/review' },
+  { name: 'review desk', as: 'inspector', path: ({ of }) => `/review/${of.first.open.id}?tab=all` },
+  {
+    name: 'keys of the desk',
+    as: 'inspector',
+    path: ({ of }) => `/review/${of.first.open.id}`,
+    press: /all keys/,
+  },
+  { name: 'rejecting', as: 'inspector', path: ({ of }) => `/review/${of.first.open.id}`, press: /^Reject/ },
+  {
+    name: 'closing',
+    as: 'inspector',
+    path: ({ of }) => `/review/${of.first.open.id}`,
+    press: /^Close review/,
+  },
+  { name: 'record', as: 'inspector', path: ({ of }) => `/records/${of.first.done.recordId}` },
+  {
+    name: 'record with a finding',
+    as: 'auditor',
+    path: ({ of }) => `/records/${of.first.done.recordIds[1]}`,
+  },
+  { name: 'concessions', as: 'engineer', path: () => '/concessions' },
+  {
+    name: 'concession to answer',
+    as: 'engineer',
+    path: ({ of }) => `/concessions/${of.first.concessionAsked}`,
+  },
+  {
+    name: 'concession granted',
+    as: 'engineer',
+    path: ({ of }) => `/concessions/${of.first.concessionGranted}`,
+  },
+  { name: 'register', as: 'auditor', path: () => '/register' },
+  { name: 'entering', as: 'clerk', path: () => '/register/enter' },
+  { name: 'register record', as: 'auditor', path: ({ of }) => `/register/${of.first.recordNumber}` },
+  { name: 'nonconformities', as: 'auditor', path: () => '/nonconformities' },
+  { name: 'nothing as filtered', as: 'auditor', path: () => '/nonconformities?q=nothing' },
+  { name: 'lots', as: 'auditor', path: () => '/lots' },
+  { name: 'lot', as: 'administrator', path: ({ shared }) => `/lots/${shared.lotId}` },
+  { name: 'transmittals', as: 'clerk', path: () => '/transmittals' },
+  { name: 'issuing', as: 'clerk', path: () => '/transmittals', press: /^Issue…/ },
+  { name: 'transmittal', as: 'clerk', path: ({ of }) => `/transmittals/${of.first.transmittalId}` },
+  { name: 'standard', as: 'engineer', path: () => '/standard' },
+  { name: 'standard version', as: 'engineer', path: () => '/standard/1' },
+  {
+    name: 'draft of the standard',
+    as: 'engineer',
+    path: ({ shared }) => `/standard/${shared.draftStandard}`,
+  },
+  { name: 'trail', as: 'auditor', path: () => '/trail' },
+  { name: 'people', as: 'administrator', path: () => '/people' },
+  { name: 'mail', as: 'administrator', path: () => '/mail' },
+  { name: 'message', as: 'administrator', path: ({ shared }) => `/mail/${shared.mailId}` },
+  { name: 'jobs', as: 'administrator', path: () => '/jobs' },
+  { name: 'search', as: 'auditor', path: () => '/search?q=A-' },
+  { name: 'no such page', as: 'auditor', path: () => '/nowhere' },
+];
