@@ -24,7 +24,7 @@ export function NonconformityState({ row }: { row: Nonconformity }) {
 }
 
 /** What is due, and by when. */
-export function actionDue(row: Nonconformity): string {
+export function actionDue(row: Pick<Nonconformity, 'state' | 'condition' | 'action' | 'dueOn'>): string {
   if (row.state === 'approved') return row.condition ?? 'none';
   if (row.state === 'concession-asked') return 'an engineer decides';
   if (row.state === 'undecided' || !row.action) return 'a decision';
