@@ -84,6 +84,7 @@ describe('npm run check', { timeout: 60_000 }, () => {
     expect(skipped).toEqual([
       { code: 'brand-differs', reason: 'off' },
       { code: 'clock-future', reason: 'no-time' },
+      { code: 'lot-overdrawn', reason: 'no-lot-use' },
       { code: 'photo-missing', reason: 'no-photos' },
     ]);
   });

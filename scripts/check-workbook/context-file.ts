@@ -12,6 +12,9 @@ export type ContextFile = {
     readonly number: string;
     readonly expiresOn?: string | null;
     readonly status?: 'in-use' | 'held' | 'recalled';
+    readonly history?: readonly { readonly on: string; readonly status: 'in-use' | 'held' | 'recalled' }[];
+    /** Kits received of each size; left out, it is not known. */
+    readonly received?: readonly { readonly kitFt3: number; readonly quantity: number }[];
   }[];
   readonly design?: readonly {
     readonly structureNumber: string;
@@ -30,6 +33,13 @@ export type ContextFile = {
 const text = { type: 'string', minLength: 1 };
 const number = { type: ['number', 'null'] };
 
+const DAY = '^\\d{4}-\\d{2}-\\d{2}$';
+const STATUS = { enum: ['in-use', 'held', 'recalled'] };
+const list = (properties: object) => ({
+  type: 'array',
+  items: { type: 'object', required: Object.keys(properties), additionalProperties: false, properties },
+});
+
 const SCHEMA = {
   type: 'object',
   additionalProperties: false,
@@ -46,8 +56,13 @@ const SCHEMA = {
         properties: {
           product: text,
           number: text,
-          expiresOn: { type: ['string', 'null'], pattern: '^\\d{4}-\\d{2}-\\d{2}$' },
-          status: { enum: ['in-use', 'held', 'recalled'] },
+          expiresOn: { type: ['string', 'null'], pattern: DAY },
+          status: STATUS,
+          history: list({ on: { type: 'string', pattern: DAY }, status: STATUS }),
+          received: list({
+            kitFt3: { type: 'number', exclusiveMinimum: 0 },
+            quantity: { type: 'integer', minimum: 0 },
+          }),
         },
       },
     },

@@ -2,7 +2,7 @@ import { readFile } from 'node:fs/promises';
 import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
 import { isZone } from '#shared/dates/wall-clock.ts';
 import { validateProduct } from '#shared/generated/validators.mjs';
-import type { CheckContext, DesignFact, LotFact, ProductInForce } from '#shared/rules/types.ts';
+import type { CheckContext, DesignFact, LotFact, LotUse, ProductInForce } from '#shared/rules/types.ts';
 import { contextFaults, type ContextFile } from './context-file.ts';
 
 /** The context file cannot be used; the message names every fault. */
@@ -13,8 +13,28 @@ const productsOf = (file: ContextFile): readonly ProductInForce[] =>
   DEMO_CONTEXT.products;
 
 const lotsOf = (file: ContextFile): readonly LotFact[] | null =>
-  file.lots?.map(({ expiresOn = null, status = 'in-use', ...lot }) => ({ ...lot, expiresOn, status })) ??
-  null;
+  file.lots?.map(({ product, number, expiresOn = null, history, status }) => ({
+    product,
+    number,
+    expiresOn,
+    status: status ?? history?.at(-1)?.status ?? 'in-use',
+    ...(history ? { history } : {}),
+  })) ?? null;
+
+/** Lots whose receipts are told; this one batch is all that uses them. */
+const lotUseOf = (file: ContextFile): readonly LotUse[] | null => {
+  const told = file.lots?.filter((lot) => lot.received) ?? [];
+  if (told.length === 0) return null;
+  return told.map(({ product, number, received = [] }) => {
+    const sizes = new Map<number, number>();
+    for (const { kitFt3, quantity } of received) sizes.set(kitFt3, (sizes.get(kitFt3) ?? 0) + quantity);
+    return {
+      product,
+      number,
+      sizes: [...sizes].map(([kitFt3, kits]) => ({ kitFt3, received: kits, used: 0, own: 0 })),
+    };
+  });
+};
 
 const designOf = (file: ContextFile): readonly DesignFact[] | null =>
   file.design?.map((fact) => ({
@@ -60,6 +80,7 @@ export const readContext = async (path: string): Promise<CheckContext> => {
     asOfMs: file.asOf === undefined ? null : Date.parse(file.asOf),
     products: productsOf(file),
     lots: lotsOf(file),
+    lotUse: lotUseOf(file),
     design: designOf(file),
   };
 };

@@ -12,6 +12,7 @@ const REASON: Readonly<Record<Skipped['reason'], string>> = {
   off: 'off in the standard',
   'no-time': 'the time of hand-in is not known here',
   'no-lots': 'the lots are not known here',
+  'no-lot-use': 'receipts and use of the lots are not known here',
   'no-design': 'the work order is not known here',
   'no-photos': 'photographs are not known here',
   'no-siblings': 'earlier revisions are not known here',

@@ -107,7 +107,17 @@ const build = ({ lines, pours, events, photos }: Parts, order: readonly number[]
 
 const CONTEXT: CheckContext = {
   ...DEMO_CONTEXT,
-  lots: [{ product: 'EP-15', number: 'L-100', expiresOn: null, status: 'in-use' }],
+  asOfMs: Date.UTC(2026, 3, 14, 15),
+  lots: [
+    {
+      product: 'EP-15',
+      number: 'L-100',
+      expiresOn: '2026-04-13',
+      status: 'in-use',
+      history: [{ on: '2026-04-01', status: 'held' }],
+    },
+  ],
+  lotUse: [{ product: 'EP-15', number: 'L-100', sizes: [] }],
   design: [],
   photos: new Map(),
   siblings: new Set(['set|S-2']),

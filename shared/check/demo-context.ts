@@ -11,6 +11,7 @@ export const DEMO_CONTEXT: CheckContext = {
   standards: [{ id: 'demo', n: 1, effectiveOn: ALWAYS, body: DEMO_STANDARD }],
   products: [{ code: DEMO_PRODUCT.code, n: 1, effectiveOn: ALWAYS, body: DEMO_PRODUCT }],
   lots: null,
+  lotUse: null,
   design: null,
   photos: null,
   siblings: null,

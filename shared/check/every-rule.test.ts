@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { KINDS, type Kind } from '#shared/records/types.ts';
 import { RULES } from '#shared/rules/registry.ts';
 import type { CheckContext, DesignFact, PhotoFact } from '#shared/rules/types.ts';
-import { DEMO_STANDARD } from '#shared/standard/demo.ts';
+import { DEMO_PRODUCT, DEMO_STANDARD } from '#shared/standard/demo.ts';
 import { checkBatch } from './check-batch.ts';
 import { DEMO_CONTEXT } from './demo-context.ts';
 import { FAILING_CONTEXT } from './failing-context.ts';
@@ -30,7 +30,14 @@ const planned = (kind: Kind): DesignFact => ({
 const CONTEXT: CheckContext = {
   ...DEMO_CONTEXT,
   asOfMs: Date.UTC(2026, 4, 1),
-  lots: [{ product: 'EP-15', number: 'L-100', expiresOn: null, status: 'in-use' }],
+  lots: [{ product: 'EP-15', number: 'L-100', expiresOn: '2026-04-14', status: 'in-use', history: [] }],
+  lotUse: [
+    {
+      product: 'EP-15',
+      number: 'L-100',
+      sizes: DEMO_PRODUCT.kitsFt3.map((kitFt3) => ({ kitFt3, received: 10, used: 4, own: 1 })),
+    },
+  ],
   design: KINDS.map(planned),
   photos: new Map(
     KINDS.map((kind) => [
@@ -60,6 +67,6 @@ describe('every rule through the check', () => {
     const { findings, records } = checkBatch(batch(parts), { ...CONTEXT, ...context });
     expect(findings.map((finding) => finding.code)).toEqual([code]);
     expect(findings[0]).toMatchObject(expected);
-    expect(records[0]?.ruleCodes).toEqual(code === 'pour-orphan' ? [] : [code]);
+    expect(records[0]?.ruleCodes).toEqual(findings[0]?.kind === null ? [] : [code]);
   });
 });

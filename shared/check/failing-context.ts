@@ -1,4 +1,8 @@
-import type { Failing } from './failing-lines.ts';
+import type { LotFact } from '#shared/rules/types.ts';
+import { big, small, type Failing } from './failing-lines.ts';
+
+const LOT: LotFact = { product: 'EP-15', number: 'L-100', expiresOn: null, status: 'in-use', history: [] };
+const OTHER: LotFact = { ...LOT, number: 'L-200' };
 
 /** What is seen only with what the batch knows beside the line. */
 export const FAILING_CONTEXT: readonly Failing[] = [
@@ -14,6 +18,34 @@ export const FAILING_CONTEXT: readonly Failing[] = [
     expected: { measured: null, limit: null, field: 'hardwareAt' },
   },
   { code: 'photo-missing', values: { waterIn: 0.5 }, expected: { limit: 'water', field: 'waterIn' } },
+  // The lot's last day is 2026-04-14.
+  {
+    code: 'lot-expired',
+    context: { lots: [{ ...LOT, expiresOn: '2026-04-12' }, OTHER] },
+    pours: [big, { ...small, lot: 'L-200' }],
+    expected: { measured: '2026-04-14', limit: '2026-04-12', margin: -2, unit: 'd', sheet: 'Pours' },
+  },
+  {
+    code: 'lot-held',
+    context: {
+      lots: [{ ...LOT, status: 'recalled', history: [{ on: '2026-05-02', status: 'recalled' }] }, OTHER],
+    },
+    pours: [big, { ...small, lot: 'L-200' }],
+    expected: { measured: 'recalled', limit: 'in-use', params: { since: '2026-05-02', later: true } },
+  },
+  // Ten received, four used elsewhere, one of them by this contractor; seven more here.
+  {
+    code: 'lot-overdrawn',
+    expected: {
+      measured: 8,
+      limit: null,
+      kind: null,
+      sheet: 'Batch',
+      params: { product: 'EP-15', lot: 'L-100', kitFt3: 1.5 },
+      ownerParams: { used: 11, received: 10, over: 1 },
+    },
+    pours: [{ ...big, kitFt3: 1.5, quantity: 7 }],
+  },
   {
     code: 'design-differs',
     values: { poleClass: '3' },

@@ -5,6 +5,7 @@ import type { Skipped } from './types.ts';
 const REASON: Readonly<Record<ContextPart, Skipped['reason']>> = {
   asOfMs: 'no-time',
   lots: 'no-lots',
+  lotUse: 'no-lot-use',
   design: 'no-design',
   photos: 'no-photos',
   siblings: 'no-siblings',

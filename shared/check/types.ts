@@ -27,7 +27,7 @@ export type CheckedRecord = {
 /** A rule (or a part of a rule's context) that did not run, and why. */
 export type Skipped = {
   readonly code: string;
-  readonly reason: 'off' | 'no-time' | 'no-lots' | 'no-design' | 'no-photos' | 'no-siblings';
+  readonly reason: 'off' | 'no-time' | 'no-lots' | 'no-lot-use' | 'no-design' | 'no-photos' | 'no-siblings';
 };
 
 export type CheckResult = {

@@ -26,6 +26,9 @@ import { liftEarly } from './lift-early/rule.ts';
 import { loadEarly } from './load-early/rule.ts';
 import { locateLapsed } from './locate-lapsed/rule.ts';
 import { locateMissing } from './locate-missing/rule.ts';
+import { lotExpired } from './lot-expired/rule.ts';
+import { lotHeld } from './lot-held/rule.ts';
+import { lotOverdrawn } from './lot-overdrawn/rule.ts';
 import { lotUnknown } from './lot-unknown/rule.ts';
 import { loweredEarly } from './lowered-early/rule.ts';
 import { notOnOrder } from './not-on-order/rule.ts';
@@ -69,6 +72,9 @@ export const RULES: readonly Rule[] = [
   kitUnknown,
   productMixed,
   lotUnknown,
+  lotExpired,
+  lotHeld,
+  lotOverdrawn,
   plumbOut,
   leanLeft,
   leanUnproved,

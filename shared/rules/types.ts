@@ -38,6 +38,7 @@ export type CheckContext = {
   readonly standards: readonly StandardInForce[];
   readonly products: readonly ProductInForce[];
   readonly lots: readonly LotFact[] | null;
+  readonly lotUse: readonly LotUse[] | null;
   readonly design: readonly DesignFact[] | null;
   /** Photographs by the key of shared/records/structure-key.ts `lineKey`: `kind|STRUCTURE|occurrence`. */
   readonly photos: ReadonlyMap<string, readonly PhotoFact[]> | null;
@@ -57,11 +58,28 @@ export type ProductInForce = {
   readonly effectiveOn: string;
   readonly body: Product;
 };
+export type LotStatus = 'in-use' | 'held' | 'recalled';
 export type LotFact = {
   readonly product: string;
   readonly number: string;
   readonly expiresOn: string | null;
-  readonly status: 'in-use' | 'held' | 'recalled';
+  /** Now. */
+  readonly status: LotStatus;
+  /** What it came to be and on which day, ascending; in use before the first. Absent: not known, `status` has always been so. */
+  readonly history?: readonly { readonly on: string; readonly status: LotStatus }[];
+};
+/** Kits of a lot by size, the lines being checked apart. */
+export type LotUse = {
+  readonly product: string;
+  readonly number: string;
+  readonly sizes: readonly {
+    readonly kitFt3: number;
+    readonly received: number;
+    /** By all contractors, wasted kits too. */
+    readonly used: number;
+    /** Of these, by the batch's contractor. */
+    readonly own: number;
+  }[];
 };
 export type DesignFact = {
   readonly structureNumber: string;
@@ -135,7 +153,7 @@ export type BatchView = {
 };
 
 /** Parts of the context that may be unknown. */
-export type ContextPart = 'asOfMs' | 'lots' | 'design' | 'photos' | 'siblings';
+export type ContextPart = 'asOfMs' | 'lots' | 'lotUse' | 'design' | 'photos' | 'siblings';
 
 type RuleBase = {
   readonly code: string;

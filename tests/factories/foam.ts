@@ -26,7 +26,7 @@ export async function createProduct(
 
 export type Lot = { id: string; number: string };
 
-/** A lot with one receipt of 100 kits of 4 ft³. */
+/** A lot with receipts of each kit size: 100 of 4 ft³, enough of the others for any batch of a test. */
 export async function createLot(
   em: EntityManager,
   options: { productId: string; number?: string; expiresOn?: string },
@@ -37,8 +37,11 @@ export async function createLot(
     [options.productId, options.number ?? `L-${unique()}`, options.expiresOn ?? '2035-12-31'],
   );
   if (made === null) throw new Error('The lot was not made.');
-  await run(em, `insert into lot_events (lot_id, type, kit_ft3, quantity) values ($1, 'received', 4, 100)`, [
-    made.id,
-  ]);
+  await run(
+    em,
+    `insert into lot_events (lot_id, type, kit_ft3, quantity)
+     select $1, 'received', * from (values (1.5, 1000), (2.5, 1000), (4, 100), (6, 1000), (8, 1000)) as kits (ft3, n)`,
+    [made.id],
+  );
   return made;
 }

@@ -15,6 +15,8 @@ export type RuleCase = {
   readonly code: string;
   /** *set* unless said. */
   readonly kind?: Kind;
+  /** The finding belongs to the batch, not to the line. */
+  readonly onBatch?: boolean;
   /** Breaks this rule alone. Numbers are worked out by hand beside it; ± 0.0001 on ratios. */
   readonly fails: Line & { readonly expected: Expected };
   /** Meets it by as little as can be written down. */
@@ -25,6 +27,9 @@ export const LOT = 'LOT-1';
 /** A second product of the owner, with its lot. */
 export const OTHER_PRODUCT = 'EP-20';
 export const OTHER_LOT = 'LOT-20';
+export const EXPIRED_LOT = 'LOT-OLD';
+export const HELD_LOT = 'LOT-HELD';
+export const SCARCE_LOT = 'LOT-FEW';
 export const kits =
   (...sizes: number[]) =>
   (structure: string) =>

@@ -1,18 +1,19 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 import type { Kind } from '#shared/records/types.ts';
-import { DEMO_PRODUCT } from '#shared/standard/demo.ts';
-import { createLot, createProduct } from '#tests/factories/foam.ts';
+import { createLot } from '#tests/factories/foam.ts';
 import { startBatch, uploadPhotographs, uploadWorkbook } from '#tests/factories/start-batch.ts';
 import { pourRow, pourRows, SET_VIEWS, setRow } from '#tests/factories/set-row.ts';
 import { createWorkSite } from '#tests/factories/work-site.ts';
 import { createHarness, type Harness } from '#tests/setup/api-harness.ts';
-import { LOT, OTHER_LOT, OTHER_PRODUCT, poursOf, rowOf, type Expected } from './rule-case.ts';
+import { poursOf, rowOf, type Expected, LOT } from './rule-case.ts';
+import { createOtherFoam } from './other-foam.ts';
+import { CONTEXT_CASES } from './rule-cases-context.ts';
 import { MEASURE_CASES } from './rule-cases-measures.ts';
 import { TIME_CASES } from './rule-cases-times.ts';
 import { RULE_CASES } from './rule-cases.ts';
 
-const CASES = [...RULE_CASES, ...MEASURE_CASES, ...TIME_CASES].map((one, index) => ({
+const CASES = [...RULE_CASES, ...MEASURE_CASES, ...TIME_CASES, ...CONTEXT_CASES].map((one, index) => ({
   kind: 'set' as Kind,
   ...one,
   bad: `F-${index + 1}`,
@@ -52,11 +53,7 @@ beforeAll(async () => {
   ]);
   const site = await createWorkSite(harness, { planned: [...cases, TWICE, PHOTOGRAPHED, PARTLY] });
   await createLot(harness.em(), { productId: site.product.id, number: LOT });
-  const other = await createProduct(harness.em(), {
-    code: OTHER_PRODUCT,
-    body: { ...DEMO_PRODUCT, code: OTHER_PRODUCT },
-  });
-  await createLot(harness.em(), { productId: other.id, number: OTHER_LOT });
+  await createOtherFoam(harness.em(), site.product.id);
   const contractor = await harness.signIn(site.contractor);
   const batch = await startBatch(contractor, site);
   await uploadPhotographs(contractor, batch, [
@@ -98,9 +95,12 @@ beforeAll(async () => {
 afterAll(() => harness.close());
 
 describe('every rule through an uploaded workbook', () => {
-  it.each(CASES)('$code is found where it is not met, and alone', ({ code, bad, fails }) => {
-    expect(codesOn(bad)).toEqual([code]);
-    const [found] = on(bad).filter((one) => one.code === code);
+  it.each(CASES)('$code is found where it is not met, and alone', ({ code, bad, fails, onBatch = false }) => {
+    expect(codesOn(bad)).toEqual(onBatch ? [] : [code]);
+    const [found, ...more] = findings.filter(
+      (one) => one.code === code && (onBatch ? one.recordId === null : one.structureNumber === bad),
+    );
+    expect(more).toEqual([]);
     expect(found).toMatchObject({ severity: 'nonconformity', ...near(fails.expected) });
   });
 

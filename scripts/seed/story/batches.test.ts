@@ -31,7 +31,19 @@ async function findingsOf(workOrder: string, lines: readonly StoryLine[]): Promi
   }
   const context: CheckContext = {
     ...DEMO_CONTEXT,
-    lots: LOTS.map(({ product, number, expiresOn }) => ({ product, number, expiresOn, status: 'in-use' })),
+    asOfMs: Date.UTC(2026, 6, 1),
+    lots: LOTS.map(({ product, number, expiresOn, event }) => ({
+      product,
+      number,
+      expiresOn,
+      status: event?.type ?? 'in-use',
+      history: event ? [{ on: event.on, status: event.type }] : [],
+    })),
+    lotUse: LOTS.map(({ product, number, received }) => ({
+      product,
+      number,
+      sizes: received.map(({ kitFt3, quantity }) => ({ kitFt3, received: quantity, used: 0, own: 0 })),
+    })),
     design: WORK_ORDERS.find((order) => order.number === workOrder)!.planned.map(
       ({ structureNumber, kind, design }) => ({ structureNumber, kind, ...design }),
     ),

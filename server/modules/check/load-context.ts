@@ -4,7 +4,7 @@ import type { SourceBatch } from '#shared/records/types.ts';
 import type { CheckContext } from '#shared/rules/types.ts';
 import { loadDesign } from './load-design.ts';
 import { loadLines, type KnownLines } from './load-lines.ts';
-import { loadLots, type LotRow } from './load-lots.ts';
+import { loadLots, loadLotUse, type LotRow } from './load-lots.ts';
 import { loadPhotos } from './load-photos.ts';
 import { loadProducts, loadStandards } from './load-versions.ts';
 import { placePhotos, type Placing } from './place-photos.ts';
@@ -39,6 +39,7 @@ export async function loadContext(
   const standards = await loadStandards(em, asOf);
   const products = await loadProducts(em, asOf);
   const lots = await loadLots(em);
+  const lotUse = await loadLotUse(em, run);
   const design = await loadDesign(em, run.workOrderId);
   const lines = await loadLines(em, run.batchId);
   const placing = placePhotos({ photos: await loadPhotos(em, run.batchId), source, known: lines });
@@ -49,7 +50,8 @@ export async function loadContext(
       asOfMs: run.asOfMs,
       standards,
       products,
-      lots: lots.map(({ product, number, expiresOn, status }) => ({ product, number, expiresOn, status })),
+      lots: lots.map(({ id: _id, ...lot }) => lot),
+      lotUse,
       design,
       photos: placing.byLine,
       siblings: lines.standing,
