@@ -29,6 +29,8 @@ const LIGHT = {
   'water-fill': '#a9cfe8',
   soil: '#a9977a',
   rock: '#77787a',
+  // Over the page behind a dialog: dims it in both themes, where a tint of the paper would wash it out.
+  scrim: 'rgb(21 35 60 / 0.48)',
 } as const;
 
 type Token = keyof typeof LIGHT;
@@ -57,6 +59,7 @@ const DARK: Record<Token, string> = {
   'water-fill': '#24587f',
   soil: '#6f88a8',
   rock: '#8fa3bb',
+  scrim: 'rgb(3 8 15 / 0.68)',
 };
 
 function variables(tokens: Record<Token, string>): Record<string, string> {

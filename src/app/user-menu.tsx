@@ -30,10 +30,9 @@ export function UserMenu({ user }: { user: SessionUser }) {
             type="button"
             className="min-h-9 truncate text-table hover:underline pointer-coarse:min-h-11"
           >
-            <span className="max-sm:hidden">
-              {user.name} · {user.role}
-            </span>
-            <span className="sm:hidden">{user.name}</span>
+            {user.name}
+            {/* At laptop width the pages of a role take the room; the role stands in the menu. */}
+            <span className="max-sm:hidden lg:max-xl:hidden"> · {user.role}</span>
           </button>
         }
       >

@@ -137,7 +137,7 @@ const AUDITOR: readonly Waiting[] = [
     key: 'conceded',
     one: 'Finding accepted by concession',
     many: 'Findings accepted by concession',
-    detail: 'They stay non-conforming on record.',
+    detail: 'What is accepted by concession stays non-conforming on record.',
     to: '/nonconformities?grounds=concession',
     sql: `select count(*) from finding_states where grounds = 'concession' and state = 'approved'`,
   },

@@ -18,7 +18,7 @@ export function Dialog({ open, onOpenChange, title, description, wide, insistent
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
-        <Radix.Overlay className="fixed inset-0 z-40 bg-sunk/80" />
+        <Radix.Overlay className="fixed inset-0 z-40 bg-scrim" />
         <Radix.Content
           {...(description ? {} : { 'aria-describedby': undefined })}
           onEscapeKeyDown={insistent ? (event) => event.preventDefault() : undefined}

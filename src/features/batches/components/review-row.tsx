@@ -2,6 +2,7 @@ import { IntakeRow } from './intake-row.tsx';
 import { Moment } from '#src/components/ui/moment.tsx';
 import { TextLink } from '#src/components/ui/text-link.tsx';
 import { paths } from '#src/config/paths.ts';
+import { HandOver } from '#src/features/review/components/hand-over.tsx';
 import { counted } from '#src/lib/formats.ts';
 import type { Batch } from '#shared/generated/api-types.ts';
 
@@ -42,6 +43,7 @@ export function ReviewRow({ batch }: { batch: Batch }) {
           Open it on the review desk
         </TextLink>
       ) : null}
+      <HandOver batch={batch} />
     </IntakeRow>
   );
 }

@@ -3,6 +3,7 @@ import { Fact, PageBand } from '#src/components/ui/page-band.tsx';
 import { DecisionBar } from '#src/components/ui/progress.tsx';
 import { STATUS_WORDS, StateWord } from '#src/components/ui/state-word.tsx';
 import type { useMoveBatch } from '#src/features/review/api/move-batch.ts';
+import { HandOver } from '#src/features/review/components/hand-over.tsx';
 import type { DeskCounts } from '#src/features/review/desk/desk-tabs.ts';
 import { useUser } from '#src/lib/session/session.ts';
 import type { Batch } from '#shared/generated/api-types.ts';
@@ -63,6 +64,7 @@ export function DeskBand({ batch, counts, onClose, move }: Props) {
               Release
             </Button>
           ) : null}
+          <HandOver batch={batch} />
           {can.includes('close-review') ? (
             <Button kind={settled ? 'primary' : 'secondary'} onClick={onClose}>
               Close review…
