@@ -1,24 +1,6 @@
-import type { Params, Severity } from '#shared/findings/types.ts';
-import type { Kind } from '#shared/records/types.ts';
+import { FINDING_FACTS, type FindingFacts } from '#server/modules/records/finding-facts.ts';
 
-export type ConcessionFindingRow = {
-  id: string;
-  recordId: string | null;
-  structureNumber: string | null;
-  code: string;
-  severity: Severity;
-  kind: Kind | null;
-  sheet: string | null;
-  row: number | null;
-  cell: string | null;
-  field: string | null;
-  measured: number | string | null;
-  limit: number | string | null;
-  margin: number | null;
-  unit: string | null;
-  uncertainty: number | null;
-  params: Params;
-};
+export type ConcessionFindingRow = FindingFacts & { id: string; record_id: string | null };
 
 export type ConcessionDbRow = {
   id: string;
@@ -45,12 +27,10 @@ select c.id, c.number, c.state, c.version, c.at, c.reason, coalesce(asked.name, 
   c.decision_reason, c.condition, c.ends_on, decided.name as decided_by, c.decided_at,
   c.contractor_id, o.name as contractor_name, b.id as batch_id, b.number as batch_number,
   (
-    select coalesce(jsonb_agg(jsonb_build_object(
-      'id', f.id, 'recordId', f.record_id, 'structureNumber', f.structure_number, 'code', f.code, 'severity', f.severity,
-      'kind', f.kind, 'sheet', f.sheet, 'row', f.row, 'cell', f.cell, 'field', f.field, 'measured', f.measured,
-      'limit', f.limit_value, 'margin', f.margin, 'unit', f.unit, 'uncertainty', f.uncertainty, 'params', f.params
-    ) order by f.ordinal), '[]')
-    from concession_findings k join findings f on f.id = k.finding_id where k.concession_id = c.id
+    select coalesce(jsonb_agg(to_jsonb(one) - 'ordinal' order by one.ordinal), '[]') from (
+      select f.id, f.record_id, f.ordinal, ${FINDING_FACTS}
+      from concession_findings k join findings f on f.id = k.finding_id where k.concession_id = c.id
+    ) one
   ) as findings
 from concession_current c
 join organisations o on o.id = c.contractor_id

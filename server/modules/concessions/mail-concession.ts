@@ -2,6 +2,7 @@ import type { EntityManager } from '@mikro-orm/postgresql';
 import { row } from '#server/db/rows.ts';
 import { queueMail } from '#server/mail/queue-mail.ts';
 import { recipients } from '#server/mail/recipients.ts';
+import { toFinding } from '#server/modules/records/finding-facts.ts';
 import { renderFinding } from '#shared/findings/render.ts';
 import type { Actor } from '#shared/permissions/ability.ts';
 import { CONCESSION_SELECT, type ConcessionDbRow, type ConcessionFindingRow } from './concession-select.ts';
@@ -55,7 +56,7 @@ export async function mailConcessionAnswered(
         reason: concession.decision_reason ?? '',
         condition: concession.condition,
         endsOn: concession.ends_on,
-        structures: [...new Set(concession.findings.flatMap(({ structureNumber: number }) => number ?? []))],
+        structures: [...new Set(concession.findings.flatMap(({ structure_number: number }) => number ?? []))],
       },
     });
   }
@@ -74,6 +75,6 @@ async function read(em: EntityManager, id: string): Promise<MailedConcession> {
 }
 
 function describe(row: ConcessionFindingRow): { structureNumber: string; finding: string; detail: string } {
-  const { title, message } = renderFinding({ ...row, occurrence: null, ownerParams: {}, fingerprint: '' });
-  return { structureNumber: row.structureNumber ?? '', finding: title, detail: message };
+  const { title, message } = renderFinding(toFinding(row, false));
+  return { structureNumber: row.structure_number ?? '', finding: title, detail: message };
 }

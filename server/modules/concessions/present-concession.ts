@@ -1,3 +1,4 @@
+import { toFinding } from '#server/modules/records/finding-facts.ts';
 import { renderFinding } from '#shared/findings/render.ts';
 import type { Concession } from '#shared/generated/api-types.ts';
 import type { Ability, Actor } from '#shared/permissions/ability.ts';
@@ -29,8 +30,21 @@ export function presentConcession(
   };
 }
 
+/** Nothing that a rule learnt about another contractor: a contractor reads this too. */
 function presentFinding(row: ConcessionFindingRow): Concession['findings'][number] {
-  const { title, message } = renderFinding({ ...row, occurrence: null, ownerParams: {}, fingerprint: '' });
-  const { id, recordId, structureNumber, measured, limit, margin, unit, uncertainty } = row;
-  return { id, recordId, structureNumber, title, message, measured, limit, margin, unit, uncertainty };
+  const finding = toFinding(row, false);
+  const { title, message } = renderFinding(finding);
+  const { structureNumber, measured, limit, margin, unit, uncertainty } = finding;
+  return {
+    id: row.id,
+    recordId: row.record_id,
+    structureNumber,
+    title,
+    message,
+    measured,
+    limit,
+    margin,
+    unit,
+    uncertainty,
+  };
 }

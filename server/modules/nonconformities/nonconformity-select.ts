@@ -1,27 +1,11 @@
-import type { Params, Severity } from '#shared/findings/types.ts';
-import type { Kind } from '#shared/records/types.ts';
+import { FINDING_FACTS, type FindingFacts } from '#server/modules/records/finding-facts.ts';
 import type { ActionDue, Grounds } from '#shared/review/states.ts';
 
-export type NonconformityDbRow = {
+export type NonconformityDbRow = FindingFacts & {
   id: string;
   record_id: string | null;
   line_id: string | null;
   sort_day: string;
-  code: string;
-  severity: Severity;
-  structure_number: string | null;
-  kind: Kind | null;
-  sheet: string | null;
-  row: number | null;
-  cell: string | null;
-  field: string | null;
-  measured: number | string | null;
-  limit_value: number | string | null;
-  margin: number | null;
-  unit: string | null;
-  uncertainty: number | null;
-  params: Params;
-  owner_params: Params;
   state: 'open' | 'approved' | 'rejected' | 'held';
   grounds: Grounds | null;
   action: ActionDue | null;
@@ -47,8 +31,7 @@ export type NonconformityDbRow = {
 
 /** Over a page of finding_states `s`, so that what is joined is joined for the rows shown only. */
 export const NONCONFORMITY_COLUMNS = `
-select f.id, f.record_id, f.line_id, s.sort_day, f.code, f.severity, f.structure_number, f.kind, f.sheet, f.row, f.cell, f.field,
-  f.measured, f.limit_value, f.margin, f.unit, f.uncertainty, f.params, f.owner_params,
+select f.id, f.record_id, f.line_id, s.sort_day, ${FINDING_FACTS},
   s.state, s.grounds, s.action, s.due_on, u.name as decided_by, k.number as concession, k.condition,
   k.decision, k.reason, k.at as decided_at, s.version,
   s.contractor_id, o.name as contractor_name, s.work_order_id, w.number as work_order_number,

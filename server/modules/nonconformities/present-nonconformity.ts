@@ -1,3 +1,4 @@
+import { toFinding } from '#server/modules/records/finding-facts.ts';
 import { renderFinding } from '#shared/findings/render.ts';
 import type { Nonconformity } from '#shared/generated/api-types.ts';
 import type { NonconformityDbRow } from './nonconformity-select.ts';
@@ -11,25 +12,7 @@ const STATES = {
 
 /** A finding as the auditor sees it. Only the owner's people and auditors come here, so nothing is held back. */
 export function presentNonconformity(row: NonconformityDbRow): Nonconformity {
-  const { title, message, remedy } = renderFinding({
-    code: row.code,
-    severity: row.severity,
-    kind: row.kind,
-    structureNumber: row.structure_number,
-    occurrence: null,
-    sheet: row.sheet,
-    row: row.row,
-    cell: row.cell,
-    field: row.field,
-    measured: row.measured,
-    limit: row.limit_value,
-    margin: row.margin,
-    unit: row.unit,
-    uncertainty: row.uncertainty,
-    params: row.params,
-    ownerParams: row.owner_params,
-    fingerprint: '',
-  });
+  const { title, message, remedy } = renderFinding(toFinding(row, true));
   return {
     id: row.id,
     recordId: row.record_id,

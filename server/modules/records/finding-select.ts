@@ -1,29 +1,11 @@
-import type { Severity, Params } from '#shared/findings/types.ts';
-import type { Kind } from '#shared/records/types.ts';
 import type { ActionDue, Grounds, LineState, RevisionStatus } from '#shared/review/states.ts';
+import { FINDING_FACTS, type FindingFacts } from './finding-facts.ts';
 
-export type FindingDbRow = {
+export type FindingDbRow = FindingFacts & {
   id: string;
   record_id: string | null;
   line_id: string | null;
   ordinal: number;
-  code: string;
-  severity: Severity;
-  kind: Kind | null;
-  structure_number: string | null;
-  occurrence: number | null;
-  sheet: string | null;
-  row: number | null;
-  cell: string | null;
-  field: string | null;
-  measured: number | string | null;
-  limit_value: number | string | null;
-  margin: number | null;
-  unit: string | null;
-  uncertainty: number | null;
-  params: Params;
-  owner_params: Params;
-  fingerprint: string;
   state: 'open' | 'approved' | 'rejected' | 'held';
   version: number;
   decision: string | null;
@@ -55,9 +37,7 @@ export type FindingDbRow = {
  * given while the next revision is open answers what came back from this one.
  */
 export const FINDING_SELECT = `
-select f.id, f.record_id, f.line_id, f.ordinal, f.code, f.severity, f.kind, f.structure_number, f.occurrence, f.sheet,
-  f.row, f.cell, f.field, f.measured, f.limit_value, f.margin, f.unit, f.uncertainty, f.params, f.owner_params,
-  f.fingerprint, coalesce(s.state, 'open') as state, coalesce(s.version, 0) as version,
+select f.id, f.record_id, f.line_id, f.ordinal, ${FINDING_FACTS}, coalesce(s.state, 'open') as state, coalesce(s.version, 0) as version,
   d.decision, d.grounds, d.action, d.due_on, d.reason, du.name as decided_by, d.at as decided_at,
   a.text as answer_text, a.by as answer_by, a.at as answer_at, a.open as answer_open,
   c.id as concession_id, c.number as concession_number, c.type as concession_type,

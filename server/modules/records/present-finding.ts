@@ -1,7 +1,7 @@
 import { renderFinding } from '#shared/findings/render.ts';
-import type { Finding } from '#shared/findings/types.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 import { may, type Ability, type Actor } from '#shared/permissions/ability.ts';
+import { toFinding } from './finding-facts.ts';
 import type { FindingDbRow } from './finding-select.ts';
 
 const STATES = {
@@ -46,28 +46,6 @@ export function presentFinding(row: FindingDbRow, viewer: { actor: Actor; abilit
     concession: told ? concessionOf(row) : null,
     version: row.version,
     can: findingCan(row, viewer),
-  };
-}
-
-export function toFinding(row: FindingDbRow, owner: boolean): Finding {
-  return {
-    code: row.code,
-    severity: row.severity,
-    kind: row.kind,
-    structureNumber: row.structure_number,
-    occurrence: row.occurrence,
-    sheet: row.sheet,
-    row: row.row,
-    cell: row.cell,
-    field: row.field,
-    measured: row.measured,
-    limit: row.limit_value,
-    margin: row.margin,
-    unit: row.unit,
-    uncertainty: row.uncertainty,
-    params: row.params,
-    ownerParams: owner ? row.owner_params : {},
-    fingerprint: row.fingerprint,
   };
 }
 

@@ -5,7 +5,7 @@ import { recipients } from '#server/mail/recipients.ts';
 import type { ReturnedFinding } from '#server/mail/templates/batch-returned.ts';
 import type { LockedRevision } from '#server/modules/batches/lock-revision.ts';
 import { FINDING_SELECT, type FindingDbRow } from '#server/modules/records/finding-select.ts';
-import { toFinding } from '#server/modules/records/present-finding.ts';
+import { toFinding } from '#server/modules/records/finding-facts.ts';
 import { renderFinding } from '#shared/findings/render.ts';
 import type { Actor } from '#shared/permissions/ability.ts';
 import type { Closing } from '#shared/review/close-review.ts';

@@ -1,7 +1,7 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { rows } from '#server/db/rows.ts';
+import { FINDING_FACTS, toFinding, type FindingFacts } from '#server/modules/records/finding-facts.ts';
 import { renderFinding } from '#shared/findings/render.ts';
-import type { Finding } from '#shared/findings/types.ts';
 import {
   FINDING_COLUMNS,
   kindColumns,
@@ -163,7 +163,7 @@ function pourRow(row: PourRow): ExportRow {
   };
 }
 
-type FindingRow = {
+type FindingRow = FindingFacts & {
   ordinal: number;
   record_number: string;
   state: string;
@@ -173,26 +173,11 @@ type FindingRow = {
   concession: string | null;
   condition: string | null;
   ends_on: string | null;
-  code: string;
-  severity: Finding['severity'];
-  kind: Finding['kind'];
-  structure_number: string | null;
-  sheet: string | null;
-  row: number | null;
-  cell: string | null;
-  field: string | null;
-  measured: Finding['measured'];
-  limit_value: Finding['limit'];
-  margin: number | null;
-  unit: string | null;
-  uncertainty: number | null;
-  params: Finding['params'];
 };
 
 const FINDINGS = `
 select i.ordinal, v.record_number, s.state, s.grounds, d.reason, u.name as decided_by,
-  c.number as concession, c.condition, c.ends_on, f.code, f.severity, f.kind, f.structure_number, f.sheet, f.row, f.cell,
-  f.field, f.measured, f.limit_value, f.margin, f.unit, f.uncertainty, f.params
+  c.number as concession, c.condition, c.ends_on, ${FINDING_FACTS}
 ${ITEMS.replace(
   'where',
   `join finding_states s on s.record_id = r.id
@@ -205,15 +190,8 @@ where`,
 order by i.ordinal, f.ordinal`;
 
 function findingRow(row: FindingRow): ExportRow {
-  const { title, message } = renderFinding({
-    ...row,
-    structureNumber: row.structure_number,
-    limit: row.limit_value,
-    occurrence: null,
-    // What concerns another contractor stays out of a document that goes to many.
-    ownerParams: {},
-    fingerprint: '',
-  });
+  // What concerns another contractor stays out of a document that goes to many.
+  const { title, message } = renderFinding(toFinding(row, false));
   return {
     recordNumber: row.record_number,
     structureNumber: row.structure_number,
