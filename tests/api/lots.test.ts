@@ -69,11 +69,11 @@ describe('lots', () => {
     });
     expect((await contractor.post(`${batch}/submit`)).status).toBe(200);
     const used = await administrator.get(`/api/lots/${site.lot.id}`);
-    // Kits of 8 and 1.5 ft³ out of 100 kits of 4 ft³.
+    // Kits of 8 and 1.5 ft³ out of 100 of 4 ft³ and 1,000 of 1.5, 2.5, 6 and 8 ft³ each: 400 + 18,000.
     expect(used.body).toMatchObject({
-      receivedFt3: 400,
+      receivedFt3: 18_400,
       usedFt3: 9.5,
-      balanceFt3: 390.5,
+      balanceFt3: 18_390.5,
       structures: 1,
       uses: [{ structureNumber: 'L-1', usedFt3: 9.5, batch: { number: created.body.number } }],
     });
