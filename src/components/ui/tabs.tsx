@@ -1,5 +1,5 @@
 import { Tabs as Radix } from 'radix-ui';
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 
 type Tab<T extends string> = { readonly value: T; readonly label: string; readonly count?: number };
 
@@ -13,12 +13,19 @@ type Props<T extends string> = {
 
 /** Views of one thing, each with its count. The panel is one: its content follows `value`. */
 export function Tabs<T extends string>({ label, value, onChange, tabs, children }: Props<T>) {
+  // A press tells of the same tab twice, by pointer and by focus, before an address has changed: once counts.
+  const asked = useRef(value);
+  useEffect(() => {
+    asked.current = value;
+  }, [value]);
   return (
     <Radix.Root
       value={value}
       onValueChange={(next) => {
         const tab = tabs.find((one) => one.value === next);
-        if (tab) onChange(tab.value);
+        if (!tab || tab.value === asked.current) return;
+        asked.current = tab.value;
+        onChange(tab.value);
       }}
       className="flex min-h-0 flex-1 flex-col"
     >

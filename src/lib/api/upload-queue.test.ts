@@ -35,12 +35,12 @@ it('stores each file, and tells the same bytes again as a duplicate', async () =
   await settled(one);
   expect(countUploads(one.files())).toMatchObject({ all: 3, stored: 2, duplicate: 1, failed: 0 });
   expect(stored).toHaveBeenCalledTimes(2);
-  one.clearDone();
+  one.clear();
   expect(one.files()).toEqual([]);
   one.stop();
 });
 
-it('a refusal costs one file, says why, and can be tried again', async () => {
+it('a refusal costs one file, says why, is not sent again, and goes with the list', async () => {
   const one = queue();
   answer = (name) => reply(name, name === 'bad' ? { code: 'photo.kind', detail: 'Not a picture.' } : null);
   one.add([file('bad'), file('good')]);
@@ -49,11 +49,27 @@ it('a refusal costs one file, says why, and can be tried again', async () => {
     ['failed', 'Not a picture.'],
     ['stored', null],
   ]);
+  one.retry();
+  await settled(one);
+  expect(countUploads(one.files())).toMatchObject({ stored: 1, failed: 1, refused: 1 });
+  expect(sent).toEqual(['bad', 'good']);
+  one.clear();
+  expect(one.files()).toEqual([]);
+  one.stop();
+});
+
+it('sends again what failed on the way', async () => {
+  const one = queue();
+  const busy = new ApiProblem({ status: 503, code: 'busy', detail: 'Busy.' });
+  answer = (name) => (name === 'lost' ? busy : reply(name));
+  one.add([file('lost'), file('good')]);
+  await settled(one);
+  expect(countUploads(one.files())).toMatchObject({ stored: 1, failed: 1, refused: 0 });
   answer = (name) => reply(name);
   one.retry();
   await settled(one);
   expect(countUploads(one.files()).stored).toBe(2);
-  expect(sent).toEqual(['bad', 'good', 'bad']);
+  expect(sent).toEqual(['lost', 'good', 'lost']);
   one.stop();
 });
 

@@ -11,6 +11,8 @@ export type QueuedFile = {
   readonly problem: string | null;
   /** No answer came: it is sent again by itself once the network is back. */
   readonly offline: boolean;
+  /** The file itself was not accepted: sending the same one again changes nothing. */
+  readonly refused: boolean;
 };
 
 export type UploadTarget = {
@@ -21,10 +23,10 @@ export type UploadTarget = {
 
 export type UploadQueue = {
   readonly add: (files: readonly File[]) => void;
-  /** Sends the failed ones again. */
+  /** Sends again what failed on the way; what was refused stays refused. */
   readonly retry: () => void;
-  /** What is stored already goes from the list. */
-  readonly clearDone: () => void;
+  /** Everything goes from the list but what is still to be sent. */
+  readonly clear: () => void;
   /** What the server holds already, by id of its answer: the same bytes again are told as duplicates. */
   readonly know: (ids: readonly string[]) => void;
   readonly stop: () => void;
@@ -38,6 +40,9 @@ export type SendFile = (request: UploadRequest) => Promise<UploadReply>;
 
 /** Two at a time: one waits for the server while the other uses the line. */
 const AT_ONCE = 2;
+
+/** Answers about the file: empty or malformed, too large, of another kind, not what it says. */
+const REFUSED: ReadonlySet<number> = new Set([400, 413, 415, 422]);
 
 /**
  * Sends many files one request each, so that a refusal or a lost connection costs one file. Lives outside the page
@@ -61,7 +66,7 @@ export function createUploadQueue(target: UploadTarget, sendFile: SendFile = upl
   }
 
   async function send({ id, file }: QueuedFile): Promise<void> {
-    patch(id, { state: 'sending', sent: 0, problem: null, offline: false });
+    patch(id, { state: 'sending', sent: 0, problem: null, offline: false, refused: false });
     try {
       const reply = await sendFile({
         ...target,
@@ -70,7 +75,7 @@ export function createUploadQueue(target: UploadTarget, sendFile: SendFile = upl
         onProgress: (sent) => patch(id, { sent }),
       });
       const answer = reply.files[0];
-      if (answer?.error) return patch(id, { state: 'failed', problem: answer.error.detail });
+      if (answer?.error) return patch(id, { state: 'failed', problem: answer.error.detail, refused: true });
       const duplicate = typeof answer?.id === 'string' && known.has(answer.id);
       if (answer?.id) known.add(answer.id);
       patch(id, { state: duplicate ? 'duplicate' : 'stored', sent: file.size });
@@ -82,6 +87,7 @@ export function createUploadQueue(target: UploadTarget, sendFile: SendFile = upl
         state: 'failed',
         problem: problem?.message ?? 'It could not be sent. Try again.',
         offline: problem?.status === 0,
+        refused: problem !== null && REFUSED.has(problem.status),
       });
     }
   }
@@ -107,13 +113,13 @@ export function createUploadQueue(target: UploadTarget, sendFile: SendFile = upl
       const added = chosen.map((file): QueuedFile => {
         const id = nextId;
         nextId += 1;
-        return { id, file, state: 'waiting', sent: 0, problem: null, offline: false };
+        return { id, file, state: 'waiting', sent: 0, problem: null, offline: false, refused: false };
       });
       put([...files, ...added]);
       run();
     },
-    retry: () => again(() => true),
-    clearDone: () => put(files.filter((one) => one.state !== 'stored' && one.state !== 'duplicate')),
+    retry: () => again((one) => !one.refused),
+    clear: () => put(files.filter((one) => one.state === 'waiting' || one.state === 'sending')),
     know: (ids) => {
       for (const id of ids) known.add(id);
     },
@@ -137,7 +143,9 @@ export type UploadCounts = {
   readonly all: number;
   readonly stored: number;
   readonly duplicate: number;
+  /** Refused or lost on the way. */
   readonly failed: number;
+  readonly refused: number;
   readonly busy: boolean;
 };
 
@@ -148,6 +156,7 @@ export function countUploads(files: readonly QueuedFile[]): UploadCounts {
     stored: of('stored'),
     duplicate: of('duplicate'),
     failed: of('failed'),
+    refused: files.filter((one) => one.state === 'failed' && one.refused).length,
     busy: of('waiting') + of('sending') > 0,
   };
 }

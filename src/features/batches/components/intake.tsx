@@ -39,7 +39,7 @@ export function Intake({ batch, view, check, intake, onUnplaced }: Props) {
         counts={intake.counts}
         onFiles={intake.take}
         onRetry={intake.queue.retry}
-        onClear={intake.queue.clearDone}
+        onClear={intake.queue.clear}
         onUnplaced={onUnplaced}
       />
       <CheckRow batch={batch} check={check} />

@@ -79,9 +79,9 @@ export function PhotographsRow({ batch, open, files, counts, onFiles, onRetry, o
       <UploadFaults files={files} />
       {counts.failed > 0 || (!counts.busy && counts.all > 0) ? (
         <div className="mt-2 flex flex-wrap gap-3">
-          {counts.failed > 0 ? (
+          {counts.failed > counts.refused ? (
             <Button size="small" onClick={onRetry}>
-              Try {counted(counts.failed, 'photograph')} again
+              Try {counted(counts.failed - counts.refused, 'photograph')} again
             </Button>
           ) : null}
           {!counts.busy ? (
@@ -95,11 +95,12 @@ export function PhotographsRow({ batch, open, files, counts, onFiles, onRetry, o
   );
 }
 
-function uploadWords({ all, stored, duplicate, failed }: UploadCounts): string {
+function uploadWords({ all, stored, duplicate, failed, refused }: UploadCounts): string {
   return [
     `${stored + duplicate} of ${all} stored`,
     duplicate > 0 ? `${duplicate} here already` : '',
-    failed > 0 ? `${failed} to try again` : '',
+    refused > 0 ? `${refused} not accepted` : '',
+    failed > refused ? `${failed - refused} to try again` : '',
   ]
     .filter(Boolean)
     .join(', ');
