@@ -1,7 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { rows, run } from '#server/db/rows.ts';
-import { enqueue } from '#server/jobs/enqueue.ts';
-import { freeIdleReviewsJob } from '#server/modules/review/free-idle-reviews.job.ts';
+import { rows } from '#server/db/rows.ts';
 import type { Actor } from '#shared/permissions/ability.ts';
 import { handIn, uploadLines, type HandedIn } from '#tests/factories/hand-in.ts';
 import { setRow } from '#tests/factories/set-row.ts';
@@ -65,28 +63,6 @@ beforeAll(async () => {
   });
 });
 afterAll(() => harness.close());
-
-describe('a review that nobody works on', () => {
-  it('goes back to the queue after the stated days, and the trail says so', async () => {
-    await colleague.post(`/api/batches/${batch.id}/take`);
-    await enqueue(harness.em(), freeIdleReviewsJob, {});
-    await harness.drain();
-    expect((await inspector.get(`/api/batches/${batch.id}`)).body.status).toBe('in-review');
-    await run(
-      harness.em(),
-      `update revisions set worked_at = now() - interval '73 hours' where batch_id = $1`,
-      [batch.id],
-    );
-    await enqueue(harness.em(), freeIdleReviewsJob, {});
-    await harness.drain();
-    expect((await inspector.get(`/api/batches/${batch.id}`)).body).toMatchObject({
-      status: 'submitted',
-      can: ['take'],
-    });
-    const trail = await inspector.get(`/api/trail?action=batch.freed&subject=batch:${batch.id}`);
-    expect(trail.body.items).toMatchObject([{ actor: null, payload: { afterDays: 3 } }]);
-  });
-});
 
 describe('a review', () => {
   it('is decided only by the inspector who took the batch', async () => {
