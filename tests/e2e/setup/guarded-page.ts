@@ -4,7 +4,7 @@ export type GuardedPage = {
   readonly page: Page;
   /** A refusal that the test provokes: the browser writes each to its console. */
   readonly expectRefusal: (status: number, path: RegExp) => void;
-  /** What went wrong on the page since it was opened. Empty in a test that passes. */
+  /** What went wrong on the page since this was last asked. Empty in a test that passes. */
   readonly faults: () => string[];
   readonly close: () => Promise<void>;
 };
@@ -27,7 +27,7 @@ export async function openPage(
     reducedMotion: 'reduce',
     ...rest,
   });
-  context.setDefaultTimeout(20_000);
+  context.setDefaultTimeout(15_000);
   const faults: string[] = [];
   const refusals: { status: number; path: RegExp }[] = [];
   // The session is asked for before anybody has signed in.
@@ -54,7 +54,7 @@ export async function openPage(
   return {
     page,
     expectRefusal: (status, path) => void refusals.push({ status, path }),
-    faults: () => [...faults],
+    faults: () => faults.splice(0),
     close: () => context.close(),
   };
 }
