@@ -85,6 +85,8 @@ describe('npm run check', { timeout: 60_000 }, () => {
       { code: 'brand-differs', reason: 'off' },
       { code: 'clock-future', reason: 'no-time' },
       { code: 'lot-overdrawn', reason: 'no-lot-use' },
+      { code: 'position-shared', reason: 'no-register' },
+      { code: 'position-outside', reason: 'no-area' },
       { code: 'photo-missing', reason: 'no-photos' },
     ]);
   });

@@ -26,7 +26,7 @@ export type ContextFile = {
     readonly latitude?: number | null;
     readonly longitude?: number | null;
   }[];
-  /** GeoJSON polygon of the work order; kept for the rule on positions outside it. */
+  /** GeoJSON polygon of the work order; null: it has none. */
   readonly area?: object | null;
 };
 

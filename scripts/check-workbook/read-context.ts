@@ -1,4 +1,5 @@
 import { readFile } from 'node:fs/promises';
+import { geoAreaOf } from '#shared/calc/geo-area.ts';
 import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
 import { isZone } from '#shared/dates/wall-clock.ts';
 import { validateProduct } from '#shared/generated/validators.mjs';
@@ -51,8 +52,9 @@ const designOf = (file: ContextFile): readonly DesignFact[] | null =>
 const faultsOf = (value: unknown): readonly string[] => {
   const faults = contextFaults(value);
   if (faults.length > 0) return faults;
-  const { zone, asOf, products = [] } = value as ContextFile;
+  const { zone, asOf, products = [], area } = value as ContextFile;
   return [
+    ...(area && geoAreaOf(area) === null ? ['area: is no GeoJSON polygon'] : []),
     ...(zone === undefined || isZone(zone) ? [] : [`zone: "${zone}" is no IANA time zone`]),
     ...(asOf === undefined || Number.isFinite(Date.parse(asOf)) ? [] : [`asOf: "${asOf}" is no instant`]),
     ...products.flatMap((product, index) =>
@@ -61,7 +63,7 @@ const faultsOf = (value: unknown): readonly string[] => {
   ];
 };
 
-/** What a check without a server is told of its context: JSON with zone, asOf, products, lots, design. Throws ContextRefused. */
+/** What a check without a server is told of its context: JSON with zone, asOf, products, lots, design, area. Throws ContextRefused. */
 export const readContext = async (path: string): Promise<CheckContext> => {
   let value: unknown;
   try {
@@ -82,5 +84,6 @@ export const readContext = async (path: string): Promise<CheckContext> => {
     lots: lotsOf(file),
     lotUse: lotUseOf(file),
     design: designOf(file),
+    area: file.area === null ? 'none' : geoAreaOf(file.area),
   };
 };

@@ -14,6 +14,8 @@ const REASON: Readonly<Record<Skipped['reason'], string>> = {
   'no-lots': 'the lots are not known here',
   'no-lot-use': 'receipts and use of the lots are not known here',
   'no-design': 'the work order is not known here',
+  'no-register': 'the register is not known here',
+  'no-area': 'the area of the work order is not known here',
   'no-photos': 'photographs are not known here',
   'no-siblings': 'earlier revisions are not known here',
 };

@@ -119,6 +119,16 @@ const CONTEXT: CheckContext = {
   ],
   lotUse: [{ product: 'EP-15', number: 'L-100', sizes: [] }],
   design: [],
+  neighbours: [{ structureNumber: 'X-1', latitude: 35.1, longitude: -97.4, accuracyFt: 5, own: false }],
+  area: [
+    [
+      [
+        [-98, 35],
+        [-97, 35],
+        [-97, 36],
+      ],
+    ],
+  ],
   photos: new Map(),
   siblings: new Set(['set|S-2']),
 };

@@ -13,6 +13,8 @@ export const DEMO_CONTEXT: CheckContext = {
   lots: null,
   lotUse: null,
   design: null,
+  neighbours: null,
+  area: null,
   photos: null,
   siblings: null,
 };

@@ -24,8 +24,8 @@ const planned = (kind: Kind): DesignFact => ({
   poleClass: kind === 'set' ? '4' : null,
   poleMaterial: kind === 'set' ? 'southern-pine' : null,
   embedmentFt: null,
-  latitude: null,
-  longitude: null,
+  latitude: Number(CLEAN_LINES[kind]['latitude']),
+  longitude: Number(CLEAN_LINES[kind]['longitude']),
 });
 const CONTEXT: CheckContext = {
   ...DEMO_CONTEXT,
@@ -39,6 +39,8 @@ const CONTEXT: CheckContext = {
     },
   ],
   design: KINDS.map(planned),
+  neighbours: [],
+  area: 'none',
   photos: new Map(
     KINDS.map((kind) => [
       `${kind}|${NUMBER[kind]}|1`,

@@ -1,3 +1,4 @@
+import { expect } from 'vitest';
 import type { LotFact } from '#shared/rules/types.ts';
 import { big, small, type Failing } from './failing-lines.ts';
 
@@ -45,6 +46,34 @@ export const FAILING_CONTEXT: readonly Failing[] = [
       ownerParams: { used: 11, received: 10, over: 1 },
     },
     pours: [{ ...big, kitFt3: 1.5, quantity: 7 }],
+  },
+  // 0.001° of latitude at 35.1° north are 110.94242 m (GeographicLib), 363.98430 ft, less 10.
+  {
+    code: 'position-off',
+    values: { latitude: 35.101, accuracyFt: 10 },
+    expected: { measured: expect.closeTo(353.9843, 3), limit: 15, margin: expect.closeTo(-338.9843, 3) },
+  },
+  {
+    code: 'position-shared',
+    context: {
+      neighbours: [{ structureNumber: 'X-9', latitude: 35.1, longitude: -97.4, accuracyFt: 5, own: false }],
+    },
+    expected: { measured: 0, limit: 3, margin: -3, structureNumber: 'S-1', ownerParams: { other: 'X-9' } },
+  },
+  {
+    code: 'position-outside',
+    context: {
+      area: [
+        [
+          [
+            [0, 0],
+            [1, 0],
+            [0, 1],
+          ],
+        ],
+      ],
+    },
+    expected: { measured: '35.1, -97.4', limit: null, field: 'latitude' },
   },
   {
     code: 'design-differs',

@@ -7,6 +7,8 @@ const REASON: Readonly<Record<ContextPart, Skipped['reason']>> = {
   lots: 'no-lots',
   lotUse: 'no-lot-use',
   design: 'no-design',
+  neighbours: 'no-register',
+  area: 'no-area',
   photos: 'no-photos',
   siblings: 'no-siblings',
 };

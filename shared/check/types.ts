@@ -27,7 +27,16 @@ export type CheckedRecord = {
 /** A rule (or a part of a rule's context) that did not run, and why. */
 export type Skipped = {
   readonly code: string;
-  readonly reason: 'off' | 'no-time' | 'no-lots' | 'no-lot-use' | 'no-design' | 'no-photos' | 'no-siblings';
+  readonly reason:
+    | 'off'
+    | 'no-time'
+    | 'no-lots'
+    | 'no-lot-use'
+    | 'no-design'
+    | 'no-register'
+    | 'no-area'
+    | 'no-photos'
+    | 'no-siblings';
 };
 
 export type CheckResult = {

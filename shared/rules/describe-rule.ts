@@ -14,7 +14,11 @@ type Case = {
 type Expected = Partial<Omit<FindingDraft, 'source' | 'params'>> & {
   readonly params?: Readonly<Record<string, unknown>>;
 };
-type Invalid = Case & { readonly expected: readonly Expected[] };
+type Invalid = Case & {
+  readonly expected: readonly Expected[];
+  /** Decimals to which numbers must agree; 9 unless said. */
+  readonly digits?: number;
+};
 
 const run = (rule: LineRule, { line, context, params }: Case): readonly FindingDraft[] =>
   rule.check(lineOf(line), params ?? ruleSetting(DEMO_STANDARD, rule.code)?.params ?? {}, {
@@ -22,8 +26,8 @@ const run = (rule: LineRule, { line, context, params }: Case): readonly FindingD
     ...context,
   });
 
-const near = (value: unknown): unknown =>
-  typeof value === 'number' ? (expect.closeTo(value, 9) as unknown) : value;
+const near = (value: unknown, digits: number): unknown =>
+  typeof value === 'number' ? (expect.closeTo(value, digits) as unknown) : value;
 
 /** Lines that meet the rule, and lines that do not with what is expected of their findings, in order. */
 export const describeRule = (
@@ -38,7 +42,9 @@ export const describeRule = (
       const drafts = run(rule, one);
       expect(drafts).toHaveLength(one.expected.length);
       one.expected.forEach((expected, index) => {
-        const wanted = Object.fromEntries(Object.entries(expected).map(([key, value]) => [key, near(value)]));
+        const wanted = Object.fromEntries(
+          Object.entries(expected).map(([key, value]) => [key, near(value, one.digits ?? 9)]),
+        );
         expect(drafts[index]).toMatchObject(wanted);
       });
     });

@@ -35,6 +35,9 @@ import { notOnOrder } from './not-on-order/rule.ts';
 import { padSlope } from './pad-slope/rule.ts';
 import { photoMissing } from './photo-missing/rule.ts';
 import { plumbOut } from './plumb-out/rule.ts';
+import { positionOff } from './position-off/rule.ts';
+import { positionOutside } from './position-outside/rule.ts';
+import { positionShared } from './position-shared/rule.ts';
 import { pourNone } from './pour-none/rule.ts';
 import { pourOrphan } from './pour-orphan/rule.ts';
 import { productMixed } from './product-mixed/rule.ts';
@@ -82,6 +85,9 @@ export const RULES: readonly Rule[] = [
   gapAgainstLean,
   gapPlane,
   padSlope,
+  positionOff,
+  positionShared,
+  positionOutside,
   notOnOrder,
   doneTwice,
   designDiffers,

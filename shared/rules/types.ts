@@ -1,3 +1,4 @@
+import type { GeoArea } from '#shared/calc/geo-area.ts';
 import type { Derived, FieldValues, Kind, Scalar, SourceRow } from '#shared/records/types.ts';
 import type { Finding, Params, Severity } from '#shared/findings/types.ts';
 import type { Product, Standard } from '#shared/standard/types.ts';
@@ -40,6 +41,10 @@ export type CheckContext = {
   readonly lots: readonly LotFact[] | null;
   readonly lotUse: readonly LotUse[] | null;
   readonly design: readonly DesignFact[] | null;
+  /** Structures of the register, and of the batch's lines that stand, near its lines. */
+  readonly neighbours: readonly NeighbourFact[] | null;
+  /** The work order's area, or that it has none. */
+  readonly area: GeoArea | 'none' | null;
   /** Photographs by the key of shared/records/structure-key.ts `lineKey`: `kind|STRUCTURE|occurrence`. */
   readonly photos: ReadonlyMap<string, readonly PhotoFact[]> | null;
   /** Approved lines of earlier revisions of this batch, by `kindKey`: `kind|STRUCTURE`. */
@@ -90,6 +95,15 @@ export type DesignFact = {
   readonly embedmentFt: number | null;
   readonly latitude: number | null;
   readonly longitude: number | null;
+};
+
+export type NeighbourFact = {
+  readonly structureNumber: string;
+  readonly latitude: number;
+  readonly longitude: number;
+  readonly accuracyFt: number;
+  /** The batch's own contractor put it there: its name may be told. */
+  readonly own: boolean;
 };
 
 /** A rework or repair of a line (2, 3 …) as its row of the Events sheet tells it. Event 1 is the line's own row. */
@@ -153,7 +167,15 @@ export type BatchView = {
 };
 
 /** Parts of the context that may be unknown. */
-export type ContextPart = 'asOfMs' | 'lots' | 'lotUse' | 'design' | 'photos' | 'siblings';
+export type ContextPart =
+  | 'asOfMs'
+  | 'lots'
+  | 'lotUse'
+  | 'design'
+  | 'neighbours'
+  | 'area'
+  | 'photos'
+  | 'siblings';
 
 type RuleBase = {
   readonly code: string;

@@ -1,4 +1,5 @@
 import type { RowInput } from '#server/workbook/write-workbook.ts';
+import { placeOf } from './place.ts';
 import { pourRow } from './set-row.ts';
 
 const PLACE: RowInput = {
@@ -24,8 +25,7 @@ export function straightenRow(structureNumber: string, values: RowInput = {}): R
     pulledAt: '2026-04-14T09:30',
     releasedAt: '2026-04-14T10:20',
     reattachedAt: '2026-04-14T11:00',
-    latitude: 41.25,
-    longitude: -97.5,
+    ...placeOf(structureNumber),
     ...PLACE,
     ...values,
   };
@@ -48,8 +48,7 @@ export function relevelRow(structureNumber: string, values: RowInput = {}): RowI
     raisedAt: '2026-04-14T09:30',
     loweredAt: '2026-04-14T10:10',
     releasedAt: '2026-04-14T10:30',
-    latitude: 41.25,
-    longitude: -97.5,
+    ...placeOf(structureNumber),
     ...PLACE,
     ...values,
   };

@@ -1,4 +1,5 @@
 import type { RowInput } from '#server/workbook/write-workbook.ts';
+import { placeOf } from './place.ts';
 
 /**
  * A set pole that meets every rule: 40 ft class 4 taped, 20 in bore, 6 ft deep in soil (6.0 ft due), poured with 9.5 ft³
@@ -24,8 +25,7 @@ export function setRow(structureNumber: string, values: RowInput = {}): RowInput
     letGoAt: '2026-04-14T10:05',
     hardwareAt: '2026-04-14T11:00',
     loadAt: '2026-04-15T08:00',
-    latitude: 41.25,
-    longitude: -97.5,
+    ...placeOf(structureNumber),
     accuracyFt: 5,
     locateTicket: 'LT-1',
     locateFrom: '2026-04-10',

@@ -2,6 +2,7 @@ import type { EntityManager } from '@mikro-orm/postgresql';
 import { insertRows, insertRowsReturning } from '#server/db/insert-rows.ts';
 import { row } from '#server/db/rows.ts';
 import type { Kind } from '#shared/records/types.ts';
+import { placeOf } from './place.ts';
 import { unique } from './unique.ts';
 
 export type PlannedStructure = {
@@ -10,15 +11,13 @@ export type PlannedStructure = {
   design?: Readonly<Record<string, unknown>>;
 };
 
-/** A 40 ft class 4 pole in soil, somewhere in open country. */
-export const DESIGN = {
+/** A 40 ft class 4 pole in soil; each stands where its number has it. */
+const DESIGN = {
   poleLengthFt: 40,
   poleClass: '4',
   poleMaterial: 'southern-pine',
   ground: 'soil',
   embedmentFt: null,
-  latitude: 41.25,
-  longitude: -97.5,
 };
 
 export type WorkOrder = { id: string; number: string; contractorId: string };
@@ -50,7 +49,7 @@ export async function createWorkOrder(
       work_order_id: made.id,
       structure_id: idOf.get(each.structureNumber),
       kind: each.kind ?? 'set',
-      design: { ...DESIGN, ...each.design },
+      design: { ...DESIGN, ...placeOf(each.structureNumber), ...each.design },
     })),
   );
   return made;

@@ -10,6 +10,8 @@ export type Expected = Partial<
 export type Line = {
   readonly values?: RowInput;
   readonly pours?: (structure: string) => readonly RowInput[];
+  /** What the design list says of it otherwise. */
+  readonly planned?: Readonly<Record<string, number>>;
 };
 export type RuleCase = {
   readonly code: string;
@@ -30,6 +32,21 @@ export const OTHER_LOT = 'LOT-20';
 export const EXPIRED_LOT = 'LOT-OLD';
 export const HELD_LOT = 'LOT-HELD';
 export const SCARCE_LOT = 'LOT-FEW';
+/** Where a structure of another contractor is on record. */
+export const TAKEN_PLACE = { latitude: 41, longitude: -98.7 };
+/** The work order's area, as GeoJSON: 96 to 99° west, 40 to 43° north. */
+export const AREA = {
+  type: 'Polygon',
+  coordinates: [
+    [
+      [-99, 40],
+      [-96, 40],
+      [-96, 43],
+      [-99, 43],
+      [-99, 40],
+    ],
+  ],
+};
 export const kits =
   (...sizes: number[]) =>
   (structure: string) =>

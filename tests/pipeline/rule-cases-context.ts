@@ -1,5 +1,5 @@
 import { pourRow } from '#tests/factories/set-row.ts';
-import { EXPIRED_LOT, HELD_LOT, LOT, SCARCE_LOT, type RuleCase } from './rule-case.ts';
+import { EXPIRED_LOT, HELD_LOT, LOT, SCARCE_LOT, TAKEN_PLACE, type RuleCase } from './rule-case.ts';
 
 const lots =
   (lot: string, kitFt3 = 8) =>
@@ -43,5 +43,43 @@ export const CONTEXT_CASES: readonly RuleCase[] = [
       expected: { measured: 2, limit: null, margin: null, unit: 'count', severity: 'query' },
     },
     passes: { pours: lots(SCARCE_LOT) },
+  },
+  {
+    // 0.001° of latitude at 41° north are 364.3501 ft (GeographicLib); less 5 ft of accuracy.
+    code: 'position-off',
+    fails: {
+      values: { latitude: 41.001, longitude: -98.5 },
+      planned: { latitude: 41, longitude: -98.5 },
+      expected: { measured: 359.3501, limit: 15, margin: -344.3501, unit: 'ft', severity: 'query' },
+    },
+    passes: {
+      values: { latitude: 41.00005, longitude: -98.6 },
+      planned: { latitude: 41, longitude: -98.6 },
+    },
+  },
+  {
+    // Where another structure is on record, put there by another contractor, 5 ft of accuracy on either side.
+    code: 'position-shared',
+    fails: {
+      values: TAKEN_PLACE,
+      planned: TAKEN_PLACE,
+      expected: { measured: 0, limit: 3, margin: -3, unit: 'ft', severity: 'query' },
+    },
+    passes: {
+      values: { ...TAKEN_PLACE, longitude: -98.701 },
+      planned: { ...TAKEN_PLACE, longitude: -98.701 },
+    },
+  },
+  {
+    code: 'position-outside',
+    fails: {
+      values: { latitude: 43.5, longitude: -97.5 },
+      planned: { latitude: 43.5, longitude: -97.5 },
+      expected: { measured: '43.5, -97.5', limit: null, margin: null, field: 'latitude' },
+    },
+    passes: {
+      values: { latitude: 43, longitude: -97.5 },
+      planned: { latitude: 43, longitude: -97.5 },
+    },
   },
 ];

@@ -170,10 +170,10 @@ export const RULE_CASES: readonly RuleCase[] = [
     passes: { values: { structureUse: 'Dead-end' } },
   },
   {
-    // A latitude ends at the pole: 90°.
+    // A brand is looked for from 10 ft below grade to 30 ft above it.
     code: 'record-range',
-    fails: { values: { latitude: 91 }, expected: { field: 'latitude', measured: 91, limit: 90 } },
-    passes: { values: { latitude: 90 } },
+    fails: { values: { brandHeightFt: 31 }, expected: { field: 'brandHeightFt', measured: 31, limit: 30 } },
+    passes: { values: { brandHeightFt: 30 } },
   },
 ];
 

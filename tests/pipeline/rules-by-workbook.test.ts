@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { run } from '#server/db/rows.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 import type { Kind } from '#shared/records/types.ts';
 import { createLot } from '#tests/factories/foam.ts';
@@ -6,7 +7,8 @@ import { startBatch, uploadPhotographs, uploadWorkbook } from '#tests/factories/
 import { pourRow, pourRows, SET_VIEWS, setRow } from '#tests/factories/set-row.ts';
 import { createWorkSite } from '#tests/factories/work-site.ts';
 import { createHarness, type Harness } from '#tests/setup/api-harness.ts';
-import { poursOf, rowOf, type Expected, LOT } from './rule-case.ts';
+import { createOnRecord } from './on-record.ts';
+import { AREA, TAKEN_PLACE, poursOf, rowOf, type Expected, LOT } from './rule-case.ts';
 import { createOtherFoam } from './other-foam.ts';
 import { CONTEXT_CASES } from './rule-cases-context.ts';
 import { MEASURE_CASES } from './rule-cases-measures.ts';
@@ -47,13 +49,18 @@ const near = (expected: Expected) =>
 
 beforeAll(async () => {
   harness = await createHarness();
-  const cases = CASES.flatMap(({ kind, bad, good }) => [
-    { kind, structureNumber: bad },
-    { kind, structureNumber: good },
+  const cases = CASES.flatMap(({ kind, bad, good, fails, passes }) => [
+    { kind, structureNumber: bad, design: fails.planned ?? {} },
+    { kind, structureNumber: good, design: passes.planned ?? {} },
   ]);
   const site = await createWorkSite(harness, { planned: [...cases, TWICE, PHOTOGRAPHED, PARTLY] });
   await createLot(harness.em(), { productId: site.product.id, number: LOT });
   await createOtherFoam(harness.em(), site.product.id);
+  await run(harness.em(), 'update work_orders set area = $2 where id = $1', [
+    site.order.id,
+    JSON.stringify(AREA),
+  ]);
+  await createOnRecord(harness, { structureNumber: 'ELSEWHERE-1', ...TAKEN_PLACE });
   const contractor = await harness.signIn(site.contractor);
   const batch = await startBatch(contractor, site);
   await uploadPhotographs(contractor, batch, [

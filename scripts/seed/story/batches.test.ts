@@ -47,6 +47,8 @@ async function findingsOf(workOrder: string, lines: readonly StoryLine[]): Promi
     design: WORK_ORDERS.find((order) => order.number === workOrder)!.planned.map(
       ({ structureNumber, kind, design }) => ({ structureNumber, kind, ...design }),
     ),
+    neighbours: [],
+    area: 'none',
     photos,
     siblings: new Set(),
   };

@@ -1,10 +1,12 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { row } from '#server/db/rows.ts';
+import { geoAreaOf } from '#shared/calc/geo-area.ts';
 import type { SourceBatch } from '#shared/records/types.ts';
 import type { CheckContext } from '#shared/rules/types.ts';
 import { loadDesign } from './load-design.ts';
 import { loadLines, type KnownLines } from './load-lines.ts';
 import { loadLots, loadLotUse, type LotRow } from './load-lots.ts';
+import { loadNeighbours } from './load-neighbours.ts';
 import { loadPhotos } from './load-photos.ts';
 import { loadProducts, loadStandards } from './load-versions.ts';
 import { placePhotos, type Placing } from './place-photos.ts';
@@ -26,9 +28,9 @@ export async function loadContext(
   run: StartedRun,
   source: SourceBatch,
 ): Promise<LoadedContext> {
-  const order = await row<{ number: string; zone: string; first_submitted: string | null }>(
+  const order = await row<{ number: string; zone: string; area: unknown; first_submitted: string | null }>(
     em,
-    `select w.number, w.zone, (
+    `select w.number, w.zone, w.area, (
        select v.submitted_at from revisions v where v.batch_id = $2 and v.n = 0
      ) as first_submitted from work_orders w where w.id = $1`,
     [run.workOrderId, run.batchId],
@@ -41,6 +43,7 @@ export async function loadContext(
   const lots = await loadLots(em);
   const lotUse = await loadLotUse(em, run);
   const design = await loadDesign(em, run.workOrderId);
+  const neighbours = await loadNeighbours(em, { ...run, source });
   const lines = await loadLines(em, run.batchId);
   const placing = placePhotos({ photos: await loadPhotos(em, run.batchId), source, known: lines });
   return {
@@ -53,6 +56,9 @@ export async function loadContext(
       lots: lots.map(({ id: _id, ...lot }) => lot),
       lotUse,
       design,
+      neighbours,
+      // An area that is no polygon is not known: the rule says that it did not run.
+      area: order.area === null ? 'none' : geoAreaOf(order.area),
       photos: placing.byLine,
       siblings: lines.standing,
     },
