@@ -18,8 +18,19 @@ describe('validator', () => {
     expect(check({ 'a/b': 'one', other: 1 }, 10)).toEqual([
       { pointer: '/kind', code: 'required', detail: 'This is missing.' },
       { pointer: '/other', code: 'additionalProperties', detail: 'This name is not known here.' },
-      { pointer: '/a~1b', code: 'type', detail: 'It must be integer.' },
+      { pointer: '/a~1b', code: 'type', detail: 'Write a whole number.' },
     ]);
+  });
+
+  it.each([
+    [{ type: 'string', format: 'email' }, 'no address', 'Write an e-mail address, as name@company.example.'],
+    [{ type: 'string', minLength: 1 }, '', 'This is blank. Write something.'],
+    [{ type: 'string', pattern: '\\S' }, '  ', 'This is blank. Write something.'],
+    [{ type: 'string', maxLength: 3 }, 'four', 'This is too long: at most 3 characters.'],
+    [{ type: 'number', minimum: 2 }, 1, 'This must be at least 2.'],
+    [{ type: 'number', exclusiveMinimum: 0 }, 0, 'This must be more than 0.'],
+  ])('says what to write: %j', (schema, value, detail) => {
+    expect(validator.body(schema)(value, 10)).toMatchObject([{ detail }]);
   });
 
   it('stops at the first fault of a large body', () => {

@@ -2,6 +2,7 @@ import { readdirSync, readFileSync } from 'node:fs';
 import { Ajv2020, type ErrorObject, type ValidateFunction } from 'ajv/dist/2020.js';
 import addFormatsModule from 'ajv-formats';
 import type { JsonSchema } from '#server/http/define-route.ts';
+import { faultSentence } from '#server/http/fault-sentence.ts';
 import type { ProblemError } from '#server/http/problem.ts';
 
 const API_SCHEMAS = new URL('../../schemas/api/', import.meta.url);
@@ -79,16 +80,5 @@ function toProblemError(error: ErrorObject, prefix: string): ProblemError {
     named === null
       ? error.instancePath
       : `${error.instancePath}/${named.replaceAll('~', '~0').replaceAll('/', '~1')}`;
-  return { pointer: `${prefix}${pointer}`, code: error.keyword, detail: sentence(error) };
-}
-
-function sentence(error: ErrorObject): string {
-  if (error.keyword === 'required') return 'This is missing.';
-  if (error.keyword === 'additionalProperties') return 'This name is not known here.';
-  if (error.keyword === 'enum') {
-    const allowed = error.params.allowedValues as unknown[];
-    return `Must be one of: ${allowed.map(String).join(', ')}.`;
-  }
-  const message = error.message ?? 'is not right';
-  return `It ${message.startsWith('must') ? message : `must fit: ${message}`}.`;
+  return { pointer: `${prefix}${pointer}`, code: error.keyword, detail: faultSentence(error) };
 }

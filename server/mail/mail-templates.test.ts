@@ -27,13 +27,13 @@ it('says the same in plain text and in HTML', () => {
   const { subject, text, html } = renderMail('batch-returned', returned, {
     publicUrl: 'https://poles.example',
   });
-  expect(subject).toBe('Batch 17-06: 1 line returned, due 2026-05-01');
+  expect(subject).toBe('Batch 17-06: 1 line returned, due 1 May 2026');
   for (const said of [
     'P-104',
     'Fill ratio short',
     '0.93 against at least 1.00, Set!H9',
     'Rework',
-    '2026-05-01',
+    '1 May 2026',
   ]) {
     expect(text).toContain(said);
     expect(html).toContain(said);

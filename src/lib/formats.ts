@@ -1,11 +1,6 @@
-const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'] as const;
+import { formatDay } from '#shared/dates/format-day.ts';
 
-/** `2026-04-14` -> `14 Apr 2026`; what is no day stays as written. */
-export function formatDay(day: string): string {
-  const match = /^(\d{4})-(\d{2})-(\d{2})$/.exec(day);
-  const month = match && MONTHS[Number(match[2]) - 1];
-  return match && month ? `${Number(match[3])} ${month} ${match[1]}` : day;
-}
+export { formatDay };
 
 /** `2026-04-14T10:42` -> `14 Apr 2026, 10:42`, without any zone: a wall clock is shown as it was read. */
 export function formatWallClock(wall: string): string {

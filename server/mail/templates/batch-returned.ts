@@ -1,4 +1,5 @@
 import type { MailContent } from '#server/mail/content.ts';
+import { formatDay } from '#shared/dates/format-day.ts';
 
 export type ReturnedFinding = {
   readonly structureNumber: string;
@@ -29,7 +30,7 @@ export type BatchReturned = {
 
 export function batchReturned(data: BatchReturned): MailContent {
   return {
-    subject: `Batch ${data.batchNumber}: ${count(data.returned, 'line')} returned${data.dueOn === null ? '' : `, due ${data.dueOn}`}`,
+    subject: `Batch ${data.batchNumber}: ${count(data.returned, 'line')} returned${data.dueOn === null ? '' : `, due ${formatDay(data.dueOn)}`}`,
     heading: `${count(data.returned, 'line')} of batch ${data.batchNumber} came back`,
     blocks: [
       {
@@ -41,7 +42,7 @@ export function batchReturned(data: BatchReturned): MailContent {
         facts: [
           ['Work order', data.workOrder],
           ['Inspector', data.inspector],
-          ['Due', data.dueOn ?? 'no day was set'],
+          ['Due', data.dueOn === null ? 'no day was set' : formatDay(data.dueOn)],
           ['Approved', String(data.approved)],
           ['Returned', String(data.returned)],
           ['Held for a concession', String(data.held)],
@@ -55,7 +56,7 @@ export function batchReturned(data: BatchReturned): MailContent {
           row.finding,
           row.detail,
           row.due,
-          row.dueOn,
+          formatDay(row.dueOn),
           row.reason,
         ]),
       },

@@ -1,4 +1,5 @@
 import type { MailContent } from '#server/mail/content.ts';
+import { formatDay } from '#shared/dates/format-day.ts';
 
 export type ConcessionAnswered = {
   readonly concessionId: string;
@@ -19,7 +20,7 @@ export function concessionAnswered(data: ConcessionAnswered): MailContent {
     ['Structures', data.structures.join(', ')],
   ];
   if (data.condition !== null) facts.push(['Condition', data.condition]);
-  if (data.endsOn !== null) facts.push(['Ends on', data.endsOn]);
+  if (data.endsOn !== null) facts.push(['Ends on', formatDay(data.endsOn)]);
   return {
     subject: `Concession ${data.number} ${data.answer}`,
     heading: `Concession ${data.number} was ${data.answer}`,
