@@ -16,7 +16,7 @@ function formatOf(column: Column): string {
   return column.read === 'text' || column.read === 'code' ? '@' : 'General';
 }
 
-function widthOf(column: Column): number {
+export function widthOf(column: Column): number {
   if (column.key === 'notes') return 40;
   if (column.read === 'clock') return 18;
   return column.read === 'text' || column.read === 'code' ? 17 : 13;
@@ -35,7 +35,8 @@ function writeHeader(sheet: SheetWriter, columns: readonly Column[]): void {
   keys.hidden = true;
   keys.commit();
   const titles = sheet.addRow(columns.map((column) => `${column.heading}${column.required ? ' *' : ''}`));
-  titles.height = 34;
+  // Three lines: `Girth at ground line (in)` in a column for a figure.
+  titles.height = 48;
   const hints = sheet.addRow(columns.map((column) => column.description));
   hints.height = 64;
   columns.forEach((column, index) => {

@@ -2,9 +2,10 @@ import type { Writable } from 'node:stream';
 import type { AddWorksheetOptions } from 'exceljs';
 import { formatKeywords } from '#shared/workbook/keywords.ts';
 import { HEADER_ROWS, LAYOUT, type SheetLayout, TEMPLATE_VERSION } from '#shared/workbook/layout.ts';
+import { pagesAcross } from './print-pages.ts';
 import { writeGuide } from './template-guide.ts';
 import { LISTS_SHEET, templateLists, writeLists } from './template-lists.ts';
-import { prepareColumns, writeTemplateSheet } from './template-sheet.ts';
+import { prepareColumns, widthOf, writeTemplateSheet } from './template-sheet.ts';
 import { HEADLINE, HINT, LABEL, PREFILLED, TEXT } from './template-style.ts';
 import type { TemplateInput } from './template-types.ts';
 import { type SheetWriter, streamWorkbook } from './workbook-writer.ts';
@@ -84,10 +85,13 @@ export async function writeTemplate(stream: Writable, input: TemplateInput): Pro
       }
       const frozen = { state: 'frozen', xSplit: 1, ySplit: HEADER_ROWS.hints, showGridLines: false } as const;
       const printTitlesRow = `${HEADER_ROWS.titles}:${HEADER_ROWS.hints}`;
-      const sheet = writer.addWorksheet(
-        layout.name,
-        options(input, { views: [frozen], pageSetup: { printTitlesRow } }),
-      );
+      // On paper the structure's number stands on every page.
+      const printed = {
+        printTitlesRow,
+        printTitlesColumn: 'A:A',
+        fitToWidth: pagesAcross(layout.columns.map(widthOf)),
+      };
+      const sheet = writer.addWorksheet(layout.name, options(input, { views: [frozen], pageSetup: printed }));
       prepareColumns(sheet, layout);
       writeTemplateSheet(sheet, layout, { design: input.design, lists });
       sheet.commit();

@@ -1,5 +1,6 @@
 import type { Writable } from 'node:stream';
 import { serialOf, DAY_FORMAT, TIME_FORMAT } from '#server/workbook/excel-time.ts';
+import { pagesAcross } from '#server/workbook/print-pages.ts';
 import { HINT, TEXT, TITLE } from '#server/workbook/template-style.ts';
 import { streamWorkbook, type SheetWriter, type Writer } from '#server/workbook/workbook-writer.ts';
 import type { ExportColumn, ExportRow } from '#shared/export/as-built-columns.ts';
@@ -52,9 +53,10 @@ function openSheet(writer: Writer, sheet: ContentSheet, cover: Cover): SheetWrit
     pageSetup: {
       orientation: 'landscape',
       fitToPage: true,
-      fitToWidth: 1,
+      fitToWidth: pagesAcross(sheet.columns.map(widthOf)),
       fitToHeight: 0,
       printTitlesRow: '2:2',
+      printTitlesColumn: 'A:B',
       margins: { left: 0.4, right: 0.4, top: 0.6, bottom: 0.6, header: 0.3, footer: 0.3 },
     },
     headerFooter: {
@@ -70,7 +72,7 @@ function openSheet(writer: Writer, sheet: ContentSheet, cover: Cover): SheetWrit
     written,
     sheet.columns.map((column) => column.heading),
     TITLE,
-    32,
+    48,
   );
   addStyled(
     written,
