@@ -103,7 +103,7 @@ describe('a record sheet', () => {
 });
 
 describe('what changed', () => {
-  it('is told by value and by finding against the check before', async () => {
+  it('is told by value and by finding against the workbook before', async () => {
     await uploadWorkbook(harness, contractor, {
       batch,
       site,

@@ -9,9 +9,9 @@ import type { BatchChanges } from '#shared/generated/api-types.ts';
 import type { Actor } from '#shared/permissions/ability.ts';
 import { fieldTitle, RECORD_FIELDS } from '#shared/records/field-meta.ts';
 import { kindKey } from '#shared/records/structure-key.ts';
+import { chooseRuns, type FinishedRun } from './choose-runs.ts';
 import { loadRun } from './load-run.ts';
 
-type Run = { id: string; input: number; n: number };
 const NONE: BatchChanges = {
   from: null,
   to: null,
@@ -22,22 +22,27 @@ const NONE: BatchChanges = {
 };
 
 /**
- * What the newest check changed against the one before it; for the first check of a later revision, against the last of
- * the revision before, its lines alone. The owner's people see only what was handed in.
+ * What the newest check changed against the one that `chooseRuns` holds it against; against an earlier revision, its
+ * lines alone. The owner's people see only what was handed in.
  */
 export async function readChanges(
   em: EntityManager,
   options: { batch: { id: string }; actor: Actor },
 ): Promise<BatchChanges> {
-  const runs = await rows<Run>(
+  const contractor = options.actor.orgKind === 'contractor';
+  const runs = await rows<FinishedRun>(
     em,
-    `select c.id, c.input, v.n from revisions v join check_runs c on c.revision_id = v.id
+    `select c.id, c.input, v.n, (
+         select i.sha256 from inputs i
+         where i.revision_id = v.id and i.kind = 'workbook' and i.n <= c.input order by i.n desc limit 1
+       ) as workbook
+     from revisions v join check_runs c on c.revision_id = v.id
      where v.batch_id = $1 and c.state = 'done' and ($2::boolean or v.submitted_at is not null)
        and (c.counts ->> 'lines')::int > 0
-     order by v.n desc, c.input desc, c.finished_at desc limit 2`,
-    [options.batch.id, options.actor.orgKind === 'contractor'],
+     order by v.n desc, c.input desc, c.finished_at desc`,
+    [options.batch.id, contractor],
   );
-  const [to, from] = runs;
+  const { from, to } = chooseRuns(runs, { decides: !contractor });
   if (!to) return NONE;
   if (!from) return { ...NONE, to: to.input };
   const after = await loadRun(em, to.id);

@@ -41,7 +41,7 @@ const COLUMNS: readonly PlainColumn<ValueChange>[] = [
   { id: 'cell', title: 'Cell', cell: (row) => row.cell ?? '' },
 ];
 
-/** What the newest check changed against the one before. */
+/** What changed since the workbook before; while there is one only, since its first check. */
 export function ChangesPanel({ batchId }: { batchId: string }) {
   const changes = useQuery(batchChangesQuery(batchId));
   if (changes.isPending) return <Skeleton lines={4} />;
@@ -60,7 +60,7 @@ export function ChangesPanel({ batchId }: { batchId: string }) {
     items.length + added.length + removed.length + findings.gone.length + findings.new.length === 0;
   if (nothing) {
     return (
-      <EmptyState title="Nothing changed since the check before">
+      <EmptyState title="Nothing changed since the workbook before">
         The values and the findings are the same.
       </EmptyState>
     );

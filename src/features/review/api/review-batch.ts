@@ -6,4 +6,6 @@ export const reviewBatchQuery = (batchId: string) =>
   queryOptions({
     queryKey: ['review', batchId],
     queryFn: ({ signal }) => api<Batch>(`/api/batches/${batchId}`, { signal }),
+    // An administrator may hand the review to another meanwhile: whoever held it is told, and sees what is left to do.
+    refetchInterval: 20_000,
   });

@@ -2,12 +2,12 @@ import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { formatWallClock } from '#src/lib/formats.ts';
 import type { BatchChanges } from '#shared/generated/api-types.ts';
 
-/** Values that differ from the check before: both are shown. */
+/** Values that differ from the workbook before, of a later revision from the one that was decided: both are shown. */
 export function ValueChanges({ items }: { items: BatchChanges['items'] }) {
   if (items.length === 0) return null;
   return (
-    <section aria-label="Changed since the check before">
-      <SectionHead title="Changed since the check before" aside={items.length} />
+    <section aria-label="Changed since the workbook before">
+      <SectionHead title="Changed since the workbook before" aside={items.length} />
       <ul className="px-3 py-1.5 text-table">
         {items.map((item) => (
           <li

@@ -6,7 +6,7 @@ export type DeskTab = (typeof DESK_TABS)[number];
 const keyOf = ({ kind, structureNumber }: { kind: string; structureNumber: string }) =>
   `${kind}|${structureNumber}`;
 
-/** Lines with a value that differs from the check before. */
+/** Lines with a value that differs from the workbook before. */
 export function changedKeys(changes: BatchChanges | undefined): ReadonlySet<string> {
   return new Set(changes?.items.map(keyOf));
 }
