@@ -19,6 +19,15 @@ const write = (finding: Finding): string => {
   return expected === '' ? `Correct ${cellOf(finding)}.` : `Write in ${cellOf(finding)} ${expected}.`;
 };
 
+/** For what is blank: where any text will do, there is nothing more to say of it. */
+const fillIn = (finding: Finding): string => {
+  const expected = expectation(finding.params);
+  if (expected !== 'a text') return write(finding);
+  return finding.cell === null
+    ? `Fill it in on the sheet ${finding.sheet}.`
+    : `Fill in cell ${finding.cell}.`;
+};
+
 /** What stands in a cell, quoted. */
 const stands = (finding: Finding): string =>
   `${Cell(finding)} (${name(finding)}) says "${say(finding.measured, null)}"`;
@@ -30,7 +39,7 @@ export const RECORD_TEXT: ReadonlyMap<string, FindingText> = new Map<string, Fin
     {
       title: 'Not filled in',
       message: (finding) => `${name(finding)} is not filled in; every line needs it.`,
-      remedy: write,
+      remedy: fillIn,
     },
   ],
   [

@@ -78,7 +78,9 @@ function findingCan(row: FindingDbRow, { actor, ability }: { actor: Actor; abili
   const owned = { contractorId: row.contractor_id };
   const can: string[] = [];
   if (row.severity === 'note') return can;
-  if (row.open_revision_id && may(ability, 'hand-in', 'Finding', owned)) can.push('answer');
+  // No answer makes a record complete: it is not taken until the workbook is.
+  const answerable = row.severity === 'query' || !row.code.startsWith('record-');
+  if (answerable && row.open_revision_id && may(ability, 'hand-in', 'Finding', owned)) can.push('answer');
   const holds = row.revision_status === 'in-review' && row.inspector_id === actor.id;
   // A line reopened after the review closed is decided by any inspector.
   const reopened = row.revision_status === 'decided' && row.line_state === 'undecided';

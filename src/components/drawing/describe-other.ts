@@ -1,6 +1,6 @@
 import { formatNumber } from '#shared/units/format-quantity.ts';
 import { dimensionText } from './dimension-text.ts';
-import { findingText } from './finding-text.ts';
+import { findingSentence } from './finding-text.ts';
 import type { LayoutInput } from './set-layout.ts';
 import type { RelevelSection } from './relevel-section.ts';
 import type { StraightenSection } from './straighten-section.ts';
@@ -13,9 +13,7 @@ function common({ record, findings, metric }: LayoutInput): string[] {
           `${dimensionText(placedFt3, 'ft3', metric)} of foam were placed in a void of ${dimensionText(voidFt3, 'ft3', metric)}: a fill ratio of ${formatNumber(fillRatio, { fixed: true })}.`,
         ]
       : []),
-    ...findings.map(
-      (finding) => `Finding ${finding.number}: ${finding.title}; ${findingText(finding, metric)}.`,
-    ),
+    ...findings.map((finding) => findingSentence(finding, metric)),
   ];
 }
 

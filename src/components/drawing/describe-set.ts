@@ -1,7 +1,7 @@
 import { textOf } from '#shared/calc/values.ts';
 import { formatNumber } from '#shared/units/format-quantity.ts';
 import { dimensionText } from './dimension-text.ts';
-import { findingText } from './finding-text.ts';
+import { findingSentence } from './finding-text.ts';
 import { missingName } from './missing-name.ts';
 import type { SetSection } from './set-section.ts';
 import type { SheetFinding, SheetRecord } from './sheet-types.ts';
@@ -35,9 +35,7 @@ export function describeSet(
     section.bed !== null && `Below the butt lies a bed of ${ft(section.bed.heightFt)}.`,
     section.missing.length > 0 &&
       `Not given, so not drawn: ${section.missing.map(missingName).join(' ').toLowerCase()}.`,
-    ...findings.map(
-      (finding) => `Finding ${finding.number}: ${finding.title}; ${findingText(finding, metric)}.`,
-    ),
+    ...findings.map((finding) => findingSentence(finding, metric)),
   ];
   return said.filter((sentence): sentence is string => typeof sentence === 'string' && sentence !== '');
 }

@@ -7,13 +7,17 @@ import { formatQuantity } from '#shared/units/format-quantity.ts';
 const figure = (value: unknown, unit: string, metric: boolean): string | null =>
   typeof value === 'number' ? formatQuantity(value, unit, { metric }) : null;
 
+const classWords = (poleClass: unknown): string | null => {
+  if (typeof poleClass !== 'string') return null;
+  return poleClass === 'other' ? 'other class' : `cl ${poleClass}`;
+};
+
 /** `40 ft cl 4, set`: the thing in few words. */
 export function lineWords({ kind, values }: Pick<RecordRow, 'kind' | 'values'>, metric: boolean): string {
   if (kind === 'set') {
-    const pole = [
-      figure(values['poleLengthFt'], 'ft', metric),
-      typeof values['poleClass'] === 'string' ? `cl ${values['poleClass']}` : null,
-    ].filter((part) => part !== null);
+    const pole = [figure(values['poleLengthFt'], 'ft', metric), classWords(values['poleClass'])].filter(
+      (part) => part !== null,
+    );
     return [pole.join(' '), 'set'].filter(Boolean).join(', ');
   }
   if (kind === 'straighten') {

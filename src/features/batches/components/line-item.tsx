@@ -7,6 +7,7 @@ import { TextLink } from '#src/components/ui/text-link.tsx';
 import { paths } from '#src/config/paths.ts';
 import { classNames } from '#src/lib/class-names.ts';
 import { counted } from '#src/lib/formats.ts';
+import { useUnitSystem } from '#src/lib/settings/unit-system.ts';
 
 type Props = FindingActions & {
   readonly line: LineView;
@@ -19,6 +20,7 @@ type Props = FindingActions & {
 /** A line with its findings: beside each other where there is room, one under the other on a phone. */
 export function LineItem({ line, active, onActive, decided, ...actions }: Props) {
   const { record, findings } = line;
+  const metric = useUnitSystem() === 'metric';
   return (
     <article
       aria-label={`Line ${record.structureNumber}`}
@@ -46,7 +48,7 @@ export function LineItem({ line, active, onActive, decided, ...actions }: Props)
             >
               {record.structureNumber}
             </TextLink>{' '}
-            <span className="text-table text-muted">{describeLine(record)}</span>
+            <span className="text-table text-muted">{describeLine(record, metric)}</span>
           </span>
         </h3>
         <p className="ml-auto text-table text-ink-2 lg:ml-6">

@@ -11,6 +11,7 @@ import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
 import { LINE_WORDS } from '#src/components/ui/state-word.tsx';
 import { counted, formatDay } from '#src/lib/formats.ts';
+import { useUnitSystem } from '#src/lib/settings/unit-system.ts';
 import type { Batch } from '#shared/generated/api-types.ts';
 
 type Props = FindingActions & { readonly batch: Batch };
@@ -18,6 +19,7 @@ type Props = FindingActions & { readonly batch: Batch };
 /** What came back with the revision before, why, and what is due; the lines that stand below. */
 export function ReturnedPanel({ batch, ...actions }: Props) {
   const before = batch.revision.number - 1;
+  const metric = useUnitSystem() === 'metric';
   const lines = useQuery(batchLinesQuery(batch.id, before));
   const findings = useQuery(batchFindingsQuery(batch.id, before));
   const error = lines.error ?? findings.error;
@@ -44,7 +46,7 @@ export function ReturnedPanel({ batch, ...actions }: Props) {
           <h3 className="flex items-center gap-2">
             <Glyph name="cross" />
             <span className="font-semibold">{line.record.structureNumber}</span>
-            <span className="text-table text-muted">{describeLine(line.record)}</span>
+            <span className="text-table text-muted">{describeLine(line.record, metric)}</span>
           </h3>
           {line.record.decision?.reason ? (
             <p className="text-ink-2">“{line.record.decision.reason}”</p>
