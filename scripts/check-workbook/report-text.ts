@@ -18,6 +18,7 @@ const REASON: Readonly<Record<Skipped['reason'], string>> = {
   'no-area': 'the area of the work order is not known here',
   'no-photos': 'photographs are not known here',
   'no-siblings': 'earlier revisions are not known here',
+  'no-earlier-check': 'earlier checks are not known here',
 };
 
 /** Breaks a text into lines that begin at a column. */

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { canonical } from '#shared/records/canonical.ts';
+import { structureKey } from '#shared/records/structure-key.ts';
 import { RECORD_FIELDS } from '#shared/records/field-meta.ts';
 import {
   KINDS,
@@ -129,7 +130,46 @@ const CONTEXT: CheckContext = {
       ],
     ],
   ],
-  photos: new Map(),
+  photos: new Map(
+    NUMBERS.map((number) => [
+      `set|${structureKey(number)}|1`,
+      [
+        {
+          id: number,
+          fileName: 'a.jpg',
+          sha256: 'same',
+          view: 'finish',
+          facts: {
+            takenWall: '2026-04-13T10:00:00',
+            takenAtMs: null,
+            latitude: 36,
+            longitude: -97.4,
+            width: 100,
+            height: 100,
+            phash: '00ff00ff00ff00ff',
+          },
+        },
+      ],
+    ]),
+  ),
+  otherPhotos: [],
+  register: new Map([['S-2', { recordNumber: 'R-1', own: true }]]),
+  previous: new Map([
+    [
+      'set|S-1|1',
+      [
+        {
+          code: 'embedment-short',
+          field: 'embedmentFt',
+          measured: 5,
+          limit: 6,
+          unit: 'ft',
+          values: { embedmentFt: 5 },
+          pours: [],
+        },
+      ],
+    ],
+  ]),
   siblings: new Set(['set|S-2']),
 };
 

@@ -47,8 +47,16 @@ describe('a clean batch of the three kinds', () => {
       { code: 'position-shared', reason: 'no-register' },
       { code: 'position-outside', reason: 'no-area' },
       { code: 'not-on-order', reason: 'no-design' },
+      { code: 'already-on-record', reason: 'no-register' },
       { code: 'design-differs', reason: 'no-design' },
+      { code: 'changed-to-pass', reason: 'no-earlier-check' },
       { code: 'photo-missing', reason: 'no-photos' },
+      { code: 'photo-reused', reason: 'no-photos' },
+      { code: 'photo-alike', reason: 'no-photos' },
+      { code: 'photo-elsewhen', reason: 'no-photos' },
+      { code: 'photo-elsewhere', reason: 'no-photos' },
+      { code: 'photo-undated', reason: 'no-photos' },
+      { code: 'photo-small', reason: 'no-photos' },
     ]);
   });
 });

@@ -15,6 +15,9 @@ export const DEMO_CONTEXT: CheckContext = {
   design: null,
   neighbours: null,
   area: null,
+  register: null,
   photos: null,
+  otherPhotos: null,
   siblings: null,
+  previous: null,
 };

@@ -1,6 +1,7 @@
 import { expect } from 'vitest';
 import type { LotFact } from '#shared/rules/types.ts';
 import { big, small, type Failing } from './failing-lines.ts';
+import { CLEAN_LINES } from './testing.ts';
 
 const LOT: LotFact = { product: 'EP-15', number: 'L-100', expiresOn: null, status: 'in-use', history: [] };
 const OTHER: LotFact = { ...LOT, number: 'L-200' };
@@ -51,6 +52,7 @@ export const FAILING_CONTEXT: readonly Failing[] = [
   {
     code: 'position-off',
     values: { latitude: 35.101, accuracyFt: 10 },
+    context: { photos: null },
     expected: { measured: expect.closeTo(353.9843, 3), limit: 15, margin: expect.closeTo(-338.9843, 3) },
   },
   {
@@ -74,6 +76,33 @@ export const FAILING_CONTEXT: readonly Failing[] = [
       ],
     },
     expected: { measured: '35.1, -97.4', limit: null, field: 'latitude' },
+  },
+  {
+    code: 'already-on-record',
+    context: { register: new Map([['S-1', { recordNumber: 'R-000007', own: false }]]) },
+    expected: { measured: 'S-1', limit: null, params: {}, ownerParams: { recordNumber: 'R-000007' } },
+  },
+  {
+    code: 'changed-to-pass',
+    context: {
+      previous: new Map([
+        [
+          'set|S-1|1',
+          [
+            {
+              code: 'embedment-short',
+              field: 'embedmentFt',
+              measured: 5.5,
+              limit: 6,
+              unit: 'ft',
+              values: { ...CLEAN_LINES.set, embedmentFt: 5.5 },
+              pours: [big, small],
+            },
+          ],
+        ],
+      ]),
+    },
+    expected: { measured: 6, field: 'embedmentFt', params: { rule: 'embedment-short', before: 5.5 } },
   },
   {
     code: 'design-differs',

@@ -1,14 +1,17 @@
 import type { Severity } from '#shared/findings/types.ts';
 import { fieldTitle } from '#shared/records/field-meta.ts';
+import { lineKey } from '#shared/records/structure-key.ts';
 import type { SourceRow } from '#shared/records/types.ts';
 import type { BatchView, CheckContext, FindingDraft, Rule, StandardInForce } from '#shared/rules/types.ts';
 import { ruleSetting } from '#shared/standard/rule-setting.ts';
+import { changedToPass } from './changed-to-pass.ts';
 import type { PreparedLine } from './prepared.ts';
 import { recordNameOf } from './record-name.ts';
 import type { ViewedLine } from './line-view.ts';
 import type { Found } from './to-finding.ts';
 
 const UNPROVED = 'unproved';
+const CHANGED = 'changed-to-pass';
 
 type Place = { readonly line: PreparedLine | null; readonly source: SourceRow };
 
@@ -53,9 +56,10 @@ const unprovedFound = (
 /** What all rules find on one line. One `unproved` a blank cell, whichever rules needed it. */
 export const runLineRules = (
   rules: readonly Rule[],
-  { view, line, standard }: ViewedLine,
+  viewed: ViewedLine,
   context: CheckContext,
 ): readonly Found[] => {
+  const { view, line, standard } = viewed;
   const found: Found[] = [];
   const blank = new Map<string, Found>();
   const unproved = ruleSetting(standard.body, UNPROVED);
@@ -75,7 +79,33 @@ export const runLineRules = (
       blank.set(key, unprovedFound(draft.unproved, { line, source, part }, unproved.severity));
     }
   }
-  return [...found, ...blank.values()];
+  const all = [...found, ...blank.values()];
+  return [...all, ...changedFound(rules, viewed, { context, found: all })];
+};
+
+/** `changed-to-pass`: a rule that runs, is met now, and was not at an earlier check of other values. */
+const changedFound = (
+  rules: readonly Rule[],
+  { view, line, standard }: ViewedLine,
+  { context, found }: { readonly context: CheckContext; readonly found: readonly Found[] },
+): readonly Found[] => {
+  const changed = rules.find(({ code }) => code === CHANGED);
+  const setting = ruleSetting(standard.body, CHANGED);
+  if (!changed || setting?.on !== true || context.previous === null) return [];
+  const earlier = context.previous.get(lineKey(view.kind, view.structureNumber, view.occurrence)) ?? [];
+  if (earlier.length === 0) return [];
+  const failing = new Set(found.map(({ code }) => code));
+  const met = rules.filter(
+    (rule) =>
+      rule.scope === 'line' &&
+      !failing.has(rule.code) &&
+      ruleSetting(standard.body, rule.code)?.on === true &&
+      rule.needs.every((part) => context[part] !== null),
+  );
+  const titles = new Map(met.map(({ code, title }) => [code, title]));
+  return changedToPass({ view, earlier, titles }).map((draft) =>
+    toFound(changed, setting.severity, draft, { line, source: draft.source ?? view.source }),
+  );
 };
 
 /** What the rules on the whole batch find, by the standard of its last work day. */

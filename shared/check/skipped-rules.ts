@@ -9,8 +9,11 @@ const REASON: Readonly<Record<ContextPart, Skipped['reason']>> = {
   design: 'no-design',
   neighbours: 'no-register',
   area: 'no-area',
+  register: 'no-register',
   photos: 'no-photos',
+  otherPhotos: 'no-photos',
   siblings: 'no-siblings',
+  previous: 'no-earlier-check',
 };
 
 /** Rules that did not run: a part of their context is not known here, or a standard used has them off. */

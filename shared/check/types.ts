@@ -36,7 +36,8 @@ export type Skipped = {
     | 'no-register'
     | 'no-area'
     | 'no-photos'
-    | 'no-siblings';
+    | 'no-siblings'
+    | 'no-earlier-check';
 };
 
 export type CheckResult = {

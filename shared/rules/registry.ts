@@ -1,7 +1,9 @@
+import { alreadyOnRecord } from './already-on-record/rule.ts';
 import { annulusNarrow } from './annulus-narrow/rule.ts';
 import { annulusWide } from './annulus-wide/rule.ts';
 import { boreShallow } from './bore-shallow/rule.ts';
 import { brandDiffers } from './brand-differs/rule.ts';
+import { changedToPass } from './changed-to-pass/rule.ts';
 import { clockFuture } from './clock-future/rule.ts';
 import { clockOrder } from './clock-order/rule.ts';
 import { clockUnreal } from './clock-unreal/rule.ts';
@@ -33,7 +35,13 @@ import { lotUnknown } from './lot-unknown/rule.ts';
 import { loweredEarly } from './lowered-early/rule.ts';
 import { notOnOrder } from './not-on-order/rule.ts';
 import { padSlope } from './pad-slope/rule.ts';
+import { photoAlike } from './photo-alike/rule.ts';
+import { photoElsewhen } from './photo-elsewhen/rule.ts';
+import { photoElsewhere } from './photo-elsewhere/rule.ts';
 import { photoMissing } from './photo-missing/rule.ts';
+import { photoReused } from './photo-reused/rule.ts';
+import { photoSmall } from './photo-small/rule.ts';
+import { photoUndated } from './photo-undated/rule.ts';
 import { plumbOut } from './plumb-out/rule.ts';
 import { positionOff } from './position-off/rule.ts';
 import { positionOutside } from './position-outside/rule.ts';
@@ -90,10 +98,18 @@ export const RULES: readonly Rule[] = [
   positionOutside,
   notOnOrder,
   doneTwice,
+  alreadyOnRecord,
   designDiffers,
   sizeDiffers,
   locateMissing,
   locateLapsed,
   unprovedRule,
+  changedToPass,
   photoMissing,
+  photoReused,
+  photoAlike,
+  photoElsewhen,
+  photoElsewhere,
+  photoUndated,
+  photoSmall,
 ];

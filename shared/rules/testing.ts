@@ -3,7 +3,7 @@ import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
 import type { Derived, FieldValues, Kind, SourceRow } from '#shared/records/types.ts';
 import { DEMO_PRODUCT, DEMO_STANDARD } from '#shared/standard/demo.ts';
 import { clockFields } from './clock-chain.ts';
-import type { LineEvent, LineView, PhotoFact, Pour } from './types.ts';
+import type { LineEvent, LineView, OtherPhoto, PhotoFact, PhotoMeasures, Pour } from './types.ts';
 
 /** Builds what a rule looks at from the few values that its test is about. Times are of America/Chicago. */
 
@@ -20,6 +20,16 @@ const NOTHING: Derived = {
   leastAnnulusIn: null,
   poleTaped: null,
   worstReading: null,
+};
+
+const NOT_TOLD: PhotoMeasures = {
+  takenWall: null,
+  takenAtMs: null,
+  latitude: null,
+  longitude: null,
+  width: null,
+  height: null,
+  phash: null,
 };
 
 export const sourceRow = (sheet: string, row: number, values: FieldValues): SourceRow => ({
@@ -60,12 +70,20 @@ export const eventOf = (kind: Kind, event: number, values: FieldValues): LineEve
   instants: CLOCK.instants(values, clockFields(kind, event)),
 });
 
-export const photoOf = (view: string): PhotoFact => ({
+/** A photograph of a view; with `facts` (null: not measured yet) what they say and nothing else. */
+export const photoOf = (view: string, facts: Partial<PhotoMeasures> | null = null): PhotoFact => ({
   id: view,
   fileName: `${view}.jpg`,
   sha256: view.padEnd(64, '0'),
   view,
+  facts: facts && { ...NOT_TOLD, ...facts },
 });
+
+/** The same photograph in batch B-9. */
+export const otherPhotoOf = (
+  { sha256, view }: PhotoFact,
+  other: Pick<OtherPhoto, 'structureNumber' | 'own'> & { readonly phash?: string | null },
+): OtherPhoto => ({ sha256, view, batch: 'B-9', phash: null, ...other });
 
 export type PartialLine = {
   readonly kind?: Kind;

@@ -28,7 +28,47 @@ export type PhotoFact = {
   readonly fileName: string;
   readonly sha256: string;
   readonly view: string;
+  /** What was measured on it; null or absent: not yet, or the picture cannot be read. */
+  readonly facts?: PhotoMeasures | null;
 };
+
+export type PhotoMeasures = {
+  /** Wall clock of the camera, `YYYY-MM-DDTHH:mm:ss`. */
+  readonly takenWall: string | null;
+  /** UTC milliseconds, where the camera tells its offset. */
+  readonly takenAtMs: number | null;
+  readonly latitude: number | null;
+  readonly longitude: number | null;
+  readonly width: number | null;
+  readonly height: number | null;
+  /** 64-bit perceptual hash as 16 hexadecimal digits. */
+  readonly phash: string | null;
+};
+
+/** A photograph of another batch that shares its bytes, or nearly its hash, with one of this batch. */
+export type OtherPhoto = {
+  readonly sha256: string;
+  readonly phash: string | null;
+  readonly view: string;
+  readonly structureNumber: string;
+  readonly batch: string;
+  /** Handed in by the batch's own contractor. */
+  readonly own: boolean;
+};
+
+/** A rule that a line did not meet at an earlier check of its revision, with what the line said then. */
+export type EarlierFailure = {
+  readonly code: string;
+  readonly field: string | null;
+  readonly measured: number | string | null;
+  readonly limit: number | string | null;
+  readonly unit: string | null;
+  readonly values: FieldValues;
+  /** Values of its pour rows as they stood. */
+  readonly pours: readonly FieldValues[];
+};
+
+export type RegisterFact = { readonly recordNumber: string; readonly own: boolean };
 
 /** What the batch knows beside one line, as plain data prepared once a batch by set-based queries. Null: not known here, so rules that need it are skipped and say so. */
 export type CheckContext = {
@@ -47,6 +87,11 @@ export type CheckContext = {
   readonly area: GeoArea | 'none' | null;
   /** Photographs by the key of shared/records/structure-key.ts `lineKey`: `kind|STRUCTURE|occurrence`. */
   readonly photos: ReadonlyMap<string, readonly PhotoFact[]> | null;
+  readonly otherPhotos: readonly OtherPhoto[] | null;
+  /** Current *set* records of other batches, by structure key. */
+  readonly register: ReadonlyMap<string, RegisterFact> | null;
+  /** What rules found at earlier checks of this revision, by `lineKey`. */
+  readonly previous: ReadonlyMap<string, readonly EarlierFailure[]> | null;
   /** Approved lines of earlier revisions of this batch, by `kindKey`: `kind|STRUCTURE`. */
   readonly siblings: ReadonlySet<string> | null;
 };
@@ -174,8 +219,11 @@ export type ContextPart =
   | 'design'
   | 'neighbours'
   | 'area'
+  | 'register'
   | 'photos'
-  | 'siblings';
+  | 'otherPhotos'
+  | 'siblings'
+  | 'previous';
 
 type RuleBase = {
   readonly code: string;

@@ -181,7 +181,7 @@ describe('photographs', () => {
     await harness.drain();
     const { body } = await contractor.get(`${batch.path}/photos`);
     expect(body.items).toMatchObject([
-      { fileName: 'L-1 kits.jpg', state: 'ready', problem: null, width: 64, height: 48 },
+      { fileName: 'L-1 kits.jpg', state: 'ready', problem: null, width: 1000, height: 750 },
       { fileName: 'L-1 plumb.jpg', state: 'unreadable', problem: expect.stringMatching(/damaged/u) },
     ]);
     // Photographs before the first workbook: nothing is checked yet, and nothing is wrong.

@@ -26,8 +26,15 @@ const recordIds = async (of: HandedIn): Promise<Record<string, string>> => {
 async function review(of: HandedIn): Promise<void> {
   await inspector.post(`/api/batches/${of.id}/take`);
   const found = await inspector.get(`/api/batches/${of.id}/findings`);
-  for (const finding of found.body.items)
-    await inspector.post(`/api/findings/${finding.id}/concession`).send({ reason: 'Rock at 5.5 ft.' });
+  for (const finding of found.body.items) {
+    if (finding.code !== 'already-on-record')
+      await inspector.post(`/api/findings/${finding.id}/concession`).send({ reason: 'Rock at 5.5 ft.' });
+    else
+      await inspector
+        .put(`/api/findings/${finding.id}/decision`)
+        .set('If-Match', `"${finding.version}"`)
+        .send({ decision: 'approve', grounds: 'evidence', reason: 'The same pole, measured again.' });
+  }
   await inspector.post(`/api/batches/${of.id}/approve-clean`);
   const closed = await inspector.post(`/api/batches/${of.id}/close-review`);
   if (closed.status !== 200) throw new Error(closed.text);
@@ -203,6 +210,7 @@ describe('a transmittal', () => {
     expect(rowsOf(book.Sheets['Pours'])).toHaveLength(4);
     const findings = rowsOf(book.Sheets['Findings']);
     expect(findings).toMatchObject([
+      { recordNumber: 'R-000001', code: 'already-on-record', grounds: 'evidence' },
       {
         recordNumber: 'R-000002',
         code: 'embedment-short',
@@ -212,7 +220,7 @@ describe('a transmittal', () => {
         concession: 'C-0001',
       },
     ]);
-    expect(findings[0]?.['condition']).toBe(`'=HYPERLINK("x")`);
+    expect(findings[1]?.['condition']).toBe(`'=HYPERLINK("x")`);
     const cover = utils.sheet_to_json<unknown[]>(book.Sheets['Cover'] as WorkSheet, { header: 1 });
     const said = Object.fromEntries(cover.map(([key, , value]) => [key, value]));
     expect(said).toMatchObject({

@@ -22,11 +22,26 @@ async function findingsOf(workOrder: string, lines: readonly StoryLine[]): Promi
   const file = path.join(folder, `${lines[0]!.structureNumber}-${lines.length}.xlsx`);
   writeFileSync(file, (await makeWorkbook(rows, 'story.xlsx')).bytes);
   const photos = new Map<string, PhotoFact[]>();
-  for (const { fileName, subject } of rows.photographs) {
+  for (const { fileName, subject, capture } of rows.photographs) {
     const key = `set|${subject.structureNumber}|1`;
     photos.set(key, [
       ...(photos.get(key) ?? []),
-      { id: fileName, fileName, sha256: fileName, view: subject.view },
+      {
+        id: fileName,
+        fileName,
+        sha256: fileName,
+        view: subject.view,
+        // As they are drawn: draw-photograph.ts.
+        facts: {
+          takenWall: capture.takenAt,
+          takenAtMs: Date.parse(`${capture.takenAt}${capture.offset}`),
+          latitude: capture.latitude,
+          longitude: capture.longitude,
+          width: 1600,
+          height: 1200,
+          phash: null,
+        },
+      },
     ]);
   }
   const context: CheckContext = {
@@ -50,6 +65,9 @@ async function findingsOf(workOrder: string, lines: readonly StoryLine[]): Promi
     neighbours: [],
     area: 'none',
     photos,
+    otherPhotos: [],
+    register: new Map(),
+    previous: new Map(),
     siblings: new Set(),
   };
   const { findings } = checkBatch(readSource(await readWorkbookFile(file)), context);

@@ -4,10 +4,12 @@ import { geoAreaOf } from '#shared/calc/geo-area.ts';
 import type { SourceBatch } from '#shared/records/types.ts';
 import type { CheckContext } from '#shared/rules/types.ts';
 import { loadDesign } from './load-design.ts';
+import { loadEarlierFailures } from './load-earlier-failures.ts';
 import { loadLines, type KnownLines } from './load-lines.ts';
 import { loadLots, loadLotUse, type LotRow } from './load-lots.ts';
 import { loadNeighbours } from './load-neighbours.ts';
-import { loadPhotos } from './load-photos.ts';
+import { loadOtherPhotos, loadPhotos } from './load-photos.ts';
+import { loadRegister } from './load-register.ts';
 import { loadProducts, loadStandards } from './load-versions.ts';
 import { placePhotos, type Placing } from './place-photos.ts';
 import type { StartedRun } from './start-run.ts';
@@ -44,6 +46,9 @@ export async function loadContext(
   const lotUse = await loadLotUse(em, run);
   const design = await loadDesign(em, run.workOrderId);
   const neighbours = await loadNeighbours(em, { ...run, source });
+  const register = await loadRegister(em, { ...run, source });
+  const otherPhotos = await loadOtherPhotos(em, run);
+  const previous = await loadEarlierFailures(em, run);
   const lines = await loadLines(em, run.batchId);
   const placing = placePhotos({ photos: await loadPhotos(em, run.batchId), source, known: lines });
   return {
@@ -59,8 +64,11 @@ export async function loadContext(
       neighbours,
       // An area that is no polygon is not known: the rule says that it did not run.
       area: order.area === null ? 'none' : geoAreaOf(order.area),
+      register,
       photos: placing.byLine,
+      otherPhotos,
       siblings: lines.standing,
+      previous,
     },
     lots,
     placing,

@@ -7,7 +7,7 @@ import type { NeighbourFact } from '#shared/rules/types.ts';
 const PER_DEGREE = 100;
 
 /**
- * Structures on record near the lines of a workbook, and those of its batch that stand from an earlier revision: one
+ * Structures on record, still standing, near the lines of a workbook, and those of its batch that stand from an earlier revision: one
  * query, however many lines.
  */
 export function loadNeighbours(
@@ -21,6 +21,7 @@ export function loadNeighbours(
      known as (
        select v.structure_number, v.latitude, v.longitude, v.contractor_id, v.record_id
        from register_current c join register_versions v on v.id = c.version_id
+       join structures s on s.id = c.structure_id and s.retired_at is null
        union all
        select r.structure_number, r.latitude, r.longitude, r.contractor_id, r.id
        from lines l join records r on r.id = l.record_id

@@ -46,7 +46,8 @@ export function placePhotos(options: {
     const place = stays ? before : (bySheet.get(nameKey(photo.fileName)) ?? placeByName(photo, byName));
     if (!stays && !samePlace(before, place)) changes.push({ photo, place });
     if (!place) continue;
-    const fact = { id: photo.id, fileName: photo.fileName, sha256: photo.sha256, view: place.view };
+    const { id, fileName, sha256, facts } = photo;
+    const fact = { id, fileName, sha256, view: place.view, facts };
     byLine.set(place.lineKey, [...(byLine.get(place.lineKey) ?? []), fact]);
   }
   return { byLine, changes };

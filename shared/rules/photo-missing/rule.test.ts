@@ -2,7 +2,7 @@ import { describeRule } from '../describe-rule.ts';
 import { photoOf } from '../testing.ts';
 import { photoMissing } from './rule.ts';
 
-const photos = (...views: string[]) => views.map(photoOf);
+const photos = (...views: string[]) => views.map((view) => photoOf(view));
 
 describeRule(photoMissing, {
   valid: [

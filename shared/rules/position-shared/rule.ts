@@ -1,3 +1,4 @@
+import { byText } from '#shared/records/canonical.ts';
 import { structureKey } from '#shared/records/structure-key.ts';
 import { say } from '#shared/findings/say.ts';
 import { belowLimit } from '../against-limit.ts';
@@ -38,8 +39,9 @@ const ofNeighbour = (fact: NeighbourFact): Point<Structure> => ({
   of: { key: structureKey(fact.structureNumber), name: fact.structureNumber, line: null, own: fact.own },
 });
 
+/** An order that rows have no say in: which of two equally near ones is told must not hang on them. */
 const byName = (a: Point<Structure>, b: Point<Structure>): number =>
-  a.of.key < b.of.key ? -1 : a.of.key > b.of.key ? 1 : 0;
+  byText(a.of.key, b.of.key) || byText(a.of.name, b.of.name);
 
 export const positionShared: BatchRule = {
   code: 'position-shared',
