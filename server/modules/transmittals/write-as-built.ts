@@ -5,6 +5,7 @@ import { HINT, TEXT, TITLE } from '#server/workbook/template-style.ts';
 import { streamWorkbook, type SheetWriter, type Writer } from '#server/workbook/workbook-writer.ts';
 import type { ExportColumn, ExportRow } from '#shared/export/as-built-columns.ts';
 import { neutral } from '#shared/export/csv.ts';
+import { columnWidth, numberFormat, rowHeight, wraps } from './as-built-layout.ts';
 import { writeCover, type Cover } from './write-cover.ts';
 import type { ContentSheet } from './read-content.ts';
 
@@ -53,7 +54,7 @@ function openSheet(writer: Writer, sheet: ContentSheet, cover: Cover): SheetWrit
     pageSetup: {
       orientation: 'landscape',
       fitToPage: true,
-      fitToWidth: pagesAcross(sheet.columns.map(widthOf)),
+      fitToWidth: pagesAcross(sheet.columns.map(columnWidth)),
       fitToHeight: 0,
       printTitlesRow: '2:2',
       printTitlesColumn: 'A:B',
@@ -64,7 +65,7 @@ function openSheet(writer: Writer, sheet: ContentSheet, cover: Cover): SheetWrit
       oddFooter: `&L${cover.owner.replaceAll('&', '&&')}&RPage &P of &N`,
     },
   });
-  written.columns = sheet.columns.map((column) => ({ width: widthOf(column) }));
+  written.columns = sheet.columns.map((column) => ({ width: columnWidth(column) }));
   const keys = written.addRow(sheet.columns.map((column) => column.key));
   keys.hidden = true;
   keys.commit();
@@ -90,19 +91,21 @@ function addStyled(sheet: SheetWriter, cells: readonly string[], style: object, 
   row.commit();
 }
 
-const widthOf = (column: ExportColumn): number =>
-  column.key === 'sentence' || column.key === 'reason' || column.key === 'notes'
-    ? 48
-    : Math.min(26, Math.max(11, column.heading.length + 2));
-
 function writeRow(sheet: SheetWriter, columns: readonly ExportColumn[], values: ExportRow): void {
   const row = sheet.addRow(columns.map((column) => cellOf(column, values[column.key])));
+  const wrapped: { text: string; width: number }[] = [];
   columns.forEach((column, index) => {
-    if (column.type === 'clock') row.getCell(index + 1).numFmt = TIME_FORMAT;
-    if (column.type === 'day') row.getCell(index + 1).numFmt = DAY_FORMAT;
-    if (column.key === 'sentence' || column.key === 'reason')
-      row.getCell(index + 1).alignment = TEXT.alignment ?? {};
+    const value = values[column.key];
+    const cell = row.getCell(index + 1);
+    cell.alignment = { vertical: 'top', ...(wraps(column) ? TEXT.alignment : {}) };
+    if (column.type === 'clock') cell.numFmt = TIME_FORMAT;
+    if (column.type === 'day') cell.numFmt = DAY_FORMAT;
+    const format = typeof value === 'number' ? numberFormat(column.key, value) : null;
+    if (format !== null) cell.numFmt = format;
+    if (wraps(column) && typeof value === 'string') wrapped.push({ text: value, width: columnWidth(column) });
   });
+  const height = rowHeight(wrapped);
+  if (height !== undefined) row.height = height;
   row.commit();
 }
 

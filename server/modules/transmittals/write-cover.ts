@@ -1,5 +1,6 @@
 import { HEADLINE, LABEL, SUBHEAD, TEXT } from '#server/workbook/template-style.ts';
 import type { Writer } from '#server/workbook/workbook-writer.ts';
+import { rowHeight } from './as-built-layout.ts';
 import { neutral } from '#shared/export/csv.ts';
 
 export type Cover = {
@@ -17,6 +18,8 @@ export type Cover = {
   readonly digest: string;
 };
 
+const VALUE_WIDTH = 76;
+
 /** Keys in column A (hidden), titles in B, values in C: a program reads the cover as it reads the other sheets. */
 export function writeCover(writer: Writer, cover: Cover): void {
   const sheet = writer.addWorksheet('Cover', {
@@ -24,11 +27,14 @@ export function writeCover(writer: Writer, cover: Cover): void {
     pageSetup: { orientation: 'portrait', fitToPage: true, fitToWidth: 1, fitToHeight: 1 },
     headerFooter: { oddFooter: `&L${cover.number} revision ${cover.revision}&RPage &P of &N` },
   });
-  sheet.columns = [{ width: 14, hidden: true }, { width: 30 }, { width: 76 }];
+  sheet.columns = [{ width: 14, hidden: true }, { width: 34 }, { width: VALUE_WIDTH }];
   const add = (key: string, title: string, value: string | number | null, style: object = TEXT) => {
     const row = sheet.addRow([key, title, typeof value === 'string' ? neutral(value) : value]);
     row.getCell(2).style = value === null ? style : LABEL;
     row.getCell(3).style = { ...style, alignment: { horizontal: 'left', vertical: 'top', wrapText: true } };
+    // A heading stands clear of what is above it.
+    const height = value === null ? 30 : rowHeight([{ text: String(value), width: VALUE_WIDTH }]);
+    if (height !== undefined) row.height = height;
     row.commit();
   };
   add('', `As-built ${cover.number}`, null, HEADLINE);
@@ -37,7 +43,7 @@ export function writeCover(writer: Writer, cover: Cover): void {
   add('revision', 'Revision', cover.revision);
   add('title', 'Title', cover.title);
   add('scope', 'Scope', cover.scope);
-  add('issuedAt', 'Issued at (UTC)', cover.issuedAt);
+  add('issuedAt', 'Issued at (UTC)', cover.issuedAt.slice(0, 16).replace('T', ' '));
   add('issuedBy', 'Issued by', cover.issuedBy);
   add('standards', 'Standard, versions', cover.standards.join(', '));
   add('', 'What is in it', null, SUBHEAD);
