@@ -11,6 +11,8 @@ it('a row is as high as its longest wrapped text: 15 pt a line', () => {
 
 it('two digits for what was computed, all for what was read', () => {
   expect(numberFormat('fillRatio', 0.7932556412)).toBe('0.00');
+  // 0.1 + 0.2 as a double is no reading of seventeen digits.
+  expect(numberFormat('waterWithPoleIn', 0.30000000000000004)).toBe('0.00');
   expect(numberFormat('embedmentFt', 6.125)).toBeNull();
   expect(numberFormat('latitude', 41.904123)).toBeNull();
 });

@@ -19,7 +19,13 @@ export const wraps = (column: ExportColumn): boolean => WIDE.has(column.key);
 /** In widths of a figure. */
 export function columnWidth(column: ExportColumn): number {
   if (wraps(column)) return 48;
+  if (column.type === 'clock') return 17;
   return WIDTHS[column.key] ?? Math.min(26, Math.max(11, column.heading.length + 2));
+}
+
+/** How many columns stand still at the left, on the screen and on every page: up to the structure's number. */
+export function fixedColumns(columns: readonly ExportColumn[]): number {
+  return columns.findIndex((column) => column.key === 'structureNumber') + 1;
 }
 
 /** Points for a row whose wrapped texts are as given, each in a column of `width`; undefined: one line, as it comes. */
@@ -34,5 +40,6 @@ export function rowHeight(texts: readonly { text: string; width: number }[]): nu
 /** What was computed keeps its digits and shows two; what was read, and positions, show as they are. */
 export function numberFormat(key: string, value: number): string | null {
   if (key === 'latitude' || key === 'longitude') return null;
-  return Math.abs(value * 1000 - Math.round(value * 1000)) > 1e-6 ? '0.00' : null;
+  const [, decimals = ''] = String(value).split('.');
+  return decimals.length > 3 ? '0.00' : null;
 }

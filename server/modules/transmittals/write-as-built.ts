@@ -5,7 +5,8 @@ import { HINT, TEXT, TITLE } from '#server/workbook/template-style.ts';
 import { streamWorkbook, type SheetWriter, type Writer } from '#server/workbook/workbook-writer.ts';
 import type { ExportColumn, ExportRow } from '#shared/export/as-built-columns.ts';
 import { neutral } from '#shared/export/csv.ts';
-import { columnWidth, numberFormat, rowHeight, wraps } from './as-built-layout.ts';
+import { columnLetters } from '#shared/workbook/xml/cell-address.ts';
+import { columnWidth, fixedColumns, numberFormat, rowHeight, wraps } from './as-built-layout.ts';
 import { writeCover, type Cover } from './write-cover.ts';
 import type { ContentSheet } from './read-content.ts';
 
@@ -49,15 +50,17 @@ export async function writeAsBuilt(
 }
 
 function openSheet(writer: Writer, sheet: ContentSheet, cover: Cover): SheetWriter {
+  const fixed = fixedColumns(sheet.columns);
+  const empty = cover.counts.get(sheet.name) === 0;
   const written = writer.addWorksheet(sheet.name, {
-    views: [{ state: 'frozen', xSplit: 2, ySplit: 3 }],
+    views: [{ state: 'frozen', xSplit: fixed, ySplit: 3 }],
     pageSetup: {
       orientation: 'landscape',
       fitToPage: true,
-      fitToWidth: pagesAcross(sheet.columns.map(columnWidth)),
+      fitToWidth: empty ? 1 : pagesAcross(sheet.columns.map(columnWidth)),
       fitToHeight: 0,
       printTitlesRow: '2:2',
-      printTitlesColumn: 'A:B',
+      printTitlesColumn: `A:${columnLetters(fixed)}`,
       margins: { left: 0.4, right: 0.4, top: 0.6, bottom: 0.6, header: 0.3, footer: 0.3 },
     },
     headerFooter: {

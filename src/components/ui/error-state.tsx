@@ -1,6 +1,8 @@
 import { ApiProblem } from '#src/lib/api/api-problem.ts';
 import { Button } from '#src/components/ui/button.tsx';
 import { Glyph } from '#src/components/ui/glyph.tsx';
+import { TextLink } from '#src/components/ui/text-link.tsx';
+import { paths } from '#src/config/paths.ts';
 
 type Props = {
   readonly error: unknown;
@@ -28,7 +30,11 @@ export function ErrorState({ error, what, onRetry }: Props) {
             ))}
           </ul>
         ) : null}
-        {onRetry ? (
+        {problem?.status === 404 || problem?.status === 403 ? (
+          <p className="mt-3">
+            <TextLink to={paths.home.to()}>What waits for you</TextLink>
+          </p>
+        ) : onRetry ? (
           <Button className="mt-4" onClick={onRetry}>
             Try again
           </Button>
