@@ -1,4 +1,4 @@
 /** Raised when the same workbook would be judged otherwise: a run belongs to the engine that made it. */
-export const ENGINE = '1';
+export const ENGINE = '2';
 /** Version of the record schemas that values are stored by. */
 export const RECORD_SCHEMA = 'v1';

@@ -6,7 +6,7 @@ import type { CheckContext } from '#shared/rules/types.ts';
 import { loadDesign } from './load-design.ts';
 import { loadEarlierFailures } from './load-earlier-failures.ts';
 import { loadLines, type KnownLines } from './load-lines.ts';
-import { loadLots, loadLotUse, type LotRow } from './load-lots.ts';
+import { loadLots, loadLotUse, lotsPoured, type LotRow } from './load-lots.ts';
 import { loadNeighbours } from './load-neighbours.ts';
 import { loadOtherPhotos, loadPhotos } from './load-photos.ts';
 import { loadRegister } from './load-register.ts';
@@ -43,7 +43,7 @@ export async function loadContext(
   const standards = await loadStandards(em, asOf);
   const products = await loadProducts(em, asOf);
   const lots = await loadLots(em);
-  const lotUse = await loadLotUse(em, run);
+  const lotUse = await loadLotUse(em, { ...run, lotIds: lotsPoured(lots, source) });
   const design = await loadDesign(em, run.workOrderId);
   const neighbours = await loadNeighbours(em, { ...run, source });
   const register = await loadRegister(em, { ...run, source });

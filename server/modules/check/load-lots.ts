@@ -1,5 +1,7 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { rows } from '#server/db/rows.ts';
+import type { SourceBatch } from '#shared/records/types.ts';
+import { lotKey } from '#shared/rules/lot-index.ts';
 import type { LotFact, LotUse } from '#shared/rules/types.ts';
 
 export type LotRow = LotFact & { readonly id: string };
@@ -21,22 +23,22 @@ export function loadLots(em: EntityManager): Promise<LotRow[]> {
 }
 
 /**
- * Kits by lot and size: received, and used by lines that were handed in. Lines of the batch are left out that its
+ * Kits of some lots by size: received, and used by lines that were handed in. Lines of the batch are left out that its
  * check will count itself; those that stand from an earlier revision are not.
  */
 export function loadLotUse(
   em: EntityManager,
-  options: { batchId: string; contractorId: string },
+  options: { batchId: string; contractorId: string; lotIds: readonly string[] },
 ): Promise<LotUse[]> {
   return rows<LotUse>(
     em,
     `with moved as (
        select e.lot_id, e.kit_ft3, e.quantity as received, 0 as used, 0 as own
-       from lot_events e where e.type = 'received'
+       from lot_events e where e.type = 'received' and e.lot_id = any($3::uuid[])
        union all
        select p.lot_id, p.kit_ft3, 0, p.quantity, case when r.contractor_id = $2 then p.quantity else 0 end
        from pours p join records r on r.id = p.record_id join lines l on l.record_id = r.id
-       where p.lot_id is not null and p.kit_ft3 is not null and p.quantity is not null
+       where p.lot_id = any($3::uuid[]) and p.kit_ft3 is not null and p.quantity is not null
          and (l.batch_id <> $1 or l.state in ('approved', 'held', 'on-record'))
      ), sizes as (
        select lot_id, kit_ft3, sum(received)::float8 as received, sum(used)::float8 as used, sum(own)::float8 as own
@@ -45,7 +47,16 @@ export function loadLotUse(
      select s.product, s.number, coalesce(jsonb_agg(jsonb_build_object('kitFt3', z.kit_ft3, 'received', z.received,
          'used', z.used, 'own', z.own) order by z.kit_ft3) filter (where z.lot_id is not null), '[]') as sizes
      from lot_status s left join sizes z on z.lot_id = s.lot_id
+     where s.lot_id = any($3::uuid[])
      group by s.product, s.number order by s.product, s.number`,
-    [options.batchId, options.contractorId],
+    [options.batchId, options.contractorId, options.lotIds],
   );
+}
+
+/** Ids of the lots that a workbook's pours name. */
+export function lotsPoured(lots: readonly LotRow[], source: SourceBatch): string[] {
+  const named = new Set(
+    source.pours.map(({ values }) => lotKey(String(values['product'] ?? ''), String(values['lot'] ?? ''))),
+  );
+  return lots.filter(({ product, number }) => named.has(lotKey(product, number))).map(({ id }) => id);
 }
