@@ -44,7 +44,13 @@ describe.each(SCREENS)('$name', (screen) => {
   it.each([1440, 360])('has no fault of accessibility at %i px, light and dark', async (width) => {
     const page = await pageOf(screen.as, width);
     await show(screen, page);
-    if (screen.press) await page.getByRole('button', { name: screen.press }).first().click();
+    const press = (name: RegExp) => page.getByRole('button', { name }).first().click();
+    if (screen.pressNarrow && width === 360) await press(screen.pressNarrow);
+    if (screen.press) await press(screen.press);
+    if (screen.key) {
+      await page.keyboard.press(screen.key);
+      await page.getByRole('dialog').waitFor();
+    }
     const found: string[] = [];
     for (const theme of ['light', 'dark'] as const) {
       await page.emulateMedia({ colorScheme: theme });

@@ -6,6 +6,10 @@ export type Screen = {
   readonly path: (world: World) => string;
   /** The control that brings up what is to be looked at. */
   readonly press?: RegExp;
+  /** Where it has to be brought into sight first on a narrow screen. */
+  readonly pressNarrow?: RegExp;
+  /** The key that does so, where there is a keyboard. */
+  readonly key?: string;
 };
 
 /** Every screen with something on it, as the role that works with it. */
@@ -35,9 +39,15 @@ export const SCREENS: readonly Screen[] = [
     name: 'keys of the desk',
     as: 'inspector',
     path: ({ of }) => `/review/${of.first.open.id}`,
-    press: /all keys/,
+    key: '?',
   },
-  { name: 'rejecting', as: 'inspector', path: ({ of }) => `/review/${of.first.open.id}`, press: /^Reject/ },
+  {
+    name: 'rejecting',
+    as: 'inspector',
+    path: ({ of }) => `/review/${of.first.open.id}`,
+    press: /^Reject/,
+    pressNarrow: /^Evidence/,
+  },
   {
     name: 'closing',
     as: 'inspector',

@@ -40,7 +40,7 @@ export function Component() {
       <div className="border-b border-hairline px-gutter py-2 text-table">
         <PlanProgress order={order.data} words />
       </div>
-      <div className="grid lg:grid-cols-[minmax(0,1fr)_27rem]">
+      <div className="grid grid-cols-[minmax(0,1fr)] lg:grid-cols-[minmax(0,1fr)_27rem]">
         <section aria-label="Batches">
           <SectionHead title="Batches" />
           <OrderBatches orderId={id} />
