@@ -37,7 +37,13 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     figures: true,
     min: 5.5,
     grow: 0.6,
-    cell: (row) => <ComparedValue value={row.limit} unit={row.unit} />,
+    // A word alone, as of the view that a missing photograph should show, is no limit.
+    cell: (row) => (
+      <ComparedValue
+        value={row.measured === null && typeof row.limit === 'string' ? null : row.limit}
+        unit={row.unit}
+      />
+    ),
   },
   {
     id: 'margin',

@@ -26,3 +26,10 @@ function textOf(value: unknown): string {
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   return typeof value === 'string' ? value : JSON.stringify(value);
 }
+
+const MACHINE = /^(?:[0-9a-f]{64}|[0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12})$/u;
+
+/** The lines of a step that a person reads at a glance: names of things within the program and digests are left to the entry itself. */
+export function plainLines(payload: Readonly<Record<string, unknown>>): readonly PayloadLine[] {
+  return payloadLines(payload).filter(({ text }) => !text.split(', ').every((word) => MACHINE.test(word)));
+}

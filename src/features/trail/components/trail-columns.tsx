@@ -3,7 +3,7 @@ import type { DataColumn } from '#src/components/table/columns.ts';
 import { Moment } from '#src/components/ui/moment.tsx';
 import { TextLink } from '#src/components/ui/text-link.tsx';
 import type { TrailEntry } from '#shared/generated/api-types.ts';
-import { payloadLines } from './payload-lines.ts';
+import { plainLines } from './payload-lines.ts';
 import { subjectLink } from './subject-link.ts';
 
 /** Opens an entry; the columns are constants and reach it from here. */
@@ -41,7 +41,7 @@ export const TRAIL_COLUMNS: readonly DataColumn<TrailEntry>[] = [
     grow: 3,
     cell: (row) => (
       <span className="text-ink-2">
-        {payloadLines(row.payload)
+        {plainLines(row.payload)
           .map((line) => `${line.name} ${line.text}`)
           .join('; ') || '–'}
       </span>

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { payloadLines } from './payload-lines.ts';
+import { payloadLines, plainLines } from './payload-lines.ts';
 import { subjectLink } from './subject-link.ts';
 
 it('what a step wrote down is read name by name', () => {
@@ -27,4 +27,12 @@ describe('the page of what a step concerned', () => {
     [{ type: 'standard', id: 's1', label: 'Standard 3' }, '/standard/3'],
     [{ type: 'person', id: 'p1', label: 'Ana' }, null],
   ])('%j', (subject, to) => expect(subjectLink(subject)).toBe(to));
+});
+
+it('leaves digests and inner names to the entry itself', () => {
+  const digest = '957359d06a210a0dad15799da31407e1de3516c12a89a06577ab67c8fa4ede4c';
+  const id = '42423d80-a70f-4e8a-8955-f3697d88ad5c';
+  expect(plainLines({ rows: 13, contentDigest: digest, scope: { workOrder: id }, lines: [id, id] })).toEqual([
+    { name: 'rows', text: '13' },
+  ]);
 });
