@@ -205,7 +205,7 @@ describe('a review', () => {
       [site.contractor.email],
     );
     expect(mail.map((one) => one.subject)).toEqual([
-      `Batch ${batch.number}: 1 line returned, due 2099-05-11`,
+      `Batch ${batch.number}: 1 line returned, due 11 May 2099`,
     ]);
     expect(mail[0]?.source).toContain('Half a foot short.');
   });

@@ -157,7 +157,7 @@ async function review(): Promise<void> {
 async function readMail(): Promise<void> {
   const { page } = await e2e.openAs(await e2e.server().person('administrator'), { to: '/mail' });
   await page
-    .getByRole('link', { name: /Batch 17-01: 1 line returned, due 2099-05-11/ })
+    .getByRole('link', { name: /Batch 17-01: 1 line returned, due 11 May 2099/ })
     .first()
     .click();
   const message = page.frameLocator('iframe');
