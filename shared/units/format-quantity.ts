@@ -43,7 +43,12 @@ export function unitWord(unit: string, { metric = false }: { readonly metric?: b
   return (metric ? METRIC[unit]?.word : undefined) ?? STYLES[unit].word;
 }
 
-export type QuantityOptions = { readonly metric?: boolean; readonly digits?: number };
+export type QuantityOptions = {
+  readonly metric?: boolean;
+  readonly digits?: number;
+  /** All digits, zeros too: figures under one another. Else as the unit has it. */
+  readonly fixed?: boolean;
+};
 
 /** A value with its unit in the words of the trade, or in metric words where the unit has them. */
 export function formatQuantity(value: number, unit: string, options: QuantityOptions = {}): string {
@@ -51,7 +56,10 @@ export function formatQuantity(value: number, unit: string, options: QuantityOpt
   const metric = options.metric === true && isUnit(unit) ? METRIC[unit] : undefined;
   const shown = metric === undefined ? value : metric.convert(value);
   const digits = options.digits ?? metric?.digits ?? style.digits;
-  const number = formatNumber(shown, { digits, fixed: metric === undefined && style.fixed === true });
+  const number = formatNumber(shown, {
+    digits,
+    fixed: options.fixed ?? (metric === undefined && style.fixed === true),
+  });
   const word = metric?.word ?? style.word;
   if (word === '') return number;
   return word === '°' ? `${number}°` : `${number} ${word}`;

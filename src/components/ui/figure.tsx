@@ -14,6 +14,6 @@ export function Figure({ value, unit, digits }: Props) {
       </span>
     );
   const word = unitWord(unit, { metric });
-  const text = formatQuantity(value, unit, { metric, digits });
+  const text = formatQuantity(value, unit, { metric, digits, fixed: true });
   return <>{word && text.endsWith(word) ? text.slice(0, -word.length).trim() : text}</>;
 }
