@@ -20,8 +20,9 @@ beforeAll(async () => {
 describe('a batch of another contractor', () => {
   it('is not found, and nothing of it is said', async () => {
     const stranger = await e2e.server().person('contractor');
-    const { page, expectRefusal } = await e2e.openAs(stranger, { to: `/batches/${batch.id}` });
+    const { page, expectRefusal } = await e2e.openAs(stranger);
     expectRefusal(404, /^\/api\/batches\//);
+    await page.goto(`/batches/${batch.id}`);
     await page.getByText('The batch was not found').waitFor();
     const seen = await page.locator('body').innerText();
     for (const secret of [batch.number, 'L-1', site.contractor.orgName]) expect(seen).not.toContain(secret);
