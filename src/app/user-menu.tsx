@@ -28,7 +28,7 @@ export function UserMenu({ user }: { user: SessionUser }) {
         trigger={
           <button
             type="button"
-            className="min-h-9 truncate text-table hover:underline pointer-coarse:min-h-11"
+            className="min-h-9 truncate text-table hover:underline lg:shrink-0 pointer-coarse:min-h-11"
           >
             {user.name}
             {/* At laptop width the pages of a role take the room; the role stands in the menu. */}

@@ -1,5 +1,6 @@
 import { read, utils } from '@e965/xlsx';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { createSubmittedBatch } from '#tests/factories/submitted-batch.ts';
 import { createWorkSite, type WorkSite } from '#tests/factories/work-site.ts';
 import { createHarness, type Agent, type Harness } from '#tests/setup/api-harness.ts';
 
@@ -105,5 +106,31 @@ describe('work orders', () => {
     const reply = await administrator.post('/api/work-orders').send(body);
     expect(reply.status).toBe(422);
     expect(reply.body.errors).toMatchObject([{ pointer }]);
+  });
+});
+
+describe('a review that goes on', () => {
+  it('is told neither to the contractor nor to the clerk before it is closed', async () => {
+    const inspector = await harness.signIn('inspector');
+    const clerk = await harness.signIn('clerk');
+    const em = harness.services.orm.em.fork();
+    const batch = await createSubmittedBatch(em, {
+      workOrder: { id: site.order.id, contractorId: site.contractor.orgId },
+      lines: [{ structureNumber: 'L-1', findings: [] }],
+    });
+    const stateFor = async (agent: Agent): Promise<unknown> =>
+      (await agent.get(`/api/work-orders/${site.order.id}/structures`)).body.items[0]?.state;
+    const toEnter = async (): Promise<unknown> =>
+      (await clerk.get('/api/home')).body.items.find(({ key }: { key: string }) => key === 'to-enter')?.count;
+
+    expect((await inspector.post(`/api/batches/${batch.id}/take`)).status).toBe(200);
+    expect((await inspector.post(`/api/batches/${batch.id}/approve-clean`)).status).toBe(200);
+    expect([await stateFor(own), await stateFor(inspector), await toEnter()]).toEqual([
+      'in-batch',
+      'approved',
+      undefined,
+    ]);
+    expect((await inspector.post(`/api/batches/${batch.id}/close-review`)).status).toBe(200);
+    expect([await stateFor(own), await toEnter()]).toEqual(['approved', 1]);
   });
 });

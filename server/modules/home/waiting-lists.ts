@@ -104,7 +104,8 @@ const CLERK: readonly Waiting[] = [
     many: 'Approved lines not yet on record',
     detail: null,
     to: '/register/enter',
-    sql: `select count(*) from lines where state = 'approved'`,
+    sql: `select count(*) from lines l join revisions v on v.id = l.revision_id
+      where l.state = 'approved' and v.status in ('decided', 'on-record')`,
   },
   {
     key: 'transmittals-failed',

@@ -20,18 +20,20 @@ const FOLDED = `upper(btrim(regexp_replace(normalize(planned.structure_number, N
 
 /**
  * Planned structures of `w` with where each stands. Lines of a draft count for its contractor only (`$2`): the owner's
- * people learn of them when they are handed in. The furthest state of a structure's lines counts.
+ * people learn of them when they are handed in. What is decided in a review that goes on is told to the contractor when
+ * it is closed. The furthest state of a structure's lines counts.
  */
 export const PLANNED_STATES = `
 select planned.id, planned.structure_id, planned.structure_number, planned.kind, planned.design,
   case when registered.record_number is not null then 'on-record'
-    when bool_or(line.state in ('approved', 'on-record')) then 'approved'
-    when bool_or(line.state in ('undecided', 'returned', 'held')) then 'in-batch'
+    when bool_or(line.state in ('approved', 'on-record') and (line.told or not $2::boolean)) then 'approved'
+    when bool_or(line.state <> 'abandoned') then 'in-batch'
     else 'planned' end as state,
   registered.record_number, (array_agg(line.batch_id order by line.created_at desc) filter (where line.state <> 'abandoned'))[1] as batch_id
 from planned_current planned
 left join lateral (
-  select l.state, l.batch_id, l.created_at from batches b join lines l on l.batch_id = b.id
+  select l.state, l.batch_id, l.created_at, review.status is distinct from 'in-review' as told
+  from batches b join lines l on l.batch_id = b.id left join revisions review on review.id = l.revision_id
   where b.work_order_id = planned.work_order_id and l.kind = planned.kind and l.structure_key = ${FOLDED}
     and (l.record_id is not null or ($2::boolean and exists (
       select 1 from revisions v join records r on r.run_id = v.run_id where v.batch_id = b.id and r.line_id = l.id
