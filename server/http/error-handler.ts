@@ -8,8 +8,10 @@ export function errorHandler(log: Logger): ErrorRequestHandler {
   return (error: unknown, req, res, _next) => {
     const known = problemOf(error);
     if (res.headersSent) {
-      // A stream that broke off: the only honest sign left is a connection that ends too early.
-      log.error({ err: error, url: req.path }, 'an answer broke off');
+      // A stream that broke off: the only honest sign left is a connection that ends too early. Where the reader went
+      // away (a picture scrolled past) it is no fault of ours.
+      const left = (error as Coded | null)?.code === 'ERR_STREAM_PREMATURE_CLOSE' && req.destroyed;
+      if (!left) log.error({ err: error, url: req.path }, 'an answer broke off');
       res.destroy();
       return;
     }
