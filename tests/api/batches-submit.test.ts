@@ -124,6 +124,20 @@ describe('submitting', () => {
   });
 });
 
+describe('submitting what was not seen', () => {
+  it('is refused when something came in since, and taken once the newest is looked at', async () => {
+    await upload();
+    const { input } = (await contractor.get(batch.path)).body as { input: number };
+    await upload({ embedmentFt: 5.5 });
+    const stale = await contractor.post(`${batch.path}/submit?input=${input}`);
+    expect(stale.body).toMatchObject({ status: 409, code: 'revision.newer-input' });
+    const newest = (await contractor.get(batch.path)).body as { input: number };
+    expect(newest.input).toBeGreaterThan(input);
+    const reply = await contractor.post(`${batch.path}/submit?input=${newest.input}`);
+    expect(reply.body.status).toBe('submitted');
+  });
+});
+
 describe('withdrawing', () => {
   const withdraw = (agent = contractor) => agent.post(`${batch.path}/withdraw`);
 

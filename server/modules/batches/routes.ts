@@ -166,16 +166,28 @@ export const batchRoutes: readonly Route[] = [
       return shown(ctx, ctx.params.id);
     },
   }),
-  defineRoute<{ reply: Batch }>({
+  defineRoute<{ query: { input?: number }; reply: Batch }>({
     method: 'post',
     path: '/api/batches/:id/submit',
     summary: 'Hand the batch in; it is frozen',
     permission: { action: 'hand-in', subject: 'Batch' },
+    query: {
+      input: {
+        type: 'integer',
+        minimum: 1,
+        description: 'Number of the newest upload that was looked at: refused when there is a newer one.',
+      },
+    },
     status: 200,
     reply: batchSchema,
     handler: async (ctx) => {
       const contractorId = contractorWall(ctx.ability, 'hand-in', 'Batch');
-      await submitBatch(ctx.em, { batchId: ctx.params.id, contractorId, actor: ctx.actor });
+      await submitBatch(ctx.em, {
+        batchId: ctx.params.id,
+        contractorId,
+        actor: ctx.actor,
+        seenInput: ctx.query.input ?? null,
+      });
       return shown(ctx, ctx.params.id);
     },
   }),

@@ -11,16 +11,22 @@ import { mailBatchReceived } from './mail-batch-received.ts';
 /**
  * Hands the open revision in and freezes it: its files, its records with the versions they were checked on, its
  * findings. Tells the contractor and the inspectors.
- * @throws Problem 404; 409 while the check runs, a record is incomplete, or the standard changed since the check
+ * @throws Problem 404; 409 while the check runs, a record is incomplete, the standard changed since the check, or something
+ * came in after `seenInput`, the upload whose check the contractor looked at (null: not said)
  */
 export async function submitBatch(
   em: EntityManager,
-  options: { batchId: string; contractorId: string | null; actor: Actor },
+  options: { batchId: string; contractorId: string | null; actor: Actor; seenInput: number | null },
 ): Promise<void> {
-  const { batchId, contractorId, actor } = options;
+  const { batchId, contractorId, actor, seenInput } = options;
   await em.transactional(async (tx) => {
     const revision = await lockRevision(tx, { id: batchId, contractorId });
     const moved = accepted(moveRevision(stateOf(revision), { type: 'submit' }, actor));
+    if (seenInput !== null && seenInput !== revision.input)
+      throw conflict(
+        'revision.newer-input',
+        'Something was added to this batch since you opened it, in another window or by a colleague. What is shown now is the newest check: look at it, then submit.',
+      );
     await refuseOldStandard(tx, revision);
     await run(
       tx,

@@ -13,7 +13,7 @@ type Props = {
 
 /** Why the server did not take it, and the way to what must be mended. */
 export function Refusal({ error, batch, onShow, onClose }: Props) {
-  const again = useMoveBatch(batch.id);
+  const again = useMoveBatch(batch);
   const problem = error instanceof ApiProblem ? error : null;
   return (
     <div role="alert">

@@ -43,7 +43,11 @@ export function ReviewRow({ batch }: { batch: Batch }) {
           Open it on the review desk
         </TextLink>
       ) : null}
-      <HandOver batch={batch} />
+      {batch.can.includes('assign') ? (
+        <div className="mt-2">
+          <HandOver batch={batch} />
+        </div>
+      ) : null}
     </IntakeRow>
   );
 }

@@ -20,7 +20,7 @@ type Props = {
 
 /** Says what handing in freezes and what stands, before it is done. */
 export function SubmitDialog({ batch, view, hindrances, onClose, onShow }: Props) {
-  const move = useMoveBatch(batch.id);
+  const move = useMoveBatch(batch);
   const all = [...view.loose, ...view.lines.flatMap((line) => line.findings)];
   const unanswered = all.filter(isUnanswered).length;
   const clean = view.lines.filter((line) => !wantsLook(line)).length;

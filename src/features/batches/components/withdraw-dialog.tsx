@@ -5,7 +5,7 @@ import { Dialog } from '#src/components/ui/dialog.tsx';
 import type { Batch } from '#shared/generated/api-types.ts';
 
 export function WithdrawDialog({ batch, onClose }: { batch: Batch; onClose: () => void }) {
-  const move = useMoveBatch(batch.id);
+  const move = useMoveBatch(batch);
   return (
     <Dialog
       open
