@@ -53,11 +53,9 @@ async function read<T>(page: Page, path: string): Promise<T> {
 
 async function take(page: Page, path: string, name: string): Promise<void> {
   await page.goto(base + path);
-  await page
-    .getByRole('img', { name: /section|drawing/i })
-    .first()
-    .waitFor();
-  await page.waitForLoadState('networkidle');
+  await page.getByLabel(/^Drawing of structure/).waitFor();
+  // Photographs come after the drawing.
+  await page.waitForFunction(() => [...document.images].every((image) => image.complete));
   await page.screenshot({ path: `${FOLDER}${name}.png` });
   console.log(`docs/pictures/${name}.png`);
 }
