@@ -256,6 +256,21 @@ describe('a transmittal', () => {
     ).rejects.toThrow(/issued/);
   });
 
+  it('names on its cover what a filter has by id', async () => {
+    const asked = await clerk
+      .post('/api/transmittals')
+      .send({ scope: { filter: { workOrder: site.order.id, kind: 'set' } } });
+    await harness.drain();
+    const file = await clerk.get(`/api/transmittals/${asked.body.id}/file`).responseType('blob');
+    const cover = utils.sheet_to_json<unknown[]>(read(file.body as Buffer).Sheets['Cover'] as WorkSheet, {
+      header: 1,
+    });
+    const scope = String(cover.find(([key]) => key === 'scope')?.[2]);
+    expect(scope).toContain('workOrder: 17, ');
+    expect(scope).toContain('kind: set');
+    expect(scope).not.toContain(site.order.id);
+  });
+
   it('refuses an empty scope and an unknown record', async () => {
     const empty = await clerk.post('/api/transmittals').send({ scope: { filter: { q: 'nothing' } } });
     expect([empty.status, empty.body.code]).toEqual([422, 'transmittal.empty']);
@@ -271,6 +286,6 @@ describe('a transmittal', () => {
     const verdict = await auditor.get('/api/trail/verify');
     expect(verdict.body).toMatchObject({ ok: true, brokenAt: null });
     const trail = await auditor.get('/api/trail?action=transmittal.issued');
-    expect(trail.body.items).toHaveLength(2);
+    expect(trail.body.items).toHaveLength(3);
   });
 });

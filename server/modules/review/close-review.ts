@@ -105,7 +105,7 @@ async function openBatchFindings(em: EntityManager, revisionId: string): Promise
   return found?.n ?? 0;
 }
 
-/** What was rejected becomes an open action of the contractor. Gives back the last day on which one is due. */
+/** What was rejected becomes an open action of the contractor. Gives back the first day on which one is due. */
 async function openActions(
   em: EntityManager,
   revisionId: string,
@@ -121,7 +121,7 @@ async function openActions(
   );
   const found = await row<{ due_on: string | null }>(
     em,
-    `select max(due_on) as due_on from finding_states where revision_id = $1 and state = 'rejected'`,
+    `select min(due_on) as due_on from finding_states where revision_id = $1 and state = 'rejected'`,
     [revisionId],
   );
   return found?.due_on ?? null;

@@ -32,12 +32,13 @@ export async function readCover(
      where i.transmittal_id = $1 order by 1`,
     [head.id],
   );
+  const names = await namesIn(em, head.scope);
   return {
     owner: facts?.owner ?? '',
     number: head.number,
     revision: head.revision,
     title: head.title,
-    scope: scopeText(head.scope),
+    scope: scopeText(head.scope, names),
     issuedBy: facts?.issued_by ?? '',
     issuedAt: facts?.issued_at ?? '',
     standards: standards.map(({ n }) => n),
@@ -47,14 +48,27 @@ export async function readCover(
   };
 }
 
-function scopeText(scope: TransmittalHead['scope']): string {
-  if (Array.isArray(scope['recordNumbers']))
-    return scope['recordNumbers'].slice(0, 40).join(', ') + (scope['recordNumbers'].length > 40 ? ' …' : '');
-  if (scope['filter'] && typeof scope['filter'] === 'object')
-    return (
-      Object.entries(scope['filter'])
-        .map(([name, value]) => `${name}: ${String(value)}`)
-        .join('; ') || 'the whole register'
-    );
-  return 'every current record of the work order';
+type Names = ReadonlyMap<string, string>;
+
+/** Work orders and contractors stand in a filter by id; the cover names them. */
+async function namesIn(em: EntityManager, scope: TransmittalHead['scope']): Promise<Names> {
+  const ids = Object.values((scope['filter'] as Record<string, unknown> | undefined) ?? {});
+  const found = await rows<{ id: string; name: string }>(
+    em,
+    `select id::text, number || ', ' || title as name from work_orders where id::text = any($1)
+     union all select id::text, name from organisations where id::text = any($1)`,
+    [ids],
+  );
+  return new Map(found.map(({ id, name }) => [id, name]));
+}
+
+function scopeText(scope: TransmittalHead['scope'], names: Names): string {
+  const { recordNumbers, filter } = scope;
+  if (Array.isArray(recordNumbers))
+    return recordNumbers.slice(0, 40).join(', ') + (recordNumbers.length > 40 ? ' …' : '');
+  if (!filter || typeof filter !== 'object') return 'every current record of the work order';
+  const parts = Object.entries(filter).map(
+    ([name, value]) => `${name}: ${names.get(String(value)) ?? String(value)}`,
+  );
+  return parts.join('; ') || 'the whole register';
 }
