@@ -28,8 +28,18 @@ function pageOf(who: Caller | 'nobody', width: number): Promise<Page> {
   return opened;
 }
 
+/** The theme, painted: colours read before that are those of the other one. */
+async function wear(page: Page, theme: 'light' | 'dark'): Promise<void> {
+  await page.emulateMedia({ colorScheme: theme });
+  await page.evaluate(async () => {
+    await new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(resolve)));
+    await Promise.all(document.getAnimations().map((one) => one.finished.catch(() => null)));
+  });
+}
+
 /** On its page, all that was being fetched in place. */
 async function show(screen: Screen, page: Page): Promise<void> {
+  await wear(page, 'light');
   await page.goto(screen.path(world));
   await page.waitForLoadState('load');
   await page.locator('h1').first().waitFor();
@@ -45,6 +55,7 @@ describe.each(SCREENS)('$name', (screen) => {
     const page = await pageOf(screen.as, width);
     await show(screen, page);
     const press = (name: RegExp) => page.getByRole('button', { name }).first().click();
+    if (screen.tab) await page.getByRole('tab', { name: screen.tab }).click();
     if (screen.pressNarrow && width === 360) await press(screen.pressNarrow);
     if (screen.press) await press(screen.press);
     if (screen.key) {
@@ -53,7 +64,7 @@ describe.each(SCREENS)('$name', (screen) => {
     }
     const found: string[] = [];
     for (const theme of ['light', 'dark'] as const) {
-      await page.emulateMedia({ colorScheme: theme });
+      await wear(page, theme);
       // The frame of a captured mail lets no script in, axe's neither: it would be waited for in vain.
       const axe = new AxeBuilder({ page }).exclude('iframe');
       // The theme changes colours alone: what else there is to find has been found in the first.
@@ -82,7 +93,6 @@ describe('the screens looked at', () => {
         return !seen.some((one) => pattern.test(one));
       })
       .map(([name]) => name);
-    // A link of a mail opens it: it is looked at apart below.
-    expect(unseen).toEqual(['setPassword']);
+    expect(unseen).toEqual([]);
   });
 });

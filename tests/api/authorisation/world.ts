@@ -1,5 +1,6 @@
 import { createWorkOrder } from '#tests/factories/work-orders.ts';
 import { createWorkSite, type WorkSite } from '#tests/factories/work-site.ts';
+import { row } from '#server/db/rows.ts';
 import type { Actor } from '#shared/permissions/ability.ts';
 import type { Agent, Stage } from '#tests/setup/api-harness.ts';
 import { buildBatches } from './build-batches.ts';
@@ -29,6 +30,8 @@ export type Shared = {
   readonly ownerId: string;
   readonly contractorOrgId: string;
   readonly organisationName: string;
+  /** Of an invitation that nobody has followed yet. */
+  readonly invitationToken: string;
 };
 
 export type World = {
@@ -84,6 +87,7 @@ async function readShared(made: {
     .post('/api/standard/versions')
     .send({ effectiveOn: '2099-01-01', body: published.body.body });
   if (draft.status !== 201) throw new Error(`The standard was not drafted: ${draft.text}`);
+  const invitationToken = await invite(harness, agents.administrator);
   const mail = await agents.administrator.get('/api/mail?limit=1');
   return {
     lotId: site.lot.id,
@@ -96,5 +100,20 @@ async function readShared(made: {
     ownerId: (await harness.owner()).id,
     contractorOrgId: people.first.orgId,
     organisationName: people.first.orgName,
+    invitationToken,
   };
+}
+
+async function invite(harness: Stage, administrator: Agent): Promise<string> {
+  const email = 'invited@people.example';
+  const invited = await administrator
+    .post('/api/people')
+    .send({ email, name: 'Ada Rowe', role: 'clerk', organisationId: (await harness.owner()).id });
+  if (invited.status !== 201) throw new Error(`Nobody was invited: ${invited.text}`);
+  const mail = await row<{ link: string }>(
+    harness.em(),
+    `select data ->> 'link' as link from outbox where recipient = $1`,
+    [email],
+  );
+  return mail?.link.split('/').at(-1) ?? '';
 }

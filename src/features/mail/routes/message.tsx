@@ -64,7 +64,7 @@ function Body({ message }: { message: CapturedMessage }) {
           className="h-[calc(100dvh-9rem)] w-full"
         />
       ) : (
-        <pre className="max-w-3xl px-gutter py-4 font-sans whitespace-pre-wrap">
+        <pre className="max-w-3xl px-gutter py-4 font-sans wrap-anywhere whitespace-pre-wrap">
           {message.text === null
             ? 'This message has no plain text.'
             : splitLinks(message.text).map((part, index) =>
