@@ -1,6 +1,5 @@
 import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
-import { read, utils, type WorkSheet } from '@e965/xlsx';
 import type { Download, Locator, Page } from 'playwright-core';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { photograph } from '#tests/factories/photograph.ts';
@@ -8,6 +7,7 @@ import { pourRows, SET_VIEWS, setRow } from '#tests/factories/set-row.ts';
 import { createWorkSite, type WorkSite } from '#tests/factories/work-site.ts';
 import { workbookFile } from '#tests/factories/workbook-file.ts';
 import { dropFiles, XLSX, type DroppedFile } from './setup/drop-files.ts';
+import { expectAsBuiltCells } from './setup/expect-as-built-cells.ts';
 import { fillTemplate } from './setup/fill-template.ts';
 import { useE2e } from './setup/stage.ts';
 
@@ -228,7 +228,7 @@ async function expectAsBuilt(): Promise<void> {
   const bytes = readFileSync(await issued.path());
   const digest = createHash('sha256').update(bytes).digest('hex');
   await page.getByText(digest).waitFor();
-  compareAsBuilt(bytes);
+  expectAsBuiltCells(bytes, { structures: STRUCTURES, lot: site.lot.number });
   await page.close();
 }
 
@@ -265,48 +265,4 @@ async function openDesk(page: Page): Promise<void> {
 async function select(page: Page, structure: string): Promise<void> {
   await listed(page, structure).click();
   await page.getByRole('figure').filter({ hasText: structure }).first().waitFor();
-}
-
-/** Cells of the issued workbook against what was entered and decided above, read by another library. */
-function compareAsBuilt(bytes: Buffer): void {
-  const book = read(bytes);
-  expect(book.SheetNames).toEqual(['Cover', 'Set', 'Straighten', 'Re-level', 'Pours', 'Findings']);
-  const set = dataOf(book.Sheets['Set']);
-  // Worked record WR-01 gives the void of 8.6701 ft³; 9.5 ft³ were placed.
-  expect(set.map((row) => [row['structureNumber'], row['embedmentFt'], row['conforms']])).toEqual([
-    ['L-1', 6, 'yes'],
-    ['L-2', 6, 'yes'],
-    ['L-3', 5.75, 'yes'],
-    ['L-4', 5.5, 'no'],
-  ]);
-  // Excel serial of 2026-04-14 10:05: day 46126 (1900 system) and 605/1440 of a day.
-  for (const row of set) expect(row['letGoAt']).toBeCloseTo(46126 + 605 / 1440, 6);
-  const pours = dataOf(book.Sheets['Pours']);
-  // Both kits of a pole are one pour, so their order says nothing.
-  const poured = pours.map((row) => [row['structureNumber'], row['lot'], row['kitFt3']]);
-  expect(poured).toHaveLength(8);
-  expect(poured).toEqual(
-    expect.arrayContaining(
-      STRUCTURES.flatMap((structure) => [
-        [structure, site.lot.number, 8],
-        [structure, site.lot.number, 1.5],
-      ]),
-    ),
-  );
-  expect(dataOf(book.Sheets['Findings'])).toMatchObject([
-    { structureNumber: 'L-3', code: 'embedment-short', measured: 5.75, limit: 6, grounds: 'evidence' },
-    { structureNumber: 'L-4', measured: 5.5, limit: 6, grounds: 'concession', concession: 'C-0001' },
-  ]);
-  const cover = utils.sheet_to_json<unknown[]>(sheetOf(book.Sheets['Cover']), { header: 1 });
-  const said = Object.fromEntries(cover.map(([key, , value]) => [key, value]));
-  expect(said).toMatchObject({ transmittal: 'T-0001', revision: 0, 'count:Set': 4, nonconforming: 1 });
-}
-
-/** Keys in row 1, data from row 4. */
-const dataOf = (sheet: WorkSheet | undefined): Record<string, unknown>[] =>
-  utils.sheet_to_json<Record<string, unknown>>(sheetOf(sheet), { raw: true }).slice(2);
-
-function sheetOf(sheet: WorkSheet | undefined): WorkSheet {
-  if (!sheet) throw new Error('The issued workbook lacks a sheet.');
-  return sheet;
 }
