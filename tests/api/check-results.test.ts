@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { rows } from '#server/db/rows.ts';
+import { ENGINE } from '#server/modules/check/engine.ts';
 import { checkRevision } from '#server/modules/check/check-revision.ts';
 import { pourRow, pourRows, setRow } from '#tests/factories/set-row.ts';
 import {
@@ -176,8 +177,8 @@ describe('the check', () => {
     );
     await rows(
       em,
-      `insert into check_runs (revision_id, input, engine, schema, state, started_at) values ($1, 2, '1', 'v1', 'running', now())`,
-      [revision?.id],
+      `insert into check_runs (revision_id, input, engine, schema, state, started_at) values ($1, 2, $2, 'v1', 'running', now())`,
+      [revision?.id, ENGINE],
     );
     await checkRevision(
       { revisionId: revision?.id ?? '', input: 2 },

@@ -24,7 +24,7 @@ export async function readCheck(
        p.state as progress_state, p.done, p.total, p.problem
      from revisions v
      left join lateral (
-       select * from check_runs c where c.revision_id = v.id and c.input = v.input order by c.queued_at desc limit 1
+       select * from check_runs c where c.revision_id = v.id and c.input = v.input order by c.queued_at desc, c.started_at desc nulls last limit 1
      ) run on true
      left join job_progress p on p.subject = 'check:' || v.id
      where v.id = $1`,

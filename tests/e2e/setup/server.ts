@@ -31,7 +31,9 @@ export async function startServer(
   const port = await freePort();
   const url = `http://127.0.0.1:${port}`;
   const dataDir = mkdtempSync(path.join(tmpdir(), 'upstand-e2e-'));
-  const child = spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
+  // Its standard input is ours: it ends with this process, however that ends.
+  const ending = new URL('../../../scripts/lib/end-with-parent.mjs', import.meta.url).href;
+  const child = spawn(process.execPath, ['--import', ending, '--import', 'tsx', 'server/index.ts'], {
     cwd: ROOT,
     env: {
       PATH: process.env['PATH'],
@@ -49,7 +51,7 @@ export async function startServer(
       CHECK_REPLIES: 'true',
       ...options.settings,
     },
-    stdio: ['ignore', 'pipe', 'inherit'],
+    stdio: ['pipe', 'pipe', 'inherit'],
   });
   const orm = await createOrm(database.appUrl);
   const pool = new pg.Pool({ connectionString: database.appUrl });
