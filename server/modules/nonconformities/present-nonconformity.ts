@@ -1,14 +1,8 @@
 import { toFinding } from '#server/modules/records/finding-facts.ts';
+import { decisionOf, FINDING_STATES } from '#server/modules/records/finding-standing.ts';
 import { renderFinding } from '#shared/findings/render.ts';
 import type { Nonconformity } from '#shared/generated/api-types.ts';
 import type { NonconformityDbRow } from './nonconformity-select.ts';
-
-const STATES = {
-  open: 'undecided',
-  approved: 'approved',
-  rejected: 'rejected',
-  held: 'concession-asked',
-} as const;
 
 /** A finding as the auditor sees it. Only the owner's people and auditors come here, so nothing is held back. */
 export function presentNonconformity(row: NonconformityDbRow): Nonconformity {
@@ -34,7 +28,7 @@ export function presentNonconformity(row: NonconformityDbRow): Nonconformity {
     params: { ...row.params, ...row.owner_params },
     message,
     remedy,
-    state: STATES[row.state],
+    state: FINDING_STATES[row.state],
     decision: decisionOf(row),
     grounds: row.grounds,
     action: row.action,
@@ -49,19 +43,5 @@ export function presentNonconformity(row: NonconformityDbRow): Nonconformity {
     decidedBy: row.decided_by,
     recordNumber: row.record_number,
     version: row.version,
-  };
-}
-
-function decisionOf(row: NonconformityDbRow): Nonconformity['decision'] {
-  const { decision } = row;
-  if ((decision !== 'approve' && decision !== 'reject') || row.decided_at === null) return null;
-  return {
-    decision,
-    grounds: row.grounds,
-    action: row.action,
-    dueOn: row.due_on,
-    reason: row.reason,
-    by: row.decided_by ?? '',
-    at: row.decided_at,
   };
 }

@@ -3,13 +3,7 @@ import type { FindingRow } from '#shared/generated/api-types.ts';
 import { may, type Ability, type Actor } from '#shared/permissions/ability.ts';
 import { toFinding } from './finding-facts.ts';
 import type { FindingDbRow } from './finding-select.ts';
-
-const STATES = {
-  open: 'undecided',
-  approved: 'approved',
-  rejected: 'rejected',
-  held: 'concession-asked',
-} as const;
+import { decisionOf, FINDING_STATES } from './finding-standing.ts';
 
 /**
  * A finding on the wire, with its sentence. A contractor is told nothing of another one, and nothing of a review that
@@ -41,7 +35,7 @@ export function presentFinding(row: FindingDbRow, viewer: { actor: Actor; abilit
     message,
     remedy,
     answer: answerOf(row, owner),
-    state: told ? STATES[row.state] : 'undecided',
+    state: told ? FINDING_STATES[row.state] : 'undecided',
     decision: told ? decisionOf(row) : null,
     concession: told ? concessionOf(row) : null,
     version: row.version,
@@ -52,20 +46,6 @@ export function presentFinding(row: FindingDbRow, viewer: { actor: Actor; abilit
 function answerOf(row: FindingDbRow, owner: boolean): FindingRow['answer'] {
   if (row.answer_text === null || row.answer_at === null || (owner && row.answer_open)) return null;
   return { text: row.answer_text, by: row.answer_by ?? '', at: row.answer_at };
-}
-
-function decisionOf(row: FindingDbRow): FindingRow['decision'] {
-  const { decision } = row;
-  if ((decision !== 'approve' && decision !== 'reject') || row.decided_at === null) return null;
-  return {
-    decision,
-    grounds: row.grounds,
-    action: row.action,
-    dueOn: row.due_on,
-    reason: row.reason,
-    by: row.decided_by ?? '',
-    at: row.decided_at,
-  };
 }
 
 function concessionOf(row: FindingDbRow): FindingRow['concession'] {
