@@ -15,9 +15,18 @@ const COMPONENTS = [
 type Reading = {
   readonly measured: number;
   readonly product: Product;
+  /** All readings of the pour would be usual ones in °C. */
+  readonly asCelsius: boolean;
   /** What is the same in every finding on this reading. */
   readonly draft: Pick<FindingDraft, 'source' | 'field' | 'part' | 'params'>;
 };
+
+/** Whether a reading, taken as °C, lies in a product's band of full yield. */
+const usualInCelsius = (
+  reading: number,
+  { lowF, highF }: { readonly lowF?: unknown; readonly highF?: unknown },
+): boolean =>
+  typeof lowF === 'number' && typeof highF === 'number' && cToF(reading) >= lowF && cToF(reading) <= highF;
 
 /** Each component temperature of a line's pours, in °F, against its product's band; `unproved` for what was not measured. */
 export const againstBand = (
@@ -30,6 +39,8 @@ export const againstBand = (
       pour.product === null ? null : productInForce(context.products, pour.product, line.workDay);
     if (!version) return [];
     const product = version.body;
+    const readings = COMPONENTS.flatMap(([, field]) => pour[field] ?? []);
+    const asCelsius = readings.every((reading) => usualInCelsius(reading, product.fullYieldF));
     return COMPONENTS.flatMap(([component, field]) => {
       const measured = pour[field];
       if (measured === null) return [];
@@ -40,8 +51,9 @@ export const againstBand = (
         product: product.code,
         lowF: product.fullYieldF.lowF,
         highF: product.fullYieldF.highF,
+        asCelsius,
       };
-      return judge({ measured, product, draft: { source: pour.source, field, part, params } });
+      return judge({ measured, product, asCelsius, draft: { source: pour.source, field, part, params } });
     });
   });
   return [...drafts, ...missingTemperatures(line.pours)];
@@ -49,10 +61,6 @@ export const againstBand = (
 
 /** For a reading that would be a usual one in °C: says so. */
 export const celsiusHint = ({ measured, params }: Finding): string => {
-  const { lowF, highF } = params;
-  if (typeof measured !== 'number' || typeof lowF !== 'number' || typeof highF !== 'number') return '';
-  const converted = cToF(measured);
-  return converted >= lowF && converted <= highF
-    ? ` (${say(measured, null)} °C would be ${say(converted, 'degF')})`
-    : '';
+  if (typeof measured !== 'number' || !usualInCelsius(measured, params)) return '';
+  return ` (${say(measured, null)} °C would be ${say(cToF(measured), 'degF')})`;
 };

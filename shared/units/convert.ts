@@ -6,6 +6,7 @@ export const UNITS = [
   'degF',
   'deg',
   'min',
+  'd',
   'in-per-10ft',
   'in-per-ft',
   'ratio',

@@ -13,6 +13,7 @@ const STYLES: Readonly<Record<Unit, Style>> = {
   degF: { word: '°F', digits: 1 },
   deg: { word: '°', digits: 6 },
   min: { word: 'min', digits: 1 },
+  d: { word: 'd', digits: 0 },
   'in-per-10ft': { word: 'in per 10 ft', digits: 2 },
   'in-per-ft': { word: 'in per ft', digits: 3 },
   ratio: { word: '', digits: 2, fixed: true },

@@ -41,6 +41,24 @@ describeRule(foamCold, {
       expected: [{ field: 'componentATempF' }, { field: 'componentBTempF' }],
     },
     {
+      // 22 °C = 71.6 °F and 23 °C = 73.4 °F, inside the full-yield band of 60 to 90 °F (demo).
+      name: 'written in °C: a query',
+      line: { pours: [pourOf({ componentATempF: 22, componentBTempF: 23 })] },
+      expected: [
+        { field: 'componentATempF', severity: 'query', measured: 22 },
+        { field: 'componentBTempF', severity: 'query', measured: 23, params: { asCelsius: true } },
+      ],
+    },
+    {
+      // 38 °C = 100.4 °F is over the full-yield band: the pour is not plainly in °C.
+      name: 'one of two that would be usual in °C stays what it is',
+      line: { pours: [pourOf({ componentATempF: 22, componentBTempF: 38 })] },
+      expected: [
+        { field: 'componentATempF', params: { asCelsius: false } },
+        { field: 'componentBTempF', params: { asCelsius: false } },
+      ],
+    },
+    {
       name: 'not measured',
       line: { pours: [pourOf({ componentATempF: null })] },
       expected: [{ unproved: 'componentATempF' }],

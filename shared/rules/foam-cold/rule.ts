@@ -14,8 +14,14 @@ export const foamCold: LineRule = {
   needs: [],
   paramsSchema: paramsSchema({}),
   check: (line, _params, context) =>
-    againstBand(line, context, ({ draft, measured, product }) =>
-      belowLimit({ ...draft, measured, limit: product.allowedF.lowF, unit: 'degF' }),
+    againstBand(line, context, ({ draft, measured, product, asCelsius }) =>
+      belowLimit({
+        ...draft,
+        ...(asCelsius ? { severity: 'query' as const } : {}),
+        measured,
+        limit: product.allowedF.lowF,
+        unit: 'degF',
+      }),
     ),
   message: ({ measured, limit, params }) =>
     `Component ${say(params['component'], null)} of pour ${say(params['pourNumber'], null)} was at ${say(measured, 'degF')}; ${say(params['product'], null)} may not be poured below ${say(limit, 'degF')}.`,
