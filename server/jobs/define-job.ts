@@ -19,6 +19,12 @@ export type JobContext = {
 /** Handlers are repeatable: a process may die after the work and before it is known to be done. */
 export type JobHandler<P> = (payload: P, context: JobContext) => Promise<void>;
 
+/** Brings the subject of a parked job to an end that its page shows. `em` is in the transaction that notes the parking. */
+export type ParkedHandler<P> = (
+  payload: P,
+  context: { readonly em: EntityManager; readonly reason: string },
+) => Promise<void>;
+
 export type JobDefinition<P extends object = object> = {
   /** Also the queue's name. */
   readonly name: string;
@@ -35,6 +41,8 @@ export type JobDefinition<P extends object = object> = {
   /** Enqueued by the workers themselves, once in so many seconds over all of them. */
   readonly everySeconds: number | null;
   readonly load: () => Promise<{ handler: JobHandler<P> }>;
+  /** Null: nobody's page waits for it. Run once a parking, however the last attempt ended: thrown, killed, out of time. */
+  readonly loadParked: (() => Promise<{ parked: ParkedHandler<P> }>) | null;
 };
 
 /** A job as data: its handler is loaded when the first one comes. */
@@ -47,6 +55,7 @@ export function defineJob<P extends object>(
     expireSeconds: 300,
     concurrency: 1,
     everySeconds: null,
+    loadParked: null,
     ...definition,
   };
 }

@@ -12,12 +12,15 @@ export type ParkedJob = {
   readonly failedAt: string | null;
 };
 
+/** SQL over a row of pgboss.job: what its last attempt said. */
+export const PROBLEM_OF_JOB = `coalesce(output ->> 'message', output #>> '{value,message}', 'No reason was kept.')`;
+
 /** Jobs whose attempts are used up, newest first; they wait here for an administrator. */
 export function listParked(em: EntityManager, limit = 100): Promise<ParkedJob[]> {
   return rows<ParkedJob>(
     em,
     `select id, name, data as payload, retry_count + 1 as attempts,
-       coalesce(output ->> 'message', output #>> '{value,message}', 'No reason was kept.') as problem,
+       ${PROBLEM_OF_JOB} as problem,
        created_on as "createdAt", completed_on as "failedAt"
      from pgboss.job where state = 'failed' order by completed_on desc nulls last, id limit $1`,
     [limit],

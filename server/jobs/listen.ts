@@ -14,7 +14,8 @@ export type Listener = {
 
 const CHANNEL = /^[a-z_]+$/;
 const FIRST_PAUSE_MS = 250;
-const LONGEST_PAUSE_MS = 5_000;
+/** Shorter than the time between two looks for jobs of dead processes: a living one has its locks again by then. */
+const LONGEST_PAUSE_MS = 2_000;
 
 /** One LISTEN connection for the whole process, made again whenever it is lost; locks held are taken again. */
 export function createListener(url: string, onError: (error: Error) => void = () => undefined): Listener {

@@ -1,6 +1,10 @@
 import type PgBoss from 'pg-boss';
 import type { Services } from '#server/container.ts';
+import { row } from '#server/db/rows.ts';
 import type { JobDefinition } from '#server/jobs/define-job.ts';
+import { endAttempt } from '#server/jobs/end-attempt.ts';
+import { Hopeless } from '#server/jobs/hopeless.ts';
+import { settleParked } from '#server/jobs/settle-parked.ts';
 
 /** How long the queue is asked again to write down how an attempt ended, while PostgreSQL restarts, say. */
 const REPORT_PAUSES_MS = [200, 1_000, 3_000, 10_000];
@@ -15,27 +19,42 @@ export async function runAttempt(options: {
   /** Aborted when the process ends. */
   stop: AbortSignal;
 }): Promise<void> {
-  const { services, job, stop } = options;
-  const { boss, listener } = services.queue;
+  const { services, definition, job, stop } = options;
+  const { listener } = services.queue;
   const lock = `job:${job.id}`;
   const log = { job: job.name, id: job.id, attempt: job.retryCount + 1 };
   try {
-    await listener.hold(lock);
+    if (!(await take(services, job, lock))) return;
     await attempt(options);
-    await report(() => boss.complete(job.name, job.id));
+    await report(() => endAttempt(services, job, { state: 'done' }));
     services.log.info(log, 'job done');
   } catch (error) {
     services.log.error({ ...log, err: error }, stop.aborted ? 'job stopped with the process' : 'job failed');
-    const reason = { message: error instanceof Error ? error.message : String(error) };
-    await report(() => boss.fail(job.name, job.id, reason)).catch((lost: unknown) =>
+    const hopeless = error instanceof Hopeless;
+    const reason = error instanceof Error ? error.message : String(error);
+    try {
+      await report(() => endAttempt(services, job, { state: 'failed', reason, hopeless }));
+      if (hopeless || job.retryCount >= job.retryLimit) await settleParked(services, [definition]);
+    } catch (lost) {
       services.log.error(
         { ...log, err: lost },
         'how the job ended could not be written down; it will be tried again',
-      ),
-    );
+      );
+    }
   } finally {
     await listener.letGo(lock);
   }
+}
+
+/** False: between the fetch and the lock (a stalled connection, say) the job was taken for a dead process's. */
+async function take(services: Services, job: PgBoss.JobWithMetadata, lock: string): Promise<boolean> {
+  if (!(await services.queue.listener.hold(lock))) return false;
+  const mine = await row(
+    services.orm.em.fork(),
+    `select 1 from pgboss.job where name = $1 and id = $2 and state = 'active' and retry_count = $3`,
+    [job.name, job.id, job.retryCount],
+  );
+  return mine !== null;
 }
 
 async function attempt(options: Parameters<typeof runAttempt>[0]): Promise<void> {

@@ -2,12 +2,13 @@ import type { Services } from '#server/container.ts';
 import type { JobDefinition } from '#server/jobs/define-job.ts';
 import { freeOrphans } from '#server/jobs/free-orphans.ts';
 import { JOBS_CHANNEL } from '#server/jobs/create-queue.ts';
-
 import { runAttempt } from '#server/jobs/run-attempt.ts';
+import { settleParked } from '#server/jobs/settle-parked.ts';
 
 /** A notification wakes a loop at once; this only catches what one missed, and jobs whose pause is over. */
 const POLL_MS = 2_000;
-const CHORES_MS = 5_000;
+/** A dead process is noticed at the second look without its lock: its jobs are free within twice this. */
+const CHORES_MS = 3_000;
 const GRACE_MS = 10_000;
 
 export type Worker = { stop(): Promise<void> };
@@ -20,6 +21,7 @@ export async function workOnQueues(
   const { boss, listener } = services.queue;
   const stopping = new AbortController();
   const ended = new AbortController();
+  const withoutLock = new Set<string>();
   const sleepers = new Set<{ name: string; wake: () => void }>();
   const wake = (name: string | null): void => {
     for (const sleeper of sleepers) if (name === null || sleeper.name === name) sleeper.wake();
@@ -54,7 +56,8 @@ export async function workOnQueues(
 
   const chores = async (): Promise<void> => {
     try {
-      if ((await freeOrphans(services)) > 0) wake(null);
+      if ((await freeOrphans(services, withoutLock)) > 0) wake(null);
+      await settleParked(services, jobs);
       for (const job of jobs) {
         if (job.everySeconds === null) continue;
         // Over all processes one in each slot: the queue's own throttle.

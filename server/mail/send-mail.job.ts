@@ -13,5 +13,6 @@ export const sendMailJob = defineJob<{ outboxId: string }>({
   retryDelay: 4,
   expireSeconds: 120,
   concurrency: 2,
+  loadParked: () => import('#server/mail/park-mail.ts').then((module) => ({ parked: module.parkMail })),
   load: () => import('#server/mail/send-mail.ts').then((module) => ({ handler: module.sendMail })),
 });

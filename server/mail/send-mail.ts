@@ -1,6 +1,7 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { row, run } from '#server/db/rows.ts';
 import type { JobHandler } from '#server/jobs/define-job.ts';
+import { Hopeless } from '#server/jobs/hopeless.ts';
 import { renderMail, type MailTemplate } from '#server/mail/mail-templates.ts';
 import { createTransport } from '#server/mail/transport.ts';
 
@@ -14,7 +15,7 @@ type OutboxRow = {
 };
 
 /** At least once: a process that dies between the server's answer and our note of it sends again, under the same Message-ID. */
-export const sendMail: JobHandler<{ outboxId: string }> = async ({ outboxId }, { services, em, job }) => {
+export const sendMail: JobHandler<{ outboxId: string }> = async ({ outboxId }, { services, em }) => {
   const found = await row<OutboxRow>(
     em,
     `select recipient, recipient_name as name, template, data, message_id as "messageId", state from outbox where id = $1`,
@@ -36,8 +37,8 @@ export const sendMail: JobHandler<{ outboxId: string }> = async ({ outboxId }, {
       html,
     });
   } catch (error) {
-    await note(em, outboxId, { error, last: job.last });
-    throw error;
+    await note(em, outboxId, error);
+    throw isRefused(error) ? new Hopeless((error as Error).message, { cause: error }) : error;
   } finally {
     transport.close();
   }
@@ -49,15 +50,27 @@ export const sendMail: JobHandler<{ outboxId: string }> = async ({ outboxId }, {
   );
 };
 
-async function note(
-  em: EntityManager,
-  id: string,
-  outcome: { error: unknown; last: boolean },
-): Promise<void> {
-  const message = outcome.error instanceof Error ? outcome.error.message : String(outcome.error);
-  await run(em, `update outbox set state = $2, attempts = attempts + 1, last_error = $3 where id = $1`, [
-    id,
-    outcome.last ? 'failed' : 'queued',
-    message.slice(0, 1_000),
-  ]);
+async function note(em: EntityManager, id: string, error: unknown): Promise<void> {
+  const message = error instanceof Error ? error.message : String(error);
+  await run(
+    em,
+    `update outbox set state = 'queued', attempts = attempts + 1, last_error = $2 where id = $1 and state <> 'sent'`,
+    [id, message.slice(0, 1_000)],
+  );
+}
+
+type SmtpError = { code?: unknown; responseCode?: unknown; command?: unknown };
+
+/**
+ * The server has said for good (RFC 5321 4.2.1: 5yz) that it does not take this message or this recipient. A refusal of
+ * our sign-in or sender speaks of the settings, not of the message: once they are mended a repeat succeeds.
+ */
+function isRefused(error: unknown): boolean {
+  const { code, responseCode, command } = error as SmtpError;
+  return (
+    (code === 'EENVELOPE' || code === 'EMESSAGE') &&
+    typeof responseCode === 'number' &&
+    responseCode >= 500 &&
+    (command === 'RCPT TO' || command === 'DATA')
+  );
 }

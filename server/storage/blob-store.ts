@@ -4,6 +4,7 @@ import { Transform, type Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
 import {
   BlobServiceClient,
+  RestError,
   StorageRetryPolicyType,
   type BlockBlobClient,
   type ContainerClient,
@@ -34,6 +35,17 @@ export class BlobMissing extends Error {
   constructor(readonly sha256: string) {
     super(`The store has no file ${sha256}.`);
     this.name = 'BlobMissing';
+  }
+}
+
+/** The store answered, and did not take the file: it is full, say, or our key no longer counts. */
+export class BlobRefused extends Error {
+  constructor(
+    readonly statusCode: number,
+    options?: ErrorOptions,
+  ) {
+    super(`The store of files did not take a file: it answered ${statusCode}.`, options);
+    this.name = 'BlobRefused';
   }
 }
 
@@ -79,7 +91,7 @@ export class BlobStore {
   /**
    * Streams a file in; no more than two buffers are in memory. Uploaded under a passing name while it is hashed, then
    * copied to its own name inside the store. Whatever ends it early leaves nothing behind.
-   * @throws BlobTooLarge above `maxBytes`; the source's own error; AbortError
+   * @throws BlobTooLarge above `maxBytes`; BlobRefused; the source's own error; AbortError
    */
   async putStream(source: Readable, options: PutOptions): Promise<StoredBlob> {
     const incoming = this.container.getBlockBlobClient(`${INCOMING}${randomUUID()}`);
@@ -104,6 +116,8 @@ export class BlobStore {
       if (feeding.status === 'rejected') throw feeding.reason;
       const { sha256, size } = result();
       return { sha256, size, existed: await this.#settle(incoming, sha256) };
+    } catch (error) {
+      throw refusalOf(error);
     } finally {
       // Left behind if the store is away just now; the sweeper takes it then.
       await incoming.deleteIfExists().catch(() => undefined);
@@ -219,6 +233,13 @@ async function deleteIfOld(blob: BlockBlobClient, before: Date): Promise<boolean
     if ((error as { statusCode?: number }).statusCode === 412) return false;
     throw error;
   }
+}
+
+function refusalOf(error: unknown): unknown {
+  const { statusCode } = error as { statusCode?: unknown };
+  return error instanceof RestError && typeof statusCode === 'number'
+    ? new BlobRefused(statusCode, { cause: error })
+    : error;
 }
 
 function isAbort(error: unknown): boolean {

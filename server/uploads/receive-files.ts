@@ -1,6 +1,7 @@
 import type { Request, Response } from 'express';
 import multer, { MulterError } from 'multer';
 import { problem, type Problem } from '#server/http/problem.ts';
+import { BlobRefused } from '#server/storage/blob-store.ts';
 import { blobEngine, type EngineOptions, type ReceivedFile } from './blob-engine.ts';
 
 export type ReceiveOptions = Omit<EngineOptions, 'received'> & {
@@ -13,7 +14,7 @@ export type ReceiveOptions = Omit<EngineOptions, 'received'> & {
 
 /**
  * Reads a multipart request to its end; files go to the blob store as they come, in the order of the request.
- * @throws Problem 415 not multipart, 400 broken off, another field or no file, 413 too many files
+ * @throws Problem 415 not multipart, 400 broken off, another field or no file, 413 too many files, 503 a store that takes nothing
  */
 export async function receiveFiles(options: ReceiveOptions): Promise<readonly ReceivedFile[]> {
   const { req, res, field, maxFiles } = options;
@@ -76,6 +77,13 @@ function uploadProblem(error: unknown, asked: { field: string; maxFiles: number 
         return problem(400, 'upload.broken', 'The form cannot be read. Upload the file again.');
     }
   }
+  if (error instanceof BlobRefused)
+    return problem(
+      503,
+      'storage.refused',
+      'The store of files behind this site does not take the file just now; it may be full. Nothing was changed. Upload it again in a few minutes; if it goes on, tell the administrator.',
+      { headers: { 'Retry-After': '60' } },
+    );
   const message = error instanceof Error ? error.message : '';
   if (/Unexpected end of form|Request aborted|Malformed|Multipart|aborted|premature/iu.test(message))
     return problem(

@@ -22,6 +22,7 @@ const TITLES: Readonly<Record<string, string>> = {
   'batch.created': 'Batch opened',
   'batch.workbook-uploaded': 'Workbook handed in',
   'batch.photos-uploaded': 'Photographs handed in',
+  'batch.photos-failed': 'Photographs not prepared',
   'batch.checked': 'Batch checked',
   'batch.check-failed': 'Check failed',
   'batch.submitted': 'Batch submitted',
@@ -53,6 +54,7 @@ const TITLES: Readonly<Record<string, string>> = {
   'transmittal.requested': 'Transmittal requested',
   'transmittal.issued': 'Transmittal issued',
   'transmittal.failed': 'Transmittal failed',
+  'job.parked': 'Job parked after its last attempt',
   'job.retried': 'Parked job tried again',
 };
 

@@ -117,7 +117,10 @@ it('a job left running by a process that died is free again; one that is worked 
   ];
   await run(em(), `update pgboss.job set started_on = now() - interval '1 minute'`);
   await services.queue.listener.hold(`job:${taken[0]?.id}`);
-  expect(await freeOrphans(services)).toBe(1);
+  const seen = new Set<string>();
+  // A worker that has just lost its connection looks like this too: only the second look counts.
+  expect(await freeOrphans(services, seen)).toBe(0);
+  expect(await freeOrphans(services, seen)).toBe(1);
   await services.queue.listener.letGo(`job:${taken[0]?.id}`);
   const states = await rows(em(), 'select id, state::text from pgboss.job order by state');
   expect(states).toEqual([

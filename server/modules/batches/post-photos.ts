@@ -2,6 +2,7 @@ import type { EntityManager } from '@mikro-orm/postgresql';
 import { insertRowsReturning } from '#server/db/insert-rows.ts';
 import { rows } from '#server/db/rows.ts';
 import { enqueue } from '#server/jobs/enqueue.ts';
+import { setProgress } from '#server/jobs/progress.ts';
 import { preparePhotosJob } from '#server/modules/photos/prepare-photos.job.ts';
 import { rememberBlob } from '#server/storage/remember-blob.ts';
 import { appendTrail } from '#server/trail/append-trail.ts';
@@ -41,6 +42,7 @@ export async function postPhotos(
       input = added.n;
       for (const photo of await insertPhotos(tx, { revision, inputId: added.id, actor, fresh }))
         known.set(photo.sha256, photo.id);
+      await setProgress(tx, { subject: `photos:${batchId}`, state: 'queued', done: 0, total: null });
       await enqueue(tx, preparePhotosJob, { batchId });
       await appendTrail(tx, {
         actor,

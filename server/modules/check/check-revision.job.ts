@@ -16,5 +16,6 @@ export const checkRevisionJob = defineJob<CheckRevisionPayload>({
   },
   retryLimit: 4,
   expireSeconds: 300,
+  loadParked: () => import('./park-check.ts').then((module) => ({ parked: module.parkCheck })),
   load: () => import('./check-revision.ts').then((module) => ({ handler: module.checkRevision })),
 });

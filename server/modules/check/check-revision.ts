@@ -1,37 +1,34 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { JobHandler } from '#server/jobs/define-job.ts';
 import { setProgress } from '#server/jobs/progress.ts';
-import { checkBatch } from '#shared/check/check-batch.ts';
-import { readSource } from '#shared/workbook/read-source.ts';
 import { refusalText } from '#shared/workbook/refusal-text.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
 import type { CheckRevisionPayload } from './check-revision.job.ts';
-import { failCheck, type CheckProblem } from './fail-check.ts';
+import { failCheck } from './fail-check.ts';
 import { finishEmpty } from './finish-empty.ts';
 import { loadContext } from './load-context.ts';
-import { nameOtherOrder } from './name-other-order.ts';
 import { newestWorkbook } from './newest-workbook.ts';
-import { readStoredWorkbook } from './read-stored-workbook.ts';
-import { scopeToReturned } from './scope-to-returned.ts';
 import { startRun, type StartedRun } from './start-run.ts';
 import { storeResult } from './store-result.ts';
+import { withCheckProcess } from './with-check-process.ts';
 
 /**
  * Checks what was handed in up to an input: workbook to rows to records to findings, stored in one transaction. Ends
  * at once when a newer input came, or when this one was checked already; a run that a dead process left is done again.
  */
-export const checkRevision: JobHandler<CheckRevisionPayload> = async (
-  payload,
-  { services, em, job, signal },
-) => {
+export const checkRevision: JobHandler<CheckRevisionPayload> = async (payload, { services, em, signal }) => {
   const run = await startRun(em, payload);
   if (!run) return;
   try {
     await check(em, run, { services, signal });
   } catch (error) {
-    const problem = problemOf(error, job.last);
-    if (problem) await failCheck(services.orm.em.fork(), run, problem);
+    // Anything else is tried again, and told by parkCheck when no attempt is left.
     if (!(error instanceof WorkbookRefused)) throw error;
+    await failCheck(services.orm.em.fork(), run, {
+      code: `workbook.${error.code}`,
+      detail: refusalText(error),
+      params: error.params,
+    });
   }
 };
 
@@ -43,37 +40,20 @@ async function check(
   const { services, signal } = tools;
   const stored = await newestWorkbook(em, run);
   if (!stored) return finishEmpty(em, run);
-  const workbook = await readStoredWorkbook(services.blobs, stored.sha256, signal);
-  const whole = readSource(workbook);
-  const loaded = await loadContext(em, run, whole);
-  const named = nameOtherOrder(whole, loaded.orderNumber);
-  const source = run.n === 0 ? named : scopeToReturned(named, loaded.returned);
-  const report = services.orm.em.fork();
-  const progress = (done: number) =>
-    setProgress(report, {
-      subject: `check:${run.revisionId}`,
-      state: 'running',
-      done,
-      total: source.lines.length,
+  await withCheckProcess({ blobs: services.blobs, sha256: stored.sha256, signal }, async (checking) => {
+    const needs = await checking.needs();
+    const report = services.orm.em.fork();
+    const progress = (done: number, total: number | null) =>
+      setProgress(report, { subject: `check:${run.revisionId}`, state: 'running', done, total });
+    // Of a returned revision some lines only are checked.
+    await progress(0, run.n === 0 ? needs.lines : null);
+    const summary = await checking.compute(await loadContext(em, run, needs));
+    signal.throwIfAborted();
+    await storeResult(em, {
+      run,
+      summary,
+      documents: checking.documents(),
+      progress: (done) => progress(done, summary.counts.lines),
     });
-  await progress(0);
-  const result = checkBatch(source, loaded.context);
-  signal.throwIfAborted();
-  await storeResult(em, { run, source, result, loaded, progress });
-}
-
-/** What the person is told; null while the queue will try again by itself. */
-function problemOf(error: unknown, last: boolean): CheckProblem | null {
-  if (error instanceof WorkbookRefused)
-    return {
-      code: `workbook.${error.code}`,
-      detail: refusalText(error),
-      params: error.params,
-    };
-  if (!last) return null;
-  return {
-    code: 'check.failed',
-    detail:
-      'The check could not be finished, and what you uploaded is kept. Upload the workbook again; if it goes on, tell the administrator.',
-  };
+  });
 }

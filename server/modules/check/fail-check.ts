@@ -17,15 +17,16 @@ export type CheckProblem = {
 /** Ends a check without a result: the reason is kept and shown, and the revision is a draft again. */
 export async function failCheck(
   em: EntityManager,
-  started: StartedRun,
+  started: Pick<StartedRun, 'revisionId' | 'input'>,
   problem: CheckProblem,
 ): Promise<void> {
   await em.transactional(async (tx) => {
     const revision = await lockForCheck(tx, started.revisionId);
     await run(
       tx,
-      `update check_runs set state = 'failed', problem = $2, finished_at = now() where id = $1 and state <> 'done'`,
-      [started.id, JSON.stringify(problem)],
+      `update check_runs set state = 'failed', problem = $3, finished_at = now()
+       where revision_id = $1 and input = $2 and state <> 'done'`,
+      [started.revisionId, started.input, JSON.stringify(problem)],
     );
     // A newer input has its own check, which says where the revision stands.
     if (!revision || revision.input !== started.input) return;

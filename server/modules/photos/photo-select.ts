@@ -30,7 +30,8 @@ export const PHOTO_SELECT = `
 select p.id, p.batch_id, b.contractor_id, p.file_name, p.sha256,
   case when not m.removed then m.line_id end as line_id, case when not m.removed then l.structure_number end as structure_number,
   case when not m.removed then m.view end as view, case when not m.removed then m.method end as method,
-  f.type, f.taken_wall, f.latitude, f.longitude, f.width, f.height, f.thumb_sha256, f.display_sha256, f.problem,
+  f.type, f.taken_wall, f.latitude, f.longitude, f.width, f.height, f.thumb_sha256, f.display_sha256,
+  case when f.sha256 is not null then f.problem else waiting.problem end as problem,
   f.sha256 is not null as prepared, r.latitude as line_latitude, r.longitude as line_longitude,
   newest.status as newest_status
 from photos p
@@ -38,6 +39,7 @@ join batches b on b.id = p.batch_id
 join revisions pv on pv.id = p.revision_id
 join lateral (select status, run_id from revisions where batch_id = b.id order by n desc limit 1) newest on true
 left join photo_facts f on f.sha256 = p.sha256 and f.pipeline = $1
+left join job_progress waiting on waiting.subject = 'photos:' || p.batch_id and waiting.state = 'failed'
 left join lateral (select * from photo_matches x where x.photo_id = p.id order by x.seq desc limit 1) m on true
 left join lines l on l.id = m.line_id
 left join lateral (

@@ -13,5 +13,6 @@ export const preparePhotosJob = defineJob<PreparePhotosPayload>({
   },
   retryLimit: 4,
   expireSeconds: 900,
+  loadParked: () => import('./park-photos.ts').then((module) => ({ parked: module.parkPhotos })),
   load: () => import('./prepare-photos.ts').then((module) => ({ handler: module.preparePhotos })),
 });

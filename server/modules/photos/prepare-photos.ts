@@ -28,22 +28,33 @@ export const preparePhotos: JobHandler<PreparePhotosPayload> = async (
      )`,
     [batchId, PHOTO_PIPELINE],
   );
-  if (waiting.length === 0) return;
+  const total = waiting.length;
+  const subject = `photos:${batchId}`;
+  if (total === 0) {
+    await setProgress(em, { subject, state: 'done', done: 0, total });
+    return;
+  }
+  await setProgress(em, { subject, state: 'running', done: 0, total });
+  const missing: string[] = [];
   const process = new PictureProcess();
   try {
     await withTempFolder('upstand-photos-', async (folder) => {
       for (const [index, { sha256 }] of waiting.entries()) {
-        await preparePhoto({ em, services, process, folder, sha256, signal });
-        const done = index + 1;
-        const state = done < waiting.length ? 'running' : 'done';
-        await setProgress(em, { subject: `photos:${batchId}`, state, done, total: waiting.length });
+        if (!(await preparePhoto({ em, services, process, folder, sha256, signal }))) missing.push(sha256);
+        await setProgress(em, { subject, state: 'running', done: index + 1, total });
       }
     });
   } finally {
     process.close();
   }
+  if (missing.length > 0)
+    throw new Error(
+      `The store of files lacks the bytes of ${missing.length} photographs: ${missing.join(', ')}.`,
+    );
+  await setProgress(em, { subject, state: 'done', done: total, total });
 };
 
+/** False: the store lacks its bytes. The others are prepared all the same. */
 async function preparePhoto(options: {
   em: EntityManager;
   services: Services;
@@ -51,7 +62,7 @@ async function preparePhoto(options: {
   folder: string;
   sha256: string;
   signal: AbortSignal;
-}): Promise<void> {
+}): Promise<boolean> {
   const { em, services, process, folder, sha256, signal } = options;
   const files = {
     source: join(folder, 'source'),
@@ -62,10 +73,10 @@ async function preparePhoto(options: {
     await services.blobs.readTo(sha256, files.source, { signal });
     const answer = await process.decode(files, signal);
     await keep({ em, services, sha256, answer, files, signal });
+    return true;
   } catch (error) {
-    // Its bytes are gone: the others are prepared all the same.
     if (!(error instanceof BlobMissing)) throw error;
-    services.log.error({ sha256 }, 'the bytes of a photograph are missing from the blob store');
+    return false;
   } finally {
     for (const path of Object.values(files)) await rm(path, { force: true });
   }

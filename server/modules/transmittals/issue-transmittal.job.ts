@@ -13,5 +13,6 @@ export const issueTransmittalJob = defineJob<IssueTransmittalPayload>({
   },
   retryLimit: 4,
   expireSeconds: 900,
+  loadParked: () => import('./park-transmittal.ts').then((module) => ({ parked: module.parkTransmittal })),
   load: () => import('./issue-transmittal.ts').then((module) => ({ handler: module.issueTransmittal })),
 });

@@ -2,7 +2,7 @@ import { PassThrough } from 'node:stream';
 import { IsolationLevel } from '@mikro-orm/core';
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { Services } from '#server/container.ts';
-import { row, rows, run } from '#server/db/rows.ts';
+import { row, run } from '#server/db/rows.ts';
 import type { JobHandler } from '#server/jobs/define-job.ts';
 import { setProgress } from '#server/jobs/progress.ts';
 import { queueMail } from '#server/mail/queue-mail.ts';
@@ -23,7 +23,7 @@ type Written = { sha256: string; size: number; digest: string; rows: number };
 
 /** Writes the as-built of a transmittal into the blob store and issues it. Repeatable: what is issued is left alone. */
 export const issueTransmittal: JobHandler<IssueTransmittalPayload> = async ({ transmittalId }, context) => {
-  const { services, em, job, signal } = context;
+  const { services, em, signal } = context;
   const head = await row<TransmittalHead>(
     em,
     // A failed one comes here again only when an administrator tries its parked job again.
@@ -32,13 +32,8 @@ export const issueTransmittal: JobHandler<IssueTransmittalPayload> = async ({ tr
     [transmittalId],
   );
   if (!head) return;
-  try {
-    const written = await writeToStore(services, { head, signal });
-    await em.transactional((tx) => issue(tx, { head, written }));
-  } catch (error) {
-    if (job.last) await markFailed(em, head);
-    throw error;
-  }
+  const written = await writeToStore(services, { head, signal });
+  await em.transactional((tx) => issue(tx, { head, written }));
 };
 
 async function writeToStore(
@@ -137,32 +132,4 @@ async function issue(
       },
     });
   }
-}
-
-/** The last attempt failed: the page says so and what to do; an administrator sees the parked job. */
-async function markFailed(em: EntityManager, head: TransmittalHead): Promise<void> {
-  const problem = {
-    code: 'transmittal.failed',
-    detail:
-      'The workbook could not be written after several attempts. Nothing was issued. An administrator can look at the parked job and try it again.',
-  };
-  await em.transactional(async (tx) => {
-    await rows(
-      tx,
-      `update transmittals set state = 'failed', problem = $2 where id = $1 and state = 'running'`,
-      [head.id, JSON.stringify(problem)],
-    );
-    await setProgress(tx, {
-      subject: `transmittal:${head.id}`,
-      state: 'failed',
-      done: 0,
-      total: null,
-      problem,
-    });
-    await appendTrail(tx, {
-      actor: null,
-      action: 'transmittal.failed',
-      subject: { type: 'transmittal', id: head.id, label: `${head.number} rev ${head.revision}` },
-    });
-  });
 }
