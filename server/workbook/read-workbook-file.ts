@@ -15,17 +15,20 @@ export type ReadOptions = {
   readonly timeLimitMs?: number;
   /** Resident memory at which the reading process is ended; buffers are outside the heap limit. */
   readonly memoryLimitBytes?: number;
+  /** Heap of the reading process. */
+  readonly heapLimitMb?: number;
 };
 
-const HEAP_MB = 256;
 const WATCH_EVERY_MS = 50;
+/** How a process ends whose heap is full: by SIGABRT, or by what a shell makes of it. */
+const ABORTED = 134;
 const CHILD = fileURLToPath(new URL('./reader-child.ts', import.meta.url));
 const inSlot = createSlots(2);
 
-function startChild(path: string): ChildProcess {
+function startChild(path: string, heapLimitMb: number): ChildProcess {
   const loader = pathToFileURL(createRequire(import.meta.url).resolve('tsx')).href;
   return fork(CHILD, [path], {
-    execArgv: [`--max-old-space-size=${HEAP_MB}`, '--import', loader],
+    execArgv: [`--max-old-space-size=${heapLimitMb}`, '--import', loader],
     // Nothing of the server's settings (database, secrets) is within reach of code that reads a stranger's file.
     env: { TZ: 'UTC', PATH: process.env['PATH'] ?? '', NODE_ENV: 'production' },
     stdio: ['ignore', 'ignore', 'ignore', 'ipc'],
@@ -34,10 +37,10 @@ function startChild(path: string): ChildProcess {
 
 function readInChild(
   path: string,
-  { timeLimitMs = 30_000, memoryLimitBytes = 400_000_000 }: ReadOptions,
+  { timeLimitMs = 30_000, memoryLimitBytes = 400_000_000, heapLimitMb = 256 }: ReadOptions,
 ): Promise<Workbook> {
   return new Promise((resolve, reject) => {
-    const child = startChild(path);
+    const child = startChild(path, heapLimitMb);
     const collector = createCollector();
     let verdict: WorkbookRefused | null = null;
     let done = false;
@@ -55,20 +58,30 @@ function readInChild(
         if (bytes !== null && bytes > memoryLimitBytes) end(new WorkbookRefused('reader-memory'));
       });
     }, WATCH_EVERY_MS);
-    child.on('message', (message: ReaderMessage) => {
+    const receive = (message: ReaderMessage): void => {
       if (message.type === 'rows') {
         collector.add({ type: 'rows', sheet: message.sheet, rows: message.rows.map(unpackRow) });
       } else if (message.type === 'event') collector.add(message.event);
       else if (message.type === 'done') done = true;
       else verdict ??= new WorkbookRefused(message.code, message.params);
+    };
+    child.on('message', (message: ReaderMessage) => {
+      try {
+        receive(message);
+      } catch {
+        // Thrown here, it would end this process instead of that one.
+        end(new WorkbookRefused('reader-failed'));
+      }
     });
     child.on('error', () => end(new WorkbookRefused('reader-failed')));
-    child.on('close', () => {
+    child.on('close', (code, signal) => {
       clearTimeout(timer);
       clearInterval(watch);
       if (verdict !== null) reject(verdict);
-      else if (!done) reject(new WorkbookRefused('reader-failed'));
-      else {
+      else if (!done) {
+        const full = signal === 'SIGABRT' || code === ABORTED;
+        reject(new WorkbookRefused(full ? 'reader-memory' : 'reader-failed'));
+      } else {
         try {
           resolve(collector.finish());
         } catch (error) {

@@ -8,7 +8,8 @@ import type { PartSource } from '#shared/workbook/xml/part-source.ts';
 
 export type ZipSource = PartSource & { readonly close: () => void };
 
-const damaged = (): WorkbookRefused => new WorkbookRefused('zip-damaged');
+const damaged = (part?: string): WorkbookRefused =>
+  new WorkbookRefused('zip-damaged', part === undefined ? {} : { part });
 
 function openZip(bytes: Buffer): Promise<ZipFile> {
   return new Promise((resolve, reject) => {
@@ -24,9 +25,10 @@ function nameOf(entry: Entry): string {
   return partName(bytes.toString((entry.generalPurposeBitFlag & 0x800) === 0 ? 'latin1' : 'utf8'));
 }
 
-function checkEntry(entry: Entry): void {
-  if (entry.isEncrypted()) throw new WorkbookRefused('zip-encrypted');
-  if (isBomb(entry.uncompressedSize, entry.compressedSize)) throw new WorkbookRefused('zip-too-large');
+function checkEntry(entry: Entry, part: string): void {
+  if (entry.isEncrypted()) throw new WorkbookRefused('zip-encrypted', { part });
+  if (isBomb(entry.uncompressedSize, entry.compressedSize))
+    throw new WorkbookRefused('zip-too-large', { part });
 }
 
 function isBomb(inflated: number, packed: number): boolean {
@@ -43,14 +45,16 @@ function readDirectory(zip: ZipFile): Promise<Map<string, Entry>> {
     }
     const entries = new Map<string, Entry>();
     let total = 0;
-    zip.on('error', () => reject(damaged()));
+    zip.on('error', (error: Error) =>
+      reject(/encryption/.test(error.message) ? new WorkbookRefused('zip-encrypted') : damaged()),
+    );
     zip.on('end', () => resolve(entries));
     zip.on('entry', (entry: Entry) => {
       try {
-        checkEntry(entry);
+        const name = nameOf(entry);
+        checkEntry(entry, name);
         total += entry.uncompressedSize;
         if (total > READER_LIMITS.totalBytes) throw new WorkbookRefused('zip-too-large');
-        const name = nameOf(entry);
         if (entries.has(name)) throw new WorkbookRefused('zip-duplicate', { part: name });
         if (!name.endsWith('/')) entries.set(name, entry);
         zip.readEntry();
@@ -62,9 +66,9 @@ function readDirectory(zip: ZipFile): Promise<Map<string, Entry>> {
   });
 }
 
-function openStream(zip: ZipFile, entry: Entry): Promise<Readable> {
+function openStream(zip: ZipFile, entry: Entry, part: string): Promise<Readable> {
   return new Promise((resolve, reject) => {
-    zip.openReadStream(entry, (error, stream) => (error ? reject(damaged()) : resolve(stream)));
+    zip.openReadStream(entry, (error, stream) => (error ? reject(damaged(part)) : resolve(stream)));
   });
 }
 
@@ -72,8 +76,8 @@ function openStream(zip: ZipFile, entry: Entry): Promise<Readable> {
 export async function openZipSource(bytes: Buffer): Promise<ZipSource> {
   const zip = await openZip(bytes);
   let inflatedInAll = 0;
-  async function* inflate(entry: Entry): AsyncGenerator<Uint8Array> {
-    const stream = await openStream(zip, entry);
+  async function* inflate(entry: Entry, part: string): AsyncGenerator<Uint8Array> {
+    const stream = await openStream(zip, entry, part);
     let inflated = 0;
     let crc = 0;
     try {
@@ -81,17 +85,17 @@ export async function openZipSource(bytes: Buffer): Promise<ZipSource> {
         inflated += chunk.length;
         inflatedInAll += chunk.length;
         if (inflatedInAll > READER_LIMITS.totalBytes || isBomb(inflated, entry.compressedSize)) {
-          throw new WorkbookRefused('zip-too-large');
+          throw new WorkbookRefused('zip-too-large', { part });
         }
         crc = crc32(chunk, crc);
         yield chunk;
       }
     } catch (error) {
-      throw error instanceof WorkbookRefused ? error : damaged();
+      throw error instanceof WorkbookRefused ? error : damaged(part);
     } finally {
       stream.destroy();
     }
-    if (crc !== entry.crc32) throw damaged();
+    if (crc !== entry.crc32) throw damaged(part);
   }
   try {
     const entries = await readDirectory(zip);
@@ -101,7 +105,7 @@ export async function openZipSource(bytes: Buffer): Promise<ZipSource> {
       open: (name) => {
         const entry = entries.get(name);
         if (entry === undefined) throw new WorkbookRefused('part-missing', { part: name });
-        return inflate(entry);
+        return inflate(entry, name);
       },
       close: () => zip.close(),
     };

@@ -12,6 +12,12 @@ export const READER_LIMITS = {
   ratio: 200,
   ratioFromBytes: 5_000_000,
   sheets: 250,
+  /** Characters of a sheet's name; Excel itself allows 31. */
+  sheetName: 255,
+  /** Relationships of the workbook, content types. */
+  partNames: 10_000,
+  /** Cell styles and number formats; Excel itself allows 65,490. */
+  styles: 100_000,
   rows: 200_000,
   cells: 600_000,
   sharedStrings: 500_000,
@@ -19,7 +25,10 @@ export const READER_LIMITS = {
   characters: 20_000_000,
   /** Characters of one cell; Excel itself allows 32,767. */
   cellCharacters: 100_000,
+  /** Merged ranges of all sheets. */
   mergedRanges: 50_000,
+  /** Characters of the keywords in the file's properties. */
+  keywords: 10_000,
   xmlDepth: 100,
   /** Characters of XML since the last tag or text was complete: a single text node is held whole in memory. */
   xmlSilence: 1_000_000,

@@ -12,13 +12,17 @@ const DOCUMENTS: Readonly<Record<string, string>> = {
 
 type Params = RefusalParams;
 
-/** Where in the workbook it is, as far as it is known. */
-function at({ sheet, address }: Params): string {
-  if (sheet === undefined) return '';
-  return address === undefined
-    ? ` in sheet “${String(sheet)}”`
-    : ` at ${String(address)} of sheet “${String(sheet)}”`;
+/** Where in the workbook it is, as far as it is known: the cell, else the sheet, else the part within the file. */
+function at({ sheet, address, part }: Params): string {
+  if (sheet !== undefined) {
+    return address === undefined
+      ? ` in sheet “${String(sheet)}”`
+      : ` at ${String(address)} of sheet “${String(sheet)}”`;
+  }
+  return part === undefined ? '' : ` (part “${String(part)}” of the file)`;
 }
+
+const count = (limit: Params[string] | undefined): string => Number(limit).toLocaleString('en-US');
 
 const SENTENCES: Readonly<Record<RefusalCode, (params: Params) => string>> = {
   'empty-file': () =>
@@ -33,24 +37,36 @@ const SENTENCES: Readonly<Record<RefusalCode, (params: Params) => string>> = {
   'binary-workbook': () => `The workbook is in the binary .xlsb format. ${PLAIN}`,
   'other-document': ({ what }) =>
     `The file is ${DOCUMENTS[String(what)] ?? 'another kind of document'}, not an Excel workbook. Upload the filled-in template.`,
-  'zip-damaged': () => `The file is damaged: a part of it cannot be unpacked. ${DAMAGED}`,
-  'zip-encrypted': () => `A part of the file is encrypted. ${DAMAGED}`,
-  'zip-duplicate': () => `The file is damaged: it holds the same part twice. ${DAMAGED}`,
-  'zip-too-many-entries': () => `The file is made of too many parts. ${DAMAGED}`,
-  'zip-too-large': () => `Unpacked, the file is far larger than any batch. ${SMALLER}`,
+  'zip-damaged': (params) =>
+    `The file is damaged: ${params['part'] === undefined ? 'it is incomplete' : 'a part of it cannot be unpacked'}${at(params)}. ${DAMAGED}`,
+  'zip-encrypted': (params) =>
+    `A part of the file is encrypted${at(params)}. Save it as .xlsx without a password, and upload the new file.`,
+  'zip-duplicate': (params) => `The file is damaged: it holds the same part twice${at(params)}. ${DAMAGED}`,
+  'zip-too-many-entries': ({ limit }) =>
+    `The file is made of more than ${count(limit)} parts. Remove pictures and what does not belong to the template, save it, and upload it again.`,
+  'zip-too-large': (params) => `Unpacked, the file is far larger than any batch${at(params)}. ${SMALLER}`,
   'part-missing': (params) => `The file is damaged: a part that it names is missing${at(params)}. ${DAMAGED}`,
-  'xml-damaged': () => `The file is damaged: a part of it cannot be read. ${DAMAGED}`,
-  'xml-doctype': () => `The file holds instructions that no spreadsheet program writes. ${DAMAGED}`,
-  'xml-too-deep': () => `A part of the file is built in a way that no spreadsheet program writes. ${DAMAGED}`,
-  'xml-too-long': () => `One text in the file is longer than any cell can be. ${DAMAGED}`,
+  'too-many-parts': (params) =>
+    `A list in the file is far longer than that of any batch${at(params)}. ${DAMAGED}`,
+  'xml-damaged': (params) => `The file is damaged: a part of it cannot be read${at(params)}. ${DAMAGED}`,
+  'xml-doctype': (params) =>
+    `The file holds instructions that no spreadsheet program writes${at(params)}. ${DAMAGED}`,
+  'xml-too-deep': (params) =>
+    `A part of the file is built in a way that no spreadsheet program writes${at(params)}. ${DAMAGED}`,
+  'xml-too-long': (params) => `One text in the file is longer than any cell can be${at(params)}. ${DAMAGED}`,
   'string-index': (params) => `The file is damaged: the text of a cell is missing${at(params)}. ${DAMAGED}`,
   'cell-address': (params) =>
     `The file is damaged: a cell has an impossible address${at(params)}. ${DAMAGED}`,
   'cell-twice': (params) => `The file is damaged: a cell is there twice${at(params)}. ${DAMAGED}`,
-  'too-many-sheets': () => `The workbook has too many sheets. ${SMALLER}`,
-  'too-many-rows': ({ limit }) => `The workbook has more than ${String(limit)} filled rows. ${SMALLER}`,
-  'too-many-cells': () => `The workbook has too many filled cells. ${SMALLER}`,
-  'too-much-text': () => `The workbook holds too much text. ${SMALLER}`,
+  'too-many-sheets': ({ limit }) =>
+    `The workbook has more than ${count(limit)} sheets. Remove the sheets that do not belong to the template, and upload it again.`,
+  'too-many-rows': (params) =>
+    `The workbook has more than ${count(params['limit'])} filled rows; the limit was passed${at(params)}. ${SMALLER}`,
+  'too-many-cells': (params) =>
+    `The workbook has more than ${count(params['limit'])} filled cells; the limit was passed${at(params)}. ${SMALLER}`,
+  'too-many-merged': (params) =>
+    `The workbook has more than ${count(params['limit'])} merged ranges; the limit was passed${at(params)}. Unmerge its cells, and upload it again.`,
+  'too-much-text': (params) => `The workbook holds too much text${at(params)}. ${SMALLER}`,
   'reader-time': ({ seconds }) =>
     `Reading the workbook took longer than ${String(seconds)} seconds and was stopped. ${SMALLER}`,
   'reader-memory': () => `Reading the workbook needed too much memory and was stopped. ${SMALLER}`,

@@ -16,6 +16,7 @@ export const REFUSAL_CODES = [
   'zip-too-many-entries',
   'zip-too-large',
   'part-missing',
+  'too-many-parts',
   'xml-damaged',
   'xml-doctype',
   'xml-too-deep',
@@ -26,6 +27,7 @@ export const REFUSAL_CODES = [
   'too-many-sheets',
   'too-many-rows',
   'too-many-cells',
+  'too-many-merged',
   'too-much-text',
   'reader-time',
   'reader-memory',
@@ -34,6 +36,13 @@ export const REFUSAL_CODES = [
 export type RefusalCode = (typeof REFUSAL_CODES)[number];
 
 export type RefusalParams = Readonly<Record<string, Scalar>>;
+
+/** Names out of the file go into messages and rows: no longer than a line, and nothing that no store takes. */
+function printable(value: Scalar): Scalar {
+  if (typeof value !== 'string') return value;
+  const short = value.length > 200 ? `${value.slice(0, 199)}…` : value;
+  return short.replaceAll('\0', '\ufffd').replace(/\p{Surrogate}/gu, '\ufffd');
+}
 
 /** A file that is refused as a whole, as code and parameters: nothing of it was taken over. */
 export class WorkbookRefused extends Error {
@@ -44,6 +53,6 @@ export class WorkbookRefused extends Error {
     super(`workbook refused: ${code} ${JSON.stringify(params)}`);
     this.name = 'WorkbookRefused';
     this.code = code;
-    this.params = params;
+    this.params = Object.fromEntries(Object.entries(params).map(([name, value]) => [name, printable(value)]));
   }
 }

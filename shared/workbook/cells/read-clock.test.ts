@@ -59,6 +59,14 @@ describe('times', () => {
     expect(short(readCell(cell, DAY, SYSTEM))).toBe('2026-04-14');
   });
 
+  it('takes an ISO time a hair before a minute for that minute, as it takes a serial', () => {
+    const iso = (raw: string) => short(readCell({ ...textCell(raw), kind: 'date' }, CLOCK, SYSTEM));
+    expect(iso('2026-04-14T10:59:59.9999999999984025')).toBe('2026-04-14T11:00');
+    expect(iso('2026-12-31T23:59:59.9999999Z')).toBe('2027-01-01T00:00');
+    expect(iso('2026-04-14T10:59:59.4')).toBe('2026-04-14T10:59');
+    expect(iso('2026-04-14T10:59:58.9')).toBe('2026-04-14T10:59');
+  });
+
   it('takes days with or without a time', () => {
     expect(read('4/1/2026', DAY)).toBe('2026-04-01');
     expect(read('2026-04-01 10:00', DAY)).toBe('2026-04-01');

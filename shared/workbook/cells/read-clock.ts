@@ -1,4 +1,4 @@
-import { parseDay } from '#shared/dates/calendar-day.ts';
+import { addDays, parseDay } from '#shared/dates/calendar-day.ts';
 import { fromSerial } from '#shared/dates/excel-serial.ts';
 import type { Cell } from '#shared/workbook/types.ts';
 import { cleanMeasure } from './clean-text.ts';
@@ -58,11 +58,22 @@ function textWhen(text: string): When | null | 'no-such-day' {
   return parseDay(day) === null ? 'no-such-day' : { day, time };
 }
 
+/** A serial of 11:00 that went through floating point is written 10:59:59.99…: within half a second of a minute it is that minute. */
+const JUST_BEFORE = /:59\.[5-9]\d*z?$/;
+
+function nextMinute({ day, time }: When): When {
+  const minutes = time === null ? 0 : Number(time.slice(0, 2)) * 60 + Number(time.slice(3)) + 1;
+  if (minutes === 1440) return { day: day === null ? null : addDays(day, 1), time: '00:00' };
+  return { day, time: time === null ? null : `${two(Math.floor(minutes / 60))}:${two(minutes % 60)}` };
+}
+
 function whenOf(cell: Cell, date1904: boolean): When | null | 'no-such-day' {
   if (cell.kind === 'number') return serialWhen(cell, date1904);
   const text = cleanMeasure(cell.raw);
   // Only ISO date cells of the file format may end in Z; there it says nothing about a zone.
-  return textWhen(cell.kind === 'date' ? text.replace(/z$/, '') : text);
+  if (cell.kind !== 'date') return textWhen(text);
+  const when = textWhen(text.replace(/z$/, ''));
+  return when !== null && when !== 'no-such-day' && JUST_BEFORE.test(text) ? nextMinute(when) : when;
 }
 
 /** A wall-clock time `YYYY-MM-DDTHH:mm` (seconds dropped) from a real date-time, or from text in the guide's forms. */

@@ -60,13 +60,17 @@ export function cellValue(
     case 'b': {
       const text = raw.value.trim().toLowerCase();
       if (text === '') return null;
+      if (!/^(?:[01]|true|false)$/.test(text)) return { kind: 'error', raw: raw.value.trim() };
       return { kind: 'boolean', raw: text === '1' || text === 'true' ? 'TRUE' : 'FALSE' };
     }
     case 'e':
       return { kind: 'error', raw: raw.value.trim() };
     case 'd':
       return raw.value.trim() === '' ? null : { kind: 'date', raw: raw.value.trim() };
-    default:
+    case 'n':
       return numberBody(raw, tables);
+    default:
+      // No type of the format: nobody knows what its text stands for.
+      return { kind: 'error', raw: storable(raw.value.trim()) };
   }
 }

@@ -26,7 +26,7 @@ export async function findMainPart(parts: PartSource): Promise<{ main: string; c
 
   const other = OTHERS.find(([pattern]) => pattern.test(type));
   if (other) throw new WorkbookRefused('other-document', { what: other[1] });
-  if (type.includes('sheet.binary')) throw new WorkbookRefused('binary-workbook');
+  if (type.includes('sheet.binary') || main.endsWith('.bin')) throw new WorkbookRefused('binary-workbook');
   // Macros are never run here, but a record must not travel on as a file that can act.
   if (type.includes('macroenabled') || parts.names.some((name) => name.endsWith('/vbaproject.bin'))) {
     throw new WorkbookRefused('macro-enabled');

@@ -1,4 +1,3 @@
-import { READER_LIMITS } from '#shared/workbook/limits.ts';
 import type { Row, SheetInfo } from '#shared/workbook/types.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
 import { findMainPart } from './main-part.ts';
@@ -52,7 +51,7 @@ function placeSheet(entry: SheetEntry, relationships: Map<string, Relationship>,
 export async function* readPackage(parts: PartSource): AsyncGenerator<WorkbookEvent> {
   const { main, core } = await findMainPart(parts);
   const { date1904, sheets } = await readWorkbookPart(main, parts.open(main));
-  if (sheets.length > READER_LIMITS.sheets) throw new WorkbookRefused('too-many-sheets');
+  if (sheets.length === 0) throw new WorkbookRefused('not-a-workbook');
   const rels = relationshipsPart(main);
   if (!parts.has(rels)) throw new WorkbookRefused('part-missing', { part: rels });
   const relationships = await readRelationships(rels, parts.open(rels));
@@ -71,17 +70,23 @@ export async function* readPackage(parts: PartSource): AsyncGenerator<WorkbookEv
     strings: stringsPart === null ? [] : await readSharedStrings(stringsPart, parts.open(stringsPart)),
     dateStyles: stylesPart === null ? [] : await readDateStyles(stylesPart, parts.open(stylesPart)),
   };
-  const budget: Budget = { rows: 0, cells: 0, characters: 0 };
+  const budget: Budget = { rows: 0, cells: 0, characters: 0, merged: 0 };
   for (const [sheet, { info, part }] of places.entries()) {
     if (info.kind !== 'worksheet') continue;
     if (!parts.has(part)) throw new WorkbookRefused('part-missing', { sheet: info.name });
-    for await (const read of readSheet(
-      { sheet: info.name, part, chunks: parts.open(part) },
-      tables,
-      budget,
-    )) {
-      if ('rows' in read) yield { type: 'rows', sheet, rows: read.rows };
-      else yield { type: 'merged', sheet, ranges: read.merged };
+    try {
+      for await (const read of readSheet(
+        { sheet: info.name, part, chunks: parts.open(part) },
+        tables,
+        budget,
+      )) {
+        if ('rows' in read) yield { type: 'rows', sheet, rows: read.rows };
+        else yield { type: 'merged', sheet, ranges: read.merged };
+      }
+    } catch (error) {
+      // Whoever opens the workbook knows its sheets, not its parts.
+      if (!(error instanceof WorkbookRefused) || 'sheet' in error.params) throw error;
+      throw new WorkbookRefused(error.code, { ...error.params, sheet: info.name });
     }
   }
 }

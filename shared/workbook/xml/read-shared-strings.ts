@@ -9,7 +9,13 @@ export async function readSharedStrings(part: string, chunks: AsyncIterable<Uint
   let item = '';
   let run = '';
   let characters = 0;
+  const add = (): void => {
+    item += decodeEscapes(run);
+    if (characters + item.length > READER_LIMITS.characters)
+      throw new WorkbookRefused('too-much-text', { part });
+  };
   await parseXmlPart(part, chunks, {
+    root: 'sst',
     open: (name) => {
       if (name === 'si') item = '';
       if (name === 't') run = '';
@@ -18,10 +24,10 @@ export async function readSharedStrings(part: string, chunks: AsyncIterable<Uint
       if (path.at(-1) === 't' && !path.includes('rPh')) run += text;
     },
     close: (name, parents) => {
-      if (name === 't' && !parents.includes('rPh')) item += decodeEscapes(run);
+      if (name === 't' && !parents.includes('rPh')) add();
       if (name !== 'si') return;
       characters += item.length;
-      if (strings.length >= READER_LIMITS.sharedStrings || characters > READER_LIMITS.characters) {
+      if (strings.length >= READER_LIMITS.sharedStrings) {
         throw new WorkbookRefused('too-much-text', { part });
       }
       strings.push(item);

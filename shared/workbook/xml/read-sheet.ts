@@ -7,7 +7,7 @@ import { decodeEscapes } from './decode-escapes.ts';
 import { attribute, parseXml, type XmlTag } from './parse-xml.ts';
 
 /** Counts over all sheets of one workbook. */
-export type Budget = { rows: number; cells: number; characters: number };
+export type Budget = { rows: number; cells: number; characters: number; merged: number };
 
 export type SheetPart = {
   readonly sheet: string;
@@ -16,6 +16,9 @@ export type SheetPart = {
 };
 
 type OpenCell = { -readonly [K in keyof RawCell]: RawCell[K] } & { row: number; column: number; run: string };
+
+/** Characters of the longest range of cells, `XFD1048576:XFD1048576`. */
+const LONGEST_RANGE = 21;
 
 /** Rows of one worksheet in the order of the file, handed on chunk by chunk; at the end the merged ranges. Blank cells and rows are left out. */
 export async function* readSheet(
@@ -33,14 +36,14 @@ export async function* readSheet(
   const endRow = (): void => {
     if (cells.length === 0) return;
     if (++budget.rows > READER_LIMITS.rows)
-      throw new WorkbookRefused('too-many-rows', { limit: READER_LIMITS.rows });
+      throw new WorkbookRefused('too-many-rows', { sheet, limit: READER_LIMITS.rows });
     rows.push({ row, cells });
     cells = [];
   };
   const openRow = (tag: XmlTag): void => {
     const given = attribute(tag, 'r');
-    row = given === undefined ? row + 1 : Number(given);
-    if (!Number.isInteger(row) || row < 1 || row > LAST_ROW) {
+    row = given === undefined ? row + 1 : /^\d{1,7}$/.test(given.trim()) ? Number(given) : 0;
+    if (row < 1 || row > LAST_ROW) {
       throw new WorkbookRefused('cell-address', { sheet, address: given ?? String(row) });
     }
     column = 0;
@@ -78,23 +81,40 @@ export async function* readSheet(
       throw new WorkbookRefused('too-much-text', { sheet, address });
     }
     if (++budget.cells > READER_LIMITS.cells) {
-      throw new WorkbookRefused('too-many-cells', { limit: READER_LIMITS.cells });
+      throw new WorkbookRefused('too-many-cells', { sheet, limit: READER_LIMITS.cells });
     }
     cells.push({ address, column: done.column, ...body, ...(done.formula ? { formula: true } : {}) });
   };
 
+  const openMerged = (tag: XmlTag): void => {
+    if (++budget.merged > READER_LIMITS.mergedRanges) {
+      throw new WorkbookRefused('too-many-merged', { sheet, limit: READER_LIMITS.mergedRanges });
+    }
+    const range = attribute(tag, 'ref') ?? '';
+    if (range.length <= LONGEST_RANGE) merged.push(range);
+  };
+  /** A second value of one cell: joined to the first it would be another number. */
+  const openOnce = (open: OpenCell, name: 'value' | 'inline'): void => {
+    if (open[name] !== null) {
+      throw new WorkbookRefused('cell-twice', { sheet, address: cellAddress(open.row, open.column) });
+    }
+    open[name] = '';
+  };
+
+  let hasData = false;
   const steps = parseXml(part, chunks, {
+    root: 'worksheet',
     open: (name, tag, parents) => {
       const parent = parents.at(-1);
       if (name === 'row' && parent === 'sheetData') openRow(tag);
       else if (name === 'c' && parent === 'row') openCell(tag);
-      else if (name === 'mergeCell') merged.push(attribute(tag, 'ref') ?? '');
+      else if (name === 'mergeCell') openMerged(tag);
+      else if (name === 'sheetData' && parents.length === 1) hasData = true;
       else if (cell === null) return;
-      else if (name === 'v' && parent === 'c') cell.value ??= '';
-      else if (name === 'f' && parent === 'c') cell.formula = true;
-      else if (name === 'is' && parent === 'c') cell.inline ??= '';
+      else if (name === 'v') openOnce(cell, 'value');
+      else if (name === 'f') cell.formula = true;
+      else if (name === 'is') openOnce(cell, 'inline');
       else if (name === 't') cell.run = '';
-      if (merged.length > READER_LIMITS.mergedRanges) throw new WorkbookRefused('too-many-cells', { sheet });
     },
     text: (text, path) => {
       if (cell === null) return;
@@ -110,6 +130,9 @@ export async function* readSheet(
         cell = null;
       } else if (name === 't' && !parents.includes('rPh') && cell.inline !== null) {
         cell.inline += decodeEscapes(cell.run);
+        if (cell.inline.length > READER_LIMITS.cellCharacters) {
+          throw new WorkbookRefused('too-much-text', { sheet, address: cellAddress(cell.row, cell.column) });
+        }
       }
     },
   });
@@ -117,5 +140,7 @@ export async function* readSheet(
     if (rows.length > 0) yield { rows };
     rows = [];
   }
+  // Every worksheet has this element, though it be empty: without it the part holds something else.
+  if (!hasData) throw new WorkbookRefused('xml-damaged', { part, sheet });
   if (merged.length > 0) yield { merged };
 }
