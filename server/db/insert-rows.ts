@@ -6,7 +6,8 @@ import { storableText } from '#server/db/storable-text.ts';
 /** Rows of one statement: one JSON document of them stays well under the protocol's limits at this number. */
 const CHUNK = 1_000;
 
-function documentOf(list: readonly Readonly<Record<string, unknown>>[]): string {
+/** Rows as one JSON document that PostgreSQL takes; for `insertDocument`. */
+export function rowsDocument(list: readonly Readonly<Record<string, unknown>>[]): string {
   const text = JSON.stringify(list);
   if (!/\\u0000|\\ud[89a-f]/i.test(text)) return text;
   return JSON.stringify(list, (_key, part: unknown) =>
@@ -37,8 +38,17 @@ export async function insertRows(
   if (first === undefined) return;
   const text = statement(table, Object.keys(first));
   for (let at = 0; at < list.length; at += CHUNK) {
-    await run(em, text, [documentOf(list.slice(at, at + CHUNK))]);
+    await run(em, text, [rowsDocument(list.slice(at, at + CHUNK))]);
   }
+}
+
+/** Inserts rows that were written as one document elsewhere; as insertRows, in one statement. */
+export async function insertDocument(
+  em: EntityManager,
+  table: string,
+  { columns, text }: { readonly columns: readonly string[]; readonly text: string },
+): Promise<void> {
+  await run(em, statement(table, columns), [text]);
 }
 
 /** As insertRows, and gives back the `returning` columns in no promised order. */
@@ -55,7 +65,7 @@ export async function insertRowsReturning<T extends QueryResultRow>(
   if (first === undefined) return out;
   const text = `${statement(options.table, Object.keys(first))} returning ${options.returning.map(quoted).join(', ')}`;
   for (let at = 0; at < options.list.length; at += CHUNK) {
-    out.push(...(await rows<T>(em, text, [documentOf(options.list.slice(at, at + CHUNK))])));
+    out.push(...(await rows<T>(em, text, [rowsDocument(options.list.slice(at, at + CHUNK))])));
   }
   return out;
 }

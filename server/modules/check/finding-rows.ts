@@ -1,20 +1,19 @@
 import type { Finding } from '#shared/findings/types.ts';
 import { lineKey } from '#shared/records/structure-key.ts';
 import type { StartedRun } from './start-run.ts';
-import { storableJson } from './storable-json.ts';
 
 /** Rows of `findings` of a check in its order, keys as the columns. */
 export function findingRows(options: {
   started: StartedRun;
   findings: readonly Finding[];
-  idByKey: ReadonlyMap<string, string>;
+  recordIds: ReadonlyMap<string, string>;
   lineIds: ReadonlyMap<string, string>;
 }): Record<string, unknown>[] {
-  const { started, findings, idByKey, lineIds } = options;
+  const { started, findings, recordIds, lineIds } = options;
   return findings.map((finding, index) => {
     const key =
       finding.kind === null ? null : lineKey(finding.kind, finding.structureNumber, finding.occurrence ?? 1);
-    const recordId = key === null ? null : (idByKey.get(key) ?? null);
+    const recordId = key === null ? null : (recordIds.get(key) ?? null);
     return {
       run_id: started.id,
       revision_id: started.revisionId,
@@ -24,19 +23,19 @@ export function findingRows(options: {
       code: finding.code,
       severity: finding.severity,
       kind: finding.kind,
-      structure_number: storableJson(finding.structureNumber),
+      structure_number: finding.structureNumber,
       occurrence: finding.occurrence,
-      sheet: storableJson(finding.sheet),
+      sheet: finding.sheet,
       row: finding.row,
       cell: finding.cell,
       field: finding.field,
-      measured: storableJson(finding.measured),
-      limit_value: storableJson(finding.limit),
+      measured: finding.measured,
+      limit_value: finding.limit,
       margin: finding.margin,
       unit: finding.unit,
       uncertainty: finding.uncertainty,
-      params: storableJson(finding.params),
-      owner_params: storableJson(finding.ownerParams),
+      params: finding.params,
+      owner_params: finding.ownerParams,
       fingerprint: finding.fingerprint,
     };
   });

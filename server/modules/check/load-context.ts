@@ -1,35 +1,23 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { row } from '#server/db/rows.ts';
 import { geoAreaOf } from '#shared/calc/geo-area.ts';
-import type { SourceBatch } from '#shared/records/types.ts';
-import type { CheckContext } from '#shared/rules/types.ts';
+import type { CheckInputs, SourceNeeds } from './check-messages.ts';
 import { loadDesign } from './load-design.ts';
 import { loadEarlierFailures } from './load-earlier-failures.ts';
-import { loadLines, type KnownLines } from './load-lines.ts';
-import { loadLots, loadLotUse, lotsPoured, type LotRow } from './load-lots.ts';
+import { loadLines } from './load-lines.ts';
+import { loadLots, loadLotUse, lotsPoured } from './load-lots.ts';
 import { loadNeighbours } from './load-neighbours.ts';
 import { loadOtherPhotos, loadPhotos } from './load-photos.ts';
 import { loadRegister } from './load-register.ts';
 import { loadProducts, loadStandards } from './load-versions.ts';
-import { placePhotos, type Placing } from './place-photos.ts';
 import type { StartedRun } from './start-run.ts';
-
-export type LoadedContext = {
-  readonly context: CheckContext;
-  readonly orderNumber: string;
-  readonly lots: readonly LotRow[];
-  readonly placing: Placing;
-  /** `kind|STRUCTURE` of the lines that came back with an earlier revision. */
-  readonly returned: ReadonlySet<string>;
-  readonly lines: KnownLines;
-};
 
 /** What the batch knows beside its lines, by one query a matter, whatever the number of lines. */
 export async function loadContext(
   em: EntityManager,
   run: StartedRun,
-  source: SourceBatch,
-): Promise<LoadedContext> {
+  needs: SourceNeeds,
+): Promise<CheckInputs> {
   const order = await row<{ number: string; zone: string; area: unknown; first_submitted: string | null }>(
     em,
     `select w.number, w.zone, w.area, (
@@ -43,36 +31,32 @@ export async function loadContext(
   const standards = await loadStandards(em, asOf);
   const products = await loadProducts(em, asOf);
   const lots = await loadLots(em);
-  const lotUse = await loadLotUse(em, { ...run, lotIds: lotsPoured(lots, source) });
+  const lotUse = await loadLotUse(em, { ...run, lotIds: lotsPoured(lots, needs.lotKeys) });
   const design = await loadDesign(em, run.workOrderId);
-  const neighbours = await loadNeighbours(em, { ...run, source });
-  const register = await loadRegister(em, { ...run, source });
+  const neighbours = await loadNeighbours(em, { ...run, squares: needs.squares });
+  const register = await loadRegister(em, { ...run, structureKeys: needs.structureKeys });
   const otherPhotos = await loadOtherPhotos(em, run);
   const previous = await loadEarlierFailures(em, run);
   const lines = await loadLines(em, run.batchId);
-  const placing = placePhotos({ photos: await loadPhotos(em, run.batchId), source, known: lines });
+  const photos = await loadPhotos(em, run.batchId);
   return {
-    orderNumber: order.number,
-    context: {
-      zone: order.zone,
-      asOfMs: run.asOfMs,
-      standards,
-      products,
-      lots: lots.map(({ id: _id, ...lot }) => lot),
-      lotUse,
-      design,
-      neighbours,
-      // An area that is no polygon is not known: the rule says that it did not run.
-      area: order.area === null ? 'none' : geoAreaOf(order.area),
-      register,
-      photos: placing.byLine,
-      otherPhotos,
-      siblings: lines.standing,
-      previous,
+    frame: {
+      run,
+      orderNumber: order.number,
+      lots,
+      context: {
+        zone: order.zone,
+        asOfMs: run.asOfMs,
+        standards,
+        products,
+        lotUse,
+        neighbours,
+        // An area that is no polygon is not known: the rule says that it did not run.
+        area: order.area === null ? 'none' : geoAreaOf(order.area),
+        register,
+        otherPhotos,
+      },
     },
-    lots,
-    placing,
-    returned: lines.returned,
-    lines,
+    lists: { photos, lines, design, previous: [...previous] },
   };
 }

@@ -12,14 +12,23 @@ export type KnownLines = {
   readonly returned: ReadonlySet<string>;
 };
 
-type LineRow = { id: string; kind: Kind; structure_number: string; occurrence: number; state: LineState };
+export type LineRow = {
+  id: string;
+  kind: Kind;
+  structure_number: string;
+  occurrence: number;
+  state: LineState;
+};
 
-export async function loadLines(em: EntityManager, batchId: string): Promise<KnownLines> {
-  const lines = await rows<LineRow>(
+export function loadLines(em: EntityManager, batchId: string): Promise<LineRow[]> {
+  return rows<LineRow>(
     em,
     'select id, kind, structure_number, occurrence, state from lines where batch_id = $1',
     [batchId],
   );
+}
+
+export function knownLines(lines: readonly LineRow[]): KnownLines {
   const keysIn = (...states: LineState[]) =>
     new Set(
       lines.flatMap((line) =>

@@ -1,6 +1,5 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { rows } from '#server/db/rows.ts';
-import type { SourceBatch } from '#shared/records/types.ts';
 import { lotKey } from '#shared/rules/lot-index.ts';
 import type { LotFact, LotUse } from '#shared/rules/types.ts';
 
@@ -54,9 +53,7 @@ export function loadLotUse(
 }
 
 /** Ids of the lots that a workbook's pours name. */
-export function lotsPoured(lots: readonly LotRow[], source: SourceBatch): string[] {
-  const named = new Set(
-    source.pours.map(({ values }) => lotKey(String(values['product'] ?? ''), String(values['lot'] ?? ''))),
-  );
+export function lotsPoured(lots: readonly LotRow[], lotKeys: readonly string[]): string[] {
+  const named = new Set(lotKeys);
   return lots.filter(({ product, number }) => named.has(lotKey(product, number))).map(({ id }) => id);
 }

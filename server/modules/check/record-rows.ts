@@ -6,36 +6,40 @@ import type { Finding } from '#shared/findings/types.ts';
 import { lineKey } from '#shared/records/structure-key.ts';
 import type { Pour } from '#shared/rules/types.ts';
 import { RECORD_SCHEMA } from './engine.ts';
-import type { LoadedContext } from './load-context.ts';
 import type { LotRow } from './load-lots.ts';
 import type { StartedRun } from './start-run.ts';
-import { storableJson } from './storable-json.ts';
 
 type Row = Record<string, unknown>;
 type Checked = {
   readonly run: StartedRun;
-  readonly result: CheckResult;
-  readonly loaded: LoadedContext;
+  readonly lots: readonly LotRow[];
+  /** Some of the check's records, and how many came before them. */
+  readonly records: readonly CheckedRecord[];
+  readonly from: number;
+  /** Findings of the whole check. */
+  readonly findings: CheckResult['findings'];
   readonly lineIds: ReadonlyMap<string, string>;
+  readonly recordIds: ReadonlyMap<string, string>;
 };
-export type RecordRows = {
-  readonly records: readonly Row[];
-  readonly pours: readonly Row[];
-  /** Record id by line key. */
-  readonly idByKey: ReadonlyMap<string, string>;
-};
+export type RecordRows = { readonly records: readonly Row[]; readonly pours: readonly Row[] };
 
-/** Rows of `records` and `pours` of a check, keys as the columns. */
-export function recordRows({ run, result, loaded, lineIds }: Checked): RecordRows {
-  const lotIds = lotIndex(loaded.lots);
-  const byLine = findingsByLine(result.findings);
-  const idByKey = new Map<string, string>();
+const keyOf = (record: CheckedRecord): string =>
+  lineKey(record.kind, record.structureNumber, record.occurrence);
+
+/** New ids of a check's records by line key. */
+export const recordIds = (records: readonly CheckedRecord[]): ReadonlyMap<string, string> =>
+  new Map(records.map((record) => [keyOf(record), randomUUID()]));
+
+/** Rows of `records` and `pours` of a part of a check, keys as the columns. Texts are made storable where they are written out. */
+export function recordRows(checked: Checked): RecordRows {
+  const { run, lineIds } = checked;
+  const lotIds = lotIndex(checked.lots);
+  const byLine = findingsByLine(checked.findings);
   const records: Row[] = [];
   const pours: Row[] = [];
-  result.records.forEach((record, index) => {
-    const key = lineKey(record.kind, record.structureNumber, record.occurrence);
-    const id = randomUUID();
-    idByKey.set(key, id);
+  checked.records.forEach((record, index) => {
+    const key = keyOf(record);
+    const id = checked.recordIds.get(key);
     const own = record.pours.map((pour, n) => pourRow({ pour, recordId: id, n: n + 1, lotIds }));
     pours.push(...own);
     records.push({
@@ -43,14 +47,14 @@ export function recordRows({ run, result, loaded, lineIds }: Checked): RecordRow
       run_id: run.id,
       revision_id: run.revisionId,
       line_id: lineIds.get(key),
-      ordinal: index + 1,
+      ordinal: checked.from + index + 1,
       work_order_id: run.workOrderId,
       contractor_id: run.contractorId,
       lot_ids: [...new Set(own.flatMap(({ lot_id }) => (typeof lot_id === 'string' ? [lot_id] : [])))],
       ...recordRow(record, byLine.get(key) ?? []),
     });
   });
-  return { records, pours, idByKey };
+  return { records, pours };
 }
 
 function recordRow(record: CheckedRecord, findings: readonly Finding[]): Row {
@@ -58,20 +62,18 @@ function recordRow(record: CheckedRecord, findings: readonly Finding[]): Row {
   const { values, derived } = record;
   return {
     kind: record.kind,
-    structure_number: storableJson(record.structureNumber),
+    structure_number: record.structureNumber,
     occurrence: record.occurrence,
-    sheet: storableJson(record.sheet),
+    sheet: record.sheet,
     row: record.row,
-    raw: storableJson(record.source.cells),
-    values: storableJson(values),
+    raw: record.source.cells,
+    values: values,
     derived,
-    events: storableJson(
-      record.events.map((event) => ({
-        event: event.values['event'] ?? null,
-        values: event.values,
-        cells: event.cells,
-      })),
-    ),
+    events: record.events.map((event) => ({
+      event: event.values['event'] ?? null,
+      values: event.values,
+      cells: event.cells,
+    })),
     schema: RECORD_SCHEMA,
     standard_id: record.standardId,
     work_day: record.workDay,
@@ -85,14 +87,14 @@ function recordRow(record: CheckedRecord, findings: readonly Finding[]): Row {
     longitude: numberOrNull(values['longitude']),
     rule_codes: record.ruleCodes,
     product_codes: [
-      ...new Set(record.pours.flatMap((pour) => (pour.product === null ? [] : [storableJson(pour.product)]))),
+      ...new Set(record.pours.flatMap((pour) => (pour.product === null ? [] : [pour.product]))),
     ],
   };
 }
 
 function pourRow(options: {
   pour: Pour;
-  recordId: string;
+  recordId: string | undefined;
   n: number;
   lotIds: ReadonlyMap<string, string>;
 }): Row {
@@ -102,9 +104,9 @@ function pourRow(options: {
     n,
     pour_number: wholeOrNull(pour.pourNumber),
     event: wholeOrNull(pour.event) ?? 1,
-    product_code: storableJson(pour.product),
+    product_code: pour.product,
     lot_id: lotIds.get(lotKey(pour.product, pour.lot)) ?? null,
-    lot_text: storableJson(pour.lot),
+    lot_text: pour.lot,
     kit_ft3: pour.kitFt3,
     quantity: pour.quantity,
     wasted_quantity: pour.wastedQuantity,
@@ -112,13 +114,18 @@ function pourRow(options: {
     poured_at: pour.pouredAtMs === null ? null : new Date(pour.pouredAtMs).toISOString(),
     component_a_temp_f: pour.componentATempF,
     component_b_temp_f: pour.componentBTempF,
-    sheet: storableJson(pour.source.sheet),
+    sheet: pour.source.sheet,
     row: pour.source.row,
-    raw: storableJson({ values: pour.source.values, cells: pour.source.cells }),
+    raw: { values: pour.source.values, cells: pour.source.cells },
   };
 }
 
+const grouped = new WeakMap<readonly Finding[], ReadonlyMap<string, Finding[]>>();
+
+/** Grouped once for all parts of a check. */
 function findingsByLine(findings: readonly Finding[]): ReadonlyMap<string, Finding[]> {
+  const before = grouped.get(findings);
+  if (before) return before;
   const byLine = new Map<string, Finding[]>();
   for (const finding of findings) {
     if (finding.kind === null || finding.structureNumber === null) continue;
@@ -127,6 +134,7 @@ function findingsByLine(findings: readonly Finding[]): ReadonlyMap<string, Findi
     if (same) same.push(finding);
     else byLine.set(key, [finding]);
   }
+  grouped.set(findings, byLine);
   return byLine;
 }
 

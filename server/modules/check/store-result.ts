@@ -1,60 +1,58 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
-import { insertRows } from '#server/db/insert-rows.ts';
+import { insertDocument } from '#server/db/insert-rows.ts';
 import { run } from '#server/db/rows.ts';
 import { setProgress } from '#server/jobs/progress.ts';
 import { appendTrail } from '#server/trail/append-trail.ts';
-import type { CheckResult } from '#shared/check/types.ts';
-import { countFindings } from '#shared/findings/count-findings.ts';
-import type { SourceBatch } from '#shared/records/types.ts';
-import type { LoadedContext } from './load-context.ts';
+import type { CheckSummary, RowsDocument } from './check-messages.ts';
 import { lockForCheck } from './lock-for-check.ts';
-import { findingRows } from './finding-rows.ts';
-import { recordRows } from './record-rows.ts';
 import type { StartedRun } from './start-run.ts';
-import { storableJson } from './storable-json.ts';
-import { storePlacing } from './store-placing.ts';
-import { upsertLines } from './upsert-lines.ts';
 
 /** Lines stored between two words on progress. */
 const STEP = 1_000;
 
 type Checked = {
   readonly run: StartedRun;
-  readonly source: SourceBatch;
-  readonly result: CheckResult;
-  readonly loaded: LoadedContext;
+  readonly summary: CheckSummary;
+  readonly documents: AsyncIterable<RowsDocument>;
   readonly progress: (done: number) => Promise<void>;
 };
 
 /** Stores a whole check, or nothing: records, pours, findings, where photographs lie, and that the revision is checked. */
 export async function storeResult(em: EntityManager, checked: Checked): Promise<void> {
-  const { run: started, result } = checked;
+  const { run: started, summary, documents, progress } = checked;
   await em.transactional(async (tx) => {
     const revision = await lockForCheck(tx, started.revisionId);
     if (!revision || revision.input !== started.input || revision.status !== 'checking') {
       await supersede(tx, started);
       return;
     }
-    const lineIds = await upsertLines(tx, { batchId: started.batchId, records: result.records });
-    const { records, pours, idByKey } = recordRows({ ...checked, lineIds });
-    for (let at = 0; at < records.length; at += STEP) {
-      await insertRows(tx, 'records', records.slice(at, at + STEP));
-      await checked.progress(Math.min(at + STEP, records.length));
+    await insertLines(tx, started.batchId, summary.lines);
+    let stored = 0;
+    for await (const document of documents) {
+      await insertDocument(tx, document.table, document);
+      if (document.table !== 'records') continue;
+      const before = stored;
+      stored += document.rows;
+      if (Math.floor(stored / STEP) > Math.floor(before / STEP)) await progress(stored);
     }
-    await insertRows(tx, 'pours', pours);
-    await insertRows(tx, 'findings', findingRows({ started, findings: result.findings, idByKey, lineIds }));
-    await storePlacing(tx, { started, placing: checked.loaded.placing, lineIds });
     await finish(tx, checked);
   });
 }
 
-async function finish(em: EntityManager, { run: started, source, result }: Checked): Promise<void> {
-  const counts = {
-    lines: result.records.length,
-    ...countFindings(result.findings),
-    incomplete: result.findings.filter(isIncomplete).length,
-    standards: [...new Set(result.records.map((record) => record.standardNumber))].toSorted((a, b) => a - b),
-  };
+/** Lines come with ids. Should another have been given to one meanwhile, its records point nowhere and all of it is done again. */
+async function insertLines(em: EntityManager, batchId: string, lines: string): Promise<void> {
+  await run(
+    em,
+    `insert into lines (id, batch_id, kind, structure_key, structure_number, occurrence)
+     select n.id, $1, n.kind, n.structure_key, n.structure_number, n.occurrence
+     from jsonb_to_recordset($2::jsonb) as n(id uuid, kind text, structure_key text, structure_number text, occurrence int)
+     on conflict (batch_id, kind, structure_key, occurrence) do nothing`,
+    [batchId, lines],
+  );
+}
+
+async function finish(em: EntityManager, { run: started, summary }: Checked): Promise<void> {
+  const { counts } = summary;
   await run(
     em,
     `update check_runs set state = 'done', finished_at = now(), counts = $2, skipped = $3, notices = $4, batch_sheet = $5,
@@ -62,17 +60,17 @@ async function finish(em: EntityManager, { run: started, source, result }: Check
     [
       started.id,
       JSON.stringify(counts),
-      JSON.stringify(storableJson(result.skipped)),
-      JSON.stringify(storableJson(source.notices)),
-      JSON.stringify(storableJson({ values: source.batch.values, cells: source.batch.cells })),
-      source.templateVersion === null ? null : storableJson(source.templateVersion),
+      summary.skipped,
+      summary.notices,
+      summary.batchSheet,
+      summary.templateVersion,
     ],
   );
   await run(em, `update revisions set status = 'checked', run_id = $2, version = version + 1 where id = $1`, [
     started.revisionId,
     started.id,
   ]);
-  const total = result.records.length;
+  const total = counts.lines;
   await setProgress(em, { subject: `check:${started.revisionId}`, state: 'done', done: total, total });
   await appendTrail(em, {
     actor: null,
@@ -81,9 +79,6 @@ async function finish(em: EntityManager, { run: started, source, result }: Check
     payload: { revision: started.n, input: started.input, ...counts },
   });
 }
-
-const isIncomplete = (finding: CheckResult['findings'][number]): boolean =>
-  finding.severity === 'nonconformity' && finding.code.startsWith('record-');
 
 function supersede(em: EntityManager, started: StartedRun): Promise<number> {
   const problem = {

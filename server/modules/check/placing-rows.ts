@@ -1,15 +1,14 @@
-import type { EntityManager } from '@mikro-orm/postgresql';
-import { insertRows } from '#server/db/insert-rows.ts';
 import type { Placing } from './place-photos.ts';
 import type { StartedRun } from './start-run.ts';
 
-/** Writes where photographs came to lie, as further rows: who looks back sees where they lay before. */
-export async function storePlacing(
-  em: EntityManager,
-  options: { started: StartedRun; placing: Placing; lineIds: ReadonlyMap<string, string> },
-): Promise<void> {
+/** Rows of `photo_matches`: where photographs came to lie, as further rows, so that who looks back sees where they lay before. */
+export function placingRows(options: {
+  started: StartedRun;
+  placing: Placing;
+  lineIds: ReadonlyMap<string, string>;
+}): Record<string, unknown>[] {
   const { started, placing, lineIds } = options;
-  const list = placing.changes.flatMap(({ photo, place }) => {
+  return placing.changes.flatMap(({ photo, place }) => {
     const lineId = place === null ? null : lineIds.get(place.lineKey);
     // The line could not be judged at all (no standard): the photograph waits where it is.
     if (lineId === undefined) return [];
@@ -25,5 +24,4 @@ export async function storePlacing(
       },
     ];
   });
-  await insertRows(em, 'photo_matches', list);
 }

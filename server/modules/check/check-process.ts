@@ -1,0 +1,139 @@
+import { fork, type ChildProcess } from 'node:child_process';
+import { createRequire } from 'node:module';
+import { fileURLToPath, pathToFileURL } from 'node:url';
+import { residentMemory } from '#server/workbook/resident-memory.ts';
+import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
+import type {
+  CheckInputs,
+  CheckSummary,
+  FromCheck,
+  ListName,
+  RowsDocument,
+  SourceNeeds,
+  ToCheck,
+} from './check-messages.ts';
+
+const HEAP_MB = 640;
+/** Buffers are outside the heap limit. */
+const MEMORY_BYTES = 800_000_000;
+/** Until the workbook is read; the job itself has a limit on the whole. */
+const READ_MS = 30_000;
+const WATCH_EVERY_MS = 50;
+/** Rows of a list in one message to the process. */
+const SLICE = 2_000;
+const CHILD = fileURLToPath(new URL('./check-child.ts', import.meta.url));
+
+export type CheckProcess = {
+  /** Reads the workbook. @throws WorkbookRefused */
+  readonly needs: () => Promise<SourceNeeds>;
+  /** @throws WorkbookRefused when it needs too much memory */
+  readonly compute: (inputs: CheckInputs) => Promise<CheckSummary>;
+  /** The rows, each document made while the one before is stored. */
+  readonly documents: () => AsyncGenerator<RowsDocument>;
+  /** Ends it, wherever it is. */
+  readonly end: () => void;
+};
+
+function startChild(path: string): ChildProcess {
+  const loader = pathToFileURL(createRequire(import.meta.url).resolve('tsx')).href;
+  return fork(CHILD, [path], {
+    execArgv: [`--max-old-space-size=${HEAP_MB}`, '--import', loader],
+    // Nothing of the server's settings (database, secrets) is within reach of code that reads a stranger's file.
+    env: { TZ: 'UTC', PATH: process.env['PATH'] ?? '', NODE_ENV: 'production' },
+    stdio: ['ignore', 'ignore', 'ignore', 'ipc'],
+    serialization: 'advanced',
+  });
+}
+
+/**
+ * Reads and checks a workbook in a process of its own, so that the server answers others meanwhile and its memory does
+ * not grow with the workbook. Rows cross one document at a time.
+ */
+export function startCheckProcess(path: string, signal: AbortSignal): CheckProcess {
+  const child = startChild(path);
+  const arrived: FromCheck[] = [];
+  let wake: (() => void) | null = null;
+  let failure: Error | null = null;
+  let read = false;
+  const fail = (error: Error): void => {
+    failure ??= error;
+    child.kill('SIGKILL');
+    wake?.();
+  };
+  const timer = setTimeout(
+    () => fail(new WorkbookRefused('reader-time', { seconds: READ_MS / 1000 })),
+    READ_MS,
+  );
+  const watch = setInterval(() => {
+    if (child.pid === undefined) return;
+    void residentMemory(child.pid).then((bytes) => {
+      if (bytes !== null && bytes > MEMORY_BYTES) fail(new WorkbookRefused('reader-memory'));
+    });
+  }, WATCH_EVERY_MS);
+  const aborted = (): void => fail(signal.reason as Error);
+  signal.addEventListener('abort', aborted);
+  child.on('message', (message: FromCheck) => {
+    arrived.push(message);
+    wake?.();
+  });
+  child.on('error', fail);
+  child.on('close', () => {
+    clearTimeout(timer);
+    clearInterval(watch);
+    signal.removeEventListener('abort', aborted);
+    // A process that ends by itself before it said all ran out of its heap: over the workbook, or over what we made of it.
+    failure ??= read
+      ? new Error('The check ended before it was done.')
+      : new WorkbookRefused('reader-failed');
+    wake?.();
+  });
+  if (signal.aborted) aborted();
+
+  const next = async (): Promise<FromCheck> => {
+    for (;;) {
+      const message = arrived.shift();
+      if (message?.type === 'refused') throw new WorkbookRefused(message.code, message.params);
+      if (message?.type === 'fault')
+        throw read ? new Error(message.stack) : new WorkbookRefused('reader-failed');
+      if (message !== undefined) return message;
+      if (failure !== null) throw failure;
+      await new Promise<void>((resolve) => (wake = resolve));
+    }
+  };
+  const send = (message: ToCheck): Promise<void> =>
+    new Promise((resolve, reject) => {
+      child.send(message, (error) => (error ? reject(failure ?? error) : resolve()));
+    });
+  const expect = async <T extends FromCheck['type']>(type: T): Promise<Extract<FromCheck, { type: T }>> => {
+    const message = await next();
+    if (message.type !== type) throw new Error(`The check said ${message.type}, not ${type}.`);
+    return message as Extract<FromCheck, { type: T }>;
+  };
+
+  return {
+    needs: async () => {
+      const { needs } = await expect('needs');
+      clearTimeout(timer);
+      read = true;
+      return needs;
+    },
+    compute: async ({ frame, lists }) => {
+      for (const name of Object.keys(lists) as ListName[])
+        for (let at = 0; at < lists[name].length; at += SLICE)
+          await send({ type: 'list', name, rows: lists[name].slice(at, at + SLICE) });
+      await send({ type: 'frame', frame });
+      return (await expect('summary')).summary;
+    },
+    documents: async function* documents() {
+      await send({ type: 'next' });
+      for (;;) {
+        const message = await next();
+        if (message.type === 'done') return;
+        if (message.type !== 'rows') throw new Error(`The check said ${message.type}, not rows.`);
+        await send({ type: 'next' });
+        yield message.document;
+      }
+    },
+    end: () => child.kill('SIGKILL'),
+  };
+}
