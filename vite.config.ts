@@ -76,6 +76,21 @@ export default defineConfig({
       {
         extends: true,
         test: {
+          name: 'faults',
+          include: ['tests/faults/**/*.test.ts'],
+          environment: 'node',
+          env: { TZ: 'UTC' },
+          globalSetup: ['tests/setup/fault-services.ts'],
+          testTimeout: 120_000,
+          hookTimeout: 120_000,
+          // They stop the stores that all of them work on.
+          maxWorkers: 1,
+          fileParallelism: false,
+        },
+      },
+      {
+        extends: true,
+        test: {
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],
           environment: 'node',

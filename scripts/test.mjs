@@ -27,7 +27,7 @@ const CHECKS = [
   ['generated', node, ['--import', 'tsx', 'scripts/generate/generate.ts', '--check']],
   ['migrations', node, ['--import', 'tsx', 'server/db/check-migrations.ts']],
 ];
-const PROJECTS = ['unit', 'far-zone', 'client', 'reference', 'api', 'pipeline', 'e2e'];
+const PROJECTS = ['unit', 'far-zone', 'client', 'reference', 'api', 'pipeline', 'faults', 'e2e'];
 
 const total = { passed: 0, failed: 0 };
 const services = runningServices();
