@@ -1,46 +1,9 @@
 import { Writable } from 'node:stream';
-import XLSX from '@e965/xlsx';
 import ExcelJS from 'exceljs';
 import { describe, expect, it } from 'vitest';
-import type { Workbook } from '#shared/workbook/types.ts';
 import { readWorkbookBytes } from './read-workbook-bytes.ts';
+import { ours, type Seen, theirs } from './second-opinion-for-tests.ts';
 import { writeWorkbook } from './write-workbook.ts';
-
-type Seen = Record<string, Record<string, string | number | boolean>>;
-
-/** Filled cells by sheet and address as our reader sees them; errors by their text. */
-function ours(workbook: Workbook): Seen {
-  return Object.fromEntries(
-    workbook.sheets.map((sheet) => [
-      sheet.name,
-      Object.fromEntries(
-        sheet.rows.flatMap(({ cells }) =>
-          cells.map((cell) => [
-            cell.address,
-            cell.number ?? (cell.kind === 'boolean' ? cell.raw === 'TRUE' : cell.raw),
-          ]),
-        ),
-      ),
-    ]),
-  );
-}
-
-function theirs(bytes: Buffer): Seen {
-  const book = XLSX.read(bytes, { cellDates: false });
-  return Object.fromEntries(
-    book.SheetNames.map((name) => [
-      name,
-      Object.fromEntries(
-        Object.entries(book.Sheets[name] as Record<string, XLSX.CellObject>)
-          .filter(([address, cell]) => !address.startsWith('!') && cell.t !== 'z')
-          .map(([address, cell]) => [
-            address,
-            (cell.t === 'e' ? cell.w : cell.v) as string | number | boolean,
-          ]),
-      ),
-    ]),
-  );
-}
 
 async function agree(bytes: Buffer): Promise<Seen> {
   const seen = ours(await readWorkbookBytes(bytes));

@@ -8,13 +8,15 @@ export type ZipEntry = {
   readonly flags?: number;
   readonly crc?: number;
   readonly size?: number;
+  /** 8 deflated, the default; 0 stored; any other is a lie. */
+  readonly method?: number;
 };
 
 function header(entry: ZipEntry, packed: Buffer, bytes: Buffer): Buffer {
   const fields = Buffer.alloc(26);
   fields.writeUInt16LE(20, 0);
   fields.writeUInt16LE(entry.flags ?? 0x800, 2);
-  fields.writeUInt16LE(8, 4);
+  fields.writeUInt16LE(entry.method ?? 8, 4);
   fields.writeUInt32LE(entry.crc ?? crc32(bytes), 10);
   fields.writeUInt32LE(packed.length, 14);
   fields.writeUInt32LE(entry.size ?? bytes.length, 18);
@@ -29,7 +31,7 @@ export function zipOf(entries: readonly ZipEntry[]): Buffer {
   let offset = 0;
   for (const entry of entries) {
     const bytes = Buffer.from(entry.content);
-    const packed = deflateRawSync(bytes);
+    const packed = entry.method === 0 ? bytes : deflateRawSync(bytes);
     const fields = header(entry, packed, bytes);
     const name = Buffer.from(entry.name);
     const record = Buffer.concat([Buffer.from('PK\u0003\u0004'), fields, name, packed]);

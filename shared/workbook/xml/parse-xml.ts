@@ -1,6 +1,6 @@
 import { SaxesParser, type SaxesTagPlain } from 'saxes';
 import { READER_LIMITS } from '#shared/workbook/limits.ts';
-import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
+import { type RefusalCode, WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
 import { isKnownChild } from './known-children.ts';
 import { createXmlDecoder } from './xml-decoder.ts';
 
@@ -9,6 +9,8 @@ export type XmlTag = Pick<SaxesTagPlain, 'attributes'>;
 export type XmlHandlers = {
   /** Local name of the outermost element: a part that holds something else is not what its name says. */
   readonly root: string;
+  /** What a part with another outermost element is refused as; damaged unless said. */
+  readonly otherwise?: RefusalCode;
   /** `parents` are the local names of the open elements around this one, outermost first. */
   readonly open?: (name: string, tag: XmlTag, parents: readonly string[]) => void;
   readonly close?: (name: string, parents: readonly string[]) => void;
@@ -73,7 +75,7 @@ export async function* parseXml(
     const name = localName(tag.name);
     if (open.length + skipping >= READER_LIMITS.xmlDepth) throw new WorkbookRefused('xml-too-deep', { part });
     if (open.length === 0 && skipping === 0 && name !== handlers.root) {
-      throw new WorkbookRefused('xml-damaged', { part });
+      throw new WorkbookRefused(handlers.otherwise ?? 'xml-damaged', { part });
     }
     const stands = standsFor(name, open.at(-1)?.name);
     if (skipping > 0 || stands === 'nothing') {
@@ -105,6 +107,11 @@ export async function* parseXml(
     if (textLength > READER_LIMITS.xmlSilence) throw new WorkbookRefused('xml-too-long', { part });
     if (skipping === 0) handlers.text?.(value, path);
   };
+  const passed = (): void => {
+    events++;
+  };
+  parser.on('comment', passed);
+  parser.on('processinginstruction', passed);
   parser.on('text', text);
   parser.on('cdata', text);
 

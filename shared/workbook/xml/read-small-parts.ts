@@ -76,6 +76,7 @@ export async function readWorkbookPart(
   const sheets: SheetEntry[] = [];
   await parseXmlPart(part, chunks, {
     root: 'workbook',
+    otherwise: 'not-a-workbook',
     open: (name, tag, parents) => {
       if (name === 'workbookPr' && parents.length === 1) {
         date1904 = readDate1904(attribute(tag, 'date1904'), part);
