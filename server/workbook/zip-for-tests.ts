@@ -10,6 +10,8 @@ export type ZipEntry = {
   readonly size?: number;
   /** 8 deflated, the default; 0 stored; any other is a lie. */
   readonly method?: number;
+  /** What stands in the file, packed already; `content` is not looked at. */
+  readonly packed?: Buffer;
 };
 
 function header(entry: ZipEntry, packed: Buffer, bytes: Buffer): Buffer {
@@ -31,7 +33,7 @@ export function zipOf(entries: readonly ZipEntry[]): Buffer {
   let offset = 0;
   for (const entry of entries) {
     const bytes = Buffer.from(entry.content);
-    const packed = entry.method === 0 ? bytes : deflateRawSync(bytes);
+    const packed = entry.packed ?? (entry.method === 0 ? bytes : deflateRawSync(bytes));
     const fields = header(entry, packed, bytes);
     const name = Buffer.from(entry.name);
     const record = Buffer.concat([Buffer.from('PK\u0003\u0004'), fields, name, packed]);

@@ -22,6 +22,11 @@ const SENTENCES: Readonly<Record<NoticeCode, Say>> = {
     message: `The sheet “${sheet}” is no part of the template and was not read.`,
     remedy: NOTHING_DUE,
   }),
+  'workbook-sheet-renamed': ({ like }, sheet) => ({
+    title: 'Sheet under another name',
+    message: `The sheet “${sheet}” has the headings of ${like}, but not its name, and was not read.`,
+    remedy: `If it holds lines, name it ${like} again, or move its rows into the sheet ${like}, and upload the workbook again.`,
+  }),
   'workbook-sheet-not-read': (_, sheet) => ({
     title: 'Sheet not read',
     message: `“${sheet}” is no sheet of cells and was not read.`,

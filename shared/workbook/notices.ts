@@ -5,6 +5,7 @@ export const NOTICE_SEVERITY = {
   'workbook-no-lines': 'nonconformity',
   'workbook-sheet-missing': 'nonconformity',
   'workbook-sheet-unknown': 'note',
+  'workbook-sheet-renamed': 'nonconformity',
   'workbook-sheet-not-read': 'note',
   'workbook-header-missing': 'nonconformity',
   'workbook-column-missing': 'note',

@@ -79,6 +79,14 @@ describe('notices', () => {
     ]);
   });
 
+  it('tell a sheet of the template that has another name from a foreign one', () => {
+    const { notices, lines } = readSource(workbook([sheetOf('Poles', [KEYS, LINE])]));
+    expect(lines).toEqual([]);
+    expect(notices.filter((one) => one.code !== 'workbook-no-lines')).toMatchObject([
+      { code: 'workbook-sheet-renamed', severity: 'nonconformity', sheet: 'Poles', params: { like: 'Set' } },
+    ]);
+  });
+
   it('note merged cells among the data, not in the headings', () => {
     const sheet = sheetOf('Set', [KEYS, TITLES, HINTS, LINE], { merged: ['A1:B1', 'C4:C5'] });
     const merged = readSource(workbook([sheet])).notices.filter((one) => one.code === 'workbook-merged');

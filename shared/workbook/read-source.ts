@@ -6,8 +6,16 @@ import {
   type SourceRow,
   type WorkbookNotice,
 } from '#shared/records/types.ts';
+import { findHeader } from './find-header.ts';
 import { parseKeywords } from './keywords.ts';
-import { layoutByName, nameKey, type SheetLayout, TEMPLATE_VERSION, TEMPLATE_VERSIONS } from './layout.ts';
+import {
+  LAYOUT,
+  layoutByName,
+  nameKey,
+  type SheetLayout,
+  TEMPLATE_VERSION,
+  TEMPLATE_VERSIONS,
+} from './layout.ts';
 import { notice } from './notices.ts';
 import { readBatchSheet } from './read-batch-sheet.ts';
 import { readRows } from './read-rows.ts';
@@ -41,6 +49,19 @@ function versionNotices(batch: SourceRow, workbook: Workbook): WorkbookNotice[] 
 
 type Known = { readonly sheet: Sheet; readonly layout: SheetLayout };
 
+/** Fewer known headings than this are chance. */
+const ALIKE = 4;
+
+/** The template's sheet whose headings a sheet of another name has; null when it has none. */
+function sheetLike(sheet: Sheet, system: { readonly date1904: boolean }): string | null {
+  const known = LAYOUT.filter(({ record }) => record !== 'batch').map((layout) => ({
+    name: layout.name,
+    count: findHeader(layout, sheet.rows, system)?.columns.size ?? 0,
+  }));
+  const best = known.reduce((most, one) => (one.count > most.count ? one : most));
+  return best.count < ALIKE ? null : best.name;
+}
+
 function sortSheets(workbook: Workbook): { known: Known[]; notices: WorkbookNotice[] } {
   const known: Known[] = [];
   const notices: WorkbookNotice[] = [];
@@ -50,7 +71,12 @@ function sortSheets(workbook: Workbook): { known: Known[]; notices: WorkbookNoti
       notices.push(notice('workbook-sheet-not-read', { sheet: sheet.name }, { kind: sheet.kind }));
     } else if (layout !== null) known.push({ sheet, layout });
     else if (!OWN_SHEETS.has(nameKey(sheet.name)) && sheet.rows.length > 0) {
-      notices.push(notice('workbook-sheet-unknown', { sheet: sheet.name }, { hidden: sheet.hidden }));
+      const like = sheetLike(sheet, workbook);
+      notices.push(
+        like === null
+          ? notice('workbook-sheet-unknown', { sheet: sheet.name }, { hidden: sheet.hidden })
+          : notice('workbook-sheet-renamed', { sheet: sheet.name }, { like }),
+      );
     }
   }
   return { known, notices };
