@@ -1,34 +1,13 @@
 import type { Config } from 'tailwindcss';
 import plugin from 'tailwindcss/plugin';
+import { LIGHT_COLOURS } from './shared/drawing/light-colours.ts';
 
 /**
- * The named tokens. Every text token has at least 4.5 : 1 on paper, sheet and sunk in both themes,
- * field borders (`rule`) at least 3 : 1. Components use the names only, never a colour value.
+ * The named tokens of both themes; components use the names only, never a colour value. The light ones are also what a
+ * PDF is printed in, so they stand with the drawings.
  */
 const LIGHT = {
-  paper: '#f5f2e9',
-  sheet: '#fcfaf4',
-  sunk: '#ebe6d9',
-  ink: '#15233c',
-  'ink-2': '#3d4a63',
-  muted: '#59647a',
-  hairline: '#cfc8b6',
-  rule: '#8f8a7b',
-  focus: '#1d4ed8',
-  accent: '#b83d08',
-  'on-accent': '#ffffff',
-  conform: '#1d6547',
-  nonconform: '#a3181c',
-  query: '#7f5200',
-  concession: '#593a8f',
-  pole: '#8b6848',
-  'pole-fill': '#d9bf9a',
-  foam: '#e6d28d',
-  'foam-cell': '#b89b45',
-  water: '#5e9cc7',
-  'water-fill': '#a9cfe8',
-  soil: '#a9977a',
-  rock: '#77787a',
+  ...LIGHT_COLOURS,
   // Over the page behind a dialog: dims it in both themes, where a tint of the paper would wash it out.
   scrim: 'rgb(21 35 60 / 0.48)',
 } as const;

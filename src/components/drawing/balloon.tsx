@@ -1,8 +1,8 @@
 import type { KeyboardEvent } from 'react';
-import { FILL, STROKE } from './sheet-classes.ts';
+import { BALLOON_R, FONT } from '#shared/drawing/sheet-spec.ts';
+import { toneOf, type SheetFinding } from '#shared/drawing/sheet-types.ts';
+import { FILL, STROKE } from './paint-classes.ts';
 import { useSheetEvents } from './sheet-events.ts';
-import { BALLOON_R, FONT } from './sheet-spec.ts';
-import { toneOf, type SheetFinding } from './sheet-types.ts';
 
 /** The number of a finding in its circle. Hover and focus mark its row in the list; Enter goes there. */
 export function Balloon({ finding, x, y }: { finding: SheetFinding; x: number; y: number }) {
@@ -16,7 +16,7 @@ export function Balloon({ finding, x, y }: { finding: SheetFinding; x: number; y
         cy={y}
         r={BALLOON_R}
         strokeWidth={marked ? 2.4 : 1.7}
-        className={`${marked ? FILL[tone] : 'fill-sheet'} ${STROKE[tone]}`}
+        className={`${marked ? FILL[tone] : 'fill-sheet'} ${STROKE[tone === 'ink' ? 'ink-2' : tone]}`}
       />
       <text
         x={x}

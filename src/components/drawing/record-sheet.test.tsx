@@ -2,7 +2,7 @@ import { cleanup, render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, beforeAll, describe, expect, it, vi } from 'vitest';
 import { RecordSheet } from './record-sheet.tsx';
-import type { SheetFinding, SheetRecord, TitleBlockData } from './sheet-types.ts';
+import type { SheetFinding, SheetRecord, TitleBlockData } from '#shared/drawing/sheet-types.ts';
 
 const titleBlock: TitleBlockData = {
   owner: 'Larkmoor Electric Cooperative',

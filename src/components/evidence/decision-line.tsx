@@ -1,4 +1,4 @@
-import { findingWord } from '#src/components/evidence/decision-words.ts';
+import { findingWord } from '#shared/review/finding-word.ts';
 import { Glyph } from '#src/components/ui/glyph.tsx';
 import { formatInstant } from '#src/lib/formats.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';

@@ -2,24 +2,7 @@ import { formatWallClock } from '#src/lib/formats.ts';
 import { formatQuantity } from '#shared/units/format-quantity.ts';
 import type { Photo } from '#shared/generated/api-types.ts';
 
-const VIEW_WORDS: Readonly<Record<string, string>> = {
-  'bore-depth': 'Bore depth',
-  water: 'Water',
-  kits: 'Kits',
-  finish: 'Finish',
-  plumb: 'Plumb',
-  brand: 'Brand',
-  before: 'Before',
-  gap: 'Gap',
-  after: 'After',
-  'level-after': 'Level after',
-  rework: 'Rework',
-  other: 'Other',
-};
-
-export function viewWord(view: string | null): string {
-  return view === null ? 'Not placed' : (VIEW_WORDS[view] ?? view);
-}
+export { viewWord } from '#shared/records/view-word.ts';
 
 /** `10:19, 11 ft from position`: the wall clock of the camera, and how far from the structure it stood. */
 export function photoFacts(

@@ -1,4 +1,5 @@
 import { Glyph } from '#src/components/ui/glyph.tsx';
+import { WHO_DECIDES } from '#shared/drawing/who-decides.ts';
 
 /** The cautions of the work, wherever it is planned or recorded. */
 export const CAUTIONS = [
@@ -7,9 +8,6 @@ export const CAUTIONS = [
   'Energised lines overhead: keep the approach distance while the pole is moved.',
   'Have buried utilities located before the ground is opened; cover or guard every open bore.',
 ] as const;
-
-export const WHO_DECIDES =
-  'Local codes, the maker’s instructions and a licensed engineer decide; this sheet does not.';
 
 export function Cautions() {
   return (

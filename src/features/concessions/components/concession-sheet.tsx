@@ -1,10 +1,10 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { lineStamp } from '#src/components/evidence/line-stamp.ts';
-import { sheetFindings } from '#src/components/evidence/number-findings.ts';
+import { lineStamp } from '#shared/drawing/line-stamp.ts';
+import { sheetFindings } from '#shared/drawing/number-findings.ts';
 import { PhotoGrid } from '#src/components/evidence/photo-grid.tsx';
 import { PhotoViewer } from '#src/components/evidence/photo-viewer.tsx';
-import { titleBlockData } from '#src/components/evidence/title-block-data.ts';
+import { titleBlockData } from '#shared/drawing/title-block-data.ts';
 import { RecordSheet } from '#src/components/drawing/record-sheet.tsx';
 import { recordSheetQuery } from '#src/lib/api/record-sheet.ts';
 import { sheetLimitsQuery } from '#src/lib/api/sheet-limits.ts';

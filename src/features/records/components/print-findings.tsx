@@ -1,5 +1,5 @@
-import { findingWord } from '#src/components/evidence/decision-words.ts';
-import { inOrder } from '#src/components/evidence/number-findings.ts';
+import { findingWord } from '#shared/review/finding-word.ts';
+import { inOrder } from '#shared/drawing/number-findings.ts';
 import { MeasuredAgainst } from '#src/components/ui/measured-against.tsx';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 

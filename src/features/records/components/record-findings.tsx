@@ -1,5 +1,5 @@
 import { FindingFacts } from '#src/components/evidence/finding-facts.tsx';
-import { inOrder } from '#src/components/evidence/number-findings.ts';
+import { inOrder } from '#shared/drawing/number-findings.ts';
 import { Glyph } from '#src/components/ui/glyph.tsx';
 import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { SEVERITY_WORDS } from '#src/components/ui/state-word.tsx';

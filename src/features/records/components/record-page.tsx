@@ -1,13 +1,13 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { lineStamp } from '#src/components/evidence/line-stamp.ts';
+import { lineStamp } from '#shared/drawing/line-stamp.ts';
 import { LineRevisions } from '#src/components/evidence/line-revisions.tsx';
 import { lineState } from '#src/components/evidence/line-words.ts';
 import { HistoryList } from '#src/components/evidence/history-list.tsx';
-import { sheetFindings } from '#src/components/evidence/number-findings.ts';
+import { sheetFindings } from '#shared/drawing/number-findings.ts';
 import { PhotoGrid } from '#src/components/evidence/photo-grid.tsx';
 import { PhotoViewer } from '#src/components/evidence/photo-viewer.tsx';
-import { titleBlockData } from '#src/components/evidence/title-block-data.ts';
+import { titleBlockData } from '#shared/drawing/title-block-data.ts';
 import { RecordSheet } from '#src/components/drawing/record-sheet.tsx';
 import { Button } from '#src/components/ui/button.tsx';
 import { Cautions } from '#src/components/ui/caution.tsx';

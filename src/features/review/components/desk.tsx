@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import { lineState } from '#src/components/evidence/line-words.ts';
 import { PhotoViewer } from '#src/components/evidence/photo-viewer.tsx';
-import { WHO_DECIDES } from '#src/components/ui/caution.tsx';
+import { WHO_DECIDES } from '#shared/drawing/who-decides.ts';
 import { StatusBar } from '#src/components/ui/status-bar.tsx';
 import { useMoveBatch } from '#src/features/review/api/move-batch.ts';
 import { CloseDialog } from '#src/features/review/components/close-dialog.tsx';

@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
-import { lineStamp } from '#src/components/evidence/line-stamp.ts';
-import { titleBlockData } from '#src/components/evidence/title-block-data.ts';
-import { sheetFindings } from '#src/components/evidence/number-findings.ts';
+import { lineStamp } from '#shared/drawing/line-stamp.ts';
+import { titleBlockData } from '#shared/drawing/title-block-data.ts';
+import { sheetFindings } from '#shared/drawing/number-findings.ts';
 import { RecordSheet } from '#src/components/drawing/record-sheet.tsx';
 import { EmptyState } from '#src/components/ui/empty-state.tsx';
 import { ErrorState } from '#src/components/ui/error-state.tsx';

@@ -9,7 +9,7 @@ import { stepTo, stepToFinding } from '#src/features/review/desk/steps.ts';
 import { useDecide } from '#src/features/review/desk/use-decide.ts';
 import { useHand, type Saying } from '#src/features/review/desk/use-hand.ts';
 import { usePlace, WHOLE_BATCH } from '#src/features/review/desk/use-place.ts';
-import { inOrder } from '#src/components/evidence/number-findings.ts';
+import { inOrder } from '#shared/drawing/number-findings.ts';
 import { ApiProblem } from '#src/lib/api/api-problem.ts';
 import { recordSheetQuery } from '#src/lib/api/record-sheet.ts';
 import type { Batch, FindingRow, RecordRow } from '#shared/generated/api-types.ts';

@@ -1,0 +1,123 @@
+import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
+import { dimensionText } from './dimension-text.ts';
+import { findingLabels, missingLabels } from './finding-labels.ts';
+import { placeColumn, type ColumnLabel, type PlacedText } from './label-column.ts';
+import type { LayoutInput } from './layout-input.ts';
+import { relevelPlaces, PAD, type RelevelPlaces } from './relevel-places.ts';
+import { relevelSection, type RelevelSection } from './relevel-section.ts';
+import type { Point } from './sheet-types.ts';
+
+export type RelevelLayout = {
+  readonly section: RelevelSection;
+  readonly places: RelevelPlaces;
+  readonly labels: readonly PlacedText[];
+  readonly leftOut: readonly ColumnLabel[];
+};
+
+const DASHED = new Set(['padLengthIn', 'padWidthIn']);
+
+/** Everything on the sheet of a *re-level* record, placed. */
+export function relevelLayout(input: LayoutInput): RelevelLayout {
+  const { record, spec, metric, findings, foot } = input;
+  const section = relevelSection(record.values);
+  const places = relevelPlaces(section, spec);
+  const labels = [
+    ...findingLabels(findings, metric),
+    ...missingLabels(section.missing, {
+      findings,
+      values: record.values,
+      dashed: (field) => DASHED.has(field),
+    }),
+    ...facts(section, input),
+  ];
+  const column = placeColumn(labels, {
+    spec,
+    bottom: foot.labelsBottom,
+    pointOf: (label) => pointOf(label, places),
+  });
+  return { section, places, ...column };
+}
+
+function facts(
+  section: RelevelSection,
+  { record, spec, limits, metric, findings }: LayoutInput,
+): ColumnLabel[] {
+  const { derived } = record;
+  const spoken = new Set(findings.map((finding) => finding.code));
+  const out: ColumnLabel[] = [];
+  const add = (id: string, title: string, detail: string) =>
+    out.push({ id, title, detail, tone: 'ink', finding: null, optional: true });
+  if (
+    derived.placedFt3 !== null &&
+    derived.voidFt3 !== null &&
+    derived.fillRatio !== null &&
+    !spoken.has('fill-short')
+  ) {
+    const u = derived.fillRatioU === null ? '' : ` ± ${formatNumber(derived.fillRatioU, { fixed: true })}`;
+    add(
+      'foam',
+      `Foam ${dimensionText(derived.placedFt3, 'ft3', metric)} placed`,
+      `fill ratio ${formatNumber(derived.fillRatio, { fixed: true })}${u} of void ${formatQuantity(derived.voidFt3, 'ft3', { metric })}`,
+    );
+  }
+  if (spec.compact && section.lengthIn !== null && section.widthIn !== null)
+    add(
+      'pad',
+      `Pad ${dimensionText(section.lengthIn, 'in', metric)} × ${dimensionText(section.widthIn, 'in', metric)}`,
+      'front to back × left to right',
+    );
+  if (section.opening) {
+    const { lengthIn, widthIn } = section.opening;
+    add(
+      'opening',
+      `Opening ${dimensionText(lengthIn, 'in', metric)} × ${dimensionText(widthIn, 'in', metric)}`,
+      'not filled; drawn in the middle',
+    );
+  }
+  if (section.planeIn !== null && !spoken.has('gap-plane')) {
+    add(
+      'plane',
+      `Plane test ${dimensionText(section.planeIn, 'in', metric)}`,
+      'how far the four gaps are from a flat pad',
+    );
+  }
+  const { beforeAcross, beforeAlong, afterAcross, afterAlong } = section.slopes;
+  const slope = (value: number) => dimensionText(value, 'in-per-ft', metric);
+  if (beforeAcross !== null)
+    add(
+      'before',
+      `Before ${slope(beforeAcross)} across`,
+      beforeAlong === null ? 'dashed' : `dashed; ${slope(beforeAlong)} along`,
+    );
+  if (afterAcross !== null && !spoken.has('pad-slope')) {
+    const limit = limits.slopeMostInPerFt;
+    const parts = [
+      afterAlong === null ? null : `${slope(afterAlong)} along`,
+      limit === undefined ? null : `limit ${formatQuantity(limit, 'in-per-ft', { metric })}`,
+    ];
+    add('after', `After ${slope(afterAcross)} across`, parts.filter(Boolean).join('; '));
+  }
+  return out;
+}
+
+function pointOf(label: ColumnLabel, places: RelevelPlaces): Point | null {
+  const field = label.finding ? label.finding.field : label.id.replace('missing ', '');
+  if (field === null || label.finding?.code.startsWith('photo-')) return null;
+  const { right, left, backY, frontY, padY, deepRightY } = places;
+  if (field === 'foam' || /^(lot|kit|quantity|product|pour|component|wasted)/.test(field)) {
+    return { x: right - (right - left) * 0.12, y: backY + (frontY - backY) * 0.3 };
+  }
+  if (field === 'opening' || field.startsWith('opening'))
+    return { x: (left + right) / 2, y: frontY - (frontY - backY) * 0.42 };
+  const corner = /^gap([1-4])In$/.exec(field)?.[1];
+  if (corner !== undefined)
+    return {
+      x: corner === '1' || corner === '2' ? left : right,
+      y: corner === '1' || corner === '4' ? frontY : backY,
+    };
+  if (/^(gap|plane)/.test(field)) return { x: right - 6, y: (padY + deepRightY) / 2 };
+  if (field === 'before' || field.startsWith('slopeBefore')) return { x: right - 14, y: padY - PAD - 4 };
+  if (field === 'after' || /^(slope|raised|lowered|released)/.test(field))
+    return { x: right, y: padY - PAD / 2 };
+  return field.startsWith('pad') ? { x: right, y: frontY - 20 } : null;
+}
