@@ -28,7 +28,8 @@ export type CursorType = 'string' | 'number' | 'instant' | 'uuid' | 'day';
 
 const FITS: Readonly<Record<CursorType, (part: unknown) => boolean>> = {
   string: (part) => typeof part === 'string' && part.length <= 300 && !part.includes('\0'),
-  number: (part) => typeof part === 'number' && Number.isFinite(part),
+  // The place of a row in its list; what is no whole number the database would not take as one.
+  number: (part) => typeof part === 'number' && Number.isSafeInteger(part) && part >= 0,
   instant: (part) => typeof part === 'string' && isInstant(part),
   uuid: (part) => typeof part === 'string' && /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i.test(part),
   day: (part) =>

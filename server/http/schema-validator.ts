@@ -4,6 +4,7 @@ import addFormatsModule from 'ajv-formats';
 import type { JsonSchema } from '#server/http/define-route.ts';
 import { faultSentence } from '#server/http/fault-sentence.ts';
 import type { ProblemError } from '#server/http/problem.ts';
+import { unstorableText } from '#server/http/unstorable-text.ts';
 
 const API_SCHEMAS = new URL('../../schemas/api/', import.meta.url);
 /** Above this many bytes only the first fault is looked for: `allErrors` on unbounded input is work for a stranger. */
@@ -65,7 +66,7 @@ export function createValidator(schemas: ReadonlyMap<string, JsonSchema>): Valid
 }
 
 function run(validate: ValidateFunction, value: unknown, prefix: string): ProblemError[] {
-  if (validate(value)) return [];
+  if (validate(value)) return unstorableText(value, prefix).slice(0, MOST_ERRORS);
   return (validate.errors ?? []).slice(0, MOST_ERRORS).map((error) => toProblemError(error, prefix));
 }
 

@@ -51,7 +51,7 @@ export async function listFindings(
   ];
   const found = await rows<FindingDbRow>(
     em,
-    `${FINDING_SELECT} ${WHERE} and ($8::int is null or f.ordinal > $8) order by f.ordinal limit $9`,
+    `${FINDING_SELECT} ${WHERE} and ($8::bigint is null or f.ordinal > $8) order by f.ordinal limit $9`,
     [...filter, after?.[0] ?? null, limit + 1],
   );
   const total = after === null ? await countFindings(em, filter) : null;

@@ -41,12 +41,12 @@ export async function listRecords(
     ? await rows<RecordDbRow>(
         em,
         `select * from (${RECORD_SELECT} ${WHERE}) line
-         where state = any($8) and ($6::int is null or ordinal > $6) order by ordinal limit $7`,
+         where state = any($8) and ($6::bigint is null or ordinal > $6) order by ordinal limit $7`,
         [...filter, after?.[0] ?? null, limit + 1, query.state],
       )
     : await rows<RecordDbRow>(
         em,
-        `${RECORD_SELECT} ${WHERE} and ($6::int is null or r.ordinal > $6) order by r.ordinal limit $7`,
+        `${RECORD_SELECT} ${WHERE} and ($6::bigint is null or r.ordinal > $6) order by r.ordinal limit $7`,
         [...filter, after?.[0] ?? null, limit + 1],
       );
   const total = after === null && !query.state ? await countRecords(em, filter) : null;
