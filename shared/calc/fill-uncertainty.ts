@@ -23,20 +23,28 @@ function slope(shifted: (by: number) => number | null): number {
   return up === null || down === null ? 0 : (up - down) / (2 * STEP);
 }
 
-function contributions(groups: readonly ReadingGroup[]) {
+type Contribution = { readonly group: ReadingGroup; readonly uV: number };
+
+function contributions(groups: readonly ReadingGroup[]): readonly Contribution[] {
   return groups.map((group) => ({ group, uV: Math.abs(slope(group.shifted)) * group.u }));
 }
 
 /** u_V of a void in ft³: root of the sum of squares over the groups, each fully correlated within (GUM, JCGM 100:2008, 5.1 and 5.2). */
 export function voidUncertainty(groups: readonly ReadingGroup[]): number {
-  return Math.hypot(...contributions(groups).map(({ uV }) => uV));
+  return combined(contributions(groups));
 }
+
+const combined = (parts: readonly Contribution[]): number => Math.hypot(...parts.map(({ uV }) => uV));
 
 /** The reading to measure again first: of the group that contributes most, the one that moves the void most. */
 export function worstReading(groups: readonly ReadingGroup[]): string | null {
+  return worstOf(contributions(groups));
+}
+
+function worstOf(parts: readonly Contribution[]): string | null {
   let worst: ReadingGroup | null = null;
   let most = 0;
-  for (const { group, uV } of contributions(groups)) {
+  for (const { group, uV } of parts) {
     if (uV > most * (1 + 1e-9)) {
       most = uV;
       worst = group;
@@ -67,6 +75,7 @@ export function fillUncertainty({
   readonly placedShare: number;
   readonly groups: readonly ReadingGroup[];
 }): FillUncertainty {
-  const relative = Math.hypot(placedShare, voidUncertainty(groups) / voidFt3);
-  return { expanded: 2 * fillRatio * relative, worstReading: worstReading(groups) };
+  const parts = contributions(groups);
+  const relative = Math.hypot(placedShare, combined(parts) / voidFt3);
+  return { expanded: 2 * fillRatio * relative, worstReading: worstOf(parts) };
 }

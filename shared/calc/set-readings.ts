@@ -8,16 +8,6 @@ import type { Standard } from '#shared/standard/types.ts';
 const BORE_FIELDS = ['boreTopIn', 'boreTopAcrossIn', 'boreBottomIn', 'boreBottomAcrossIn', 'bellIn'] as const;
 const DEPTH_FIELDS = ['boreDepthFt', 'embedmentFt'] as const;
 
-/** Fields that carry a number, each moved by so much. */
-function moved(values: FieldValues, fields: readonly string[], by: number): FieldValues {
-  const out: Record<string, FieldValues[string]> = { ...values };
-  for (const field of fields) {
-    const value = numberOf(values, field);
-    if (value !== null) out[field] = value + by;
-  }
-  return out;
-}
-
 const withPole = (space: SetSpace, groundLine: number, butt: number): SetSpace => ({
   ...space,
   pole: {
@@ -37,16 +27,24 @@ function fieldOf(size: PoleSize, [girth, diameter]: readonly [string, string]): 
 export function setReadings(values: FieldValues, space: SetSpace, standard: Standard): ReadingGroup[] {
   const { uncertainty } = standard;
   const options = { foamFollowsGrade: standard.foamFollowsGrade };
-  const voidOf = (changed: FieldValues) => {
-    const space = setSpace(changed, options);
+  // One copy for all shifts of a line, put back after each: copying it for each took longer than the computation.
+  const copy: Record<string, FieldValues[string]> = { ...values };
+  /** The void with those of the fields that carry a number moved by so much. */
+  const movedVoid = (fields: readonly string[], by: number) => {
+    for (const field of fields) {
+      const value = numberOf(values, field);
+      if (value !== null) copy[field] = value + by;
+    }
+    const space = setSpace(copy, options);
+    for (const field of fields) if (Object.hasOwn(values, field)) copy[field] = values[field] ?? null;
     return space === null ? null : setVoid(space);
   };
   const group = (u: number, fields: readonly string[], unit: number): ReadingGroup => ({
     u,
-    shifted: (by) => voidOf(moved(values, fields, by * unit)),
+    shifted: (by) => movedVoid(fields, by * unit),
     readings: fields.map((field) => ({
       field,
-      shifted: (by) => voidOf(moved(values, [field], by * unit)),
+      shifted: (by) => movedVoid([field], by * unit),
     })),
   });
 

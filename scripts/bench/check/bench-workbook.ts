@@ -3,8 +3,8 @@ import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
 import { lineKey } from '#shared/records/structure-key.ts';
 import type { CheckContext, PhotoFact } from '#shared/rules/types.ts';
 
-const VIEWS = ['bore-depth', 'kits', 'finish', 'plumb'];
-const numberOf = (index: number): string => `B-${String(index + 1).padStart(6, '0')}`;
+export const VIEWS = ['bore-depth', 'kits', 'finish', 'plumb'];
+export const numberOf = (index: number): string => `B-${String(index + 1).padStart(6, '0')}`;
 
 /** A plain set pole; each tenth is set half a foot short, each fifteenth short of foam. Invented figures. */
 function setRow(index: number): RowInput {
@@ -48,16 +48,14 @@ function pourRows(index: number): RowInput[] {
     componentATempF: 72,
     componentBTempF: 72,
   };
-  return [
-    { ...row, kitFt3: index % 15 === 0 ? 4 : 8 },
-    { ...row, kitFt3: 1.5 },
-  ];
+  const main = { ...row, kitFt3: index % 15 === 0 ? 4 : 8 };
+  return index % 5 === 0 ? [main, { ...row, kitFt3: 1.5 }] : [main];
 }
 
-export async function writeBenchWorkbook(file: string, lines: number): Promise<void> {
+export async function writeBenchWorkbook(file: string, lines: number, workOrder = 'BENCH'): Promise<void> {
   const indexes = Array.from({ length: lines }, (_, index) => index);
   await writeWorkbook(file, {
-    workOrder: 'BENCH',
+    workOrder,
     contractor: 'Brindle Line Constructors',
     foreman: 'A foreman',
     set: indexes.map(setRow),

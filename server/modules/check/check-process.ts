@@ -23,6 +23,9 @@ const WATCH_EVERY_MS = 50;
 const SLICE = 2_000;
 const CHILD = fileURLToPath(new URL('./check-child.ts', import.meta.url));
 
+/** How a process ends whose heap is full: by SIGABRT, or by what a shell makes of it. */
+const ABORTED = 134;
+
 export type CheckProcess = {
   /** Reads the workbook. @throws WorkbookRefused */
   readonly needs: () => Promise<SourceNeeds>;
@@ -37,12 +40,19 @@ export type CheckProcess = {
 function startChild(path: string): ChildProcess {
   const loader = pathToFileURL(createRequire(import.meta.url).resolve('tsx')).href;
   return fork(CHILD, [path], {
-    execArgv: [`--max-old-space-size=${HEAP_MB}`, '--import', loader],
+    // A young generation as large as the work: most of what is read lives until the end, and was copied over and over.
+    execArgv: [`--max-old-space-size=${HEAP_MB}`, '--max-semi-space-size=32', '--import', loader],
     // Nothing of the server's settings (database, secrets) is within reach of code that reads a stranger's file.
     env: { TZ: 'UTC', PATH: process.env['PATH'] ?? '', NODE_ENV: 'production' },
     stdio: ['ignore', 'ignore', 'ignore', 'ipc'],
     serialization: 'advanced',
   });
+}
+
+/** Why a process said nothing more: over the workbook, or over what we made of it. */
+function endedEarly({ full, read }: { full: boolean; read: boolean }): Error {
+  if (full) return new WorkbookRefused('reader-memory');
+  return read ? new Error('The check ended before it was done.') : new WorkbookRefused('reader-failed');
 }
 
 /**
@@ -77,14 +87,11 @@ export function startCheckProcess(path: string, signal: AbortSignal): CheckProce
     wake?.();
   });
   child.on('error', fail);
-  child.on('close', () => {
+  child.on('close', (code, killedBy) => {
     clearTimeout(timer);
     clearInterval(watch);
     signal.removeEventListener('abort', aborted);
-    // A process that ends by itself before it said all ran out of its heap: over the workbook, or over what we made of it.
-    failure ??= read
-      ? new Error('The check ended before it was done.')
-      : new WorkbookRefused('reader-failed');
+    failure ??= endedEarly({ full: killedBy === 'SIGABRT' || code === ABORTED, read });
     wake?.();
   });
   if (signal.aborted) aborted();
