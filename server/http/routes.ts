@@ -10,6 +10,7 @@ import { openapiRoutes } from '#server/modules/openapi/routes.ts';
 import { organisationRoutes } from '#server/modules/organisations/routes.ts';
 import { peopleRoutes } from '#server/modules/people/routes.ts';
 import { photoRoutes } from '#server/modules/photos/routes.ts';
+import { plannerRoutes } from '#server/modules/planner/routes.ts';
 import { productRoutes } from '#server/modules/products/routes.ts';
 import { recordRoutes } from '#server/modules/records/routes.ts';
 import { searchRoutes } from '#server/modules/search/routes.ts';
@@ -37,6 +38,7 @@ export const ROUTES: readonly Route[] = [
   ...eventRoutes,
   ...lotRoutes,
   ...productRoutes,
+  ...plannerRoutes,
   ...reviewRoutes,
   ...concessionRoutes,
   ...registerRoutes,

@@ -709,6 +709,20 @@ export interface PlannedStructure {
   recordNumber: string | null;
 }
 /**
+ * Kits of a lot by size that are left: received less used by lines that were handed in.
+ */
+export interface PlannerLot {
+  id: string;
+  number: string;
+  product: string;
+  expiresOn: string | null;
+  status: 'in-use' | 'held' | 'recalled';
+  sizes: {
+    kitFt3: number;
+    left: number;
+  }[];
+}
+/**
  * One row of a pour as stored.
  */
 export interface PourRow {

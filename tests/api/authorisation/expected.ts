@@ -148,6 +148,7 @@ export const EXPECTED: readonly Row[] = [
   ['401 403 403  403 403 403 403 403 422', 'POST /api/products', 'product.invalid'],
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/lots'],
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/lots/:id'],
+  ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/planner/stock'],
   ['401 403 403  403 403 403 403 403 409', 'POST /api/lots', 'lot.number-taken'],
   ['401 403 403  403 403 403 403 403 409', 'POST /api/lots/:id/events', 'lot.not-held'],
   ['401 ok  ok   ok  ok  ok  ok  ok  ok ', 'GET /api/standard/versions'],

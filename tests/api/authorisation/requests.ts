@@ -212,6 +212,7 @@ export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = 
   'GET /api/products': () => ({ path: '/api/products' }),
   'GET /api/products/:id': ({ shared }) => ({ path: `/api/products/${shared.productId}` }),
   'POST /api/products': () => ({ path: '/api/products', body: { effectiveOn: '2099-02-01', body: {} } }),
+  'GET /api/planner/stock': () => ({ path: '/api/planner/stock' }),
   'GET /api/lots': () => ({ path: '/api/lots' }),
   'GET /api/lots/:id': ({ shared }) => ({ path: `/api/lots/${shared.lotId}` }),
   'POST /api/lots': ({ shared }) => ({
