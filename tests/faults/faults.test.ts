@@ -1,5 +1,8 @@
 import { afterAll, afterEach, beforeAll } from 'vitest';
+import { fullStore } from './full-store.ts';
 import { killedProcesses } from './killed-processes.ts';
+import { mailServer } from './mail-server.ts';
+import { storesAway } from './stores-away.ts';
 import { createFaultStage, type FaultStage } from './setup/fault-stage.ts';
 import { beginStory, type Story } from './setup/story.ts';
 
@@ -18,3 +21,6 @@ afterEach(({ task }) => {
 afterAll(() => stage?.close());
 
 killedProcesses(() => ({ stage, story }));
+storesAway(() => ({ stage, story }));
+fullStore(() => ({ stage, story }));
+mailServer(() => ({ stage, story }));

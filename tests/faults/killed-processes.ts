@@ -1,10 +1,9 @@
 import { describe, expect, it } from 'vitest';
+import type { ParkedJob } from '#shared/generated/api-types.ts';
 import { sweep } from '#server/storage/sweep-blobs.ts';
 import { countOf, expectWhole } from './setup/expect-whole.ts';
-import type { FaultStage } from './setup/fault-stage.ts';
-import { oneLine, openBatch, putWorkbook, type Story } from './setup/story.ts';
-
-type World = () => { readonly stage: FaultStage; readonly story: Story };
+import { oneLine, openBatch, putWorkbook, type World } from './setup/story.ts';
+import { beginAll, makeLastAttempts, readAll } from './setup/under-way.ts';
 
 export function killedProcesses(world: World): void {
   describe('a web process that is killed', () => {
@@ -15,16 +14,10 @@ export function killedProcesses(world: World): void {
       const { database, blobs } = stage.web();
 
       const put = blobs.holdReply(/^COPY /);
-      const first = putWorkbook(story, before, lost).then(
-        () => 'answered',
-        () => 'broke off',
-      );
+      const first = outcomeOf(putWorkbook(story, before, lost));
       await put.reached;
       const committed = database.holdCommitted(/insert into inputs/);
-      const second = putWorkbook(story, after, kept).then(
-        () => 'answered',
-        () => 'broke off',
-      );
+      const second = outcomeOf(putWorkbook(story, after, kept));
       await committed.reached;
       await stage.web().kill();
       expect(await Promise.all([first, second])).toEqual(['broke off', 'broke off']);
@@ -56,4 +49,74 @@ export function killedProcesses(world: World): void {
       ).toBe(1);
     });
   });
+
+  describe('a worker that is killed', () => {
+    it('in the middle of a check, a photograph, a transmittal and a message: another does them, each once', async () => {
+      const { stage, story } = world();
+      const doomed = stage.worker();
+      const data = stage.mail.holdData();
+      const { email } = story.site.contractor;
+      await story.contractor.post('/api/password-resets').send({ email });
+      await data.reached;
+      const begun = await beginAll(story, { worker: doomed, structureNumber: 'L-4' });
+      await stage.startWorker();
+      await doomed.kill();
+      await expectWhole(stage);
+      expect(await readAll(story, begun)).toEqual({
+        states: ['done', 'checked', 'ready', 'issued'],
+        problems: [null, null, null],
+      });
+      // The server had the whole message when its sender died: it came again, under its Message-ID.
+      const ids = stage.mail.deliveries.filter((one) => one.to === email && /password/i.test(one.subject));
+      expect(ids).toHaveLength(2);
+      expect(new Set(ids.map((one) => one.messageId)).size).toBe(1);
+      data.letGo();
+    });
+
+    it('on the last attempt: its work is parked, each page says what to do, and the administrator has it done', async () => {
+      const { stage, story } = world();
+      const doomed = stage.worker();
+      const begun = await beginAll(story, { worker: doomed, structureNumber: 'L-5' });
+      await makeLastAttempts(stage);
+      await stage.startWorker();
+      await doomed.kill();
+      await expectWhole(stage);
+      const ended = await readAll(story, begun);
+      expect(ended.states).toEqual(['failed', 'draft', 'stored', 'failed']);
+      expect(ended.problems).toEqual([
+        expect.stringContaining('Press “Check again”'),
+        expect.stringContaining('Tell the administrator'),
+        expect.stringContaining('An administrator can look at the parked job'),
+      ]);
+
+      const parked = (await story.admin.get('/api/jobs/parked')).body.items as ParkedJob[];
+      expect(parked.map((job) => [job.title, job.problem]).toSorted()).toEqual([
+        ['Check a batch', 'The process that worked on it died.'],
+        ['Issue a transmittal', 'The process that worked on it died.'],
+        ['Prepare photographs', 'The process that worked on it died.'],
+      ]);
+      for (const job of parked) await story.admin.post(`/api/jobs/parked/${job.id}/retry`).expect(204);
+      await expectWhole(stage);
+      expect(await readAll(story, begun)).toEqual({
+        states: ['done', 'checked', 'ready', 'issued'],
+        problems: [null, null, null],
+      });
+      expect((await story.admin.get('/api/jobs/parked')).body.items).toEqual([]);
+      for (const [action, times] of [
+        ['batch.check-failed', 1],
+        ['batch.photos-failed', 1],
+        ['transmittal.failed', 1],
+        ['job.parked', 3],
+        ['job.retried', 3],
+      ])
+        expect([action, await countOf(stage, 'trail where action = $1', [action])]).toEqual([action, times]);
+    });
+  });
 }
+
+/** What the sender of a request saw. */
+const outcomeOf = (request: PromiseLike<unknown>): PromiseLike<string> =>
+  request.then(
+    () => 'answered',
+    () => 'broke off',
+  );

@@ -9,9 +9,7 @@ select 'job ' || name as what from pgboss.job where state <= 'active' and single
 union all select 'revision ' || id from revisions where status = 'checking'
 union all select 'check run ' || id from check_runs where state in ('queued', 'running')
 union all select 'transmittal ' || id from transmittals where state in ('queued', 'running')
-union all select 'progress of ' || subject from job_progress where state in ('queued', 'running')
-union all select 'parked and not told ' || name from pgboss.job
-  where state = 'failed' and coalesce(output -> 'settled', 'false') <> 'true'`;
+union all select 'progress of ' || subject from job_progress where state in ('queued', 'running')`;
 
 /** What the rows say was done beside what the trail says was done. */
 const TOLD = `

@@ -19,11 +19,13 @@ export type FaultStage = Stage & {
   /** The one web process; agents stay signed in when it is started again. */
   web(): Part;
   startWeb(): Promise<Part>;
+  /** The newest worker. */
+  worker(): Part;
   /** One more worker beside those that run. */
   startWorker(): Promise<Part>;
   /** What every process wrote of itself. */
   said(): string;
-  /** Until no job waits, rests before a repeat or is worked on. */
+  /** Until no job waits, rests before a repeat or is worked on, and what was parked is told. */
   rest(): Promise<void>;
   close(): Promise<void>;
 };
@@ -47,6 +49,7 @@ export async function createFaultStage(): Promise<FaultStage> {
     return part;
   };
   let web: Part | null = null;
+  let worker: Part | null = null;
   let owner: ReturnType<Stage['owner']> | null = null;
   const em: Stage['em'] = () => orm.em.fork();
   const stage: FaultStage = {
@@ -71,7 +74,11 @@ export async function createFaultStage(): Promise<FaultStage> {
       return web;
     },
     startWeb: async () => (web = await start('web')),
-    startWorker: () => start('worker'),
+    worker: () => {
+      if (!worker) throw new Error('No worker was started.');
+      return worker;
+    },
+    startWorker: async () => (worker = await start('worker')),
     said: () => parts.map((part) => part.said()).join('\n'),
     rest: () => untilAtRest(pool),
     drain: () => untilAtRest(pool),
@@ -91,7 +98,8 @@ export async function createFaultStage(): Promise<FaultStage> {
 async function untilAtRest(pool: pg.Pool): Promise<void> {
   for (;;) {
     const { rows } = await pool.query<{ open: number }>(
-      `select count(*)::int as open from pgboss.job where state <= 'active' and singleton_key is distinct from 'every'`,
+      `select count(*)::int as open from pgboss.job where singleton_key is distinct from 'every'
+         and (state <= 'active' or (state = 'failed' and coalesce(output -> 'settled', 'false') <> 'true'))`,
     );
     if (rows[0]?.open === 0) return;
     await new Promise((resolve) => setTimeout(resolve, POLL_MS));

@@ -45,7 +45,7 @@ export async function startPart(settings: PartSettings): Promise<Part> {
       SMTP_URL: `smtp://127.0.0.1:${settings.smtpPort}`,
       SESSION_SECRET: 'for tests alone, and long enough to be taken',
       DATA_DIR: settings.dataDir,
-      LOG_LEVEL: 'error',
+      LOG_LEVEL: 'fatal',
       CHECK_REPLIES: 'true',
     },
     stdio: ['pipe', 'pipe', 'pipe'],

@@ -15,7 +15,10 @@ export type Story = {
   readonly admin: Agent;
 };
 
-const PLANNED = Array.from({ length: 12 }, (_, index) => `L-${index + 1}`);
+/** Asked for when a test runs: the stage is made before the first of them. */
+export type World = () => { readonly stage: FaultStage; readonly story: Story };
+
+const PLANNED = Array.from({ length: 20 }, (_, index) => `L-${index + 1}`);
 
 export async function beginStory(stage: FaultStage): Promise<Story> {
   const site = await createWorkSite(stage, { planned: PLANNED, number: '17' });
