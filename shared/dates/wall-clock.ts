@@ -54,6 +54,27 @@ function wallMs(format: Intl.DateTimeFormat, ms: number): number {
   return days * DAY + seconds * 1000;
 }
 
+/** Offsets at midnights (UTC) by zone: a batch asks for the same few days thousands of times. */
+const offsets = new WeakMap<Intl.DateTimeFormat, Map<number, number>>();
+
+/** Some thirty years of days; a workbook of more is absurd, and may not fill the memory. */
+const KEPT_OFFSETS = 10_000;
+
+/** What a zone's clocks are ahead of UTC at an instant, in milliseconds. */
+function offsetAt(format: Intl.DateTimeFormat, ms: number): number {
+  let known = offsets.get(format);
+  if (known === undefined) {
+    known = new Map();
+    offsets.set(format, known);
+  }
+  const held = known.get(ms);
+  if (held !== undefined) return held;
+  const offset = wallMs(format, ms) - ms;
+  if (known.size >= KEPT_OFFSETS) known.clear();
+  known.set(ms, offset);
+  return offset;
+}
+
 /** `YYYY-MM-DDTHH:mm[:ss]` as if it were UTC milliseconds; null if it is no time. */
 function parseWall(wall: string): number | null {
   const match = WALL.exec(wall);
@@ -69,12 +90,14 @@ export function toInstant(wall: string, zone: string): ClockResult {
   if (shown === null) return { problem: 'unreal' };
   const format = formatter(zone);
   if (format === null) return { problem: 'zone' };
-  // The offsets a day before and after are the only ones that can hold at this wall time.
+  // No zone changes its clock twice within four days: with one offset at both ends there is no change between.
+  const midnight = Math.floor(shown / DAY) * DAY;
+  const [before, after] = [offsetAt(format, midnight - DAY), offsetAt(format, midnight + 2 * DAY)];
+  if (before === after) return { ms: shown - before };
+  // Else these are the only offsets that can hold at this wall time.
   const found = new Set<number>();
-  for (const near of [shown - DAY, shown + DAY]) {
-    const candidate = shown - (wallMs(format, near) - near);
-    if (wallMs(format, candidate) === shown) found.add(candidate);
-  }
+  for (const offset of [before, after])
+    if (wallMs(format, shown - offset) === shown) found.add(shown - offset);
   const [ms] = found;
   if (ms === undefined) return { problem: 'gap' };
   return found.size > 1 ? { problem: 'overlap' } : { ms };

@@ -1,7 +1,7 @@
 import { structureKey } from '#shared/records/structure-key.ts';
 import { viewWord } from '#shared/records/photo-views.ts';
 import { say } from '#shared/findings/say.ts';
-import { bandsOf, bitsApart, hashBits } from '../hash-bands.ts';
+import { nearHashes, pictureHash, type NearHashes } from '../near-hashes.ts';
 import { numberOf, paramsSchema } from '../params.ts';
 import { allPhotos, byTelling, tellOther, type PlacedPhoto } from '../photo-index.ts';
 import { photoPart } from '../photo-part.ts';
@@ -20,41 +20,34 @@ const schema = paramsSchema({
 /** Kit labels look alike by nature. */
 const EXEMPT = 'kits';
 
-type Hashed = PlacedPhoto & { readonly bits: string };
-type Index = { readonly greatest: number; readonly bands: ReadonlyMap<string, readonly Hashed[]> };
+type Index = NearHashes & { readonly greatest: number; readonly photos: readonly PlacedPhoto[] };
 const made = new WeakMap<CheckContext, Index>();
 
-const indexOf = (context: CheckContext, greatest: number): Index['bands'] => {
+const indexOf = (context: CheckContext, greatest: number): Index => {
   const before = made.get(context);
-  if (before?.greatest === greatest) return before.bands;
-  const bands = new Map<string, Hashed[]>();
-  for (const photo of allPhotos(context)) {
-    const bits = photo.view === EXEMPT ? null : hashBits(photo.phash);
-    if (bits === null) continue;
-    for (const band of bandsOf(bits, greatest)) {
-      const held = bands.get(band);
-      if (held) held.push({ ...photo, bits });
-      else bands.set(band, [{ ...photo, bits }]);
-    }
-  }
-  made.set(context, { greatest, bands });
-  return bands;
+  if (before?.greatest === greatest) return before;
+  const hashed = allPhotos(context).flatMap((photo) => {
+    const hash = photo.view === EXEMPT ? null : pictureHash(photo.phash);
+    return hash === null ? [] : [{ photo, hash }];
+  });
+  const hashes = hashed.map(({ hash }) => hash);
+  const index = { greatest, photos: hashed.map(({ photo }) => photo), ...nearHashes(hashes, greatest) };
+  made.set(context, index);
+  return index;
 };
 
-const nearest = (
-  photo: PhotoFact,
-  { own, bands, greatest }: { own: string; bands: Index['bands']; greatest: number },
-): { readonly other: Hashed; readonly apart: number } | null => {
-  const bits = photo.view === EXEMPT ? null : hashBits(photo.facts?.phash ?? null);
-  if (bits === null) return null;
-  const found = bandsOf(bits, greatest).flatMap((band) => bands.get(band) ?? []);
-  const near = found
+type Near = { readonly other: PlacedPhoto; readonly apart: number };
+
+const nearest = (photo: PhotoFact, own: string, { photos, eachNear }: Index): Near | null => {
+  const hash = photo.view === EXEMPT ? null : pictureHash(photo.facts?.phash ?? null);
+  if (hash === null) return null;
+  const found: Near[] = [];
+  eachNear(hash, (place, apart) => {
+    const other = photos[place];
     // The same bytes are the matter of `photo-reused`.
-    .filter((other) => other.structure !== own && other.sha256 !== photo.sha256)
-    .map((other) => ({ other, apart: bitsApart(bits, other.bits) }))
-    .filter(({ apart }) => apart <= greatest)
-    .toSorted((a, b) => a.apart - b.apart || byTelling(a.other, b.other));
-  return near[0] ?? null;
+    if (other && other.structure !== own && other.sha256 !== photo.sha256) found.push({ other, apart });
+  });
+  return found.toSorted((a, b) => a.apart - b.apart || byTelling(a.other, b.other))[0] ?? null;
 };
 
 export const photoAlike: LineRule = {
@@ -68,10 +61,10 @@ export const photoAlike: LineRule = {
   paramsSchema: schema,
   check: (line, params, context) => {
     const greatest = numberOf(params, schema, 'greatestBits');
-    const bands = indexOf(context, greatest);
+    const index = indexOf(context, greatest);
     const own = structureKey(line.structureNumber);
     return (line.photos ?? []).flatMap((photo): FindingDraft[] => {
-      const near = nearest(photo, { own, bands, greatest });
+      const near = nearest(photo, own, index);
       if (!near) return [];
       const { params: told, ownerParams } = tellOther(near.other);
       return [
