@@ -32,6 +32,12 @@ export type CheckFrame = {
   readonly context: Omit<CheckContext, 'photos' | 'siblings' | 'design' | 'previous' | 'lots'>;
 };
 export type CheckInputs = { readonly frame: CheckFrame; readonly lists: ContextLists };
+/** The same where it is loaded: the longest list page by page, never whole. */
+export type LoadedInputs = {
+  readonly frame: CheckFrame;
+  readonly lists: Omit<ContextLists, 'photos'>;
+  readonly photos: AsyncIterable<ContextLists['photos']>;
+};
 
 /** What is stored of a check beside its rows. */
 export type CheckSummary = {

@@ -4,10 +4,9 @@ import { fileURLToPath, pathToFileURL } from 'node:url';
 import { residentMemory } from '#server/workbook/resident-memory.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
 import type {
-  CheckInputs,
+  LoadedInputs,
   CheckSummary,
   FromCheck,
-  ListName,
   RowsDocument,
   SourceNeeds,
   ToCheck,
@@ -30,7 +29,7 @@ export type CheckProcess = {
   /** Reads the workbook. @throws WorkbookRefused */
   readonly needs: () => Promise<SourceNeeds>;
   /** @throws WorkbookRefused when it needs too much memory */
-  readonly compute: (inputs: CheckInputs) => Promise<CheckSummary>;
+  readonly compute: (inputs: LoadedInputs) => Promise<CheckSummary>;
   /** The rows, each document made while the one before is stored. */
   readonly documents: () => AsyncGenerator<RowsDocument>;
   /** Ends it, wherever it is. */
@@ -124,8 +123,9 @@ export function startCheckProcess(path: string, signal: AbortSignal): CheckProce
       read = true;
       return needs;
     },
-    compute: async ({ frame, lists }) => {
-      for (const name of Object.keys(lists) as ListName[])
+    compute: async ({ frame, lists, photos }) => {
+      for await (const rows of photos) await send({ type: 'list', name: 'photos', rows });
+      for (const name of Object.keys(lists) as (keyof typeof lists)[])
         for (let at = 0; at < lists[name].length; at += SLICE)
           await send({ type: 'list', name, rows: lists[name].slice(at, at + SLICE) });
       await send({ type: 'frame', frame });

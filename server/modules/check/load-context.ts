@@ -1,7 +1,7 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { row } from '#server/db/rows.ts';
 import { geoAreaOf } from '#shared/calc/geo-area.ts';
-import type { CheckInputs, SourceNeeds } from './check-messages.ts';
+import type { LoadedInputs, SourceNeeds } from './check-messages.ts';
 import { loadDesign } from './load-design.ts';
 import { loadEarlierFailures } from './load-earlier-failures.ts';
 import { loadLines } from './load-lines.ts';
@@ -17,7 +17,7 @@ export async function loadContext(
   em: EntityManager,
   run: StartedRun,
   needs: SourceNeeds,
-): Promise<CheckInputs> {
+): Promise<LoadedInputs> {
   const order = await row<{ number: string; zone: string; area: unknown; first_submitted: string | null }>(
     em,
     `select w.number, w.zone, w.area, (
@@ -38,7 +38,6 @@ export async function loadContext(
   const otherPhotos = await loadOtherPhotos(em, run);
   const previous = await loadEarlierFailures(em, run);
   const lines = await loadLines(em, run.batchId);
-  const photos = await loadPhotos(em, run.batchId);
   return {
     frame: {
       run,
@@ -57,6 +56,7 @@ export async function loadContext(
         otherPhotos,
       },
     },
-    lists: { photos, lines, design, previous: [...previous] },
+    lists: { lines, design, previous: [...previous] },
+    photos: loadPhotos(em, run.batchId),
   };
 }

@@ -17,21 +17,36 @@ export type PhotoToPlace = {
   readonly facts: PhotoMeasures | null;
 };
 
-export function loadPhotos(em: EntityManager, batchId: string): Promise<PhotoToPlace[]> {
-  return rows<PhotoToPlace>(
-    em,
-    `select p.id, p.file_name as "fileName", p.sha256, coalesce(m.seq, 0) as seq, m.line_id as "lineId", m.view, m.method,
-       coalesce(m.removed, false) as removed,
-       case when f.sha256 is null or f.problem is not null then null else jsonb_build_object(
-         'takenWall', f.taken_wall, 'takenAtMs', floor(extract(epoch from f.taken_at) * 1000)::float8,
-         'latitude', f.latitude, 'longitude', f.longitude, 'width', f.width, 'height', f.height, 'phash', f.phash
-       ) end as facts
-     from photos p
-     left join lateral (select * from photo_matches x where x.photo_id = p.id order by x.seq desc limit 1) m on true
-     left join photo_facts f on f.sha256 = p.sha256 and f.pipeline = $2
-     where p.batch_id = $1 order by p.at, p.id`,
-    [batchId, PHOTO_PIPELINE],
-  );
+/** Photographs fetched at a time: of a large batch there are tens of thousands. */
+const PAGE = 2_000;
+
+/** The photographs of a batch in the order they came, page by page. */
+export async function* loadPhotos(
+  em: EntityManager,
+  batchId: string,
+): AsyncGenerator<readonly PhotoToPlace[]> {
+  let last: { at: string; id: string } | null = null;
+  for (;;) {
+    const found: (PhotoToPlace & { at: string })[] = await rows<PhotoToPlace & { at: string }>(
+      em,
+      `select p.id, p.file_name as "fileName", p.sha256, p.at, coalesce(m.seq, 0) as seq, m.line_id as "lineId", m.view, m.method,
+         coalesce(m.removed, false) as removed,
+         case when f.sha256 is null or f.problem is not null then null else jsonb_build_object(
+           'takenWall', f.taken_wall, 'takenAtMs', floor(extract(epoch from f.taken_at) * 1000)::float8,
+           'latitude', f.latitude, 'longitude', f.longitude, 'width', f.width, 'height', f.height, 'phash', f.phash
+         ) end as facts
+       from photos p
+       left join lateral (select * from photo_matches x where x.photo_id = p.id order by x.seq desc limit 1) m on true
+       left join photo_facts f on f.sha256 = p.sha256 and f.pipeline = $2
+       where p.batch_id = $1 and ($3::timestamptz is null or (p.at, p.id) > ($3::timestamptz, $4::uuid))
+       order by p.at, p.id limit $5`,
+      [batchId, PHOTO_PIPELINE, last?.at ?? null, last?.id ?? null, PAGE],
+    );
+    if (found.length > 0) yield found.map(({ at: _at, ...photo }) => photo);
+    const end = found.at(-1);
+    if (end === undefined || found.length < PAGE) return;
+    last = { at: end.at, id: end.id };
+  }
 }
 
 /**

@@ -4,6 +4,7 @@ import { setProgress } from '#server/jobs/progress.ts';
 import type { CheckRevisionPayload } from './check-revision.job.ts';
 import { ENGINE, RECORD_SCHEMA } from './engine.ts';
 import { lockForCheck } from './lock-for-check.ts';
+import { waitForPhotos } from './wait-for-photos.ts';
 
 export type StartedRun = {
   readonly id: string;
@@ -18,12 +19,13 @@ export type StartedRun = {
   readonly asOfMs: number;
 };
 
-/** Opens the run of an input, or null when there is nothing left to do: a newer input came, it was handed in, or it is checked. */
+/** Opens the run of an input, or null when there is nothing left to do: a newer input came, it was handed in, it is checked, or it waits for photographs. */
 export async function startRun(em: EntityManager, payload: CheckRevisionPayload): Promise<StartedRun | null> {
   return em.transactional(async (tx) => {
     const revision = await lockForCheck(tx, payload.revisionId);
     if (!revision || revision.input !== payload.input) return null;
     if (revision.status !== 'checking' && revision.status !== 'draft') return null;
+    if (await waitForPhotos(tx, payload, revision.batch_id)) return null;
     const opened = await row<{ id: string; started_at: string }>(
       tx,
       `insert into check_runs (revision_id, input, engine, schema, state, as_of, started_at)
