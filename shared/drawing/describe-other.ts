@@ -30,7 +30,7 @@ export function describeStraighten(section: StraightenSection, input: LayoutInpu
   const { before, after, wedge, rake, springback, embedmentFt, waterIn } = section;
   const inches = (value: number) => dimensionText(value, 'in', metric);
   const lean = ({ amount, azimuthDeg }: Lean) =>
-    `${dimensionText(amount, 'in-per-10ft', metric)}${azimuthDeg === null ? '' : ` towards ${formatQuantity(azimuthDeg, 'deg')}`}`;
+    `${dimensionText(amount, 'in-per-10ft', metric)}${azimuthDeg === null ? '' : ` towards ${formatQuantity(azimuthDeg, 'deg', { digits: 0 })}`}`;
   return said([
     `Section through structure ${record.structureNumber}, a pole that was straightened.`,
     embedmentFt !== null && `It stands ${dimensionText(embedmentFt, 'ft', metric)} deep.`,

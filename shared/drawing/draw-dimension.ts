@@ -5,6 +5,8 @@ import type { AcrossDimension } from './set-dimensions.ts';
 import { BALLOON_R, FONT } from './sheet-spec.ts';
 import type { Tone } from './sheet-types.ts';
 
+const TIGHT = 20;
+const OUTSIDE = 16;
 const THIN = { stroke: 'ink-2', weight: 0.9 } as const;
 
 /** The colour of a tone's line: ink is lighter as a line than as a word. */
@@ -17,16 +19,19 @@ export function acrossMarks(dimension: AcrossDimension): Mark[] {
   const { id, x1, x2, y, fromY, gap, textX, textAt, runs } = dimension;
   const part = `dimension ${id}`;
   const past = y < fromY ? -5 : 5;
-  const from = textAt === 'left' ? textX + 5 : x1;
-  const to = textAt === 'left' ? x2 : textX - 5;
+  // Arrows that would meet stand outside and point inwards.
+  const tight = x2 - x1 < TIGHT;
+  const over = tight ? OUTSIDE : 0;
+  const from = textAt === 'left' ? textX + 5 : x1 - over;
+  const to = textAt === 'left' ? x2 + over : textX - 5;
   const line = gap
     ? `M${at(from, y)}L${at(gap[0], y)}M${at(gap[1], y)}L${at(to, y)}`
     : `M${at(from, y)}L${at(to, y)}`;
   return [
     path(`M${at(x1, fromY)}L${at(x1, y + past)}M${at(x2, fromY)}L${at(x2, y + past)}`, { ...THIN, part }),
     path(line, { ...THIN, part }),
-    arrow(x1, y, { to: 'left', part }),
-    arrow(x2, y, { to: 'right', part }),
+    arrow(x1, y, { to: tight ? 'right' : 'left', part }),
+    arrow(x2, y, { to: tight ? 'left' : 'right', part }),
     {
       is: 'text',
       x: textX,

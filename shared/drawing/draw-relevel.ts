@@ -10,7 +10,7 @@ import { scaleBarMarks } from './scale-bar.ts';
 export function relevelMarks(layout: RelevelLayout, { foot, metric }: LayoutInput): Mark[] {
   const { section, places, labels } = layout;
   return [
-    ...padPlanMarks(section, places, metric),
+    ...padPlanMarks(layout, metric),
     ...padSectionMarks(section, places, metric),
     ...labels.flatMap(labelMarks),
     ...scaleBarMarks({ ...foot.scaleBar, scale: places.scale * 12, metric }),

@@ -75,12 +75,21 @@ function waterInWedge(
   ];
 }
 
-function poleMarks({ poleIn }: StraightenSection, { face, topFt, buttFt, open }: StraightenPlaces): Mark[] {
+function poleMarks(
+  { poleIn, after }: StraightenSection,
+  { face, topFt, buttFt, open }: StraightenPlaces,
+): Mark[] {
   const [topLeft, topRight] = [face(-1, topFt), face(1, topFt)];
   const [buttLeft, buttRight] = [face(-1, buttFt), face(1, buttFt)];
   const sides = `L${at(buttRight.x, buttRight.y)}${open ? 'M' : 'L'}${at(buttLeft.x, buttLeft.y)}L${at(topLeft.x, topLeft.y)}`;
   if (poleIn === null) return [path(`M${at(topRight.x, topRight.y)}${sides}`, GHOST)];
   const area = `${brokenTop(topLeft.x, topRight.x, topLeft.y)}L${at(buttRight.x, buttRight.y)}L${at(buttLeft.x, buttLeft.y)}Z`;
+  // Where it leans now was not measured: it stands plumb, as a sign.
+  if (after === null)
+    return [
+      path(area, { fill: 'pole-fill', opacity: 0.5 }),
+      path(`M${at(topRight.x, topRight.y)}${sides}`, GHOST),
+    ];
   if (!open) return [path(area, { fill: 'pole-fill', stroke: 'pole', weight: 1.5 })];
   return [
     path(area, { fill: 'pole-fill' }),
@@ -89,10 +98,10 @@ function poleMarks({ poleIn }: StraightenSection, { face, topFt, buttFt, open }:
 }
 
 /** Both faces as they stood before, above grade: below it the soil's side of the wedge is what is left of one. */
-function formerMarks({ former, topFt, wedge }: StraightenPlaces): Mark[] {
+function formerMarks({ former, topFt }: StraightenPlaces): Mark[] {
   if (!former) return [];
   const style = { stroke: 'pole', weight: 1.4, dash: [8, 5] } as const;
-  const lines = ([-1, 1] as const).map((side) => through([former(side, topFt), former(side, wedge ? 0 : 1)]));
+  const lines = ([-1, 1] as const).map((side) => through([former(side, topFt), former(side, 0)]));
   return [path(lines.join(''), style)];
 }
 

@@ -1,7 +1,9 @@
 import { dimensionText } from './dimension-text.ts';
 import { GHOST } from './draw-ghosts.ts';
 import { contourStepIn, gapContours } from './gap-contours.ts';
-import { arrow, at, circle, path, through, type Mark } from './marks.ts';
+import { arrow, at, path, through, type Mark } from './marks.ts';
+import { cornerMarks } from './pad-corners.ts';
+import type { RelevelLayout } from './relevel-layout.ts';
 import type { RelevelPlaces } from './relevel-places.ts';
 import type { RelevelSection } from './relevel-section.ts';
 import { FONT } from './sheet-spec.ts';
@@ -9,11 +11,16 @@ import type { Run } from './sheet-types.ts';
 import { textWidth } from './text-width.ts';
 
 /** The pad from above: foam with contours of its gap, opening, corners with their gaps, its two sizes, the side of the doors. */
-export function padPlanMarks(section: RelevelSection, places: RelevelPlaces, metric: boolean): Mark[] {
+export function padPlanMarks(
+  { section, places, balloons }: Pick<RelevelLayout, 'section' | 'places' | 'balloons'>,
+  metric: boolean,
+): Mark[] {
   const { left, right, backY, frontY } = places;
   const known = section.lengthIn !== null && section.widthIn !== null;
   const outline = `M${at(left, backY)}L${at(right, backY)}L${at(right, frontY)}L${at(left, frontY)}Z`;
   const step = section.gapsIn === null ? null : contourStepIn(section.gapsIn);
+  // Below the figures that stand under the corners.
+  const doorsY = frontY + (places.compact ? 25 : 8);
   const titleX = places.compact ? 12 : Math.min(left, TITLE_X);
   const title = places.compact
     ? 'Plan; gaps at the final level'
@@ -38,12 +45,12 @@ export function padPlanMarks(section: RelevelSection, places: RelevelPlaces, met
     ...contours(section, places),
     ...(section.opening ? opening(section.opening, places) : []),
     path(outline, known ? { stroke: 'ink', weight: 1.8 } : GHOST),
-    ...corners(section, places, metric),
+    ...cornerMarks(section, { places, balloons, metric }),
     ...(places.compact ? [] : sizes(section, places, metric)),
-    path(`M${at(left + 4, frontY + 8)}L${at(right - 4, frontY + 8)}`, { stroke: 'ink', weight: 2.6 }),
+    path(`M${at(left + 4, doorsY)}L${at(right - 4, doorsY)}`, { stroke: 'ink', weight: 2.6 }),
     text('doors', {
       x: (left + right) / 2,
-      y: frontY + 36,
+      y: doorsY + (places.compact ? 17 : 28),
       anchor: 'middle',
       runs: [
         { text: 'doors', bold: true },
@@ -103,38 +110,6 @@ function opening(
       ? [text('opening', { x, y: y - 2, anchor: 'middle', runs: [{ text: 'opening', bold: true }] })]
       : []),
   ];
-}
-
-function corners(
-  { cornersIn }: RelevelSection,
-  { left, right, backY, frontY, compact }: RelevelPlaces,
-  metric: boolean,
-): Mark[] {
-  // On a narrow sheet they stand over their corners, if there is room for two side by side.
-  const over = compact && right - left >= 66;
-  const places = [
-    { x: left, y: frontY },
-    { x: left, y: backY },
-    { x: right, y: backY },
-    { x: right, y: frontY },
-  ];
-  return places.flatMap(({ x, y }, index): Mark[] => {
-    const gap = cornersIn[index] ?? null;
-    return [
-      path(circle(x, y, 3.8), { fill: 'ink' }),
-      text(`corner ${index + 1}`, {
-        x: over ? x : x + (x === left ? -9 : 9),
-        y: y === backY ? y - 7 : y + 17,
-        anchor: over ? 'middle' : x === left ? 'end' : 'start',
-        runs: [
-          { text: `${index + 1}: `, bold: true },
-          gap === null
-            ? { text: compact ? '?' : 'not given', tone: 'query' }
-            : { text: dimensionText(gap, 'in', metric), tone: 'muted' },
-        ],
-      }),
-    ];
-  });
 }
 
 /** Width above the plan, length at its left, each between extension lines. */

@@ -3,15 +3,22 @@ import { dimensionText } from './dimension-text.ts';
 import { findingLabels, missingLabels } from './finding-labels.ts';
 import { placeColumn, type ColumnLabel, type PlacedText } from './label-column.ts';
 import type { LayoutInput } from './layout-input.ts';
+import { CORNER, cornerBaseline, cornerText } from './pad-corners.ts';
 import { relevelPlaces, PAD, type RelevelPlaces } from './relevel-places.ts';
 import { relevelSection, type RelevelSection } from './relevel-section.ts';
-import type { Point } from './sheet-types.ts';
+import { FONT } from './sheet-spec.ts';
+import type { Point, SheetFinding } from './sheet-types.ts';
+import { textWidth } from './text-width.ts';
+
+/** A finding on the gap of a corner, in its circle beside the figure. */
+export type CornerBalloon = { readonly corner: 1 | 2; readonly finding: SheetFinding };
 
 export type RelevelLayout = {
   readonly section: RelevelSection;
   readonly places: RelevelPlaces;
   readonly labels: readonly PlacedText[];
   readonly leftOut: readonly ColumnLabel[];
+  readonly balloons: readonly CornerBalloon[];
 };
 
 const DASHED = new Set(['padLengthIn', 'padWidthIn']);
@@ -21,8 +28,13 @@ export function relevelLayout(input: LayoutInput): RelevelLayout {
   const { record, spec, metric, findings, foot } = input;
   const section = relevelSection(record.values);
   const places = relevelPlaces(section, spec);
+  const balloons = spec.compact ? [] : cornerBalloons(findings);
+  const beside = new Set(balloons.map((one) => one.finding));
   const labels = [
-    ...findingLabels(findings, metric),
+    ...findingLabels(
+      findings.filter((finding) => !beside.has(finding)),
+      metric,
+    ),
     ...missingLabels(section.missing, {
       findings,
       values: record.values,
@@ -33,9 +45,9 @@ export function relevelLayout(input: LayoutInput): RelevelLayout {
   const column = placeColumn(labels, {
     spec,
     bottom: foot.labelsBottom,
-    pointOf: (label) => pointOf(label, places),
+    pointOf: (label) => pointOf(label, { section, places, metric }),
   });
-  return { section, places, ...column };
+  return { section, places, ...column, balloons };
 }
 
 function facts(
@@ -100,7 +112,18 @@ function facts(
   return out;
 }
 
-function pointOf(label: ColumnLabel, places: RelevelPlaces): Point | null {
+/** At the left there is room beside the figure; a leader would run across the whole plan. */
+function cornerBalloons(findings: readonly SheetFinding[]): CornerBalloon[] {
+  return ([1, 2] as const).flatMap((corner) => {
+    const finding = findings.find((one) => one.field === `gap${corner}In`);
+    return finding ? [{ corner, finding }] : [];
+  });
+}
+
+function pointOf(
+  label: ColumnLabel,
+  { section, places, metric }: { section: RelevelSection; places: RelevelPlaces; metric: boolean },
+): Point | null {
   const field = label.finding ? label.finding.field : label.id.replace('missing ', '');
   if (field === null || label.finding?.code.startsWith('photo-')) return null;
   const { right, left, backY, frontY, padY, deepRightY } = places;
@@ -110,11 +133,14 @@ function pointOf(label: ColumnLabel, places: RelevelPlaces): Point | null {
   if (field === 'opening' || field.startsWith('opening'))
     return { x: (left + right) / 2, y: frontY - (frontY - backY) * 0.42 };
   const corner = /^gap([1-4])In$/.exec(field)?.[1];
-  if (corner !== undefined)
-    return {
-      x: corner === '1' || corner === '2' ? left : right,
-      y: corner === '1' || corner === '4' ? frontY : backY,
-    };
+  if (corner !== undefined) {
+    const atLeft = corner === '1' || corner === '2';
+    const y = corner === '1' || corner === '4' ? frontY : backY;
+    if (atLeft || places.compact) return { x: atLeft ? left : right, y };
+    // From behind the figure, so that the leader does not run through it.
+    const text = cornerText(Number(corner), { gapIn: section.cornersIn[Number(corner) - 1] ?? null, metric });
+    return { x: right + CORNER + textWidth(text, FONT, true) + 6, y: cornerBaseline(y, places) - 4 };
+  }
   if (/^(gap|plane)/.test(field)) return { x: right - 6, y: (padY + deepRightY) / 2 };
   if (field === 'before' || field.startsWith('slopeBefore')) return { x: right - 14, y: padY - PAD - 4 };
   if (field === 'after' || /^(slope|raised|lowered|released)/.test(field))

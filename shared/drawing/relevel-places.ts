@@ -29,14 +29,14 @@ export function relevelPlaces(section: RelevelSection, spec: SheetSpec): Relevel
   const [frontLeft = 0, backLeft = 0, backRight = 0, frontRight = 0] = section.gapsIn ?? [];
   const meanLeft = (frontLeft + backLeft) / 2;
   const meanRight = (frontRight + backRight) / 2;
-  const room = spec.compact ? 136 : 232;
+  const room = spec.compact ? 136 : 248;
   const deepest = spec.compact ? 70 : 96;
   const axisX = spec.compact ? 124 : spec.axisX;
   const scale = Math.min(room / Math.max(lengthIn, widthIn), deepest / Math.max(meanLeft, meanRight, 0.1));
   const half = (widthIn / 2) * scale;
   const backY = spec.compact ? 76 : 100;
   const frontY = backY + lengthIn * scale;
-  const padY = frontY + 62 + PAD + BOX + 26;
+  const padY = frontY + (spec.compact ? 66 : 78) + PAD + BOX + 26;
   return {
     scale,
     left: axisX - half,

@@ -5,7 +5,7 @@ import { dimensionText } from './dimension-text.ts';
 import { findingLabels, missingLabels } from './finding-labels.ts';
 import type { ColumnLabel } from './label-column.ts';
 import type { SetSection } from './set-section.ts';
-import type { SheetFinding, SheetLimits, SheetRecord } from './sheet-types.ts';
+import type { SheetFinding, SheetLimits, SheetPurpose, SheetRecord } from './sheet-types.ts';
 
 /** What a label says, before it has a place. */
 export type LabelContent = ColumnLabel & { readonly anchor: AnchorName | null };
@@ -16,6 +16,7 @@ type Input = {
   readonly findings: readonly SheetFinding[];
   readonly limits: SheetLimits;
   readonly metric: boolean;
+  readonly purpose: SheetPurpose;
 };
 
 /** What a dashed outline stands for. */
@@ -40,7 +41,7 @@ export function setLabels(input: Input): LabelContent[] {
   return [...found, ...missing, ...facts];
 }
 
-function factLabels({ record, section, limits, metric }: Input): LabelContent[] {
+function factLabels({ record, section, limits, metric, purpose }: Input): LabelContent[] {
   const { derived, values } = record;
   const facts: LabelContent[] = [];
   const add = (anchor: AnchorName, title: string, detail: string) =>
@@ -54,7 +55,7 @@ function factLabels({ record, section, limits, metric }: Input): LabelContent[] 
       `Foam ${text(derived.placedFt3, 'ft3')} placed${lifts > 1 ? ` in ${lifts} lifts` : ''}`,
       fillDetail(record, limits, metric),
     );
-  } else if (derived.voidFt3 !== null) {
+  } else if (purpose === 'plan' && derived.voidFt3 !== null) {
     add('foam', `Void ${text(derived.voidFt3, 'ft3')}`, 'to be foamed');
   }
   if (derived.leastAnnulusIn !== null) {
@@ -106,7 +107,7 @@ function fillDetail({ derived }: SheetRecord, limits: SheetLimits, metric: boole
   const limit =
     limits.fillLeast === undefined
       ? ''
-      : `, limit ${formatNumber(limits.fillLeast, { digits: 2, fixed: true })}`;
+      : `, limit\u00a0${formatNumber(limits.fillLeast, { digits: 2, fixed: true })}`;
   return `fill ratio ${ratio}${plusMinus} of void ${dimensionText(derived.voidFt3, 'ft3', metric)}${limit}`;
 }
 

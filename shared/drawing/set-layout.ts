@@ -23,7 +23,7 @@ export function setLayout(input: LayoutInput): SetLayout {
   const geometry = setGeometry(section, spec);
   const dimensions = setDimensions({ section, geometry, spec, values: record.values, findings, metric });
   const onLine = new Set(dimensions.down.map((dimension) => dimension.balloon?.finding.id));
-  const contents = setLabels({ record, section, findings, limits, metric }).filter(
+  const contents = setLabels({ record, section, findings, limits, metric, purpose }).filter(
     (label) => label.finding === null || !onLine.has(label.finding.id),
   );
   const column = placeColumn(contents, {

@@ -18,7 +18,7 @@ export type StraightenLayout = {
   readonly leftOut: readonly ColumnLabel[];
 };
 
-const DASHED = new Set(['gapAtGradeIn', 'gapDepthFt', 'girthGroundLineIn']);
+const DASHED = new Set(['gapAtGradeIn', 'gapDepthFt', 'girthGroundLineIn', 'leanAfterInPer10Ft']);
 
 /** Everything on the sheet of a *straighten* record, placed. */
 export function straightenLayout(given: LayoutInput): StraightenLayout {
@@ -176,7 +176,9 @@ function facts(section: StraightenSection, { record, limits, metric, findings }:
 }
 
 function towards({ azimuthDeg }: Lean): string {
-  return azimuthDeg === null ? 'direction not given' : `towards ${formatQuantity(azimuthDeg, 'deg')}`;
+  return azimuthDeg === null
+    ? 'direction not given'
+    : `towards ${formatQuantity(azimuthDeg, 'deg', { digits: 0 })}`;
 }
 
 /** Findings of lean point to the pole's face, those of gaps and foam to the wedge. */
