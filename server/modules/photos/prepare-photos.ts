@@ -8,6 +8,7 @@ import { setProgress } from '#server/jobs/progress.ts';
 import { BlobMissing } from '#server/storage/blob-store.ts';
 import { rememberBlob } from '#server/storage/remember-blob.ts';
 import { withTempFolder } from '#server/uploads/temp-folder.ts';
+import { finishPhotos } from './finish-photos.ts';
 import type { PictureAnswer } from './picture-messages.ts';
 import { PictureProcess } from './picture-process.ts';
 import { PHOTO_PIPELINE } from './pipeline.ts';
@@ -30,10 +31,7 @@ export const preparePhotos: JobHandler<PreparePhotosPayload> = async (
   );
   const total = waiting.length;
   const subject = `photos:${batchId}`;
-  if (total === 0) {
-    await setProgress(em, { subject, state: 'done', done: 0, total });
-    return;
-  }
+  if (total === 0) return finishPhotos(em, { batchId, problem: null });
   await setProgress(em, { subject, state: 'running', done: 0, total });
   const missing: string[] = [];
   const process = new PictureProcess();
@@ -41,7 +39,13 @@ export const preparePhotos: JobHandler<PreparePhotosPayload> = async (
     await withTempFolder('upstand-photos-', async (folder) => {
       for (const [index, { sha256 }] of waiting.entries()) {
         if (!(await preparePhoto({ em, services, process, folder, sha256, signal }))) missing.push(sha256);
-        await setProgress(em, { subject, state: 'running', done: index + 1, total });
+        await run(
+          em,
+          // An attempt that was taken for dead, and is not, must not open what another has ended.
+          `update job_progress set state = 'running', done = $2, total = $3, updated_at = now()
+           where subject = $1 and state in ('queued', 'running')`,
+          [subject, index + 1, total],
+        );
       }
     });
   } finally {
@@ -51,7 +55,7 @@ export const preparePhotos: JobHandler<PreparePhotosPayload> = async (
     throw new Error(
       `The store of files lacks the bytes of ${missing.length} photographs: ${missing.join(', ')}.`,
     );
-  await setProgress(em, { subject, state: 'done', done: total, total });
+  return finishPhotos(em, { batchId, problem: null });
 };
 
 /** False: the store lacks its bytes. The others are prepared all the same. */
