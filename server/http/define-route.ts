@@ -45,6 +45,8 @@ type RouteBase = {
   readonly status?: number;
   /** Honours Idempotency-Key: the first answer is given again. */
   readonly creates?: boolean;
+  /** A raw route whose handler honours Idempotency-Key itself: a file must not be read inside the key's transaction. */
+  readonly keyed?: boolean;
   /** Requires If-Match: missing 428; the handler compares and throws `stale(current)`. */
   readonly ifMatch?: boolean;
   /** The handler reads the request or writes the answer itself (multipart, files, streams). */
@@ -62,8 +64,11 @@ export type RouteOf<T extends RouteTypes> = RouteBase & {
 export function defineRoute<T extends RouteTypes = RouteTypes>(route: RouteOf<T>): Route {
   const name = `${route.method.toUpperCase()} ${route.path}`;
   if (route.creates && route.raw) {
-    throw new Error(`${name}: a raw route cannot honour Idempotency-Key, since its answer is not kept.`);
+    throw new Error(
+      `${name}: a raw route cannot honour Idempotency-Key, since its answer is not kept; one that keeps it says \`keyed\`.`,
+    );
   }
+  if (route.keyed && !route.raw) throw new Error(`${name}: only a raw route keeps its answer itself.`);
   if (route.body && route.raw) throw new Error(`${name}: a raw route reads its body itself.`);
   if (route.creates && route.method !== 'post') throw new Error(`${name}: only a post creates.`);
   // The context given to the handler was checked against the route's own schemas, which is what T says.

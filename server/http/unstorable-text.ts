@@ -19,5 +19,5 @@ export function unstorableText(value: unknown, pointer: string): ProblemError[] 
 }
 
 function isStorable(text: string): boolean {
-  return !text.includes('\0') && text.isWellFormed();
+  return !/[\0\p{Surrogate}]/u.test(text);
 }

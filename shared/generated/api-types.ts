@@ -956,6 +956,35 @@ export interface Session {
   csrfToken: string;
 }
 /**
+ * On which paper the record sheets of a batch are put.
+ */
+export interface SheetFileBody {
+  paper: 'letter' | 'a4';
+  revision?: number;
+}
+/**
+ * The record sheets of a batch as one PDF file, ready or being made.
+ */
+export interface SheetFile {
+  id: string;
+  batchId: string;
+  paper: 'letter' | 'a4';
+  state: 'queued' | 'running' | 'ready' | 'failed';
+  /**
+   * Record sheets that it holds.
+   */
+  sheets: number;
+  /**
+   * Sheets written so far.
+   */
+  done: number;
+  pages: number | null;
+  size: number | null;
+  requestedAt: string;
+  finishedAt: string | null;
+  problem: string | null;
+}
+/**
  * E-mail address and password.
  */
 export interface SignIn {
@@ -1078,6 +1107,13 @@ export interface UploadReply {
     id: string | null;
     fileName: string;
     sha256: string | null;
+    /**
+     * The same bytes were in this batch before, and are not kept twice: as what, and on which structure they lie.
+     */
+    already: {
+      fileName: string;
+      structureNumber: string | null;
+    } | null;
     error: {
       code: string;
       detail: string;

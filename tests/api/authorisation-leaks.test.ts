@@ -187,8 +187,20 @@ describe('the same bytes handed in by both', () => {
     ]);
     const sha = (bytes: Buffer): string => createHash('sha256').update(bytes).digest('hex');
     const [same, other] = reply.body.files;
-    expect(same).toEqual({ id: expect.any(String), fileName: 'a.jpg', sha256: sha(shared), error: null });
-    expect(other).toEqual({ id: expect.any(String), fileName: 'b.jpg', sha256: sha(fresh), error: null });
+    expect(same).toEqual({
+      id: expect.any(String),
+      fileName: 'a.jpg',
+      sha256: sha(shared),
+      already: null,
+      error: null,
+    });
+    expect(other).toEqual({
+      id: expect.any(String),
+      fileName: 'b.jpg',
+      sha256: sha(fresh),
+      already: null,
+      error: null,
+    });
     expect(Object.keys(reply.body)).toEqual(['input', 'files']);
     expect(reply.headers['idempotency-replayed']).toBeUndefined();
     const theirs = before.body.files[0].id as string;

@@ -14,11 +14,18 @@ import { readBatch } from './read-batch.ts';
  */
 export async function ensureTakesFiles(
   em: EntityManager,
-  upload: { req: Request; batchId: string; contractorId: string | null; actor: Actor },
+  upload: {
+    req: Request;
+    batchId: string;
+    contractorId: string | null;
+    actor: Actor;
+    /** It was answered before: what the batch has become since is no reason to refuse the same answer. */
+    repeated: boolean;
+  },
 ): Promise<void> {
   try {
     const batch = await readBatch(em, { id: upload.batchId, contractorId: upload.contractorId });
-    accepted(moveRevision(revisionState(batch), { type: 'upload' }, upload.actor));
+    if (!upload.repeated) accepted(moveRevision(revisionState(batch), { type: 'upload' }, upload.actor));
   } catch (error) {
     discardBody(upload.req);
     throw error;

@@ -15,6 +15,7 @@ import { addInput } from './add-input.ts';
 import { lockRevision, stateOf, type LockedRevision } from './lock-revision.ts';
 
 type PhotoRow = { id: string; sha256: string };
+type Known = PhotoRow & { fileName: string; structureNumber: string | null };
 
 /**
  * Adds received photographs to the batch's open revision. A file refused by itself is told beside the others; the
@@ -29,8 +30,9 @@ export async function postPhotos(
   return em.transactional(async (tx) => {
     const revision = await lockRevision(tx, { id: batchId, contractorId });
     const moved = accepted(moveRevision(stateOf(revision), { type: 'upload' }, actor));
-    const known = await photosBySha(tx, batchId, files);
-    const fresh = newFiles(files, known);
+    const before = await photosBySha(tx, batchId, files);
+    const fresh = newFiles(files, before);
+    const ids = new Map([...before.values()].map(({ sha256, id }) => [sha256, id]));
     let input = revision.input;
     if (fresh.length > 0) {
       for (const { stored } of fresh) if (stored) await rememberBlob(tx, stored);
@@ -41,7 +43,7 @@ export async function postPhotos(
       );
       input = added.n;
       for (const photo of await insertPhotos(tx, { revision, inputId: added.id, actor, fresh }))
-        known.set(photo.sha256, photo.id);
+        ids.set(photo.sha256, photo.id);
       await setProgress(tx, { subject: `photos:${batchId}`, state: 'queued', done: 0, total: null });
       await enqueue(tx, preparePhotosJob, { batchId });
       await appendTrail(tx, {
@@ -53,30 +55,50 @@ export async function postPhotos(
     }
     return {
       input,
-      files: files.map(({ fileName, stored, refused }) => ({
-        id: stored ? (known.get(stored.sha256) ?? null) : null,
-        fileName,
-        sha256: stored?.sha256 ?? null,
-        error: refused ? { code: refused.code, detail: refused.detail } : null,
-      })),
+      files: files.map((file) => {
+        const { fileName, stored, refused } = file;
+        return {
+          id: stored ? (ids.get(stored.sha256) ?? null) : null,
+          fileName,
+          sha256: stored?.sha256 ?? null,
+          already: stored ? alreadyAs(file, { before: before.get(stored.sha256), fresh }) : null,
+          error: refused ? { code: refused.code, detail: refused.detail } : null,
+        };
+      }),
     };
   });
 }
 
+/** Of this batch only: that another batch has the same bytes is told to nobody here. */
 async function photosBySha(
   em: EntityManager,
   batchId: string,
   files: readonly ReceivedFile[],
-): Promise<Map<string, string>> {
-  const found = await rows<PhotoRow>(
+): Promise<Map<string, Known>> {
+  const found = await rows<Known>(
     em,
-    'select id, sha256 from photos where batch_id = $1 and sha256 = any($2)',
+    `select p.id, p.sha256, p.file_name as "fileName",
+       case when not m.removed then l.structure_number end as "structureNumber"
+     from photos p
+     left join lateral (select * from photo_matches x where x.photo_id = p.id order by x.seq desc limit 1) m on true
+     left join lines l on l.id = m.line_id
+     where p.batch_id = $1 and p.sha256 = any($2)`,
     [batchId, files.flatMap((file) => (file.stored ? [file.stored.sha256] : []))],
   );
-  return new Map(found.map((photo) => [photo.sha256, photo.id]));
+  return new Map(found.map((photo) => [photo.sha256, photo]));
 }
 
-function newFiles(files: readonly ReceivedFile[], known: ReadonlyMap<string, string>): ReceivedFile[] {
+/** As what the same bytes came before this file: in the batch, or earlier in the same upload. */
+function alreadyAs(
+  file: ReceivedFile,
+  { before, fresh }: { before: Known | undefined; fresh: readonly ReceivedFile[] },
+): { fileName: string; structureNumber: string | null } | null {
+  if (before) return { fileName: before.fileName, structureNumber: before.structureNumber };
+  const first = fresh.find((one) => one.stored?.sha256 === file.stored?.sha256);
+  return first && first !== file ? { fileName: first.fileName, structureNumber: null } : null;
+}
+
+function newFiles(files: readonly ReceivedFile[], known: ReadonlyMap<string, Known>): ReceivedFile[] {
   const bySha = new Map<string, ReceivedFile>();
   for (const file of files)
     if (file.stored && !known.has(file.stored.sha256) && !bySha.has(file.stored.sha256))

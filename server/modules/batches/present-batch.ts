@@ -8,6 +8,8 @@ import { isOpen } from './is-open.ts';
 export function presentBatch(row: BatchDbRow, viewer: { actor: Actor; ability: Ability }): Batch {
   const hidden = viewer.actor.orgKind === 'owner' && isOpen(row.status);
   const counts = hidden ? null : row.counts;
+  // What an inspector decides is told when the review is closed, and so is how far they are.
+  const going = viewer.actor.orgKind === 'contractor' && row.status === 'in-review';
   return {
     id: row.id,
     number: row.number,
@@ -29,7 +31,7 @@ export function presentBatch(row: BatchDbRow, viewer: { actor: Actor; ability: A
     workbook: { fileName: hidden ? null : row.file_name, sha256: hidden ? null : row.sha256 },
     counts: {
       lines: counts?.lines ?? (row.n > 0 ? row.returned : 0),
-      decided: hidden ? 0 : row.decided,
+      decided: hidden || going ? 0 : row.decided,
       nonconformity: counts?.nonconformity ?? 0,
       query: counts?.query ?? 0,
       note: counts?.note ?? 0,

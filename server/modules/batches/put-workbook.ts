@@ -33,8 +33,12 @@ export async function putWorkbook(
     const revision = await lockRevision(tx, { id: batchId, contractorId });
     const moved = accepted(moveRevision(stateOf(revision), { type: 'upload' }, actor));
     const current = await currentWorkbook(tx, revision.id);
-    const files = (id: string) => [{ id, fileName: file.fileName, sha256: stored.sha256, error: null }];
-    if (current?.sha256 === stored.sha256) return { input: revision.input, files: files(current.id) };
+    const same = current?.sha256 === stored.sha256 ? current : null;
+    const already = same ? { fileName: same.file_name, structureNumber: null } : null;
+    const files = (id: string) => [
+      { id, fileName: file.fileName, sha256: stored.sha256, already, error: null },
+    ];
+    if (same) return { input: revision.input, files: files(same.id) };
     await rememberBlob(tx, stored);
     const added = await addInput(
       tx,
@@ -60,10 +64,10 @@ export async function putWorkbook(
 function currentWorkbook(
   em: EntityManager,
   revisionId: string,
-): Promise<{ id: string; sha256: string } | null> {
+): Promise<{ id: string; sha256: string; file_name: string } | null> {
   return row(
     em,
-    `select id, sha256 from inputs where revision_id = $1 and kind = 'workbook' order by n desc limit 1`,
+    `select id, sha256, file_name from inputs where revision_id = $1 and kind = 'workbook' order by n desc limit 1`,
     [revisionId],
   );
 }

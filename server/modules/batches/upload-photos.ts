@@ -4,6 +4,7 @@ import { HEAD_BYTES, pictureType } from '#server/modules/photos/picture-type.ts'
 import { receiveFiles } from '#server/uploads/receive-files.ts';
 import type { UploadReply } from '#shared/generated/api-types.ts';
 import { ensureTakesFiles } from './ensure-takes-files.ts';
+import { answerUploadOnce, readUploadKey } from './answer-upload-once.ts';
 import { postPhotos } from './post-photos.ts';
 
 const MOST_BYTES = 40_000_000;
@@ -13,7 +14,8 @@ const MOST_FILES = 500;
 export async function uploadPhotos(ctx: RouteContext): Promise<UploadReply> {
   const { em, req, res, actor, ability, services } = ctx;
   const where = { batchId: ctx.params.id, contractorId: contractorWall(ability, 'hand-in', 'Batch'), actor };
-  await ensureTakesFiles(em, { req, ...where });
+  const key = await readUploadKey(em, { req, actor });
+  await ensureTakesFiles(em, { req, ...where, repeated: key.repeated });
   const files = await receiveFiles({
     req,
     res,
@@ -28,5 +30,5 @@ export async function uploadPhotos(ctx: RouteContext): Promise<UploadReply> {
       detail: `The picture is larger than ${MOST_BYTES / 1_000_000} MB. Save it smaller as JPEG and upload it again.`,
     },
   });
-  return postPhotos(em, { ...where, files });
+  return answerUploadOnce(ctx, { key, files, first: (tx) => postPhotos(tx, { ...where, files }) });
 }

@@ -6,7 +6,12 @@ import type { Ability, Actor, SubjectName } from '#shared/permissions/ability.ts
 
 const UUID = /^[0-9a-f]{8}-(?:[0-9a-f]{4}-){3}[0-9a-f]{12}$/i;
 
-type Kind = { readonly needs: SubjectName; readonly sql: string };
+type Kind = {
+  readonly needs: SubjectName;
+  readonly sql: string;
+  /** `$2` is who asks: it is theirs alone. */
+  readonly own?: boolean;
+};
 
 /** `$1` the id, `$2` the wall. A check is its revision's. */
 const KINDS: Readonly<Record<string, Kind>> = {
@@ -21,10 +26,20 @@ const KINDS: Readonly<Record<string, Kind>> = {
           join lateral (select id from revisions where batch_id = b.id order by n desc limit 1) v on true
           where b.id = $1 and ($2::uuid is null or b.contractor_id = $2)`,
   },
+  // Photographs of a batch, while their pictures are made; what is in a draft is its contractor's.
+  photos: {
+    needs: 'Photo',
+    sql: `select b.id from batches b where b.id = $1 and ($2::uuid is null or b.contractor_id = $2)`,
+  },
   // Transmittals belong to no contractor: the right to read them is the whole of the wall.
   transmittal: {
     needs: 'Transmittal',
     sql: 'select id from transmittals where id = $1 and $2::uuid is null',
+  },
+  sheets: {
+    needs: 'Batch',
+    own: true,
+    sql: 'select id from sheet_files where id = $1 and requested_by = $2',
   },
 };
 
@@ -47,14 +62,24 @@ export async function readSubject(
   const [name = '', id = ''] = subject.split(':', 2);
   const kind = Object.hasOwn(KINDS, name) ? KINDS[name] : undefined;
   if (!kind || !UUID.test(id))
-    throw problem(400, 'subject.unknown', 'Follow check:<id>, batch:<id> or transmittal:<id>.', {
-      errors: [{ pointer: '#/query/subject', code: 'subject.unknown', detail: 'There is no such subject.' }],
-    });
+    throw problem(
+      400,
+      'subject.unknown',
+      'Follow check:<id>, batch:<id>, photos:<batch id>, transmittal:<id> or sheets:<id>.',
+      {
+        errors: [
+          { pointer: '#/query/subject', code: 'subject.unknown', detail: 'There is no such subject.' },
+        ],
+      },
+    );
   const wall = contractorWall(ability, 'read', kind.needs);
-  const found = await row<{ id: string; revision_id?: string }>(em, kind.sql, [id, wall]);
+  const found = await row<{ id: string; revision_id?: string }>(em, kind.sql, [
+    id,
+    kind.own ? actor.id : wall,
+  ]);
   if (!found) throw notFound();
   return {
-    progress: name === 'transmittal' ? `transmittal:${found.id}` : `check:${found.revision_id}`,
-    hideProblem: name !== 'transmittal' && actor.orgKind === 'owner',
+    progress: found.revision_id === undefined ? `${name}:${found.id}` : `check:${found.revision_id}`,
+    hideProblem: name !== 'transmittal' && name !== 'sheets' && actor.orgKind === 'owner',
   };
 }

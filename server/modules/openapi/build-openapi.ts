@@ -60,7 +60,7 @@ function operation(route: Route, names: ReadonlyMap<string, string>): JsonSchema
     })),
     ...Object.entries(route.query ?? {}).map(([name, schema]) => ({ name, in: 'query', schema })),
     ...(isWrite ? [header('X-CSRF-Token', true)] : []),
-    ...(route.creates ? [header('Idempotency-Key', false)] : []),
+    ...(route.creates || route.keyed ? [header('Idempotency-Key', false)] : []),
     ...(route.ifMatch ? [header('If-Match', true)] : []),
   ];
   const status = String(

@@ -5,9 +5,11 @@ import type { UploadReply } from '#shared/generated/api-types.ts';
 
 const sent: string[] = [];
 let answer: (name: string) => UploadReply | Error;
-const send: SendFile = ({ files }) => {
+const keys: (string | undefined)[] = [];
+const send: SendFile = ({ files, idempotencyKey }) => {
   const name = files[0]?.name ?? '';
   sent.push(name);
+  keys.push(idempotencyKey);
   const reply = answer(name);
   return reply instanceof Error ? Promise.reject(reply) : Promise.resolve(reply);
 };
@@ -15,7 +17,13 @@ const send: SendFile = ({ files }) => {
 const file = (name: string) => new File(['x'], name);
 const reply = (id: string, error: { code: string; detail: string } | null = null): UploadReply => ({
   input: 1,
-  files: [{ id: error ? null : id, fileName: id, sha256: null, error }],
+  files: [{ id: error ? null : id, fileName: id, sha256: null, already: null, error }],
+});
+const copyOf = (id: string, structureNumber: string | null): UploadReply => ({
+  input: 1,
+  files: [
+    { id, fileName: id, sha256: null, already: { fileName: `first ${id}`, structureNumber }, error: null },
+  ],
 });
 const queue = () => createUploadQueue({ path: '/p', method: 'POST', field: 'photos' }, send);
 const settled = (one: ReturnType<typeof queue>) =>
@@ -23,17 +31,19 @@ const settled = (one: ReturnType<typeof queue>) =>
 
 beforeEach(() => {
   sent.length = 0;
+  keys.length = 0;
   answer = (name) => reply(name);
 });
 
-it('stores each file, and tells the same bytes again as a duplicate', async () => {
+it('stores each file, and tells the same bytes again as a duplicate, with where they lie', async () => {
   const one = queue();
   const stored = vi.fn<() => void>();
   one.onStored(stored);
-  one.know(['known']);
+  answer = (name) => (name === 'known' ? copyOf(name, 'L-1') : reply(name));
   one.add([file('a'), file('known'), file('b')]);
   await settled(one);
   expect(countUploads(one.files())).toMatchObject({ all: 3, stored: 2, duplicate: 1, failed: 0 });
+  expect(one.files()[1]?.already).toEqual({ fileName: 'first known', structureNumber: 'L-1' });
   expect(stored).toHaveBeenCalledTimes(2);
   one.clear();
   expect(one.files()).toEqual([]);
@@ -70,6 +80,9 @@ it('sends again what failed on the way', async () => {
   await settled(one);
   expect(countUploads(one.files()).stored).toBe(2);
   expect(sent).toEqual(['lost', 'good', 'lost']);
+  // Under one key, so that an answer that was lost on the way is given again; another file has its own.
+  expect(keys[2]).toBe(keys[0]);
+  expect(new Set(keys).size).toBe(2);
   one.stop();
 });
 

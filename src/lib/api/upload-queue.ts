@@ -1,14 +1,19 @@
 import { ApiProblem } from '#src/lib/api/api-problem.ts';
+import { newIdempotencyKey } from '#src/lib/api/client.ts';
 import { upload, type UploadRequest } from '#src/lib/api/upload.ts';
 import type { UploadReply } from '#shared/generated/api-types.ts';
 
 export type QueuedFile = {
   readonly id: number;
   readonly file: File;
+  /** Of its upload, however often it is tried. */
+  readonly key: string;
   readonly state: 'waiting' | 'sending' | 'stored' | 'duplicate' | 'failed';
   /** Bytes sent. */
   readonly sent: number;
   readonly problem: string | null;
+  /** Of a duplicate: where the same bytes lie in this batch. */
+  readonly already: UploadReply['files'][number]['already'];
   /** No answer came: it is sent again by itself once the network is back. */
   readonly offline: boolean;
   /** The file itself was not accepted: sending the same one again changes nothing. */
@@ -27,8 +32,6 @@ export type UploadQueue = {
   readonly retry: () => void;
   /** Everything goes from the list but what is still to be sent. */
   readonly clear: () => void;
-  /** What the server holds already, by id of its answer: the same bytes again are told as duplicates. */
-  readonly know: (ids: readonly string[]) => void;
   readonly stop: () => void;
   readonly files: () => readonly QueuedFile[];
   readonly subscribe: (listener: () => void) => () => void;
@@ -52,7 +55,6 @@ export function createUploadQueue(target: UploadTarget, sendFile: SendFile = upl
   let files: readonly QueuedFile[] = [];
   let nextId = 1;
   let running = 0;
-  const known = new Set<string>();
   const abort = new AbortController();
   const listeners = new Set<() => void>();
   const storedListeners = new Set<() => void>();
@@ -65,20 +67,21 @@ export function createUploadQueue(target: UploadTarget, sendFile: SendFile = upl
     put(files.map((one) => (one.id === id ? { ...one, ...change } : one)));
   }
 
-  async function send({ id, file }: QueuedFile): Promise<void> {
+  async function send({ id, file, key }: QueuedFile): Promise<void> {
     patch(id, { state: 'sending', sent: 0, problem: null, offline: false, refused: false });
     try {
       const reply = await sendFile({
         ...target,
         files: [file],
+        idempotencyKey: key,
         signal: abort.signal,
         onProgress: (sent) => patch(id, { sent }),
       });
       const answer = reply.files[0];
       if (answer?.error) return patch(id, { state: 'failed', problem: answer.error.detail, refused: true });
-      const duplicate = typeof answer?.id === 'string' && known.has(answer.id);
-      if (answer?.id) known.add(answer.id);
-      patch(id, { state: duplicate ? 'duplicate' : 'stored', sent: file.size });
+      const already = answer?.already ?? null;
+      const duplicate = already !== null;
+      patch(id, { state: duplicate ? 'duplicate' : 'stored', sent: file.size, already });
       if (!duplicate) for (const listener of storedListeners) listener();
     } catch (error) {
       if (abort.signal.aborted) return;
@@ -113,16 +116,23 @@ export function createUploadQueue(target: UploadTarget, sendFile: SendFile = upl
       const added = chosen.map((file): QueuedFile => {
         const id = nextId;
         nextId += 1;
-        return { id, file, state: 'waiting', sent: 0, problem: null, offline: false, refused: false };
+        return {
+          id,
+          file,
+          key: newIdempotencyKey(),
+          state: 'waiting',
+          sent: 0,
+          problem: null,
+          already: null,
+          offline: false,
+          refused: false,
+        };
       });
       put([...files, ...added]);
       run();
     },
     retry: () => again((one) => !one.refused),
     clear: () => put(files.filter((one) => one.state === 'waiting' || one.state === 'sending')),
-    know: (ids) => {
-      for (const id of ids) known.add(id);
-    },
     stop() {
       abort.abort();
       globalThis.removeEventListener('online', onOnline);

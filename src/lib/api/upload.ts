@@ -9,6 +9,8 @@ export type UploadRequest = {
   /** Name of the multipart field: `workbook`, `photos`. */
   readonly field: string;
   readonly files: readonly File[];
+  /** The same for each attempt at the same files: an answer that was lost on the way is given again. */
+  readonly idempotencyKey?: string;
   /** Bytes sent of bytes. */
   readonly onProgress?: (sent: number, total: number) => void;
   readonly signal?: AbortSignal;
@@ -16,7 +18,7 @@ export type UploadRequest = {
 
 /** Sends files with progress (fetch cannot tell how much has left). Throws ApiProblem, or AbortError when cancelled. */
 export async function upload<T>(request: UploadRequest): Promise<T> {
-  const key = newIdempotencyKey();
+  const key = request.idempotencyKey ?? newIdempotencyKey();
   const first = await send(request, key);
   if (first.status !== 401 || !(await waitForSignIn())) return read(first) as T;
   return read(await send(request, key)) as T;

@@ -3,7 +3,7 @@ import { useMemo, useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { batchFindingsQuery } from '../api/batch-findings.ts';
 import { batchLinesQuery } from '../api/batch-lines.ts';
-import { batchPhotosQuery } from '../api/batch-photos.ts';
+import { usePhotosPrepared } from '../api/batch-photos.ts';
 import { useCheck } from '../api/use-check.ts';
 import { BatchHead } from './batch-head.tsx';
 import { BatchTabs, readTab, type BatchTab } from './batch-tabs.tsx';
@@ -34,9 +34,9 @@ export function BatchPage({ batch }: { batch: Batch }) {
   const n = revision ?? batch.revision.number;
   const lines = useQuery(batchLinesQuery(batch.id, n));
   const findings = useQuery(batchFindingsQuery(batch.id, n));
-  const photos = useQuery(batchPhotosQuery(batch.id));
+  usePhotosPrepared(batch.id);
   const check = useCheck(batch);
-  const intake = useIntake(batch, photos.data);
+  const intake = useIntake(batch);
   const view = useMemo(
     () => joinFindings(lines.data ?? NONE, findings.data ?? NONE),
     [lines.data, findings.data],

@@ -31,14 +31,19 @@ export function UploadFaults({ files }: { files: readonly QueuedFile[] }) {
       ) : null}
       {copies.length > 0 ? (
         <p className="mt-1 break-words">
-          Here already, byte for byte, and not kept twice:{' '}
-          {copies
-            .slice(0, MOST)
-            .map((one) => one.file.name)
-            .join(', ')}
-          {copies.length > MOST ? ` and ${copies.length - MOST} more` : ''}.
+          Here already, byte for byte, and not kept twice: {copies.slice(0, MOST).map(copyWords).join(', ')}
+          {copies.length > MOST ? ` and ${copies.length - MOST} more` : ''}. To move one to another structure,
+          place it by hand under Photographs.
         </p>
       ) : null}
     </>
   );
+}
+
+/** `kits.jpg (as L-104 kits.jpg on 17-0426)` */
+function copyWords({ file, already }: QueuedFile): string {
+  if (!already) return file.name;
+  const name = already.fileName === file.name ? '' : `as ${already.fileName}`;
+  const place = already.structureNumber ? `on ${already.structureNumber}` : 'on no line yet';
+  return `${file.name} (${[name, place].filter(Boolean).join(' ')})`;
 }

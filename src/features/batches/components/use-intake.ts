@@ -1,15 +1,15 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { useCallback, useEffect, useRef, useState } from 'react';
+import { useCallback, useRef, useState } from 'react';
 import { batchKey } from '../api/batch.ts';
 import { useSendWorkbook } from '../api/send-workbook.ts';
 import { sortFiles } from '../lib/sort-files.ts';
 import { useUploadQueue } from '#src/lib/api/use-upload-queue.ts';
-import type { Batch, Photo } from '#shared/generated/api-types.ts';
+import type { Batch } from '#shared/generated/api-types.ts';
 
 const SETTLE_MS = 1_200;
 
 /** Takes whatever is dropped, chosen or photographed and sends it where it belongs. */
-export function useIntake(batch: Batch, photos: readonly Photo[] | undefined) {
+export function useIntake(batch: Batch) {
   const client = useQueryClient();
   const { send, sent } = useSendWorkbook(batch.id);
   const [told, setTold] = useState<readonly string[]>([]);
@@ -26,10 +26,6 @@ export function useIntake(batch: Batch, photos: readonly Photo[] | undefined) {
     { path: `/api/batches/${batch.id}/photos`, method: 'POST', field: 'photos' },
     onStored,
   );
-  useEffect(() => {
-    if (photos) queue.know(photos.map((photo) => photo.id));
-  }, [queue, photos]);
-
   function take(chosen: readonly File[]): void {
     const { workbooks, photographs, others } = sortFiles(chosen);
     const [workbook, ...more] = workbooks;
