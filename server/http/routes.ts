@@ -19,6 +19,7 @@ import { concessionRoutes } from '#server/modules/concessions/routes.ts';
 import { nonconformityRoutes } from '#server/modules/nonconformities/routes.ts';
 import { registerRoutes } from '#server/modules/register/routes.ts';
 import { reviewRoutes } from '#server/modules/review/routes.ts';
+import { sheetRoutes } from '#server/modules/sheets/routes.ts';
 import { standardRoutes } from '#server/modules/standard/routes.ts';
 import { trailRoutes } from '#server/modules/trail/routes.ts';
 import { transmittalRoutes } from '#server/modules/transmittals/routes.ts';
@@ -35,6 +36,7 @@ export const ROUTES: readonly Route[] = [
   ...batchRoutes,
   ...photoRoutes,
   ...recordRoutes,
+  ...sheetRoutes,
   ...eventRoutes,
   ...lotRoutes,
   ...productRoutes,

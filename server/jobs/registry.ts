@@ -4,6 +4,7 @@ import { sendMailJob } from '#server/mail/send-mail.job.ts';
 import { checkRevisionJob } from '#server/modules/check/check-revision.job.ts';
 import { preparePhotosJob } from '#server/modules/photos/prepare-photos.job.ts';
 import { freeIdleReviewsJob } from '#server/modules/review/free-idle-reviews.job.ts';
+import { makeSheetsJob } from '#server/modules/sheets/make-sheets.job.ts';
 import { issueTransmittalJob } from '#server/modules/transmittals/issue-transmittal.job.ts';
 import { sweepBlobsJob } from '#server/storage/sweep-blobs.job.ts';
 
@@ -15,5 +16,6 @@ export const JOBS: readonly JobDefinition<never>[] = [
   checkRevisionJob,
   preparePhotosJob,
   issueTransmittalJob,
+  makeSheetsJob,
   freeIdleReviewsJob,
 ];

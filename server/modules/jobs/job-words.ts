@@ -17,6 +17,10 @@ const WORDS: Readonly<Record<string, { readonly title: string; readonly meaning:
     title: 'Issue a transmittal',
     meaning: 'Nothing was issued. What it is to hold stands fixed and is written when this runs.',
   },
+  'make-sheets': {
+    title: 'Make the record sheets of a batch',
+    meaning: 'Whoever asked for the PDF is told that it failed. The records are not touched.',
+  },
   tidy: {
     title: 'Clear away what has done its work',
     meaning: 'Old sessions, tokens and counters stay a little longer. Nobody’s work waits for it.',
