@@ -21,20 +21,23 @@ export type PageGroup = {
 export type SheetPage = { readonly groups: readonly PageGroup[]; readonly foot: string };
 
 const FOOT = 30;
+/** Words of 13 units are 7.8 points high then. */
+const LEAST_SCALE = 0.6;
 
 /** The pages of one record sheet: the drawing with its title block, then its lists, over as many pages as they take. */
 export function layOutSheet(content: SheetContent, paper: Paper): SheetPage[] {
   const size = PAPER_SIZES[paper];
   const width = size.width - 2 * MARGIN;
-  const { figure, height } = figureGroup(content, width);
+  const pieces = sheetLists(content, width);
+  const bottom = size.height - MARGIN - FOOT + 12;
+  const lists = pieces.reduce((sum, piece) => sum + piece.height, 0);
+  const { figure, height } = figureGroup(content, { width, beside: bottom - MARGIN - 20 - lists });
   const caution = words(
     { x: MARGIN, y: MARGIN + height + 15 },
     { runs: [{ text: WHO_DECIDES, tone: 'query' }], size: 8 },
   );
   const pages: PageGroup[][] = [[figure, { x: 0, y: 0, scale: 1, marks: [caution] }]];
   let y = MARGIN + height + 20;
-  const bottom = size.height - MARGIN - FOOT + 12;
-  const pieces = sheetLists(content, width);
   pieces.forEach((piece, index) => {
     if (y + heightWithNext(pieces, index) > bottom && y > MARGIN + 20) {
       const next = nextPage(content, size);
@@ -54,7 +57,11 @@ function heightWithNext(pieces: readonly Piece[], index: number): number {
   return piece.height + (piece.heading ? heightWithNext(pieces, index + 1) : 0);
 }
 
-function figureGroup(content: SheetContent, width: number): { figure: PageGroup; height: number } {
+/** As wide as the page, or smaller where that brings the whole sheet on to one page and still reads well. */
+function figureGroup(
+  content: SheetContent,
+  { width, beside }: { width: number; beside: number },
+): { figure: PageGroup; height: number } {
   const { data, limits, zone } = content;
   const drawing = drawSheet({
     record: { ...data.record, values: data.record.values as FieldValues, pours: data.pours },
@@ -63,7 +70,9 @@ function figureGroup(content: SheetContent, width: number): { figure: PageGroup;
     limits,
     stamp: lineStamp(data.record, data.findings, zone),
   });
-  const scale = width / drawing.width;
+  const full = width / drawing.width;
+  const whole = beside / drawing.height;
+  const scale = whole < full && whole >= LEAST_SCALE ? whole : full;
   const frame = (inset: number, weight: number): Mark => {
     const [right, bottom] = [drawing.width - inset, drawing.height - inset];
     return path(`M${inset} ${inset}L${right} ${inset}L${right} ${bottom}L${inset} ${bottom}Z`, {
@@ -73,7 +82,7 @@ function figureGroup(content: SheetContent, width: number): { figure: PageGroup;
   };
   return {
     figure: {
-      x: MARGIN,
+      x: MARGIN + (width - drawing.width * scale) / 2,
       y: MARGIN,
       scale,
       marks: [frame(0, 0.8), frame(5, 1.6), ...drawing.marks],
