@@ -1,7 +1,7 @@
+import { preflight } from '#shared/workbook/preflight.ts';
 import type { Workbook } from '#shared/workbook/types.ts';
 import { createCollector } from '#shared/workbook/xml/collect-workbook.ts';
 import { readPackage, type WorkbookEvent } from '#shared/workbook/xml/read-package.ts';
-import { preflight } from './preflight.ts';
 import { openZipSource } from './zip-source.ts';
 
 /** The reader's events for a file in memory. Throws WorkbookRefused. */

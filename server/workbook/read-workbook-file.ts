@@ -2,7 +2,7 @@ import { fork, type ChildProcess } from 'node:child_process';
 import { open } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { fileURLToPath, pathToFileURL } from 'node:url';
-import { READER_LIMITS } from '#shared/workbook/limits.ts';
+import { checkFileSize } from '#shared/workbook/preflight.ts';
 import type { Workbook } from '#shared/workbook/types.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
 import { createCollector } from '#shared/workbook/xml/collect-workbook.ts';
@@ -97,10 +97,7 @@ async function checkSize(path: string): Promise<void> {
   const file = await open(path);
   try {
     const { size } = await file.stat();
-    if (size === 0) throw new WorkbookRefused('empty-file');
-    if (size > READER_LIMITS.fileBytes) {
-      throw new WorkbookRefused('file-too-large', { limitMb: READER_LIMITS.fileBytes / 1_000_000 });
-    }
+    checkFileSize(size);
   } finally {
     await file.close();
   }

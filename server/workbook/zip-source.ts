@@ -1,9 +1,13 @@
 import type { Readable } from 'node:stream';
 import yauzl, { type Entry, type ZipFile } from 'yauzl';
-import { crc32 } from '#shared/workbook/crc32.ts';
-import { READER_LIMITS } from '#shared/workbook/limits.ts';
+import { inflateCounted } from '#shared/workbook/inflate-counted.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
-import { partName } from '#shared/workbook/xml/resolve-target.ts';
+import {
+  checkEntryCount,
+  createAdmission,
+  entryName,
+  type PackedEntry,
+} from '#shared/workbook/zip-limits.ts';
 import type { PartSource } from '#shared/workbook/xml/part-source.ts';
 
 export type ZipSource = PartSource & { readonly close: () => void };
@@ -19,44 +23,36 @@ function openZip(bytes: Buffer): Promise<ZipFile> {
   });
 }
 
+type ZipPart = PackedEntry & { readonly entry: Entry };
+
 function nameOf(entry: Entry): string {
   const raw: unknown = entry.fileName;
   const bytes = Buffer.isBuffer(raw) ? raw : Buffer.from(String(raw));
-  return partName(bytes.toString((entry.generalPurposeBitFlag & 0x800) === 0 ? 'latin1' : 'utf8'));
-}
-
-function checkEntry(entry: Entry, part: string): void {
-  if (entry.isEncrypted()) throw new WorkbookRefused('zip-encrypted', { part });
-  if (isBomb(entry.uncompressedSize, entry.compressedSize))
-    throw new WorkbookRefused('zip-too-large', { part });
-}
-
-function isBomb(inflated: number, packed: number): boolean {
-  if (inflated > READER_LIMITS.partBytes) return true;
-  return inflated > READER_LIMITS.ratioFromBytes && inflated > READER_LIMITS.ratio * packed;
+  return entryName(bytes, entry.generalPurposeBitFlag);
 }
 
 /** The directory of a zip file: every entry looked at before any is inflated. */
-function readDirectory(zip: ZipFile): Promise<Map<string, Entry>> {
+function readDirectory(zip: ZipFile): Promise<ReadonlyMap<string, ZipPart>> {
   return new Promise((resolve, reject) => {
-    if (zip.entryCount > READER_LIMITS.zipEntries) {
-      reject(new WorkbookRefused('zip-too-many-entries', { limit: READER_LIMITS.zipEntries }));
+    try {
+      checkEntryCount(zip.entryCount);
+    } catch (error) {
+      reject(error as Error);
       return;
     }
-    const entries = new Map<string, Entry>();
-    let total = 0;
+    const admission = createAdmission<ZipPart>();
     zip.on('error', (error: Error) =>
       reject(/encryption/.test(error.message) ? new WorkbookRefused('zip-encrypted') : damaged()),
     );
-    zip.on('end', () => resolve(entries));
+    zip.on('end', () => resolve(admission.parts));
     zip.on('entry', (entry: Entry) => {
       try {
-        const name = nameOf(entry);
-        checkEntry(entry, name);
-        total += entry.uncompressedSize;
-        if (total > READER_LIMITS.totalBytes) throw new WorkbookRefused('zip-too-large');
-        if (entries.has(name)) throw new WorkbookRefused('zip-duplicate', { part: name });
-        if (!name.endsWith('/')) entries.set(name, entry);
+        admission.admit(nameOf(entry), {
+          packed: entry.compressedSize,
+          inflated: entry.uncompressedSize,
+          encrypted: entry.isEncrypted(),
+          entry,
+        });
         zip.readEntry();
       } catch (error) {
         reject(error as Error);
@@ -75,28 +71,7 @@ function openStream(zip: ZipFile, entry: Entry, part: string): Promise<Readable>
 /** Parts of a zip file held in memory. Inflated bytes are counted, not believed, and checked against the entry's CRC. */
 export async function openZipSource(bytes: Buffer): Promise<ZipSource> {
   const zip = await openZip(bytes);
-  let inflatedInAll = 0;
-  async function* inflate(entry: Entry, part: string): AsyncGenerator<Uint8Array> {
-    const stream = await openStream(zip, entry, part);
-    let inflated = 0;
-    let crc = 0;
-    try {
-      for await (const chunk of stream as AsyncIterable<Buffer>) {
-        inflated += chunk.length;
-        inflatedInAll += chunk.length;
-        if (inflatedInAll > READER_LIMITS.totalBytes || isBomb(inflated, entry.compressedSize)) {
-          throw new WorkbookRefused('zip-too-large', { part });
-        }
-        crc = crc32(chunk, crc);
-        yield chunk;
-      }
-    } catch (error) {
-      throw error instanceof WorkbookRefused ? error : damaged(part);
-    } finally {
-      stream.destroy();
-    }
-    if (crc !== entry.crc32) throw damaged(part);
-  }
+  const inAll = { bytes: 0 };
   try {
     const entries = await readDirectory(zip);
     return {
@@ -105,7 +80,15 @@ export async function openZipSource(bytes: Buffer): Promise<ZipSource> {
       open: (name) => {
         const entry = entries.get(name);
         if (entry === undefined) throw new WorkbookRefused('part-missing', { part: name });
-        return inflate(entry, name);
+        return inflateCounted(
+          {
+            name,
+            packed: entry.packed,
+            crc32: entry.entry.crc32,
+            open: () => openStream(zip, entry.entry, name),
+          },
+          inAll,
+        );
       },
       close: () => zip.close(),
     };
