@@ -5,6 +5,7 @@ export type NavItem = { readonly label: string; readonly to: string };
 
 const HOME = { label: 'Home', to: paths.home.to() };
 const ORDERS = { label: 'Work orders', to: paths.workOrders.to() };
+const PLANNER = { label: 'Kit planner', to: paths.planner.to() };
 const BATCHES = { label: 'Batches', to: paths.batches.to() };
 const REVIEW = { label: 'Review desk', to: paths.review.to() };
 const CONCESSIONS = { label: 'Concessions', to: paths.concessions.to() };
@@ -20,10 +21,10 @@ const JOBS = { label: 'Jobs', to: paths.jobs.to() };
 
 /** What each role works with, most used first; the rest is reached from these. */
 export const NAV: Readonly<Record<Role, readonly NavItem[]>> = {
-  contractor: [HOME, ORDERS, BATCHES, REGISTER, STANDARD],
+  contractor: [HOME, ORDERS, PLANNER, BATCHES, REGISTER, STANDARD],
   inspector: [HOME, ORDERS, REVIEW, REGISTER, NONCONFORMITIES, LOTS, STANDARD, TRAIL],
   engineer: [HOME, CONCESSIONS, REGISTER, NONCONFORMITIES, LOTS, STANDARD, TRAIL],
   clerk: [HOME, ORDERS, REGISTER, TRANSMITTALS, NONCONFORMITIES, LOTS, STANDARD, TRAIL],
   auditor: [HOME, REGISTER, NONCONFORMITIES, LOTS, TRANSMITTALS, STANDARD, TRAIL],
-  administrator: [HOME, ORDERS, BATCHES, LOTS, PEOPLE, NONCONFORMITIES, STANDARD, TRAIL, MAIL, JOBS],
+  administrator: [HOME, ORDERS, PLANNER, BATCHES, LOTS, PEOPLE, NONCONFORMITIES, STANDARD, TRAIL, MAIL, JOBS],
 };

@@ -19,6 +19,7 @@ const SIGNED_IN: RouteObject[] = [
   { path: paths.reviewBatch.path, lazy: () => import('#src/features/review/routes/review-batch.tsx') },
   { path: paths.workOrders.path, lazy: () => import('#src/features/work-orders/routes/work-orders.tsx') },
   { path: paths.workOrder.path, lazy: () => import('#src/features/work-orders/routes/work-order.tsx') },
+  { path: paths.planner.path, lazy: () => import('#src/features/planner/routes/planner.tsx') },
   { path: paths.batches.path, lazy: () => import('#src/features/batches/routes/batches.tsx') },
   { path: paths.batch.path, lazy: () => import('#src/features/batches/routes/batch.tsx') },
   { path: paths.record.path, lazy: () => import('#src/features/records/routes/record.tsx') },

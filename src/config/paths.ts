@@ -12,6 +12,7 @@ export const paths = {
   search: { path: '/search', to: (q = '') => (q ? `/search?q=${encode(q)}` : '/search') },
   workOrders: { path: '/work-orders', to: () => '/work-orders' },
   workOrder: { path: '/work-orders/:id', to: (id: string) => `/work-orders/${encode(id)}` },
+  planner: { path: '/planner', to: () => '/planner' },
   batches: { path: '/batches', to: () => '/batches' },
   batch: { path: '/batches/:id', to: (id: string) => `/batches/${encode(id)}` },
   review: { path: '/review', to: () => '/review' },
