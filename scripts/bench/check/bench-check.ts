@@ -1,51 +1,56 @@
 /**
- * Times the check of a large workbook, step by step: `npm run bench:check -- [LINES] [RUNS]` (10,000 and 3).
- * The reader alone in its child process; reader and source rows; all of it with records and rules, on the demo standard
- * with lots, design list and photographs known. Prints the median of each and its ratio to the reader alone.
+ * Times the check of a large workbook, step by step, beside a script in Python that applies two of its rules:
+ * `npm run bench:check -- [LINES] [RUNS]` (10,000 and 3). Every step is a process of its own, its start included: the
+ * reader alone; reader and records; the whole as the worker does it, with all rules, lots, design list and photographs,
+ * until the last row is ready to be stored. Prints medians and ratios, and fails where the script finds otherwise.
  */
 import { mkdtemp, rm, stat } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { readWorkbookFile } from '#server/workbook/read-workbook-file.ts';
-import { checkBatch } from '#shared/check/check-batch.ts';
-import { readSource } from '#shared/workbook/read-source.ts';
-import { benchContext, writeBenchWorkbook } from './bench-workbook.ts';
+import { median } from '#scripts/bench/lib/stats.ts';
+import { machine } from '#scripts/bench/machine.ts';
+import { writeBenchWorkbook } from './bench-workbook.ts';
+import { compareFindings } from './compare-findings.ts';
+import { runOpenpyxl, runStep } from './run-steps.ts';
+import { wholeCheck } from './whole-check.ts';
 
 const [lines = 10_000, runs = 3] = process.argv.slice(2).map(Number);
 const folder = await mkdtemp(join(tmpdir(), 'upstand-bench-'));
 try {
   const file = join(folder, 'bench.xlsx');
   await writeBenchWorkbook(file, lines);
-  const context = benchContext(lines);
-  const limits = { timeLimitMs: 120_000 };
-  const times: number[][] = [];
-  let findings = 0;
-  // One run to warm up, which is not counted.
-  for (let run = 0; run <= runs; run += 1) {
-    const t0 = performance.now();
-    const workbook = await readWorkbookFile(file, limits);
-    const t1 = performance.now();
-    const source = readSource(workbook);
-    const t2 = performance.now();
-    findings = checkBatch(source, context).findings.length;
-    const t3 = performance.now();
-    if (run > 0) times.push([t1 - t0, t2 - t0, t3 - t0]);
-  }
-  const median = (step: number) =>
-    times.map((one) => one[step] ?? 0).toSorted((a, b) => a - b)[Math.floor(times.length / 2)] ?? 0;
-  const alone = median(0);
   const size = (await stat(file)).size / 1024 / 1024;
+  let found = await wholeCheck(file, lines);
+  const script = await runOpenpyxl(file);
+  const steps = [
+    { name: 'reader alone', run: () => runStep('read', file) },
+    { name: 'reader and records', run: () => runStep('records', file) },
+    { name: 'whole, all rules', run: async () => void (found = await wholeCheck(file, lines)) },
+    { name: 'openpyxl script, two rules', run: async () => void (await runOpenpyxl(file)) },
+  ];
+  const times = steps.map((): number[] => []);
+  // In turn, so that a change of the machine's load meets all of them; the runs above have warmed up.
+  for (let run = 0; run < runs; run += 1)
+    for (const [index, step] of steps.entries()) {
+      const began = performance.now();
+      await step.run();
+      times[index]?.push(performance.now() - began);
+    }
+  console.log(machine());
   console.log(
-    `${lines} lines, ${lines * 2} pour rows, ${size.toFixed(1)} MB; ${findings} findings; median of ${runs} runs`,
+    `${lines} lines, ${script.pours} pour rows, ${size.toFixed(1)} MB; ${found.findings} findings; median of ${runs} runs`,
   );
-  for (const [step, name] of [
-    'reader alone',
-    'reader and source rows',
-    'whole, with records and rules',
-  ].entries())
+  const medians = times.map(median);
+  const [alone = Number.NaN] = medians;
+  for (const [index, { name }] of steps.entries()) {
+    const ms = medians[index] ?? Number.NaN;
     console.log(
-      `  ${name.padEnd(32)} ${(median(step) / 1000).toFixed(2).padStart(7)} s   × ${(median(step) / alone).toFixed(2)}`,
+      `  ${name.padEnd(30)} ${(ms / 1000).toFixed(2).padStart(7)} s   × ${(ms / alone).toFixed(2)}`,
     );
+  }
+  const [, , whole = Number.NaN, python = Number.NaN] = medians;
+  console.log(`  whole to script                            × ${(whole / python).toFixed(2)}`);
+  console.log(compareFindings(found, script));
 } finally {
   await rm(folder, { recursive: true, force: true });
 }

@@ -1,7 +1,4 @@
 import { writeWorkbook, type RowInput } from '#server/workbook/write-workbook.ts';
-import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
-import { lineKey } from '#shared/records/structure-key.ts';
-import type { CheckContext, PhotoFact } from '#shared/rules/types.ts';
 
 export const VIEWS = ['bore-depth', 'kits', 'finish', 'plumb'];
 export const numberOf = (index: number): string => `B-${String(index + 1).padStart(6, '0')}`;
@@ -61,20 +58,4 @@ export async function writeBenchWorkbook(file: string, lines: number, workOrder 
     set: indexes.map(setRow),
     pours: indexes.flatMap(pourRows),
   });
-}
-
-/** What the batch would know in the product: its lot, its design list, four photographs a line. */
-export function benchContext(lines: number): CheckContext {
-  const photos = new Map<string, readonly PhotoFact[]>();
-  for (let index = 0; index < lines; index += 1) {
-    const key = lineKey('set', numberOf(index), 1);
-    photos.set(
-      key,
-      VIEWS.map(
-        (view) =>
-          ({ id: `${key}|${view}`, fileName: `${view}.jpg`, sha256: `${key}|${view}`, view }) as PhotoFact,
-      ),
-    );
-  }
-  return { ...DEMO_CONTEXT, photos, siblings: new Set() };
 }
