@@ -2,12 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { expectWhole } from './setup/expect-whole.ts';
 import { restartPostgres, startBlobs, stopBlobs } from './setup/stores.ts';
 import { askTransmittal, oneLine, openBatch, postPhoto, putWorkbook, type World } from './setup/story.ts';
-import { beginAll, readAll } from './setup/under-way.ts';
+import { ALL_DONE, beginAll, SMALL, readAll } from './setup/under-way.ts';
 
-const ALL_DONE = {
-  states: ['done', 'checked', 'ready', 'issued'],
-  problems: [null, null, null],
-};
 const TRY_AGAIN = {
   code: 'storage.unreachable',
   detail: 'The store behind this site cannot be reached just now. Nothing is lost; try again in a moment.',
@@ -52,7 +48,8 @@ export function storesAway(world: World): void {
       ];
       await putWorkbook(story, checked, await oneLine(story, 'L-9')).expect(202);
       await holds[0]?.reached;
-      await postPhoto(story, pictured, 'L-9 finish.jpg');
+      await postPhoto(story, pictured, 'L-9 finish.jpg', SMALL);
+      await putWorkbook(story, pictured, await oneLine(story, 'L-9')).expect(202);
       const asked = await askTransmittal(story);
       const file = stage.web().blobs.holdRequest(/^PUT \S+incoming/);
       const upload = putWorkbook(story, batch, bytes).then((reply) => reply);

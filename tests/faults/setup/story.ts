@@ -55,8 +55,12 @@ export function oneLine({ site }: Story, structureNumber: string): Promise<Buffe
 export const putWorkbook = (story: Story, batch: HandedIn, bytes: Buffer) =>
   story.contractor.put(`${batch.path}/workbook`).attach('workbook', bytes, 'batch.xlsx');
 
-export const postPhoto = async (story: Story, batch: HandedIn, name: string) =>
-  story.contractor.post(`${batch.path}/photos`).attach('photos', await photograph(), name);
+export const postPhoto = async (
+  story: Story,
+  batch: HandedIn,
+  name: string,
+  size: { width?: number; height?: number } = {},
+) => story.contractor.post(`${batch.path}/photos`).attach('photos', await photograph(size), name);
 
 export const askTransmittal = (story: Story) =>
   story.clerk.post('/api/transmittals').send({ scope: { filter: {} } });
