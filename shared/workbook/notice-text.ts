@@ -9,7 +9,8 @@ const NOTHING_DUE = 'Nothing, if that is meant.';
 const SENTENCES: Readonly<Record<NoticeCode, Say>> = {
   'workbook-no-lines': () => ({
     title: 'No lines',
-    message: 'None of the sheets Set, Straighten and Re-level holds a filled-in line.',
+    message:
+      'None of the sheets Set, Straighten and Re-level holds a filled-in line. A row with nothing but what the template had filled in is not one.',
     remedy: 'Fill in what was measured, save, and upload again.',
   }),
   'workbook-sheet-missing': (_, sheet) => ({
