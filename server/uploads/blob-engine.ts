@@ -36,9 +36,9 @@ export function blobEngine(options: EngineOptions): StorageEngine {
   const inSlot = createSlots(AT_ONCE);
   let files = 0;
   return {
-    _handleFile(req: Request, file, done) {
+    _handleFile(_req: Request, file, done) {
       const place = files++;
-      inSlot(() => receive(file.stream, safeFileName(file.originalname), { ...options, req })).then(
+      inSlot(() => receive(file.stream, safeFileName(file.originalname), options)).then(
         (received) => {
           options.received[place] = received;
           done(null, {});
@@ -53,11 +53,7 @@ export function blobEngine(options: EngineOptions): StorageEngine {
   };
 }
 
-async function receive(
-  stream: Readable,
-  fileName: string,
-  options: EngineOptions & { req: Request },
-): Promise<ReceivedFile> {
+async function receive(stream: Readable, fileName: string, options: EngineOptions): Promise<ReceivedFile> {
   const chunks = stream[Symbol.asyncIterator]() as AsyncIterator<Buffer>;
   const head = await readHead(chunks, options.headBytes);
   const admission = options.admit(head);
@@ -67,7 +63,7 @@ async function receive(
   }
   try {
     const { sha256, size } = await options.blobs.putStream(
-      Readable.from(whole(head, chunks, options.req), { objectMode: false }),
+      Readable.from(whole(head, chunks), { objectMode: false }),
       {
         maxBytes: options.maxBytes,
       },
@@ -92,11 +88,9 @@ async function readHead(chunks: AsyncIterator<Buffer>, bytes: number): Promise<B
   return Buffer.concat(parts);
 }
 
-async function* whole(head: Buffer, rest: AsyncIterator<Buffer>, req: Request): AsyncGenerator<Buffer> {
+async function* whole(head: Buffer, rest: AsyncIterator<Buffer>): AsyncGenerator<Buffer> {
   if (head.length > 0) yield head;
   for (let next = await rest.next(); !next.done; next = await rest.next()) yield next.value;
-  // Of a request that was cut, the part that came ends like a file: it is none, and is not kept as one.
-  if (req.destroyed && !req.complete) throw new Error('Request aborted');
 }
 
 /** A refused file is read to its end, or the rest of the request could not be. */
