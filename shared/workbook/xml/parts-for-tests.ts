@@ -10,13 +10,21 @@ const SHEET_TYPE = 'application/vnd.openxmlformats-officedocument.spreadsheetml.
 
 export type Parts = Record<string, string | Uint8Array>;
 
+const relationship = (id: string, type: string, target: string): string =>
+  `<Relationship Id="${id}" Type="${OFFICE}/${type}" Target="${target}"/>`;
+
 /** Parts of a workbook with one sheet; `sheetData` is the inside of that element, `more` replaces or adds parts. */
 export function workbookParts(sheetData: string, more: Parts = {}): Parts {
+  const related = [
+    relationship('rId1', 'worksheet', 'worksheets/sheet1.xml'),
+    'xl/sharedStrings.xml' in more ? relationship('rId2', 'sharedStrings', 'sharedStrings.xml') : '',
+    'xl/styles.xml' in more ? relationship('rId3', 'styles', 'styles.xml') : '',
+  ];
   return {
     '[Content_Types].xml': `<Types xmlns="${PACKAGE}/content-types"><Default Extension="xml" ContentType="application/xml"/><Override PartName="/xl/workbook.xml" ContentType="${SHEET_TYPE}"/></Types>`,
     '_rels/.rels': `<Relationships xmlns="${PACKAGE}/relationships"><Relationship Id="r1" Type="${OFFICE}/officeDocument" Target="xl/workbook.xml"/></Relationships>`,
     'xl/workbook.xml': `<workbook xmlns="${MAIN}" xmlns:r="${OFFICE}"><sheets><sheet name="Set" sheetId="1" r:id="rId1"/></sheets></workbook>`,
-    'xl/_rels/workbook.xml.rels': `<Relationships xmlns="${PACKAGE}/relationships"><Relationship Id="rId1" Type="${OFFICE}/worksheet" Target="worksheets/sheet1.xml"/><Relationship Id="rId2" Type="${OFFICE}/sharedStrings" Target="sharedStrings.xml"/><Relationship Id="rId3" Type="${OFFICE}/styles" Target="styles.xml"/></Relationships>`,
+    'xl/_rels/workbook.xml.rels': `<Relationships xmlns="${PACKAGE}/relationships">${related.join('')}</Relationships>`,
     'xl/worksheets/sheet1.xml': `<worksheet xmlns="${MAIN}"><sheetData>${sheetData}</sheetData></worksheet>`,
     ...more,
   };

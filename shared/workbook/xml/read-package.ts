@@ -61,8 +61,11 @@ export async function* readPackage(parts: PartSource): AsyncGenerator<WorkbookEv
 
   const byType = (type: string): string | null => {
     const found = [...relationships.values()].find((one) => one.type === type);
-    const part = found === undefined ? null : resolveTarget(main, found.target);
-    return part !== null && parts.has(part) ? part : null;
+    if (found === undefined) return null;
+    const part = resolveTarget(main, found.target);
+    // Without its styles a workbook would still be read, and every date be a plain number.
+    if (!parts.has(part)) throw new WorkbookRefused('part-missing', { part });
+    return part;
   };
   const stringsPart = byType('sharedStrings');
   const stylesPart = byType('styles');
