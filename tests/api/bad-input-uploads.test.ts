@@ -4,6 +4,7 @@ import { mkdtempSync, readdirSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import { startAzurite } from '#scripts/lib/azurite.mjs';
 import { INCOMING } from '#server/storage/blob-store.ts';
 import { photograph } from '#tests/factories/photograph.ts';
 import { pourRows, setRow } from '#tests/factories/set-row.ts';
@@ -18,12 +19,15 @@ let contractor: Agent;
 let workmate: Agent;
 let batch: HandedIn;
 let server: http.Server;
+/** A store of this file's own: what lies in it is counted. */
+let azurite: Awaited<ReturnType<typeof startAzurite>>;
 // Of this file's own: what others leave in the common folder meanwhile is not ours.
 const folder = mkdtempSync(path.join(tmpdir(), 'upstand-test-'));
 process.env['TMPDIR'] = folder;
 
 beforeAll(async () => {
-  harness = await createHarness();
+  azurite = await startAzurite({ dir: path.join(folder, 'upstand-data-blobs') });
+  harness = await createHarness({ settings: { AZURE_STORAGE_CONNECTION_STRING: azurite.connectionString } });
   site = await createWorkSite(harness, { planned: ['L-1', 'L-2'] });
   contractor = await harness.signIn(site.contractor);
   workmate = await harness.signIn(await harness.person('contractor', { orgId: site.contractor.orgId }));
@@ -34,6 +38,7 @@ afterAll(async () => {
   server.closeAllConnections();
   await new Promise((resolve) => server.close(resolve));
   await harness.close();
+  await azurite.stop();
   rmSync(folder, { recursive: true, force: true });
 });
 beforeEach(async () => {
