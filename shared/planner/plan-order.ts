@@ -54,15 +54,14 @@ export function designTexts({ kind, structureNumber, design }: DesignStructure):
   return texts;
 }
 
-/** The plan of every structure given, and the kits of all of them. Structures of one design are computed once. */
-export function planOrder<S extends DesignStructure>(
-  structures: readonly S[],
+/** Plans one structure after the other, each design once: a page may plan some, answer a key, and go on. */
+export function orderPlanner<S extends DesignStructure>(
   texts: PlanTexts,
   { context, options = {} }: { readonly context: PlanContext; readonly options?: SayOptions },
-): OrderPlan<S> {
+): (structure: S) => OrderRow<S> {
   const shared = sharedTexts(texts);
   const known = new Map<string, Plan>();
-  const rows = structures.map((structure) => {
+  return (structure) => {
     const { name: _name, ...design } = designTexts(structure);
     const key = JSON.stringify(design);
     let plan = known.get(key);
@@ -71,7 +70,11 @@ export function planOrder<S extends DesignStructure>(
       known.set(key, plan);
     }
     return { structure, plan };
-  });
+  };
+}
+
+/** The kits of all structures planned. */
+export function sumOrder<S extends DesignStructure>(rows: readonly OrderRow<S>[]): OrderPlan<S> {
   let [voidFt3, needFt3, surplusFt3, unplanned] = [0, 0, 0, 0];
   for (const { plan } of rows) {
     const answer = plan.kits.likely;
@@ -83,4 +86,13 @@ export function planOrder<S extends DesignStructure>(
   const plans = rows.flatMap(({ plan }) => plan.kits.likely ?? []);
   const spareShare = rows[0]?.plan.assumptions.spareShare ?? 0;
   return { rows, unplanned, voidFt3, needFt3, surplusFt3, lines: orderList(plans, spareShare) };
+}
+
+/** The plan of every structure given, and the kits of all of them. */
+export function planOrder<S extends DesignStructure>(
+  structures: readonly S[],
+  texts: PlanTexts,
+  about: { readonly context: PlanContext; readonly options?: SayOptions },
+): OrderPlan<S> {
+  return sumOrder(structures.map(orderPlanner<S>(texts, about)));
 }

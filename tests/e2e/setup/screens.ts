@@ -28,6 +28,13 @@ export const SCREENS: readonly Screen[] = [
   { name: 'home of a clerk', as: 'clerk', path: () => '/' },
   { name: 'work orders', as: 'first', path: () => '/work-orders' },
   { name: 'work order', as: 'first', path: ({ of }) => `/work-orders/${of.first.orderId}` },
+  { name: 'kit planner', as: 'first', path: () => '/planner?boreIn=20&waterIn=3&tempF=cold' },
+  {
+    name: 'kits of a work order',
+    as: 'administrator',
+    path: ({ of }) => `/planner?view=order&built=too&order=${of.first.orderId}`,
+  },
+  { name: 'kits for the truck', as: 'first', path: () => '/planner?view=table' },
   { name: 'new work order', as: 'administrator', path: () => '/work-orders', press: /^New work order/ },
   { name: 'batches', as: 'first', path: () => '/batches' },
   { name: 'draft batch', as: 'first', path: ({ of }) => `/batches/${of.first.draft.id}` },

@@ -5,6 +5,7 @@ import { assumedTexts } from '../lib/assumed-texts.ts';
 import { downloadCsv } from '../lib/download-text.ts';
 import { PlanFormProvider, type PlanForm } from '../lib/plan-form.ts';
 import { plannerAddress } from '../lib/planner-address.ts';
+import { useOrderPlan } from '../lib/use-order-plan.ts';
 import type { PlanState } from '../lib/use-plan-texts.ts';
 import { FoamFields } from './foam-fields.tsx';
 import { FormSection } from './form-section.tsx';
@@ -31,7 +32,6 @@ import { allotStock } from '#shared/planner/allot-stock.ts';
 import { orderCsv } from '#shared/planner/order-csv.ts';
 import { PLAN_DEFAULTS } from '#shared/planner/plan-fields.ts';
 import { planOne } from '#shared/planner/plan-one.ts';
-import { planOrder } from '#shared/planner/plan-order.ts';
 import { amountBySize, sharedTexts } from '#shared/planner/plan-texts.ts';
 import type { PlanContext } from '#shared/planner/plan-types.ts';
 import type { PlannedStructure } from '#shared/generated/api-types.ts';
@@ -60,12 +60,9 @@ export function OrderView({ orderId, everything, state, context, products }: Pro
     [structures.data, everything],
   );
   const kinds = KINDS.filter((kind) => wanted.some((one) => one.kind === kind));
-  // Typing never waits for the order: its plan follows when there is time.
+  const { plan, busy } = useOrderPlan({ structures: wanted, texts, context, metric });
+  // What hangs on the plan is painted when there is time.
   const later = useDeferredValue(texts);
-  const plan = useMemo(
-    () => planOrder(wanted, later, { context, options: { metric } }),
-    [wanted, later, context, metric],
-  );
   const sample = useMemo(() => KINDS.map((kind) => planOne({ ...texts, kind }, context)), [texts, context]);
   const form = useMemo<PlanForm>(() => {
     const faults = new Map<string, string>();
@@ -119,7 +116,7 @@ export function OrderView({ orderId, everything, state, context, products }: Pro
             <Cautions />
           </div>
         </form>
-        <div className="flex min-w-0 flex-col" aria-busy={later !== texts}>
+        <div className="flex min-w-0 flex-col" aria-busy={busy}>
           {orderId === '' ? (
             <p className="px-gutter py-8 text-ink-2">
               Choose a work order: its design list is planned as a whole.

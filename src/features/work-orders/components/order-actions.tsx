@@ -2,12 +2,15 @@ import { useNavigate } from 'react-router-dom';
 import { useStartBatch } from '../api/start-batch.ts';
 import { Button, ButtonLink } from '#src/components/ui/button.tsx';
 import { paths } from '#src/config/paths.ts';
+import { plannerAddress } from '#src/features/planner/lib/planner-address.ts';
+import { usePlansKits } from '#src/features/planner/lib/use-plans-kits.ts';
 import type { WorkOrder } from '#shared/generated/api-types.ts';
 
 /** The template to fill in, and the batch to hand it in with. */
 export function OrderActions({ order, mayContinue }: { order: WorkOrder; mayContinue: boolean }) {
   const start = useStartBatch();
   const navigate = useNavigate();
+  const plansKits = usePlansKits();
   const open = mayContinue ? order.openBatch : null;
   return (
     <>
@@ -15,6 +18,9 @@ export function OrderActions({ order, mayContinue }: { order: WorkOrder; mayCont
         <p role="alert" className="text-table text-nonconform">
           {start.error.message}
         </p>
+      ) : null}
+      {plansKits ? (
+        <ButtonLink to={plannerAddress({ view: 'order', order: order.id })}>Plan kits</ButtonLink>
       ) : null}
       <a
         href={`/api/work-orders/${order.id}/template.xlsx`}

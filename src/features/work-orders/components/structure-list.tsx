@@ -11,6 +11,8 @@ import { FilterBar, type FilterDefinition } from '#src/components/table/filter-b
 import { useColumns } from '#src/components/table/use-columns.ts';
 import { EmptyState } from '#src/components/ui/empty-state.tsx';
 import { SectionHead } from '#src/components/ui/page-band.tsx';
+import { plannerAddress } from '#src/features/planner/lib/planner-address.ts';
+import { usePlansKits } from '#src/features/planner/lib/use-plans-kits.ts';
 import type { KeysetList } from '#src/lib/api/use-keyset-list.ts';
 import type { Filters } from '#src/lib/filters/use-filters.ts';
 
@@ -20,6 +22,7 @@ const IDLE = { isStale: false, hasMore: false, isLoadingMore: false, loadMore: (
 /** The design list: what is planned, and how far each structure is. */
 export function StructureList({ orderId, filters }: { orderId: string; filters: Filters }) {
   const structures = useQuery(structuresQuery(orderId));
+  const plansKits = usePlansKits();
   const [today] = useState(() => new Date().toLocaleDateString('en-CA'));
   const standard = useQuery(standardInForceQuery(today));
   const all = useMemo(
@@ -62,6 +65,7 @@ export function StructureList({ orderId, filters }: { orderId: string; filters: 
         list={list}
         columns={columns}
         filters={filters}
+        rowTo={plansKits ? (row) => plannerAddress({ order: orderId, structure: row.id }) : undefined}
         empty={
           <EmptyState
             title={all.length > 0 ? 'No structure passes these filters' : 'The design list is empty'}
