@@ -51,5 +51,7 @@ describe('planning kits', () => {
     const kits = page.getByRole('region', { name: 'Kits to order' });
     await kits.getByText(site.lot.number).first().waitFor();
     await kits.getByText('all at hand').waitFor();
+    // Two poles with kits each, and one spare of every size.
+    expect(await kits.getByRole('row').count()).toBeGreaterThan(1);
   });
 });
