@@ -1,10 +1,13 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { rows } from '#server/db/rows.ts';
+import { ABOUT_OF_JOB } from '#server/modules/jobs/job-about.ts';
 
 export type ParkedJob = {
   readonly id: string;
   readonly name: string;
   readonly payload: Readonly<Record<string, unknown>>;
+  /** Whose work it is, as people name it; null for a chore, or a subject that is gone. */
+  readonly about: string | null;
   readonly attempts: number;
   /** What its last attempt said. */
   readonly problem: string;
@@ -19,7 +22,7 @@ export const PROBLEM_OF_JOB = `coalesce(output ->> 'message', output #>> '{value
 export function listParked(em: EntityManager, limit = 100): Promise<ParkedJob[]> {
   return rows<ParkedJob>(
     em,
-    `select id, name, data as payload, retry_count + 1 as attempts,
+    `select id, name, data as payload, ${ABOUT_OF_JOB} as about, retry_count + 1 as attempts,
        ${PROBLEM_OF_JOB} as problem,
        created_on as "createdAt", completed_on as "failedAt"
      from pgboss.job where state = 'failed' order by completed_on desc nulls last, id limit $1`,

@@ -579,6 +579,10 @@ export interface ParkedJob {
    */
   meaning: string;
   /**
+   * Whose work it is: a batch, a transmittal, a message and its recipient. Null for a chore.
+   */
+  about: string | null;
+  /**
    * What its last attempt said.
    */
   problem: string;

@@ -5,6 +5,8 @@ import { countOf, expectWhole } from './setup/expect-whole.ts';
 import { oneLine, openBatch, putWorkbook, type World } from './setup/story.ts';
 import { ALL_DONE, beginAll, makeLastAttempts, readAll } from './setup/under-way.ts';
 
+const DIED = 'The process that worked on it died.';
+
 export function killedProcesses(world: World): void {
   describe('a web process that is killed', () => {
     it('after the file was put and before its row leaves nothing that counts; after the commit the upload stands and a repeat adds none', async () => {
@@ -89,11 +91,15 @@ export function killedProcesses(world: World): void {
       ]);
 
       const parked = (await story.admin.get('/api/jobs/parked')).body.items as ParkedJob[];
-      expect(parked.map((job) => [job.title, job.problem]).toSorted()).toEqual([
-        ['Check a batch', 'The process that worked on it died.'],
-        ['Issue a transmittal', 'The process that worked on it died.'],
-        ['Prepare photographs', 'The process that worked on it died.'],
-      ]);
+      const { body: batch } = await story.contractor.get(begun.pictured.path);
+      const { body: transmittal } = await story.clerk.get(`/api/transmittals/${begun.transmittalId}`);
+      expect(new Set(parked.map((job) => [job.title, job.about, job.problem]))).toEqual(
+        new Set([
+          ['Check a batch', begun.checked.number, DIED],
+          ['Issue a transmittal', `${transmittal.number} rev 0`, DIED],
+          ['Prepare photographs', batch.number, DIED],
+        ]),
+      );
       for (const job of parked) await story.admin.post(`/api/jobs/parked/${job.id}/retry`).expect(204);
       await expectWhole(stage);
       expect(await readAll(story, begun)).toEqual(ALL_DONE);

@@ -57,7 +57,11 @@ export function mailServer(world: World): void {
       expect([cameTo(stage, refused), cameTo(stage, taken)]).toEqual([0, 1]);
       const [job, ...others] = (await story.admin.get('/api/jobs/parked')).body.items as ParkedJob[];
       expect(others).toEqual([]);
-      expect(job).toMatchObject({ title: 'Send a message', attempts: 1 });
+      expect(job).toMatchObject({
+        title: 'Send a message',
+        about: `password-reset to ${refused.email}`,
+        attempts: 1,
+      });
       expect(job?.problem).toContain('550 No such person here');
       const kept = await row(stage.em(), 'select state, attempts from outbox where recipient = $1', [
         refused.email,

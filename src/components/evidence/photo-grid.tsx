@@ -45,7 +45,7 @@ function Picture({ photo }: { photo: Photo }) {
   if (photo.state !== 'ready') {
     return (
       <span className="flex aspect-3/2 items-center justify-center bg-sunk px-2 text-center text-micro text-ink-2">
-        {photo.state === 'stored' ? 'Being prepared' : 'Cannot be shown'}
+        {photo.state === 'stored' && photo.problem === null ? 'Being prepared' : 'Cannot be shown'}
       </span>
     );
   }

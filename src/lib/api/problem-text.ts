@@ -6,3 +6,9 @@ export function problemText(problem: unknown): string | null {
   }
   return null;
 }
+
+/** The stable code of a job's problem; null where it has none. */
+export function problemCode(problem: unknown): string | null {
+  if (typeof problem !== 'object' || problem === null || !('code' in problem)) return null;
+  return typeof problem.code === 'string' ? problem.code : null;
+}

@@ -1,12 +1,17 @@
 import type { CheckState } from '../api/use-check.ts';
+import { useMoveBatch } from '../api/move-batch.ts';
 import { IntakeRow } from './intake-row.tsx';
+import { Button } from '#src/components/ui/button.tsx';
 import { Progress } from '#src/components/ui/progress.tsx';
+import { problemCode } from '#src/lib/api/problem-text.ts';
 import { counted } from '#src/lib/formats.ts';
 import type { Batch } from '#shared/generated/api-types.ts';
 
 /** The check of the newest upload: how far, or what it came to. */
 export function CheckRow({ batch, check }: { batch: Batch; check: CheckState | null }) {
   const running = check?.state === 'queued' || check?.state === 'running';
+  // A workbook that cannot be read ends the same way each time.
+  const again = problemCode(check?.problem) === 'check.failed' && batch.can.includes('upload');
   return (
     <IntakeRow
       glyph={
@@ -31,8 +36,21 @@ export function CheckRow({ batch, check }: { batch: Batch; check: CheckState | n
           <p>{resultWords(batch, check)}</p>
         )}
         {running ? <p className="mt-1">It goes on when you leave this page.</p> : null}
+        {again ? <CheckAgain batch={batch} /> : null}
       </div>
     </IntakeRow>
+  );
+}
+
+function CheckAgain({ batch }: { batch: Batch }) {
+  const move = useMoveBatch(batch);
+  return (
+    <p className="mt-1">
+      <Button size="small" busy={move.isPending && 'Asking…'} onClick={() => move.mutate('recheck')}>
+        Check again
+      </Button>
+      {move.isError ? <span className="ml-2 text-nonconform">{move.error.message}</span> : null}
+    </p>
   );
 }
 

@@ -44,7 +44,7 @@ export function PhotoPicture({ photo }: { photo: Photo }) {
   }
   return (
     <span className="flex aspect-[3/2] w-full items-center justify-center border-b border-rule bg-sunk px-3 text-center text-small text-muted">
-      {photo.state === 'stored' ? 'being prepared' : (photo.problem ?? 'cannot be read')}
+      {photo.problem ?? (photo.state === 'stored' ? 'being prepared' : 'cannot be read')}
     </span>
   );
 }

@@ -14,7 +14,10 @@ export function ParkedJobItem({ job }: { job: ParkedJob }) {
       <div className="flex min-w-0 flex-1 basis-96 gap-3">
         <Glyph name="triangle" className="mt-0.5" />
         <div className="min-w-0">
-          <h2 className="font-semibold">{job.title}</h2>
+          <h2 className="font-semibold">
+            {job.title}
+            {job.about ? <span className="font-normal">: {job.about}</span> : null}
+          </h2>
           <p className="text-ink-2">{job.meaning}</p>
           <p className="mt-1">
             <span className="text-muted">Last attempt said: </span>
@@ -34,7 +37,10 @@ export function ParkedJobItem({ job }: { job: ParkedJob }) {
       </div>
       {job.can.includes('retry') ? (
         <Button size="small" busy={retry.isPending && 'Trying…'} onClick={() => retry.mutate(job)}>
-          Try again<span className="sr-only">: {job.title}</span>
+          Try again
+          <span className="sr-only">
+            : {job.title} {job.about}
+          </span>
         </Button>
       ) : null}
     </li>
