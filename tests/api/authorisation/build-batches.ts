@@ -8,7 +8,9 @@ import type { Agent, Stage } from '#tests/setup/api-harness.ts';
 import type { BatchObjects } from './own-objects.ts';
 
 type Name = 'draft' | 'queued' | 'open' | 'done';
-export type HandedInBatches = { readonly site: WorkSite } & Readonly<Record<Name, BatchObjects>>;
+export type HandedInBatches = { readonly site: WorkSite; readonly sheetFileId: string } & Readonly<
+  Record<Name, BatchObjects>
+>;
 
 /** Due 6.0 ft: this one is half a foot short and has one nonconformity. */
 const short = (structureNumber: string): RowInput => setRow(structureNumber, { embedmentFt: 5.5 });
@@ -33,8 +35,13 @@ export async function buildBatches(
   await harness.drain();
   for (const name of ['queued', 'open', 'done'] as const)
     await ok(agent.post(`/api/batches/${begun[name].id}/submit`), 200);
+  const sheets = await ok(
+    agent.post(`/api/batches/${begun.queued.id}/sheets`).send({ paper: 'letter' }),
+    202,
+  );
   return {
     site,
+    sheetFileId: sheets.id,
     draft: await readObjects(agent, begun.draft),
     queued: await readObjects(agent, begun.queued),
     open: await readObjects(agent, begun.open),

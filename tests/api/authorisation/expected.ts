@@ -54,6 +54,7 @@ export const EXPECTED: readonly Row[] = [
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/work-orders/:id'],
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/work-orders/:id/structures'],
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/work-orders/:id/template.xlsx'],
+  ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/work-orders/:id/check-context'],
 
   // Batches: handed in by their contractor alone.
   ['401 ok  404  403 403 403 403 403 403', 'POST /api/work-orders/:id/batches'],
@@ -81,6 +82,15 @@ export const EXPECTED: readonly Row[] = [
   ['401 409 404  403 403 403 403 403 403', 'DELETE /api/photos/:id/match', 'revision.frozen'],
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/records/:id'],
   ['401 ok  404  404 404 404 404 404 404', 'GET /api/records/:id (draft)'],
+
+  // Sheets on paper: whoever may see the lines; a file of many for the one who asked for it alone.
+  ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/records/:id/sheet.pdf'],
+  ['401 ok  404  404 404 404 404 404 404', 'GET /api/records/:id/sheet.pdf (draft)'],
+  ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'POST /api/batches/:id/sheets'],
+  ['401 ok  404  409 409 409 409 409 409', 'POST /api/batches/:id/sheets (draft)', 'sheets.none'],
+  ['401 ok  404  404 404 404 404 404 404', 'GET /api/sheets/:id'],
+  ['401 ok  404  404 404 404 404 404 404', 'GET /api/sheets/:id/file'],
+
   ['401 409 404  403 403 403 403 403 403', 'PUT /api/findings/:id/answer', 'revision.frozen'],
 
   // The review: inspectors alone, and a taken batch by the one who took it alone.
@@ -134,6 +144,7 @@ export const EXPECTED: readonly Row[] = [
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/events (check)'],
   ['401 ok  404  ok  ok  ok  ok  ok  ok ', 'GET /api/events (batch)'],
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/events (transmittal)'],
+  ['401 ok  404  404 404 404 404 404 404', 'GET /api/events (sheets)'],
 
   // What did not conform, and the trail: the owner's people; the chain is verified by auditor and administrator.
   ['401 403 403  ok  ok  ok  ok  ok  ok ', 'GET /api/nonconformities'],

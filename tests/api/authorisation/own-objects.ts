@@ -14,6 +14,8 @@ export type OwnObjects = {
   readonly concessionGranted: string;
   readonly recordNumber: string;
   readonly transmittalId: string;
+  /** The sheets of `queued`, asked for by the contractor. */
+  readonly sheetFileId: string;
 };
 
 export type BatchObjects = {

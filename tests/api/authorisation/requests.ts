@@ -88,6 +88,9 @@ export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = 
   'GET /api/work-orders/:id/structures': ({ own }) => ({
     path: `/api/work-orders/${own.orderId}/structures`,
   }),
+  'GET /api/work-orders/:id/check-context': ({ own }) => ({
+    path: `/api/work-orders/${own.orderId}/check-context`,
+  }),
   'GET /api/work-orders/:id/template.xlsx': ({ own }) => ({
     path: `/api/work-orders/${own.orderId}/template.xlsx`,
   }),
@@ -124,6 +127,20 @@ export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = 
   'DELETE /api/photos/:id/match': ({ own }) => ({ path: `/api/photos/${own.queued.photoId}/match` }),
   'GET /api/records/:id': ({ own }) => ({ path: `/api/records/${own.queued.recordId}` }),
   'GET /api/records/:id (draft)': ({ own }) => ({ path: `/api/records/${own.draft.recordId}` }),
+  'GET /api/records/:id/sheet.pdf': ({ own }) => ({ path: `/api/records/${own.queued.recordId}/sheet.pdf` }),
+  'GET /api/records/:id/sheet.pdf (draft)': ({ own }) => ({
+    path: `/api/records/${own.draft.recordId}/sheet.pdf`,
+  }),
+  'POST /api/batches/:id/sheets': ({ own }) => ({
+    path: `/api/batches/${own.queued.id}/sheets`,
+    body: { paper: 'letter' },
+  }),
+  'POST /api/batches/:id/sheets (draft)': ({ own }) => ({
+    path: `/api/batches/${own.draft.id}/sheets`,
+    body: { paper: 'a4' },
+  }),
+  'GET /api/sheets/:id': ({ own }) => ({ path: `/api/sheets/${own.sheetFileId}` }),
+  'GET /api/sheets/:id/file': ({ own }) => ({ path: `/api/sheets/${own.sheetFileId}/file` }),
   'PUT /api/findings/:id/answer': ({ own }) => ({
     path: `/api/findings/${own.queued.findingId}/answer`,
     body: { text: 'Rock at 5.5 ft.' },
@@ -202,6 +219,7 @@ export const REQUESTS: Readonly<Record<string, (of: AskedOf) => RequestSpec>> = 
   'GET /api/events (check)': ({ own }) => events(`check:${own.queued.revisionId}`),
   'GET /api/events (batch)': ({ own }) => events(`batch:${own.queued.id}`),
   'GET /api/events (transmittal)': ({ own }) => events(`transmittal:${own.transmittalId}`),
+  'GET /api/events (sheets)': ({ own }) => events(`sheets:${own.sheetFileId}`),
 
   'GET /api/nonconformities': () => ({ path: '/api/nonconformities' }),
   'GET /api/nonconformities/summary': () => ({ path: '/api/nonconformities/summary' }),

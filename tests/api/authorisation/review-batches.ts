@@ -44,6 +44,7 @@ export async function reviewBatches(options: {
     concessionGranted,
     recordNumber: entered.entries[0]?.recordNumber ?? '',
     transmittalId: issued.id,
+    sheetFileId: handedIn.sheetFileId,
   };
 }
 
