@@ -1,10 +1,16 @@
 import { readFile } from 'node:fs/promises';
 import { geoAreaOf } from '#shared/calc/geo-area.ts';
+import { checkBatch } from '#shared/check/check-batch.ts';
+import { checkBeforeHandIn } from '#shared/check/check-before-hand-in.ts';
 import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
+import type { CheckResult } from '#shared/check/types.ts';
 import { isZone } from '#shared/dates/wall-clock.ts';
+import type { CheckContextData } from '#shared/generated/api-types.ts';
 import { validateProduct } from '#shared/generated/validators.mjs';
+import type { SourceBatch } from '#shared/records/types.ts';
 import type { CheckContext, DesignFact, LotFact, LotUse, ProductInForce } from '#shared/rules/types.ts';
 import { contextFaults, type ContextFile } from './context-file.ts';
+import { isOrderContext, orderContextFaults } from './order-context.ts';
 
 /** The context file cannot be used; the message names every fault. */
 export class ContextRefused extends Error {}
@@ -50,6 +56,7 @@ const designOf = (file: ContextFile): readonly DesignFact[] | null =>
   })) ?? null;
 
 const faultsOf = (value: unknown): readonly string[] => {
+  if (isOrderContext(value)) return orderContextFaults(value);
   const faults = contextFaults(value);
   if (faults.length > 0) return faults;
   const { zone, asOf, products = [], area } = value as ContextFile;
@@ -63,8 +70,27 @@ const faultsOf = (value: unknown): readonly string[] => {
   ];
 };
 
-/** What a check without a server is told of its context: JSON with zone, asOf, products, lots, design, area. Throws ContextRefused. */
-export const readContext = async (path: string): Promise<CheckContext> => {
+const contextOf = (file: ContextFile): CheckContext => ({
+  ...DEMO_CONTEXT,
+  zone: file.zone ?? DEMO_CONTEXT.zone,
+  asOfMs: file.asOf === undefined ? null : Date.parse(file.asOf),
+  products: productsOf(file),
+  lots: lotsOf(file),
+  lotUse: lotUseOf(file),
+  design: designOf(file),
+  area: file.area === null ? 'none' : geoAreaOf(file.area),
+});
+
+export type Check = (source: SourceBatch) => CheckResult;
+
+/** On the demo standard, with nothing known beside the workbook. */
+export const demoCheck: Check = (source) => checkBatch(source, DEMO_CONTEXT);
+
+/**
+ * The check as a context file has it: JSON with zone, asOf, products, lots, design, area; or what the server gives for a
+ * work order, its standards with it. Throws ContextRefused.
+ */
+export const readContext = async (path: string): Promise<Check> => {
   let value: unknown;
   try {
     value = JSON.parse(await readFile(path, 'utf8'));
@@ -75,15 +101,7 @@ export const readContext = async (path: string): Promise<CheckContext> => {
   const faults = faultsOf(value);
   if (faults.length > 0)
     throw new ContextRefused(`The context file ${path} cannot be used: ${faults.join('; ')}.`);
-  const file = value as ContextFile;
-  return {
-    ...DEMO_CONTEXT,
-    zone: file.zone ?? DEMO_CONTEXT.zone,
-    asOfMs: file.asOf === undefined ? null : Date.parse(file.asOf),
-    products: productsOf(file),
-    lots: lotsOf(file),
-    lotUse: lotUseOf(file),
-    design: designOf(file),
-    area: file.area === null ? 'none' : geoAreaOf(file.area),
-  };
+  if (isOrderContext(value)) return (source) => checkBeforeHandIn(source, value as CheckContextData);
+  const context = contextOf(value as ContextFile);
+  return (source) => checkBatch(source, context);
 };

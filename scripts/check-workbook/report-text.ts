@@ -19,6 +19,7 @@ const REASON: Readonly<Record<Skipped['reason'], string>> = {
   'no-photos': 'photographs are not known here',
   'no-siblings': 'earlier revisions are not known here',
   'no-earlier-check': 'earlier checks are not known here',
+  'own-only': 'ran on the contractor’s own structures alone',
 };
 
 /** Breaks a text into lines that begin at a column. */

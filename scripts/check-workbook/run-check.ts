@@ -1,11 +1,9 @@
 import { readWorkbookFile } from '#server/workbook/read-workbook-file.ts';
-import { checkBatch } from '#shared/check/check-batch.ts';
-import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
 import { readSource } from '#shared/workbook/read-source.ts';
 import { refusalText } from '#shared/workbook/refusal-text.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
 import { parseCommandLine } from './parse-args.ts';
-import { ContextRefused, readContext } from './read-context.ts';
+import { ContextRefused, demoCheck, readContext } from './read-context.ts';
 import { reportJson } from './report-json.ts';
 import { reportText } from './report-text.ts';
 
@@ -39,8 +37,8 @@ export const runCheck = async (argv: readonly string[]): Promise<Outcome> => {
   const args = parseCommandLine(argv);
   if ('fault' in args) return unreadable({ code: 'usage', detail: args.fault }, argv.includes('--json'));
   try {
-    const context = args.context === null ? DEMO_CONTEXT : await readContext(args.context);
-    const result = checkBatch(readSource(await readWorkbookFile(args.file)), context);
+    const check = args.context === null ? demoCheck : await readContext(args.context);
+    const result = check(readSource(await readWorkbookFile(args.file)));
     const grave = result.findings.some(({ severity }) => severity !== 'note');
     const report = args.json ? reportJson(result) : reportText(result);
     return { exitCode: grave ? 1 : 0, stdout: `${report}\n`, stderr: '' };

@@ -1,5 +1,6 @@
 import type { Route } from '#server/http/define-route.ts';
 import { batchRoutes } from '#server/modules/batches/routes.ts';
+import { checkContextRoutes } from '#server/modules/check-context/routes.ts';
 import { eventRoutes } from '#server/modules/events/routes.ts';
 import { healthRoutes } from '#server/modules/health/routes.ts';
 import { homeRoutes } from '#server/modules/home/routes.ts';
@@ -33,6 +34,7 @@ export const ROUTES: readonly Route[] = [
   ...peopleRoutes,
   ...organisationRoutes,
   ...workOrderRoutes,
+  ...checkContextRoutes,
   ...batchRoutes,
   ...photoRoutes,
   ...recordRoutes,

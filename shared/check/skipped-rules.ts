@@ -16,7 +16,7 @@ const REASON: Readonly<Record<ContextPart, Skipped['reason']>> = {
   previous: 'no-earlier-check',
 };
 
-/** Rules that did not run: a part of their context is not known here, or a standard used has them off. */
+/** Rules that did not run, or not on all: a part of their context is not known here, or a standard used has them off. */
 export const skippedRules = (
   rules: readonly Rule[],
   standards: readonly StandardInForce[],
@@ -26,5 +26,7 @@ export const skippedRules = (
     const lacking = rule.needs.find((part) => context[part] === null);
     if (lacking) return [{ code: rule.code, reason: REASON[lacking] }];
     const off = standards.some((standard) => ruleSetting(standard.body, rule.code)?.on !== true);
-    return off ? [{ code: rule.code, reason: 'off' }] : [];
+    if (off) return [{ code: rule.code, reason: 'off' }];
+    const inPart = rule.needs.some((part) => context.ownOnly?.includes(part));
+    return inPart ? [{ code: rule.code, reason: 'own-only' }] : [];
   });

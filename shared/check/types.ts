@@ -37,7 +37,9 @@ export type Skipped = {
     | 'no-area'
     | 'no-photos'
     | 'no-siblings'
-    | 'no-earlier-check';
+    | 'no-earlier-check'
+    /** It ran on the contractor's own records only. */
+    | 'own-only';
 };
 
 export type CheckResult = {

@@ -170,6 +170,81 @@ export interface CapturedMessage {
   html: string | null;
 }
 /**
+ * What a check of a workbook for this work order knows before anything is handed in: nothing of other contractors.
+ */
+export interface CheckContextData {
+  workOrder: {
+    id: string;
+    number: string;
+  };
+  /**
+   * IANA zone of the work order's times.
+   */
+  zone: string;
+  /**
+   * The server's clock: later times have not come yet.
+   */
+  asOf: string;
+  standards: {
+    id: string;
+    n: number;
+    effectiveOn: string;
+    body: {
+      [k: string]: unknown;
+    };
+  }[];
+  products: {
+    code: string;
+    n: number;
+    effectiveOn: string;
+    body: {
+      [k: string]: unknown;
+    };
+  }[];
+  lots: {
+    product: string;
+    number: string;
+    expiresOn: string | null;
+    status: 'in-use' | 'held' | 'recalled';
+    history: {
+      on: string;
+      status: 'in-use' | 'held' | 'recalled';
+    }[];
+  }[];
+  design: {
+    structureNumber: string;
+    kind: 'set' | 'straighten' | 'relevel';
+    poleLengthFt: number | null;
+    poleClass: string | null;
+    poleMaterial: string | null;
+    embedmentFt: number | null;
+    latitude: number | null;
+    longitude: number | null;
+  }[];
+  /**
+   * GeoJSON polygon of the work order; null: it has none.
+   */
+  area: {
+    [k: string]: unknown;
+  } | null;
+  /**
+   * The contractor's own set records of planned structures that still stand.
+   */
+  register: {
+    structureKey: string;
+    recordNumber: string;
+  }[];
+  /**
+   * The contractor's own structures on record near the planned ones.
+   */
+  neighbours: {
+    structureNumber: string;
+    latitude: number;
+    longitude: number;
+    accuracyFt: number;
+  }[];
+}
+/**
  * How far the check of the newest upload is.
  */
 export interface CheckProgress {

@@ -94,6 +94,8 @@ export type CheckContext = {
   readonly previous: ReadonlyMap<string, readonly EarlierFailure[]> | null;
   /** Approved lines of earlier revisions of this batch, by `kindKey`: `kind|STRUCTURE`. */
   readonly siblings: ReadonlySet<string> | null;
+  /** Parts of which only the contractor's own is known here: rules that need them run, and what they lack is said. */
+  readonly ownOnly?: readonly ContextPart[];
 };
 
 export type StandardInForce = {

@@ -3,15 +3,15 @@ import { createSubmittedBatch } from '#tests/factories/submitted-batch.ts';
 import { createWorkOrder } from '#tests/factories/work-orders.ts';
 import type { Harness } from '#tests/setup/api-harness.ts';
 
-/** A structure set by another contractor and on record, written straight into the tables. */
+/** A structure set by another contractor (or the one named) and on record, written straight into the tables. */
 export async function createOnRecord(
   harness: Harness,
-  options: { structureNumber: string; latitude: number; longitude: number },
+  options: { structureNumber: string; latitude: number; longitude: number; contractorId?: string },
 ): Promise<void> {
   const em = harness.em();
   const { structureNumber, latitude, longitude } = options;
-  const other = await harness.person('contractor');
-  const workOrder = await createWorkOrder(em, { contractorId: other.orgId, planned: [{ structureNumber }] });
+  const contractorId = options.contractorId ?? (await harness.person('contractor')).orgId;
+  const workOrder = await createWorkOrder(em, { contractorId, planned: [{ structureNumber }] });
   const { lines } = await createSubmittedBatch(em, { workOrder, lines: [{ structureNumber, findings: [] }] });
   await run(
     em,

@@ -1,5 +1,6 @@
 import { rowsDocument } from '#server/db/insert-rows.ts';
 import { checkBatch } from '#shared/check/check-batch.ts';
+import { nameOtherOrder } from '#shared/check/name-other-order.ts';
 import type { CheckResult } from '#shared/check/types.ts';
 import { countFindings } from '#shared/findings/count-findings.ts';
 import type { SourceBatch } from '#shared/records/types.ts';
@@ -7,7 +8,7 @@ import { assignLines } from './assign-lines.ts';
 import type { CheckInputs, CheckSummary, RowsDocument, StoredTable } from './check-messages.ts';
 import { findingRows } from './finding-rows.ts';
 import { knownLines } from './load-lines.ts';
-import { nameOtherOrder } from './name-other-order.ts';
+
 import { placePhotos } from './place-photos.ts';
 import { placingRows } from './placing-rows.ts';
 import { recordIds, recordRows } from './record-rows.ts';

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { SourceBatch, SourceLine } from '#shared/records/types.ts';
-import { nameOtherOrder } from './name-other-order.ts';
+import { nameOtherOrder } from '#shared/check/name-other-order.ts';
 import { scopeToReturned } from './scope-to-returned.ts';
 
 const line = (structureNumber: string): SourceLine => ({

@@ -10,7 +10,7 @@ export function sourceNeeds(source: SourceBatch): SourceNeeds {
   return {
     lines: source.lines.length,
     structureKeys: [...new Set(source.lines.map((line) => structureKey(line.structureNumber)))],
-    squares: squaresOf(source),
+    squares: squaresNear(source.lines.map(({ values }) => values)),
     lotKeys: [
       ...new Set(
         source.pours.map(({ values }) =>
@@ -21,10 +21,12 @@ export function sourceNeeds(source: SourceBatch): SourceNeeds {
   };
 }
 
-function squaresOf(source: SourceBatch): { i: number; j: number }[] {
+/** Squares of a hundredth of a degree in and beside which these places lie. */
+export function squaresNear(
+  places: readonly { readonly latitude?: unknown; readonly longitude?: unknown }[],
+): { i: number; j: number }[] {
   const squares = new Map<string, { i: number; j: number }>();
-  for (const { values } of source.lines) {
-    const { latitude, longitude } = values;
+  for (const { latitude, longitude } of places) {
     if (typeof latitude !== 'number' || typeof longitude !== 'number') continue;
     // What is no place has a finding of its own, and may be no number of the database's either.
     if (!(Math.abs(latitude) <= 90 && Math.abs(longitude) <= 180)) continue;
