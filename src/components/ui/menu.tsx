@@ -58,6 +58,17 @@ export function MenuLink({ to, active, children }: { to: string; active?: boolea
   );
 }
 
+/** A file of the server's, streamed straight to the disk. */
+export function MenuDownload({ href, children }: { href: string; children: ReactNode }) {
+  return (
+    <DropdownMenu.Item asChild className={ITEM}>
+      <a href={href} download>
+        {children}
+      </a>
+    </DropdownMenu.Item>
+  );
+}
+
 type ChoiceProps<T extends string> = {
   readonly label: string;
   readonly value: T;

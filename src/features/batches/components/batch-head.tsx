@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { batchRevisionsQuery } from '../api/batch-revisions.ts';
+import { SheetsMenu } from './sheets-menu.tsx';
 import { Fact, PageBand } from '#src/components/ui/page-band.tsx';
 import { STATUS_WORDS, StateWord } from '#src/components/ui/state-word.tsx';
 import { TextLink } from '#src/components/ui/text-link.tsx';
@@ -35,7 +36,14 @@ export function BatchHead({ batch, revision, onRevision, withContractor }: Props
           {batch.revision.dueOn ? <Fact word="due">{formatDay(batch.revision.dueOn)}</Fact> : null}
         </>
       }
-      actions={<RevisionSwitch batch={batch} revision={revision} onRevision={onRevision} />}
+      actions={
+        <>
+          <RevisionSwitch batch={batch} revision={revision} onRevision={onRevision} />
+          {batch.counts.lines > 0 ? (
+            <SheetsMenu batchId={batch.id} revision={revision ?? batch.revision.number} />
+          ) : null}
+        </>
+      }
     />
   );
 }

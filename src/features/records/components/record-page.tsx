@@ -1,15 +1,13 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { lineStamp } from '#shared/drawing/line-stamp.ts';
 import { LineRevisions } from '#src/components/evidence/line-revisions.tsx';
 import { lineState } from '#src/components/evidence/line-words.ts';
 import { HistoryList } from '#src/components/evidence/history-list.tsx';
-import { sheetFindings } from '#shared/drawing/number-findings.ts';
 import { PhotoGrid } from '#src/components/evidence/photo-grid.tsx';
 import { PhotoViewer } from '#src/components/evidence/photo-viewer.tsx';
-import { titleBlockData } from '#shared/drawing/title-block-data.ts';
+import { PrintMenu } from '#src/components/drawing/print-menu.tsx';
 import { RecordSheet } from '#src/components/drawing/record-sheet.tsx';
-import { Button } from '#src/components/ui/button.tsx';
+import { useSheetData } from '#src/components/drawing/use-sheet-data.ts';
 import { Cautions } from '#src/components/ui/caution.tsx';
 import { Fact, PageBand, SectionHead } from '#src/components/ui/page-band.tsx';
 import { StateWord } from '#src/components/ui/state-word.tsx';
@@ -25,12 +23,12 @@ import { sheetLimitsQuery } from '#src/lib/api/sheet-limits.ts';
 import { counted } from '#src/lib/formats.ts';
 import { useUser } from '#src/lib/session/session.ts';
 import type { RecordSheetData } from '#shared/generated/api-types.ts';
-import type { FieldValues } from '#shared/records/types.ts';
 
 /** One structure: its drawing, all that was written of it, and what became of it. Printed, it is the sheet alone. */
 export function RecordPage({ data }: { data: RecordSheetData }) {
   const { record, findings, photos, batch, registerEntry } = data;
   const user = useUser();
+  const sheet = useSheetData(data);
   const limits = useQuery(sheetLimitsQuery(record.standard));
   const [photo, setPhoto] = useState<number | null>(null);
   const [marked, setMarked] = useState<string | null>(null);
@@ -67,9 +65,7 @@ export function RecordPage({ data }: { data: RecordSheetData }) {
           actions={
             <>
               <LineMoves record={record} />
-              <Button size="small" onClick={() => window.print()}>
-                Print the sheet
-              </Button>
+              <PrintMenu recordId={record.id} />
             </>
           }
         />
@@ -78,11 +74,8 @@ export function RecordPage({ data }: { data: RecordSheetData }) {
         <div className="min-w-0 lg:border-r print:border-none">
           <div className="mx-auto max-w-5xl px-3 py-2.5 print:max-w-none print:p-0">
             <RecordSheet
-              record={{ ...record, values: record.values as FieldValues }}
-              findings={sheetFindings(findings)}
-              titleBlock={titleBlockData(data.titleBlock)}
+              {...sheet}
               limits={limits.data}
-              stamp={lineStamp(record, findings)}
               activeFinding={marked}
               onActive={setMarked}
               onPick={(id) => document.getElementById(`finding-${id}`)?.focus()}

@@ -1,8 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
-import { lineStamp } from '#shared/drawing/line-stamp.ts';
-import { titleBlockData } from '#shared/drawing/title-block-data.ts';
-import { sheetFindings } from '#shared/drawing/number-findings.ts';
 import { RecordSheet } from '#src/components/drawing/record-sheet.tsx';
+import { useSheetData } from '#src/components/drawing/use-sheet-data.ts';
 import { EmptyState } from '#src/components/ui/empty-state.tsx';
 import { ErrorState } from '#src/components/ui/error-state.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
@@ -11,11 +9,11 @@ import { paths } from '#src/config/paths.ts';
 import { findingElementId } from '#src/features/review/desk/restore-focus.ts';
 import type { DeskModel } from '#src/features/review/desk/use-desk.ts';
 import { sheetLimitsQuery } from '#src/lib/api/sheet-limits.ts';
+import type { RecordSheetData } from '#shared/generated/api-types.ts';
 
 /** The drawing of the line in hand. */
 export function SheetPane({ desk, onShowEvidence }: { desk: DeskModel; onShowEvidence: () => void }) {
-  const { sheet, whole, hand } = desk;
-  const limits = useQuery(sheetLimitsQuery(sheet.data?.record.standard ?? 0));
+  const { sheet, whole } = desk;
   if (whole) {
     return (
       <EmptyState title="Findings of the batch itself">
@@ -27,18 +25,19 @@ export function SheetPane({ desk, onShowEvidence }: { desk: DeskModel; onShowEvi
   if (sheet.isError)
     return <ErrorState error={sheet.error} what="The record" onRetry={() => void sheet.refetch()} />;
   if (!sheet.data) return <Skeleton lines={14} label="Loading the record sheet" />;
-  const { record, findings, titleBlock } = sheet.data;
+  return <DrawnLine data={sheet.data} desk={desk} onShowEvidence={onShowEvidence} />;
+}
+
+type DrawnProps = { data: RecordSheetData; desk: DeskModel; onShowEvidence: () => void };
+
+function DrawnLine({ data, desk, onShowEvidence }: DrawnProps) {
+  const { hand } = desk;
+  const limits = useQuery(sheetLimitsQuery(data.record.standard));
   return (
     <div className="px-3 py-2.5 lg:[&_figure_svg]:max-h-[calc(100dvh-11rem)]">
       <RecordSheet
-        record={{
-          ...record,
-          values: record.values as Readonly<Record<string, string | number | boolean | null>>,
-        }}
-        findings={sheetFindings(findings)}
-        titleBlock={titleBlockData(titleBlock)}
+        {...useSheetData(data)}
         limits={limits.data}
-        stamp={lineStamp(record, findings)}
         activeFinding={hand.marked}
         onActive={hand.hover}
         onPick={(id) => {
@@ -49,8 +48,8 @@ export function SheetPane({ desk, onShowEvidence }: { desk: DeskModel; onShowEvi
         caution={false}
       />
       <p className="mt-1 text-small text-ink-2">
-        <TextLink to={paths.record.to(record.id)}>Open the record page</TextLink>: measurements, pours and
-        history.
+        <TextLink to={paths.record.to(data.record.id)}>Open the record page</TextLink>: measurements, pours
+        and history.
       </p>
     </div>
   );
