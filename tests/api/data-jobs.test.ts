@@ -1,13 +1,16 @@
-import { afterAll, beforeAll, beforeEach, expect, it } from 'vitest';
+import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { createServices, type Services } from '#server/container.ts';
 import { row, rows, run } from '#server/db/rows.ts';
 import { createQueue } from '#server/jobs/create-queue.ts';
 import { defineJob, type JobDefinition, type JobHandler } from '#server/jobs/define-job.ts';
 import { enqueue } from '#server/jobs/enqueue.ts';
+import { endAttempt } from '#server/jobs/end-attempt.ts';
 import { freeOrphans } from '#server/jobs/free-orphans.ts';
+import { Hopeless } from '#server/jobs/hopeless.ts';
 import { listParked } from '#server/jobs/list-parked.ts';
 import { PROGRESS_CHANNEL, readProgress, setProgress } from '#server/jobs/progress.ts';
 import { retryParked } from '#server/jobs/retry-parked.ts';
+import { settleParked } from '#server/jobs/settle-parked.ts';
 import { workOnQueues } from '#server/jobs/work-on-queues.ts';
 import { cloneDatabase, type TestDatabase } from '#tests/setup/clone-database.ts';
 import { drainJobs } from '#tests/setup/drain-jobs.ts';
@@ -106,6 +109,66 @@ it('a job whose attempts are used up is parked with its reason, and runs again w
   expect(seen).toEqual([{ n: 7, attempt: 2, last: true }]);
   expect(await listParked(em())).toEqual([]);
   expect(await retryParked(em(), id)).toBe(null);
+});
+
+describe('a parked job tells its subject once, and the trail,', () => {
+  const told: { n: number; reason: string }[] = [];
+  const parting = defineJob<{ n: number }>({
+    ...job,
+    expireSeconds: 1,
+    loadParked: () =>
+      Promise.resolve({ parked: ({ n }, { reason }) => Promise.resolve(void told.push({ n, reason })) }),
+  });
+  const part = async (retryLimit: number): Promise<void> => {
+    told.length = 0;
+    await em().transactional((tx) => enqueue(tx, parting, { n: 3 }));
+    await run(em(), 'update pgboss.job set retry_limit = $1', [retryLimit]);
+    const worker = await workOnQueues(services, [parting] as readonly JobDefinition<never>[]);
+    await drainJobs(services.pool);
+    await worker.stop();
+    await settleParked(services, [parting] as readonly JobDefinition<never>[]);
+  };
+  const entries = () =>
+    rows(
+      em(),
+      `select payload_text::jsonb as payload from trail where action = 'job.parked' order by seq desc limit 1`,
+    );
+
+  it('when its last attempt takes too long', async () => {
+    handler = () => new Promise(() => undefined);
+    await part(0);
+    const reason = 'It took longer than 1 s.';
+    expect(told).toEqual([{ n: 3, reason }]);
+    expect(await entries()).toEqual([{ payload: { name: 'send-mail', attempts: 1, reason } }]);
+  });
+
+  it('when its handler knows that no repeat can succeed', async () => {
+    handler = () => Promise.reject(new Hopeless('there is no such pump'));
+    await part(5);
+    expect(told).toEqual([{ n: 3, reason: 'there is no such pump' }]);
+  });
+
+  it('and not while attempts are left', async () => {
+    handler = () => Promise.reject(new Error('the pump is dry'));
+    await part(5);
+    expect(told).toEqual([]);
+    expect(await rows(em(), 'select state::text from pgboss.job')).toEqual([{ state: 'retry' }]);
+  });
+});
+
+it('an attempt that was taken for dead and comes back writes nothing', async () => {
+  await em().transactional((tx) => enqueue(tx, job, { n: 1 }));
+  const fetchOne = () => services.queue.boss.fetch<object>(job.name, { includeMetadata: true });
+  const [first] = await fetchOne();
+  const attempt = { name: job.name, id: first?.id ?? '', retryCount: 0 };
+  expect(await endAttempt(services, attempt, { state: 'failed', reason: 'taken for dead' })).toBe(true);
+  await run(em(), "update pgboss.job set start_after = now() - interval '1 second'");
+  await fetchOne();
+  for (const state of ['done', 'failed'] as const)
+    expect(await endAttempt(services, attempt, { state, reason: 'late' })).toBe(false);
+  expect(await rows(em(), 'select state::text, retry_count from pgboss.job')).toEqual([
+    { state: 'active', retry_count: 1 },
+  ]);
 });
 
 it('a job left running by a process that died is free again; one that is worked on is not', async () => {

@@ -37,6 +37,7 @@ describe('parked jobs', () => {
         id,
         name: 'check-revision',
         title: 'Check a batch',
+        about: null,
         problem: 'the disk is full',
         payload: { revisionId: REVISION, input: 1 },
         attempts: 6,

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import type { ParkedJob } from '#shared/generated/api-types.ts';
 import { sweep } from '#server/storage/sweep-blobs.ts';
 import { countOf, expectWhole } from './setup/expect-whole.ts';
-import { oneLine, openBatch, putWorkbook, type World } from './setup/story.ts';
+import { createBatch, oneLine, openBatch, putWorkbook, type World } from './setup/story.ts';
 import { ALL_DONE, beginAll, makeLastAttempts, readAll } from './setup/under-way.ts';
 
 const DIED = 'The process that worked on it died.';
@@ -21,8 +21,11 @@ export function killedProcesses(world: World): void {
       const committed = database.holdCommitted(/insert into inputs/);
       const second = outcomeOf(putWorkbook(story, after, kept));
       await committed.reached;
+      const made = database.holdCommitted(/insert into "?batches/);
+      const third = outcomeOf(createBatch(story, 'a-key-of-its-own'));
+      await made.reached;
       await stage.web().kill();
-      expect(await Promise.all([first, second])).toEqual(['broke off', 'broke off']);
+      expect(await Promise.all([first, second, third])).toEqual(['broke off', 'broke off', 'broke off']);
       await stage.startWeb();
       await stage.rest();
 
@@ -43,6 +46,10 @@ export function killedProcesses(world: World): void {
       expect([again.status, again.body.input]).toEqual([202, 1]);
       const repeated = await putWorkbook(story, after, kept);
       expect([repeated.status, repeated.body.input]).toEqual([202, 1]);
+      const batches = await countOf(stage, 'batches');
+      const answered = await createBatch(story, 'a-key-of-its-own');
+      expect([answered.status, answered.headers['idempotency-replayed']]).toEqual([201, 'true']);
+      expect(await countOf(stage, 'batches')).toBe(batches);
       await expectWhole(stage);
       expect(
         await countOf(stage, 'inputs i join revisions v on v.id = i.revision_id where v.batch_id = $1', [

@@ -21,6 +21,10 @@ const WORDS: Readonly<Record<string, { readonly title: string; readonly meaning:
     title: 'Make the record sheets of a batch',
     meaning: 'Whoever asked for the PDF is told that it failed. The records are not touched.',
   },
+  'free-idle-reviews': {
+    title: 'Free reviews that nobody works on',
+    meaning: 'A batch that its inspector left alone stays with them until somebody gives it back.',
+  },
   tidy: {
     title: 'Clear away what has done its work',
     meaning: 'Old sessions, tokens and counters stay a little longer. Nobody’s work waits for it.',

@@ -42,6 +42,10 @@ export async function beginStory(stage: FaultStage): Promise<Story> {
 
 export const openBatch = ({ contractor, site }: Story): Promise<HandedIn> => startBatch(contractor, site);
 
+/** A repeat with the same key is answered as the first was. */
+export const createBatch = ({ contractor, site }: Story, key: string) =>
+  contractor.post(`/api/work-orders/${site.order.id}/batches`).set('Idempotency-Key', key);
+
 /** A workbook of one line that meets every rule but the photographs. */
 export function oneLine({ site }: Story, structureNumber: string): Promise<Buffer> {
   return workbookFile({
