@@ -24,6 +24,8 @@ export async function receiveFiles(options: ReceiveOptions): Promise<readonly Re
   const parse = multer({
     storage: blobEngine({ ...options, received }),
     defParamCharset: 'utf8',
+    // Path parts are taken off by safeFileName; what is nothing but path is still a file.
+    preservePath: true,
     // The engine counts bytes itself, so that one file too large does not lose the others; this is the outer wall.
     limits: {
       fileSize: options.maxBytes * 4,
@@ -85,6 +87,12 @@ function uploadProblem(error: unknown, asked: { field: string; maxFiles: number 
       { headers: { 'Retry-After': '60' } },
     );
   const message = error instanceof Error ? error.message : '';
+  if (/Malformed part header/iu.test(message))
+    return problem(
+      400,
+      'upload.name',
+      'The name of a file has a character that cannot be sent, such as a line end or another control character. Rename the file and upload it again. Nothing was stored.',
+    );
   if (/Unexpected end of form|Request aborted|Malformed|Multipart|aborted|premature/iu.test(message))
     return problem(
       400,

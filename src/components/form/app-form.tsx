@@ -12,18 +12,27 @@ type Props<T extends FieldValues> = {
   /** Keeps what is typed for this tab under this name until it is sent. Never for passwords. */
   readonly draftKey?: string;
   readonly label?: string;
+  /** A refusal that stands above the form in words of its own: not said a second time. What was typed stays. */
+  readonly toldElsewhere?: (error: unknown) => boolean;
   readonly children: ReactNode;
 };
 
 /** A form with its error summary. The browser's own bubbles are off: they say less and vanish. */
-export function AppForm<T extends FieldValues>({ form, onSubmit, draftKey, label, children }: Props<T>) {
+export function AppForm<T extends FieldValues>({
+  form,
+  onSubmit,
+  draftKey,
+  label,
+  toldElsewhere,
+  children,
+}: Props<T>) {
   useDraft(form, draftKey);
   const submit = form.handleSubmit(async (values) => {
     try {
       await onSubmit(values);
       if (draftKey) dropDraft(draftKey);
     } catch (error) {
-      placeProblem(form, error);
+      if (!toldElsewhere?.(error)) placeProblem(form, error);
     }
   });
   return (

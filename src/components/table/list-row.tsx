@@ -66,7 +66,7 @@ export function ListCard<Row>({ row, columns, active, to }: Props<Row>) {
               <span className="block text-small text-muted">
                 {column.unit ? `${column.title}, ${unitWord(column.unit, { metric })}` : column.title}
               </span>
-              <span className="block truncate">{column.cell(row)}</span>
+              <span className="block break-words [&_*]:whitespace-normal">{column.cell(row)}</span>
             </div>
           ))}
       </div>

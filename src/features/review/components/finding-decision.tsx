@@ -27,6 +27,7 @@ export function FindingDecision({ finding, saying, sending, stale, say, send, se
   const frame = {
     draftKey: `${finding.id}.${saying ?? ''}`,
     sending,
+    newerIsShown: true,
     onCancel: () => {
       say(null);
       restoreFocus(finding.id);

@@ -5,7 +5,7 @@ import type { FindingRow } from '#shared/generated/api-types.ts';
 /** After a refusal because somebody was faster: what stands now, above what was typed. */
 export function NewerState({ finding }: { finding: FindingRow }) {
   return (
-    <div className="mt-2">
+    <div role="alert" className="mt-2">
       <Callout tone="query" title="Changed by someone else meanwhile">
         {finding.state === 'undecided' ? (
           <p>It is undecided now. What you typed is below; send it again if it still holds.</p>

@@ -35,10 +35,10 @@ export function useDesk(batch: Batch, lines: readonly RecordRow[]) {
 
   const line = currentLine(place.line, { lines, own });
   const whole = line === WHOLE_BATCH;
-  const { line: asked, setLine } = place;
+  const { line: asked, nameLine } = place;
   // The line that was chosen for the person is named too: else a decision on it would choose another.
   useEffect(() => {
-    if (line !== null && line !== asked && !ownQuery.isPending) setLine(line);
+    if (line !== null && line !== asked && !ownQuery.isPending) nameLine(line);
   });
   const record = lines.find((one) => one.id === line) ?? null;
   // The line in hand stays in sight under every tab, though its decision may have taken it from there.

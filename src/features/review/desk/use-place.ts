@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { DESK_TABS, type DeskTab } from '#src/features/review/desk/desk-tabs.ts';
 
@@ -19,13 +19,26 @@ export function usePlace() {
       },
       { replace: true, preventScrollReset: true },
     );
+  const line = search.get('line');
+  // A line that was chosen and is not in the address yet: nothing may name another meanwhile.
+  const chosen = useRef<string | null>(null);
+  useEffect(() => {
+    if (chosen.current === line) chosen.current = null;
+  }, [line]);
   const tab = DESK_TABS.find((one) => one === search.get('tab')) ?? 'undecided';
   return {
     tab,
-    line: search.get('line'),
+    line,
     step,
     setStep,
     setTab: (next: DeskTab) => change({ tab: next }),
-    setLine: (next: string) => change({ line: next }),
+    setLine: (next: string) => {
+      if (next !== line) chosen.current = next;
+      change({ line: next });
+    },
+    /** Puts the line that was chosen for the person into the address; their own choice goes before it. */
+    nameLine: (next: string) => {
+      if (chosen.current === null) change({ line: next });
+    },
   };
 }
