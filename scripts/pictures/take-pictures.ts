@@ -9,9 +9,10 @@ const FOLDER = new URL('../../docs/pictures/', import.meta.url).pathname;
 const base = process.argv[2] ?? 'http://127.0.0.1:4600';
 const executablePath = process.env['CHROMIUM_PATH'] ?? '/usr/bin/chromium';
 
-type Listed = {
-  items: { id: string; status: string; structureNumber?: string; counts?: { nonconformity: number } }[];
-};
+type Row = { id: string; status: string; counts?: { nonconformity: number } };
+type Listed = { items: Row[] };
+
+const KINDS = ['set', 'straighten', 'relevel'] as const;
 
 const browser = await chromium.launch({ executablePath, args: ['--no-sandbox', '--disable-dev-shm-usage'] });
 try {
@@ -35,7 +36,32 @@ async function takeAll(using: Browser): Promise<void> {
       (a, b) => (b.counts?.nonconformity ?? 0) - (a.counts?.nonconformity ?? 0),
     )[0];
     await take(page, `/records/${worst?.id}`, `record-sheet-${theme}`);
+    if (theme === 'light') await takeKinds(page, batches.items);
     await page.close();
+  }
+}
+
+/** The drawing alone, of the line of each kind with the most to show. */
+async function takeKinds(page: Page, batches: readonly Row[]): Promise<void> {
+  for (const kind of KINDS) {
+    const found: Row[] = [];
+    for (const batch of batches) {
+      const path = `/api/batches/${batch.id}/records?kind=${kind}&limit=50`;
+      found.push(...(await read<Listed>(page, path)).items);
+    }
+    const [best] = found.toSorted((a, b) => (b.counts?.nonconformity ?? 0) - (a.counts?.nonconformity ?? 0));
+    if (!best) {
+      console.log(
+        `No batch of the demo has a line of kind ${kind}: docs/pictures/sheet-${kind}.png is left as it is.`,
+      );
+      continue;
+    }
+    await page.goto(`${base}/records/${best.id}`);
+    const drawing = page.getByLabel(/^Drawing of structure/);
+    await drawing.waitFor();
+    await page.evaluate(() => document.fonts.ready);
+    await drawing.screenshot({ path: `${FOLDER}sheet-${kind}.png` });
+    console.log(`docs/pictures/sheet-${kind}.png`);
   }
 }
 
