@@ -47,6 +47,13 @@ describe('reading in a process of its own', { timeout: 30_000 }, () => {
     });
   });
 
+  it('says so when its heap is full, as when its memory is', async () => {
+    // Too little even to start with: the process ends itself before it has read anything.
+    await expect(readWorkbookFile(await smallWorkbook(), { heapLimitMb: 4 })).rejects.toMatchObject({
+      code: 'reader-memory',
+    });
+  });
+
   it('calls an exit without an answer a failure', async () => {
     // A folder opens but cannot be read: the process ends with an error of its own.
     await expect(readWorkbookFile(folder)).rejects.toMatchObject({ code: 'reader-failed' });

@@ -21,13 +21,26 @@ async function reading(bytes: Buffer): Promise<Workbook | null> {
     return workbook;
   } catch (error) {
     if (!(error instanceof WorkbookRefused)) throw error;
-    expect(refusalText(error)).toMatch(/^[A-Z“].{20,}\.$/su);
+    const sentence = refusalText(error);
+    if (!/^[A-Z“].{20,}\.$/su.test(sentence)) throw new Error(`No sentence: ${sentence}`, { cause: error });
     return null;
   }
 }
 
 const cellsOf = (workbook: Workbook): Cell[] =>
   workbook.sheets.flatMap((sheet) => sheet.rows.flatMap((row) => row.cells));
+
+/** What is in a workbook, but for how its numbers are shown: a file may do without its styles. */
+function seen(workbook: Workbook): unknown {
+  const sheets = workbook.sheets.map(({ name, kind, hidden, merged, rows }) => ({
+    name,
+    kind,
+    hidden,
+    merged,
+    cells: rows.flatMap((row) => row.cells.map((cell) => [cell.address, cell.kind, cell.raw, cell.formula])),
+  }));
+  return { date1904: workbook.date1904, sheets };
+}
 
 /** What holds for every reading, whatever the file. */
 function expectSound(workbook: Workbook): void {
@@ -153,10 +166,10 @@ describe('damaged XML in a sound zip file', () => {
           touched.length === 0 ? 0 : 1,
         );
       }),
-      { seed: SEED, numRuns: 1_500 },
+      { seed: SEED, numRuns: 1_000 },
     );
     // Else the damage would be such that nothing was ever read.
-    expect(read).toBeGreaterThan(150);
+    expect(read).toBeGreaterThan(100);
   });
 });
 
@@ -171,7 +184,7 @@ const BYTES = fc.array(
 describe('damaged bytes of a zip file', () => {
   it('are refused, or matter nothing', { timeout: 60_000 }, async () => {
     const file = zipParts(OWNED_PARTS);
-    const sound = (await reading(file))!;
+    const sound = seen((await reading(file))!);
     let read = 0;
     await fc.assert(
       fc.asyncProperty(BYTES, async (damages) => {
@@ -183,7 +196,7 @@ describe('damaged bytes of a zip file', () => {
         const workbook = await reading(bytes);
         if (workbook === null) return;
         read++;
-        expect(workbook).toEqual(sound);
+        expect(seen(workbook)).toEqual(sound);
       }),
       { seed: SEED, numRuns: 1_000 },
     );
@@ -192,14 +205,14 @@ describe('damaged bytes of a zip file', () => {
 
   it('of one bit anywhere are refused, or matter nothing', { timeout: 60_000 }, async () => {
     const file = zipParts(OWNED_PARTS);
-    const sound = (await reading(file))!;
+    const sound = seen((await reading(file))!);
     await fc.assert(
       fc.asyncProperty(PLACE, fc.nat(7), async (place, bit) => {
         const bytes = Buffer.from(file);
         const where = at(place, bytes.length);
         bytes[where] = bytes[where]! ^ (1 << bit);
         const workbook = await reading(bytes);
-        expect(workbook ?? sound).toEqual(sound);
+        expect(workbook === null ? sound : seen(workbook)).toEqual(sound);
       }),
       { seed: SEED, numRuns: 1_000 },
     );

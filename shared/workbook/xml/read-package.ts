@@ -63,9 +63,10 @@ export async function* readPackage(parts: PartSource): AsyncGenerator<WorkbookEv
     const found = [...relationships.values()].find((one) => one.type === type);
     if (found === undefined) return null;
     const part = resolveTarget(main, found.target);
-    // Without its styles a workbook would still be read, and every date be a plain number.
-    if (!parts.has(part)) throw new WorkbookRefused('part-missing', { part });
-    return part;
+    if (parts.has(part)) return part;
+    // Some writers name styles and leave them out: times are then told by their size. Texts cannot be done without.
+    if (type === 'styles') return null;
+    throw new WorkbookRefused('part-missing', { part });
   };
   const stringsPart = byType('sharedStrings');
   const stylesPart = byType('styles');
