@@ -19,6 +19,8 @@ export type Allotted = OrderLine & {
   /** Kits at hand that may be used, taken or not. */
   readonly atHand: number;
   readonly short: number;
+  /** Counted by hand: the lots of that size do not matter. */
+  readonly byHand: boolean;
 };
 
 const same = (a: number, b: number) => Math.abs(a - b) < 1e-6;
@@ -57,7 +59,7 @@ export function allotStock(
     const wanted = line.planned + line.spares;
     const typed = options.typed(line.kitFt3);
     if (typed !== null)
-      return { ...line, wanted, from: [], atHand: typed, short: Math.max(0, wanted - typed) };
+      return { ...line, wanted, from: [], atHand: typed, short: Math.max(0, wanted - typed), byHand: true };
     let [left, atHand] = [wanted, 0];
     const from: { lot: string; expiresOn: string | null; kits: number }[] = [];
     for (const { number, expiresOn, sizes } of usable) {
@@ -68,6 +70,6 @@ export function allotStock(
       if (kits > 0) from.push({ lot: number, expiresOn, kits });
       left -= kits;
     }
-    return { ...line, wanted, from, atHand, short: left };
+    return { ...line, wanted, from, atHand, short: left, byHand: false };
   });
 }

@@ -74,6 +74,7 @@ describe('stock', () => {
       wanted: 6,
       atHand: 4,
       short: 2,
+      byHand: false,
       from: [
         { lot: 'A', expiresOn: '2027-01-01', kits: 2 },
         { lot: 'B', expiresOn: '2027-09-01', kits: 2 },
@@ -97,6 +98,7 @@ describe('stock', () => {
     expect(allotStock([line], { lots: [lot('A')], day: '2026-12-01', typed: () => 7 })[0]).toMatchObject({
       atHand: 7,
       short: 0,
+      byHand: true,
     });
     const overdrawn = [lot('A', { sizes: [{ kitFt3: 8, left: -3 }] })];
     expect(allotStock([line], { lots: overdrawn, day: '2026-12-01', typed: none })[0]?.short).toBe(6);

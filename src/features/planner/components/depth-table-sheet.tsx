@@ -42,8 +42,7 @@ export function DepthTableSheet({ table, head, dueFt, standard }: Props) {
           <p className="mt-2 text-small text-ink-2">
             Each cell: kits in ft³, the void in ft³ below them. † leaves less than{' '}
             {formatNumber(leastGapIn(standard), { digits: 1 })} in round the pole: take a wider bore. × the
-            pole does not go in.{' '}
-            {dueFt === null ? '' : `Depth due in soil and rock as planned: ${formatNumber(dueFt)} ft.`}
+            pole does not go in. {dueFt === null ? '' : `Depth due as planned: ${formatNumber(dueFt)} ft.`}
           </p>
         </div>
       </div>

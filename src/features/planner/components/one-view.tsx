@@ -18,11 +18,13 @@ import { Cautions } from '#src/components/ui/caution.tsx';
 import { StatusBar } from '#src/components/ui/status-bar.tsx';
 import { sheetLimits } from '#shared/drawing/sheet-limits.ts';
 import { useUnitSystem } from '#src/lib/settings/unit-system.ts';
+import { assumptionsOf } from '#shared/planner/assumptions.ts';
 import { kitsText } from '#shared/planner/kits-text.ts';
 import { planOne } from '#shared/planner/plan-one.ts';
 import { amountBySize, type PlanTexts } from '#shared/planner/plan-texts.ts';
 import type { PlanContext } from '#shared/planner/plan-types.ts';
 import { readPlan } from '#shared/planner/read-plan.ts';
+import { tableHead } from '#shared/planner/table-head.ts';
 import { formatQuantity } from '#shared/units/format-quantity.ts';
 import type { Product } from '#shared/standard/types.ts';
 
@@ -47,7 +49,7 @@ export function OneView({ texts, type, settle, context, products }: Props) {
   const priceOf = (kitFt3: number) => amountBySize(texts, 'price', kitFt3);
   return (
     <PlanFormProvider value={form}>
-      <div className="grid flex-1 md:grid-cols-[20rem_minmax(0,1fr)] xl:grid-cols-[20rem_minmax(0,1fr)_27rem] print:block">
+      <div className="grid flex-1 md:grid-cols-[20rem_minmax(0,1fr)] xl:grid-cols-[20rem_minmax(0,1fr)_27rem] print:flex print:flex-col">
         <form
           aria-label="What is planned"
           onSubmit={(event) => event.preventDefault()}
@@ -67,14 +69,17 @@ export function OneView({ texts, type, settle, context, products }: Props) {
           {kind === 'straighten' ? <StraightenFields one /> : null}
           <FoamFields products={products} kitsFt3={plan.assumptions.kitsFt3} kinds={[kind]} />
         </form>
-        <div className="order-3 min-w-0 px-3 py-2.5 xl:order-none print:p-0">
-          <PlanDrawing plan={plan} name={texts['name'] ?? ''} context={context} />
+        {kind === 'set' ? <PrintHead texts={texts} context={context} /> : null}
+        <div className="order-3 min-w-0 px-3 py-2.5 xl:order-none print:order-3 print:p-0">
+          <div className="print:mx-auto print:w-[12cm]">
+            <PlanDrawing plan={plan} name={texts['name'] ?? ''} context={context} />
+          </div>
+          {kind === 'set' ? <WhatIfs plan={plan} texts={texts} context={context} /> : null}
         </div>
-        <div className="min-w-0 border-hairline xl:border-l">
+        <div className="min-w-0 border-hairline xl:border-l print:contents">
           <KitAnswers plan={plan} priceOf={priceOf} productCode={product?.code ?? 'no foam'} />
           <PlanFacts plan={plan} standard={standard} />
-          {kind === 'set' ? <WhatIfs plan={plan} texts={texts} context={context} /> : null}
-          <div className="px-gutter py-4">
+          <div className="px-gutter py-4 print:order-4 print:break-inside-avoid print:px-0">
             <Cautions />
           </div>
         </div>
@@ -102,14 +107,31 @@ function PlanDrawing({ plan, name, context }: PartProps & { readonly name: strin
   return <RecordSheet record={record} limits={limits} purpose="plan" caution={false} />;
 }
 
+/** On paper the fields are not there: what was typed stands over the answers. */
+function PrintHead({ texts, context }: Omit<PartProps, 'plan'> & { readonly texts: PlanTexts }) {
+  const reading = readPlan(texts);
+  const name = reading.words.get('name');
+  const head = tableHead(reading, { assumptions: assumptionsOf(reading, context), context });
+  return (
+    <dl className="hidden grid-cols-[max-content_minmax(0,1fr)] gap-x-4 px-gutter py-2 text-table print:grid">
+      {[...(name === undefined ? [] : [['Structure', name] as const]), ...head].map(([word, text]) => (
+        <div key={word} className="contents">
+          <dt className="text-muted">{word}</dt>
+          <dd>{text}</dd>
+        </div>
+      ))}
+    </dl>
+  );
+}
+
 function WhatIfs({ plan, texts, context }: PartProps & { readonly texts: PlanTexts }) {
   const later = useDeferredValue(plan);
   const typed = useDeferredValue(texts);
   const reading = useMemo(() => readPlan(typed), [typed]);
   return (
-    <>
+    <div className="mt-3 grid gap-x-3 border-t border-hairline lg:max-xl:grid-cols-1 2xl:grid-cols-2">
       <WaterSection plan={later} standard={context.standard} />
       <RockSection reading={reading} context={context} />
-    </>
+    </div>
   );
 }

@@ -17,16 +17,23 @@ function pole({ design }: PlannedStructure): string {
 }
 
 export const PLANNED_COLUMNS: readonly DataColumn<PlannedRow>[] = [
-  { id: 'structure', title: 'Structure', main: true, min: 6, cell: (row) => row.structure.structureNumber },
-  { id: 'kind', title: 'Kind', min: 5.5, cell: (row) => KIND_WORDS[row.structure.kind] },
-  { id: 'pole', title: 'Pole', min: 11, cell: (row) => pole(row.structure) },
+  {
+    id: 'structure',
+    title: 'Structure',
+    main: true,
+    min: 6,
+    grow: 0.5,
+    cell: (row) => row.structure.structureNumber,
+  },
+  { id: 'kind', title: 'Kind', min: 5.5, grow: 0.3, cell: (row) => KIND_WORDS[row.structure.kind] },
+  { id: 'pole', title: 'Pole', min: 11, grow: 0.5, cell: (row) => pole(row.structure) },
   {
     id: 'depth',
     title: 'Depth',
     unit: 'ft',
     figures: true,
     min: 5,
-    grow: 0.5,
+    grow: 0.2,
     cell: (row) => <Figure value={row.plan.depthFt} unit="ft" />,
   },
   {
@@ -35,7 +42,7 @@ export const PLANNED_COLUMNS: readonly DataColumn<PlannedRow>[] = [
     unit: 'in',
     figures: true,
     min: 4.5,
-    grow: 0.5,
+    grow: 0.2,
     cell: (row) => <Figure value={row.plan.boreIn} unit="in" digits={1} />,
   },
   {
@@ -44,7 +51,7 @@ export const PLANNED_COLUMNS: readonly DataColumn<PlannedRow>[] = [
     unit: 'ft3',
     figures: true,
     min: 5.5,
-    grow: 0.5,
+    grow: 0.2,
     cell: (row) => <Figure value={row.plan.voidFt3?.likely ?? null} unit="ft3" />,
   },
   {
@@ -53,7 +60,7 @@ export const PLANNED_COLUMNS: readonly DataColumn<PlannedRow>[] = [
     unit: 'ft3',
     figures: true,
     min: 8.5,
-    grow: 0.5,
+    grow: 0.2,
     cell: ({ plan: { voidFt3 } }) =>
       voidFt3 === null ? (
         '–'
@@ -66,7 +73,8 @@ export const PLANNED_COLUMNS: readonly DataColumn<PlannedRow>[] = [
   {
     id: 'kits',
     title: 'Kits, ft³',
-    min: 8,
+    min: 10,
+    grow: 4,
     cell: ({ plan }) =>
       plan.kits.likely ? (
         <span className="font-semibold">{kitsText(plan.kits.likely.kits)}</span>

@@ -42,7 +42,7 @@ export function OrderKits({ allotted, priceOf, lots, day }: Props) {
           caption="Kits by size"
           rows={allotted}
           rowKey={(line) => String(line.kitFt3)}
-          columns={columnsOf({ priceOf: priced ? priceOf : null })}
+          columns={columnsOf({ priceOf: priced ? priceOf : null, known: lots !== null })}
         />
       )}
       {priced ? <Costs allotted={allotted} priceOf={priceOf} /> : null}
@@ -53,8 +53,11 @@ export function OrderKits({ allotted, priceOf, lots, day }: Props) {
 
 function columnsOf({
   priceOf,
+  known,
 }: {
   readonly priceOf: Props['priceOf'] | null;
+  /** What stands in stock is known even where nobody counted. */
+  readonly known: boolean;
 }): readonly PlainColumn<Allotted>[] {
   const cost: PlainColumn<Allotted> = {
     id: 'cost',
@@ -75,7 +78,12 @@ function columnsOf({
     { id: 'planned', title: 'Planned', figures: true, cell: (line) => formatCount(line.planned) },
     { id: 'spares', title: 'Spares', figures: true, cell: (line) => formatCount(line.spares) },
     { id: 'wanted', title: 'To have', figures: true, cell: (line) => formatCount(line.wanted) },
-    { id: 'hand', title: 'At hand', figures: true, cell: (line) => formatCount(line.atHand) },
+    {
+      id: 'hand',
+      title: 'At hand',
+      figures: true,
+      cell: (line) => (known || line.byHand ? formatCount(line.atHand) : '–'),
+    },
     {
       id: 'short',
       title: 'To order',
@@ -93,7 +101,7 @@ function columnsOf({
 
 function FromLots({ line }: { readonly line: Allotted }): ReactNode {
   if (line.from.length === 0)
-    return <span className="text-muted">{line.atHand > 0 ? 'counted by hand' : '–'}</span>;
+    return <span className="text-muted">{line.byHand ? 'counted by hand' : '–'}</span>;
   return line.from.map(({ lot, expiresOn, kits }) => (
     <span key={lot} className="mr-3 inline-block whitespace-nowrap">
       {formatCount(kits)} of {lot}

@@ -31,6 +31,7 @@ export function WaterSection({ plan, standard }: { readonly plan: Plan; readonly
   const rows = useMemo(() => waterWhatIfs(values, standard), [values, standard]);
   const most = useMemo(() => mostOpenWaterIn(values, standard), [values, standard]);
   const limit = waterLimitIn(standard);
+  const goesIn = plan.leastAnnulusIn === null || plan.leastAnnulusIn > 0;
   return (
     <section aria-label="Water in the bore" className="print:break-inside-avoid">
       <SectionHead
@@ -46,11 +47,13 @@ export function WaterSection({ plan, standard }: { readonly plan: Plan; readonly
       <div className="grid grid-cols-[9rem_minmax(0,1fr)] items-end gap-3 px-gutter py-3">
         <PlanInput name="waterIn" label="Standing now" />
         <div aria-live="polite" className="text-table">
-          {met ? <Action answer={met} most={most} /> : null}
+          {met && goesIn ? <Action answer={met} most={most} /> : null}
         </div>
       </div>
-      {most === null ? (
-        <p className="px-gutter pb-3 text-table text-ink-2">Bore and pole are not known yet.</p>
+      {most === null || !goesIn ? (
+        <p className="px-gutter pb-3 text-table text-ink-2">
+          {goesIn ? 'Bore and pole are not known yet.' : 'The pole does not go into this bore.'}
+        </p>
       ) : (
         <WaterTable rows={rows} most={most} />
       )}
@@ -68,7 +71,8 @@ function Action({ answer, most }: { readonly answer: WaterAnswer; readonly most:
         in.{' '}
         {answer.over && most !== null ? (
           <>
-            Bail or pump to <Quantity value={most} unit="in" digits={1} /> or less before the pole goes in.
+            Bail or pump to <Quantity value={tenthBelow(most)} unit="in" digits={1} /> or less before the pole
+            goes in.
           </>
         ) : (
           'Pour.'
@@ -102,7 +106,7 @@ function waterColumns(inch: string, most: number): readonly PlainColumn<WaterAns
       id: 'pole',
       title: `Pole in, ${inch}`,
       figures: true,
-      cell: (row) => <Figure value={row.withPoleIn} unit="in" digits={1} />,
+      cell: (row) => <Figure value={row.withPoleIn} unit="in" digits={2} />,
     },
     {
       id: 'do',
@@ -112,7 +116,7 @@ function waterColumns(inch: string, most: number): readonly PlainColumn<WaterAns
           <Glyph name={row.over ? 'triangle' : 'tick'} />
           {row.over ? (
             <>
-              remove to <Quantity value={most} unit="in" digits={1} />
+              remove to <Quantity value={tenthBelow(most)} unit="in" digits={1} />
             </>
           ) : (
             'pour'
@@ -122,3 +126,6 @@ function waterColumns(inch: string, most: number): readonly PlainColumn<WaterAns
     },
   ];
 }
+
+/** Rounded up, what may stand would be too much. */
+const tenthBelow = (inches: number) => Math.floor(inches * 10 + 1e-6) / 10;

@@ -93,26 +93,28 @@ export function Component() {
           Depths due and limits come from the owner’s construction standard. An engineer publishes one.
         </EmptyState>
       ) : (
-        <Tabs
-          label="What is planned"
-          value={view}
-          tabs={TABS}
-          onChange={(next) => go({ view: next === 'one' ? null : next })}
-        >
-          {view === 'order' ? (
-            <OrderView
-              orderId={orderId}
-              everything={search.get('built') === 'too'}
-              state={state}
-              context={sources.context}
-              products={sources.products}
-            />
-          ) : view === 'table' ? (
-            <TableView {...{ texts, type, settle }} context={sources.context} products={sources.products} />
-          ) : (
-            <OneView {...{ texts, type, settle }} context={sources.context} products={sources.products} />
-          )}
-        </Tabs>
+        <div className="flex min-h-0 flex-1 flex-col print:[&_[role=tablist]]:hidden">
+          <Tabs
+            label="What is planned"
+            value={view}
+            tabs={TABS}
+            onChange={(next) => go({ view: next === 'one' ? null : next })}
+          >
+            {view === 'order' ? (
+              <OrderView
+                orderId={orderId}
+                everything={search.get('built') === 'too'}
+                state={state}
+                context={sources.context}
+                products={sources.products}
+              />
+            ) : view === 'table' ? (
+              <TableView {...{ texts, type, settle }} context={sources.context} products={sources.products} />
+            ) : (
+              <OneView {...{ texts, type, settle }} context={sources.context} products={sources.products} />
+            )}
+          </Tabs>
+        </div>
       )}
     </>
   );
