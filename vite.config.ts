@@ -7,6 +7,8 @@ export default defineConfig({
   publicDir: 'src/public',
   // No assets as data: addresses: the content security policy allows fonts and pictures from the server alone.
   build: { outDir: 'dist', sourcemap: true, target: 'es2022', assetsInlineLimit: 0 },
+  // Workers are modules of their own, fetched from the server alone.
+  worker: { format: 'es' },
   server: { port: 4601, proxy: { '/api': 'http://127.0.0.1:4600' } },
   test: {
     projects: [

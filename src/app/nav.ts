@@ -7,6 +7,7 @@ const HOME = { label: 'Home', to: paths.home.to() };
 const ORDERS = { label: 'Work orders', to: paths.workOrders.to() };
 const PLANNER = { label: 'Kit planner', to: paths.planner.to() };
 const BATCHES = { label: 'Batches', to: paths.batches.to() };
+const CHECK_FIRST = { label: 'Check', to: paths.checkFirstOrders.to() };
 const REVIEW = { label: 'Review desk', to: paths.review.to() };
 const CONCESSIONS = { label: 'Concessions', to: paths.concessions.to() };
 const REGISTER = { label: 'Register', to: paths.register.to() };
@@ -21,7 +22,7 @@ const JOBS = { label: 'Jobs', to: paths.jobs.to() };
 
 /** What each role works with, most used first; the rest is reached from these. */
 export const NAV: Readonly<Record<Role, readonly NavItem[]>> = {
-  contractor: [HOME, ORDERS, PLANNER, BATCHES, REGISTER, STANDARD],
+  contractor: [HOME, ORDERS, CHECK_FIRST, PLANNER, BATCHES, REGISTER, STANDARD],
   inspector: [HOME, ORDERS, REVIEW, REGISTER, NONCONFORMITIES, LOTS, STANDARD, TRAIL],
   engineer: [HOME, CONCESSIONS, REGISTER, NONCONFORMITIES, LOTS, STANDARD, TRAIL],
   clerk: [HOME, ORDERS, REGISTER, TRANSMITTALS, NONCONFORMITIES, LOTS, STANDARD, TRAIL],

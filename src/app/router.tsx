@@ -20,6 +20,11 @@ const SIGNED_IN: RouteObject[] = [
   { path: paths.workOrders.path, lazy: () => import('#src/features/work-orders/routes/work-orders.tsx') },
   { path: paths.workOrder.path, lazy: () => import('#src/features/work-orders/routes/work-order.tsx') },
   { path: paths.planner.path, lazy: () => import('#src/features/planner/routes/planner.tsx') },
+  {
+    path: paths.checkFirstOrders.path,
+    lazy: () => import('#src/features/check-first/routes/choose-order.tsx'),
+  },
+  { path: paths.checkFirst.path, lazy: () => import('#src/features/check-first/routes/check-first.tsx') },
   { path: paths.batches.path, lazy: () => import('#src/features/batches/routes/batches.tsx') },
   { path: paths.batch.path, lazy: () => import('#src/features/batches/routes/batch.tsx') },
   { path: paths.record.path, lazy: () => import('#src/features/records/routes/record.tsx') },

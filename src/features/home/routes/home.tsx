@@ -1,9 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
+import { ButtonLink } from '#src/components/ui/button.tsx';
 import { DocumentTitle } from '#src/components/ui/document-title.tsx';
 import { EmptyState } from '#src/components/ui/empty-state.tsx';
 import { ErrorState } from '#src/components/ui/error-state.tsx';
 import { Fact, PageBand } from '#src/components/ui/page-band.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
+import { paths } from '#src/config/paths.ts';
 import { homeQuery } from '#src/features/home/api/home.ts';
 import { RecentList } from '#src/features/home/components/recent-list.tsx';
 import { WaitingList } from '#src/features/home/components/waiting-list.tsx';
@@ -20,6 +22,11 @@ export function Component() {
       <PageBand
         title="What waits for you"
         facts={<Fact word={`${user.role}, for`}>{user.organisation.name}</Fact>}
+        actions={
+          user.role === 'contractor' ? (
+            <ButtonLink to={paths.checkFirstOrders.to()}>Check before handing in</ButtonLink>
+          ) : null
+        }
       />
       {home.isPending ? <Skeleton lines={6} /> : null}
       {home.isError ? (

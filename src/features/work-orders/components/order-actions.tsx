@@ -29,6 +29,7 @@ export function OrderActions({ order, mayContinue }: { order: WorkOrder; mayCont
       >
         Download workbook template
       </a>
+      <ButtonLink to={paths.checkFirst.to(order.id)}>Check a workbook first</ButtonLink>
       {open ? (
         <ButtonLink kind="primary" to={paths.batch.to(open)}>
           Continue the open batch
