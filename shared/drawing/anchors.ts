@@ -50,6 +50,11 @@ const FIELDS: Readonly<Record<string, AnchorName>> = {
 /** Everything about the pole itself and about the clock of the work on it. */
 const POLE = /^(pole|girth|diameter|brand|lean|designRake|structureUse|(bored|set|letGo|hardware|load)At$)/;
 
+/** A rule's primary cell is where its figures begin; what it speaks of may be another thing: the foam, a photograph. */
+export function aboutReading(code: string): boolean {
+  return !/^(fill|lot|pour|kit|photo|product)-/.test(code);
+}
+
 /** Null: it is nowhere on the drawing (a position, a photograph, the order). */
 export function anchorOf(field: string | null, code: string): AnchorName | null {
   if (code.startsWith('photo-')) return null;

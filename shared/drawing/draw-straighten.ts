@@ -6,7 +6,7 @@ import { leanPlanMarks, needsLeanPlan } from './lean-plan.ts';
 import type { LayoutInput } from './layout-input.ts';
 import { at, path, through, type Mark } from './marks.ts';
 import { scaleBarMarks } from './scale-bar.ts';
-import type { SheetSpec } from './sheet-spec.ts';
+import { FONT, type SheetSpec } from './sheet-spec.ts';
 import type { StraightenLayout } from './straighten-layout.ts';
 import { straightenSpec, type StraightenPlaces } from './straighten-places.ts';
 import type { StraightenSection } from './straighten-section.ts';
@@ -28,7 +28,26 @@ export function straightenMarks(layout: StraightenLayout, input: LayoutInput): M
     ...(needsLeanPlan(section)
       ? leanPlanMarks(section, { ...foot.inset, metric, limit: limits.leanMostInPer10Ft })
       : []),
+    ...oppositeMarks(places, spec),
     ...scaleBarMarks({ ...foot.scaleBar, scale: places.scale, metric }),
+  ];
+}
+
+/** What the figures leave out, under the section. */
+function oppositeMarks({ hatchBottomY }: StraightenPlaces, spec: SheetSpec): Mark[] {
+  return [
+    {
+      is: 'text',
+      x: spec.compact ? spec.scaleBar.x - 16 : spec.hatch.left - 24,
+      y: spec.compact ? spec.labels.bottom + 28 : hatchBottomY + 20,
+      runs: [
+        { text: 'Opposite gap below the pivot', bold: true },
+        { text: ' is not counted', tone: 'muted' },
+      ],
+      size: FONT,
+      anchor: 'start',
+      part: 'opposite gap',
+    },
   ];
 }
 

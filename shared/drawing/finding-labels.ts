@@ -1,4 +1,5 @@
 import type { FieldValues } from '#shared/records/types.ts';
+import { viewWord } from '#shared/records/view-word.ts';
 import { findingText } from './finding-text.ts';
 import type { ColumnLabel } from './label-column.ts';
 import { missingTitle } from './missing-name.ts';
@@ -8,10 +9,15 @@ export function findingLabels(findings: readonly SheetFinding[], metric: boolean
   return findings.map((finding) => ({
     id: `finding ${finding.id}`,
     title: finding.title,
-    detail: findingText(finding, metric),
+    detail: findingText(finding, metric) || viewOf(finding),
     tone: toneOf(finding),
     finding,
   }));
+}
+
+/** Which photograph is missing; its rule has the view for a limit. */
+function viewOf({ code, limit }: SheetFinding): string {
+  return code === 'photo-missing' && typeof limit === 'string' ? viewWord(limit).toLowerCase() : '';
 }
 
 /** What the drawing lacks, unless a finding says so already. `dashed`: a dashed outline stands in its place. */

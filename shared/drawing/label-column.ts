@@ -30,6 +30,14 @@ export type PlacedText = {
 
 const ASCENT = 12;
 
+type Column<Label> = {
+  readonly spec: SheetSpec;
+  readonly bottom: number;
+  readonly pointOf: (label: Label) => Point | null;
+  /** Where what is nowhere on the drawing stands: last unless told. */
+  readonly loose?: 'first' | 'last';
+};
+
 /** Full words, else their first line, else titles alone: a finding is shortened before it is left out. */
 const LEVELS = [
   { title: 3, detail: 3 },
@@ -40,7 +48,7 @@ const LEVELS = [
 /** Puts labels in the column at the right of a drawing, each level with what it names, none overlapping. */
 export function placeColumn<Label extends ColumnLabel>(
   labels: readonly Label[],
-  room: { spec: SheetSpec; bottom: number; pointOf: (label: Label) => Point | null },
+  room: Column<Label>,
 ): { labels: PlacedText[]; leftOut: Label[] } {
   const tried = LEVELS.map((level) => placeAt(labels, { ...room, level }));
   const complete = tried.find(({ leftOut }) => !leftOut.some((label) => !label.optional));
@@ -49,17 +57,7 @@ export function placeColumn<Label extends ColumnLabel>(
 
 function placeAt<Label extends ColumnLabel>(
   labels: readonly Label[],
-  {
-    spec,
-    bottom,
-    pointOf,
-    level,
-  }: {
-    spec: SheetSpec;
-    bottom: number;
-    pointOf: (label: Label) => Point | null;
-    level: (typeof LEVELS)[number];
-  },
+  { spec, bottom, pointOf, level, loose = 'last' }: Column<Label> & { level: (typeof LEVELS)[number] },
 ): { labels: PlacedText[]; leftOut: Label[] } {
   const { x, width, top, mostLines } = spec.labels;
   const drawn = labels.map((label) => {
@@ -85,8 +83,7 @@ function placeAt<Label extends ColumnLabel>(
   const { placed, left } = placeLabels(
     drawn.map(({ label, height, anchor }) => ({
       id: label.id,
-      // What is nowhere on the drawing stands last.
-      wantY: anchor === null ? bottom : anchor.y,
+      wantY: anchor === null ? (loose === 'last' ? bottom : top) : anchor.y,
       height,
       optional: label.optional,
     })),

@@ -1,4 +1,5 @@
 import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
+import { aboutReading } from './anchors.ts';
 import { dimensionText } from './dimension-text.ts';
 import { findingLabels, missingLabels } from './finding-labels.ts';
 import { placeColumn, type ColumnLabel, type PlacedText } from './label-column.ts';
@@ -45,6 +46,8 @@ export function relevelLayout(input: LayoutInput): RelevelLayout {
   const column = placeColumn(labels, {
     spec,
     bottom: foot.labelsBottom,
+    // The section stands low on the sheet: what is nowhere on it leaves the place beside it free.
+    loose: 'first',
     pointOf: (label) => pointOf(label, { section, places, metric }),
   });
   return { section, places, ...column, balloons };
@@ -115,7 +118,7 @@ function facts(
 /** At the left there is room beside the figure; a leader would run across the whole plan. */
 function cornerBalloons(findings: readonly SheetFinding[]): CornerBalloon[] {
   return ([1, 2] as const).flatMap((corner) => {
-    const finding = findings.find((one) => one.field === `gap${corner}In`);
+    const finding = findings.find((one) => one.field === `gap${corner}In` && aboutReading(one.code));
     return finding ? [{ corner, finding }] : [];
   });
 }
@@ -124,7 +127,12 @@ function pointOf(
   label: ColumnLabel,
   { section, places, metric }: { section: RelevelSection; places: RelevelPlaces; metric: boolean },
 ): Point | null {
-  const field = label.finding ? label.finding.field : label.id.replace('missing ', '');
+  const code = label.finding?.code ?? '';
+  const field = /^(fill|lot|pour|kit)-/.test(code)
+    ? 'foam'
+    : label.finding
+      ? label.finding.field
+      : label.id.replace('missing ', '');
   if (field === null || label.finding?.code.startsWith('photo-')) return null;
   const { right, left, backY, frontY, padY, deepRightY } = places;
   if (field === 'foam' || /^(lot|kit|quantity|product|pour|component|wasted)/.test(field)) {

@@ -1,5 +1,6 @@
 import { positiveOf } from '#shared/calc/values.ts';
 import type { FieldValues } from '#shared/records/types.ts';
+import { anchorOf } from './anchors.ts';
 import { downDimension, type DownDimension } from './down-dimension.ts';
 import { dueTick, type DueTick } from './due-tick.ts';
 import { crossText, dimensionText } from './dimension-text.ts';
@@ -167,7 +168,7 @@ function downDimensions(input: Input): DownDimension[] {
         toX2: (pole?.buttLeft ?? spec.axisX) - 8,
         value: dimensionText(section.embedmentFt, 'ft', metric),
         word: 'embedment',
-        finding: findings.find((one) => one.field === 'embedmentFt') ?? null,
+        finding: findings.find((one) => anchorOf(one.field, one.code) === 'embedment') ?? null,
       }),
     );
   }
@@ -182,7 +183,7 @@ function downDimensions(input: Input): DownDimension[] {
         toX2: (bore?.bottomLeft ?? geometry.edges.left) - 4,
         value: dimensionText(section.boreDepthFt, 'ft', metric),
         word: 'bore',
-        finding: findings.find((one) => one.field === 'boreDepthFt') ?? null,
+        finding: findings.find((one) => anchorOf(one.field, one.code) === 'bore-depth') ?? null,
       }),
     );
   }

@@ -1,4 +1,5 @@
 import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
+import { aboutReading } from './anchors.ts';
 import { dimensionText } from './dimension-text.ts';
 import { downDimension, type DownDimension } from './down-dimension.ts';
 import { findingLabels, missingLabels } from './finding-labels.ts';
@@ -93,7 +94,7 @@ function depths(
       toX2: places.face(-1, depthFt).x - 8,
       value: dimensionText(depthFt, 'ft', metric),
       word,
-      finding: findings.find((one) => one.field === field) ?? null,
+      finding: findings.find((one) => one.field === field && aboutReading(one.code)) ?? null,
     });
   return [
     ...(wedge
@@ -171,7 +172,6 @@ function facts(section: StraightenSection, { record, limits, metric, findings }:
       limit === undefined ? '' : `limit ${formatQuantity(limit, 'in', { metric })}`,
     );
   }
-  add('opposite', 'Opposite gap below the pivot', 'is not counted');
   return out;
 }
 
@@ -183,14 +183,19 @@ function towards({ azimuthDeg }: Lean): string {
 
 /** Findings of lean point to the pole's face, those of gaps and foam to the wedge. */
 function pointOf(label: ColumnLabel, section: StraightenSection, places: StraightenPlaces): Point | null {
-  const field = label.finding ? label.finding.field : label.id.replace('missing ', '');
+  const code = label.finding?.code ?? '';
+  const field = /^(fill|lot|pour|kit)-/.test(code)
+    ? 'foam'
+    : label.finding
+      ? label.finding.field
+      : label.id.replace('missing ', '');
   if (field === null || label.finding?.code.startsWith('photo-')) return null;
   const high = places.topFt;
   if (field === 'before' || field.startsWith('leanBefore')) return places.former?.(1, high * 0.82) ?? null;
   if (field === 'springback') return places.ray(section.slopes.held ?? 0, high * 0.9);
   if (field === 'rake' || field.startsWith('designRake'))
     return places.ray(section.slopes.rake ?? 0, high * 0.72);
-  if (field === 'opposite' || field.startsWith('embedment')) return places.face(-1, places.buttFt - 0.25);
+  if (field.startsWith('embedment')) return places.face(-1, places.buttFt - 0.25);
   if (field === 'after' || /^(lean|pole|girth|diameter|pulled|released|reattached)/.test(field))
     return places.face(1, high * 0.4);
   if (field.startsWith('water')) return places.wedge && middle(places.wedge[2], places.wedge[3]);
