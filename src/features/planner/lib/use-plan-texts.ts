@@ -2,12 +2,22 @@ import { useCallback, useEffect, useRef, useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { readPlanTexts, writePlanTexts, type PlanTexts } from '#shared/planner/plan-texts.ts';
 
-/** Typing settles this long before the address follows: browsers refuse an address that changes with every key. */
+/** Typing settles this long before the router is told of the address, so that a key does not wake every reader of it. */
 const SETTLE_MS = 400;
 const PLACES = ['view', 'order', 'structure', 'built'] as const;
 export type Place = Partial<Record<(typeof PLACES)[number], string | null>>;
 
 const textOf = (texts: PlanTexts) => writePlanTexts(new URLSearchParams(), texts).toString();
+
+/** A page that is closed or loaded again keeps the last key. A browser that finds it too often refuses: then the next key, or a pause, does it. */
+function keepInAddress(texts: PlanTexts): void {
+  try {
+    const next = writePlanTexts(new URLSearchParams(location.search), texts);
+    history.replaceState(history.state, '', `${location.pathname}?${next}`);
+  } catch {
+    // The pause writes it.
+  }
+}
 
 export type PlanState = {
   /** What was typed over the design or the defaults. */
@@ -19,7 +29,7 @@ export type PlanState = {
   readonly settle: () => void;
 };
 
-/** The planner's state: at hand at once, in the address a moment later, so that it can be sent and nothing typed is lost. */
+/** The planner's state: at hand and in the address at once, so that it can be sent and nothing typed is lost. */
 export function usePlanTexts(): PlanState {
   const [search, setSearch] = useSearchParams();
   const [typed, setTyped] = useState<PlanTexts>(() => readPlanTexts(search));
@@ -59,21 +69,11 @@ export function usePlanTexts(): PlanState {
     setTyped(texts);
   }, [search]);
 
-  // A page that is closed or loaded again within that moment keeps the last keys too.
-  useEffect(() => {
-    const keep = () => {
-      if (written.current === textOf(now.current)) return;
-      const next = writePlanTexts(new URLSearchParams(location.search), now.current);
-      history.replaceState(history.state, '', `${location.pathname}?${next}`);
-    };
-    addEventListener('pagehide', keep);
-    return () => removeEventListener('pagehide', keep);
-  }, []);
-
   const type = useCallback(
     (key: string, text: string) => {
       now.current = { ...now.current, [key]: text };
       setTyped(now.current);
+      keepInAddress(now.current);
       clearTimeout(timer.current);
       timer.current = setTimeout(settle, SETTLE_MS);
     },
