@@ -8,11 +8,11 @@ export function bisect(
   if (rising(high) <= value) return high;
   let from = low;
   let to = high;
-  for (let step = 0; step < 200; step += 1) {
-    const middle = (from + to) / 2;
-    if (middle === from || middle === to) break;
+  let middle = (from + to) / 2;
+  while (from < middle && middle < to) {
     if (rising(middle) < value) from = middle;
     else to = middle;
+    middle = (from + to) / 2;
   }
-  return (from + to) / 2;
+  return middle;
 }

@@ -42,9 +42,9 @@ export function boreProfile(values: FieldValues): BoreProfile | null {
 
 const between = (from: number, to: number, share: number) => from + (to - from) * share;
 
+/** Of a part that has a height. */
 function axesIn(part: BorePart, z: number): Axes {
-  const height = part.toFt - part.fromFt;
-  const share = height > 0 ? (z - part.fromFt) / height : 0;
+  const share = (z - part.fromFt) / (part.toFt - part.fromFt);
   return { a: between(part.top.a, part.bottom.a, share), b: between(part.top.b, part.bottom.b, share) };
 }
 

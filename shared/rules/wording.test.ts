@@ -127,6 +127,18 @@ describe('sentences that say one thing or another', () => {
   });
 });
 
+// 10 °C = 50 °F and 25 °C = 77 °F: the ends of the band count as in it.
+it.each([
+  ['the lower end', 10, true],
+  ['the upper end', 25, true],
+  ['colder than the band', 9, false],
+  ['warmer than the band', 26, false],
+  ['no number', 'x', false],
+])('foam-cold tells what a reading would be in °C: %s', (_what, measured, told) => {
+  const finding = { ...EMPTY, measured, limit: 40, params: { lowF: 50, highF: 77 } };
+  expect(ruleOf('foam-cold')?.remedy(finding).includes('°C would be')).toBe(told);
+});
+
 describe('what to do about it', () => {
   it.each([
     ['clock-unreal', { problem: 'overlap' }, 'outside the repeated hour'],

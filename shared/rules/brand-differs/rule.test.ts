@@ -8,6 +8,10 @@ describeRule(brandDiffers, {
     { name: 'as embedded: 10 ft less 4 ft', line: { values } },
     { name: 'half a foot off', line: { values: { ...values, brandHeightFt: 3.5 } } },
     {
+      name: 'a 50 ft pole is still branded at 10 ft',
+      line: { values: { poleLengthFt: 50, embedmentFt: 7, brandHeightFt: 3 } },
+    },
+    {
       name: 'a 55 ft pole is branded at 14 ft',
       line: { values: { poleLengthFt: 55, embedmentFt: 7.5, brandHeightFt: 6.5 } },
     },

@@ -14,6 +14,12 @@ describeRule(clockFuture, {
   ],
   invalid: [
     {
+      name: 'its title is the sheet’s',
+      line: { values: { setAt: '2026-04-14T13:00' } },
+      context,
+      expected: [{ field: 'setAt', params: { title: 'Set' } }],
+    },
+    {
       name: 'an hour ahead',
       line: { values: { loadAt: '2026-04-14T13:00' } },
       context,

@@ -18,6 +18,11 @@ describeRule(designDiffers, {
   valid: [
     { name: 'as designed', line: { values }, context },
     {
+      name: 'a length that differs in its last binary digits alone',
+      line: { values: { ...values, poleLengthFt: 40.0000000005 } },
+      context,
+    },
+    {
       name: 'class in small letters on the order',
       line: { values },
       context: { design: [{ ...design, poleClass: 'h1' }] },

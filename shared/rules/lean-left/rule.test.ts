@@ -44,6 +44,11 @@ describeRule(leanLeft, {
       expected: [{ measured: 3, limit: 1, margin: -2 }],
     },
     {
+      name: 'its own direction not said',
+      line: { kind, values: { leanAfterInPer10Ft: 2 } },
+      expected: [{ unproved: 'leanAfterAzimuthDeg' }],
+    },
+    {
       name: 'left so by an event, its direction not said',
       line: { kind, events: [eventOf(kind, 2, { leanInPer10Ft: 2 })] },
       expected: [{ unproved: 'leanAzimuthDeg' }],

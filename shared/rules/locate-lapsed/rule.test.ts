@@ -26,12 +26,29 @@ describeRule(locateLapsed, {
     {
       name: 'three days after its end',
       line: { values: { ...ticket, boredAt: '2026-04-27T09:00' } },
-      expected: [{ field: 'locateTo', measured: '2026-04-27', limit: '2026-04-24', margin: -3, unit: 'd' }],
+      expected: [
+        {
+          field: 'locateTo',
+          measured: '2026-04-27',
+          limit: '2026-04-24',
+          margin: -3,
+          unit: 'd',
+          params: { end: 'ended', days: 3 },
+        },
+      ],
     },
     {
       name: 'the day before it begins',
       line: { kind: 'straighten', values: { ...ticket, pulledAt: '2026-04-09T09:00' } },
-      expected: [{ field: 'locateFrom', measured: '2026-04-09', limit: '2026-04-10', margin: -1 }],
+      expected: [
+        {
+          field: 'locateFrom',
+          measured: '2026-04-09',
+          limit: '2026-04-10',
+          margin: -1,
+          params: { end: 'begins' },
+        },
+      ],
     },
     {
       name: 'its days left blank',

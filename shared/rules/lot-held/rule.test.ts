@@ -23,6 +23,11 @@ describeRule(lotHeld, {
       line: { pours: [pourOf()] },
       context: lot({ status: 'held', history: [{ on: '2026-04-15', status: 'held' }] }),
     },
+    {
+      name: 'held from the day after: a first pour counts on the work day, though it ended past midnight',
+      line: { pours: [pourOf({ pouredAt: '2026-04-15T00:30' })] },
+      context: lot({ status: 'held', history: [{ on: '2026-04-15', status: 'held' }] }),
+    },
     { name: 'another lot', line: { pours: [pourOf({ lot: 'L-9' })] }, context: lot({ status: 'held' }) },
     { name: 'lots not known here', line: { pours: [pourOf()] } },
   ],

@@ -42,6 +42,11 @@ describeRule(photoElsewhen, {
       expected: [{ limit: '2026-04-14T09:00', margin: -1410, params: { offMin: 1440 } }],
     },
     {
+      name: 'against a pour, the only time known',
+      line: { photos: taken('2026-04-15T12:00:00'), pours: [pourOf()] },
+      expected: [{ limit: '2026-04-14T10:00', margin: -1530 }],
+    },
+    {
       name: 'of rework, taken when it was first built',
       line: {
         ...line(taken('2026-04-14T09:50:00', 'rework')),

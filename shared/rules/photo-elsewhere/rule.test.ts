@@ -12,6 +12,11 @@ describeRule(photoElsewhere, {
       name: 'at the structure',
       line: { values, photos: [photoOf('finish', { latitude: 40, longitude: -105 })] },
     },
+    {
+      name: 'at the limit: none off and none allowed',
+      line: { values, photos: [photoOf('finish', { latitude: 40, longitude: -105 })] },
+      params: { limitFt: 0 },
+    },
     { name: 'no position in it', line: { values, photos: [photoOf('finish', {})] } },
     { name: 'not measured yet', line: { values, photos: [photoOf('finish', null)] } },
     { name: 'where the structure stands is not known', line: { photos: north } },

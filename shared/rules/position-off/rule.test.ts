@@ -18,6 +18,12 @@ const EAST = { latitude: 40, longitude: -104.9995 };
 describeRule(positionOff, {
   valid: [
     { name: 'where it was planned', line: { values: { latitude: 40, longitude: -105 } }, context },
+    {
+      name: 'at the limit: none off and none allowed',
+      line: { values: { latitude: 40, longitude: -105 } },
+      context,
+      params: { limitFt: 0 },
+    },
     { name: 'so far as its accuracy explains', line: { values: { ...EAST, accuracyFt: 126 } }, context },
     {
       name: 'the design has no position',

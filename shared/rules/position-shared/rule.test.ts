@@ -47,6 +47,25 @@ describe('position-shared', () => {
     expect(find([line('S-1', HERE), line('S-2', HERE)], [], 0)).toEqual([]);
   });
 
+  it('meets: exactly as far as asked for: nothing left of it, and nothing asked for', () => {
+    const lines = [line('S-1', { ...HERE, accuracyFt: 1 }), line('S-2', { ...HERE, accuracyFt: 1 })];
+    expect(find(lines, [], 0)).toEqual([]);
+  });
+
+  // 7.0e-6° of longitude at 40° north are 0.598 m (85,394 m a degree, WGS 84), 1.96 ft.
+  it('finds: the one to the east and the one to the west, wherever the pair lies', () => {
+    const lines = [0, 1, 2, 3, 4, 5, 6, 7].flatMap((n) => {
+      const longitude = -105 + n * 0.0101013;
+      return [
+        line(`W-${n}`, { latitude: 40, longitude }),
+        line(`E-${n}`, { latitude: 40, longitude: longitude + 7e-6 }),
+      ];
+    });
+    expect(find(lines).map(({ on, params }) => `${on} ${params?.['other'] as string}`)).toEqual(
+      [0, 1, 2, 3, 4, 5, 6, 7].flatMap((n) => [`W-${n} E-${n}`, `E-${n} W-${n}`]),
+    );
+  });
+
   it('finds: two lines of a batch in one place, each of them', () => {
     expect(find([line('S-1', HERE), line('S-2', HERE)])).toEqual([
       { on: 'S-1', measured: 0, limit: 3, margin: -3, unit: 'ft', params: { distanceFt: 0, other: 'S-2' } },
@@ -73,12 +92,24 @@ describe('position-shared', () => {
     );
   });
 
+  it('finds: of two in one place the first by name', () => {
+    const [a, b] = [neighbour('A-1'), neighbour('B-1')];
+    for (const neighbours of [
+      [a, b],
+      [b, a],
+    ])
+      expect(find([line('S-1', HERE)], neighbours)).toMatchObject([{ params: { other: 'A-1' } }]);
+  });
+
   it('finds: the nearest of several, whatever their order', () => {
+    const south = neighbour('A-0', { accuracyFt: 500, latitude: 39.9995 });
     const near = neighbour('A-1', { accuracyFt: 500, ...NORTH });
     const nearer = neighbour('B-1', { accuracyFt: 500 });
     for (const neighbours of [
       [near, nearer],
       [nearer, near],
+      [south, nearer],
+      [nearer, south],
     ])
       expect(find([line('S-1', HERE)], neighbours)).toMatchObject([{ params: { other: 'B-1' } }]);
   });

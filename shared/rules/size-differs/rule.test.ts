@@ -6,6 +6,11 @@ describeRule(sizeDiffers, {
   valid: [
     { name: 'they agree', line: { values: { girthGroundLineIn: 37.7, diameterGroundLineIn: 12 } } },
     { name: 'a quarter inch apart: 12.2495', line: { values: { girthButtIn: 37.7, diameterButtIn: 12.25 } } },
+    {
+      // 49/4 = 12.25.
+      name: 'exactly a quarter inch apart',
+      line: { values: { poleSection: 'square', girthButtIn: 49, diameterButtIn: 12 } },
+    },
     { name: 'one of them', line: { values: { girthGroundLineIn: 37.7, diameterButtIn: 20 } } },
     {
       name: 'section unreadable',

@@ -9,6 +9,10 @@ describeRule(waterDeep, {
       name: 'at the limit with the pole in',
       line: { values: { waterIn: 1.1 }, derived: { waterWithPoleIn: 2 } },
     },
+    {
+      name: 'at the limit in a later event',
+      line: { values: { waterIn: 0 }, events: [eventOf('set', 2, { waterIn: 2 })] },
+    },
     { name: 'unreadable', line: { broken: ['waterIn'] } },
     { name: 'level with the pole not known, open level within', line: { values: { waterIn: 1 } } },
   ],
