@@ -96,7 +96,7 @@ function decisionPieces({ data, zone }: SheetContent, width: number): Piece[] {
         `${decision.decision === 'approve' ? 'Approved' : 'Returned'} by ${decision.by}, ${formatInstant(decision.at, zone)}${decision.reason ? `: ${decision.reason}` : '.'}`,
         { width },
       )
-    : paragraph('Not decided by itself.', { width, tone: 'muted' });
+    : paragraph('The line itself is not decided.', { width, tone: 'muted' });
   const entered = data.registerEntry
     ? paragraph(`On record as ${data.registerEntry.recordNumber}, version ${data.registerEntry.version}.`, {
         width,

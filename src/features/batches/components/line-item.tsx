@@ -1,6 +1,7 @@
 import { FindingItem, type FindingActions } from './finding-item.tsx';
 import { describeLine } from '../lib/describe-line.ts';
 import { wantsLook, worstSeverity, type LineView } from '../lib/line-view.ts';
+import { DrawingButton } from '#src/components/drawing/drawing-button.tsx';
 import { Glyph, type GlyphName } from '#src/components/ui/glyph.tsx';
 import { LINE_WORDS, SEVERITY_WORDS } from '#src/components/ui/state-word.tsx';
 import { TextLink } from '#src/components/ui/text-link.tsx';
@@ -62,6 +63,9 @@ export function LineItem({ line, active, onActive, decided, ...actions }: Props)
             {counted(record.photos.length, 'photograph')}, row {record.row}
           </span>
         </p>
+        <span className="lg:ml-4">
+          <DrawingButton recordId={record.id} structureNumber={record.structureNumber} />
+        </span>
         {decided && record.decision?.reason ? (
           <p className="w-full text-table text-ink-2 lg:ml-6">“{record.decision.reason}”</p>
         ) : null}

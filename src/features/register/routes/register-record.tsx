@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router-dom';
+import { RecordDrawing } from '#src/components/drawing/record-drawing.tsx';
 import { PlainTable, type PlainColumn } from '#src/components/table/plain-table.tsx';
 import { ButtonLink } from '#src/components/ui/button.tsx';
 import { DocumentTitle } from '#src/components/ui/document-title.tsx';
@@ -121,6 +122,10 @@ export function Component() {
             rowKey={(row) => row.id}
           />
           <Supersedings rows={rows} />
+          <SectionHead title="Drawing" aside={`of version ${newest.version}`} />
+          <div className="max-w-4xl px-gutter py-3">
+            <RecordDrawing recordId={newest.recordId} />
+          </div>
         </>
       ) : null}
     </>
