@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { FoldedSection, FormSection } from './form-section.tsx';
 import { PlanInput } from './plan-input.tsx';
 import { PlanSelect } from './plan-select.tsx';
@@ -15,10 +16,14 @@ type Props = {
 
 /** Foam, kits, prices, and how far what is measured may be off. */
 export function FoamFields({ products, kitsFt3, kinds, order = false }: Props) {
-  const options = products.map(({ code, name }) => ({
-    value: code,
-    label: `${code} ${name.replace(code, '').trim()}`,
-  }));
+  const options = useMemo(
+    () =>
+      products.map(({ code, name }) => ({
+        value: code,
+        label: `${code} ${name.replace(code, '').trim()}`,
+      })),
+    [products],
+  );
   const poles = kinds.includes('set') || kinds.includes('straighten');
   return (
     <>

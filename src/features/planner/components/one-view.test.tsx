@@ -1,4 +1,4 @@
-import { cleanup, render, screen, within } from '@testing-library/react';
+import { cleanup, render, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { createMemoryRouter, RouterProvider, useLocation, useSearchParams } from 'react-router-dom';
 import { afterEach, beforeAll, describe, expect, it, vi } from 'vitest';
@@ -61,7 +61,7 @@ describe('planning one structure', () => {
     await user.type(screen.getByLabelText('Bore to be used'), '20');
     expect(kits().getAllByText('8 + 2.5').length).toBeGreaterThan(0);
     await user.tab();
-    expect(address()).toBe('?boreIn=20');
+    await waitFor(() => expect(address()).toBe('?boreIn=20'));
   });
 
   it('says beside a field what is wrong with it, and goes on with the rest', async () => {

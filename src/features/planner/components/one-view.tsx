@@ -1,4 +1,4 @@
-import { useDeferredValue, useMemo } from 'react';
+import { useCallback, useDeferredValue, useMemo } from 'react';
 import { assumedTexts } from '../lib/assumed-texts.ts';
 import { PlanFormProvider, type PlanForm } from '../lib/plan-form.ts';
 import { planRecord } from '../lib/plan-record.ts';
@@ -28,6 +28,9 @@ import { tableHead } from '#shared/planner/table-head.ts';
 import { formatQuantity } from '#shared/units/format-quantity.ts';
 import type { Product } from '#shared/standard/types.ts';
 
+/** Always the same, so never painted anew. */
+const CAUTIONS = <Cautions />;
+
 type Props = {
   readonly texts: PlanTexts;
   readonly type: PlanForm['type'];
@@ -46,7 +49,7 @@ export function OneView({ texts, type, settle, context, products }: Props) {
   }, [texts, type, settle, plan]);
   const { kind } = plan;
   const { standard, product } = context;
-  const priceOf = (kitFt3: number) => amountBySize(texts, 'price', kitFt3);
+  const priceOf = useCallback((kitFt3: number) => amountBySize(texts, 'price', kitFt3), [texts]);
   return (
     <PlanFormProvider value={form}>
       <div className="grid flex-1 md:grid-cols-[20rem_minmax(0,1fr)] xl:grid-cols-[20rem_minmax(0,1fr)_27rem] print:flex print:flex-col">
@@ -79,9 +82,7 @@ export function OneView({ texts, type, settle, context, products }: Props) {
         <div className="min-w-0 border-hairline xl:border-l print:contents">
           <KitAnswers plan={plan} priceOf={priceOf} productCode={product?.code ?? 'no foam'} />
           <PlanFacts plan={plan} standard={standard} />
-          <div className="px-gutter py-4 print:order-4 print:break-inside-avoid print:px-0">
-            <Cautions />
-          </div>
+          <div className="px-gutter py-4 print:order-4 print:break-inside-avoid print:px-0">{CAUTIONS}</div>
         </div>
       </div>
       <StatusBar

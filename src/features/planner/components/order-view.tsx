@@ -38,6 +38,9 @@ import type { PlannedStructure } from '#shared/generated/api-types.ts';
 import type { Kind } from '#shared/records/types.ts';
 import type { Product } from '#shared/standard/types.ts';
 
+/** Always the same, so never painted anew. */
+const CAUTIONS = <Cautions />;
+
 type Props = {
   readonly orderId: string;
   readonly everything: boolean;
@@ -112,9 +115,7 @@ export function OrderView({ orderId, everything, state, context, products }: Pro
           {kinds.includes('straighten') ? <StraightenFields one={false} /> : null}
           {kinds.includes('relevel') ? <RelevelFields one={false} /> : null}
           <FoamFields products={products} kitsFt3={sizes} kinds={kinds} order />
-          <div className="px-gutter py-4">
-            <Cautions />
-          </div>
+          <div className="px-gutter py-4">{CAUTIONS}</div>
         </form>
         <div className="flex min-w-0 flex-col" aria-busy={busy}>
           {orderId === '' ? (

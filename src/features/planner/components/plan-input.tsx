@@ -1,22 +1,38 @@
-import { useId } from 'react';
-import { usePlanForm } from '../lib/plan-form.ts';
+import { memo, useId } from 'react';
+import { usePlanForm, type PlanForm } from '../lib/plan-form.ts';
 import { CONTROL, describedBy, FieldFrame } from '#src/components/form/field-frame.tsx';
 import { classNames } from '#src/lib/class-names.ts';
 import { planField } from '#shared/planner/plan-fields.ts';
 
-type Props = {
-  readonly name: string;
-  readonly label?: string;
-  readonly hint?: string;
-  readonly fault?: string;
-};
+type Props = { readonly name: string; readonly label?: string; readonly hint?: string };
 
 /** A measure or a list of sizes. What a blank one is taken as stands in it. */
-export function PlanInput({ name, label, hint, fault }: Props) {
+export function PlanInput(props: Props) {
   const { texts, type, settle, faultOf, assumed } = usePlanForm();
+  const { name } = props;
+  return (
+    <Input
+      {...props}
+      value={texts[name] ?? ''}
+      error={faultOf(name)}
+      assumed={assumed[name]}
+      type={type}
+      settle={settle}
+    />
+  );
+}
+
+type InputProps = Props &
+  Pick<PlanForm, 'type' | 'settle'> & {
+    readonly value: string;
+    readonly error: string | undefined;
+    readonly assumed: string | undefined;
+  };
+
+/** A key in one field paints that field, not the form. */
+const Input = memo(function Input({ name, label, hint, value, error, assumed, type, settle }: InputProps) {
   const field = planField(name);
   const id = useId();
-  const error = fault ?? faultOf(name);
   const unit = field?.unit ?? '';
   const wide = field?.read === 'text' || field?.read === 'sizes';
   return (
@@ -27,8 +43,8 @@ export function PlanInput({ name, label, hint, fault }: Props) {
           type="text"
           inputMode={field?.read === 'number' ? 'decimal' : undefined}
           autoComplete="off"
-          value={texts[name] ?? ''}
-          placeholder={assumed[name]}
+          value={value}
+          placeholder={assumed}
           onChange={(event) => type(name, event.target.value)}
           onBlur={settle}
           aria-invalid={error ? true : undefined}
@@ -47,4 +63,4 @@ export function PlanInput({ name, label, hint, fault }: Props) {
       </span>
     </FieldFrame>
   );
-}
+});

@@ -1,5 +1,5 @@
-import { useId } from 'react';
-import { usePlanForm } from '../lib/plan-form.ts';
+import { memo, useId } from 'react';
+import { usePlanForm, type PlanForm } from '../lib/plan-form.ts';
 import { CONTROL, describedBy, FieldFrame } from '#src/components/form/field-frame.tsx';
 import { planField } from '#shared/planner/plan-fields.ts';
 
@@ -8,7 +8,7 @@ type Props = {
   readonly name: string;
   readonly label?: string;
   readonly hint?: string;
-  /** Instead of the field's own codes. */
+  /** Instead of the field's own codes; the same list each time. */
   readonly options?: readonly Option[];
   /** What no choice means. */
   readonly blank?: string;
@@ -17,12 +17,19 @@ type Props = {
 const KIND_LABELS: Readonly<Record<string, string>> = { relevel: 're-level' };
 
 /** A choice. What cannot be known, as from an old address, stays in sight as such. */
-export function PlanSelect({ name, label, hint, options, blank }: Props) {
+export function PlanSelect(props: Props) {
   const { texts, type, settle, faultOf } = usePlanForm();
+  const { name } = props;
+  return <Select {...props} value={texts[name] ?? ''} error={faultOf(name)} type={type} settle={settle} />;
+}
+
+type SelectProps = Props &
+  Pick<PlanForm, 'type' | 'settle'> & { readonly value: string; readonly error: string | undefined };
+
+const Select = memo(function Select(props: SelectProps) {
+  const { name, label, hint, options, blank, value, error, type, settle } = props;
   const field = planField(name);
   const id = useId();
-  const error = faultOf(name);
-  const value = texts[name] ?? '';
   const codes = field?.codes ?? [];
   const offered =
     options ?? codes.map((code) => ({ value: code, label: KIND_LABELS[code] ?? code.replaceAll('-', ' ') }));
@@ -48,4 +55,4 @@ export function PlanSelect({ name, label, hint, options, blank }: Props) {
       </select>
     </FieldFrame>
   );
-}
+});
