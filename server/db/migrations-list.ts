@@ -7,6 +7,7 @@ import { Register20260105090500 } from '#migrations/20260105090500-register.ts';
 import { Trail20260105090600 } from '#migrations/20260105090600-trail.ts';
 import { Messages20260105090700 } from '#migrations/20260105090700-messages.ts';
 import { RefusalCounts20260105090900 } from '#migrations/20260105090900-refusal-counts.ts';
+import { ListIndexes20260105091000 } from '#migrations/20260105091000-list-indexes.ts';
 import { SheetFiles20260105091200 } from '#migrations/20260105091200-sheet-files.ts';
 
 /** All migrations in order, by name: a bundled server has no folder to read them from. */
@@ -20,5 +21,6 @@ export const MIGRATIONS = [
   { name: '20260105090600-trail', class: Trail20260105090600 },
   { name: '20260105090700-messages', class: Messages20260105090700 },
   { name: '20260105090900-refusal-counts', class: RefusalCounts20260105090900 },
+  { name: '20260105091000-list-indexes', class: ListIndexes20260105091000 },
   { name: '20260105091200-sheet-files', class: SheetFiles20260105091200 },
 ];

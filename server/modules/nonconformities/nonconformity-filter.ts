@@ -64,15 +64,18 @@ export function nonconformityConditions(filter: NonconformityFilter): { sql: str
   add(filter.to, (p) => `s.work_day <= ${p}::date`);
   add(
     filter.lot,
-    (p) => `exists (select 1 from pours x where x.record_id = s.record_id and x.lot_text = ${p})`,
+    // As a list made first: who poured a lot is few, and how few is not known before it is looked up.
+    (p) => `s.record_id = any(array(select x.record_id from pours x where x.lot_text = ${p}))`,
   );
   add(
     filter.product,
-    (p) => `exists (select 1 from records x where x.id = s.record_id and ${p} = any(x.product_codes))`,
+    (p) =>
+      `exists (select 1 from records x where x.id = s.record_id and x.product_codes @> array[${p}::text])`,
   );
   add(
     filter.q?.replaceAll(/[\\%_]/g, String.raw`\$&`).concat('%'),
-    (p) => `exists (select 1 from findings x where x.id = s.finding_id and x.structure_number ilike ${p})`,
+    (p) =>
+      `exists (select 1 from findings x where x.id = s.finding_id and lower(x.structure_number) like lower(${p}))`,
   );
   return { sql: conditions.join(' and '), values };
 }

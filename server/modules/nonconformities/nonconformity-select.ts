@@ -47,7 +47,9 @@ join batches b on b.id = s.batch_id
 join revisions v on v.id = s.revision_id
 left join users u on u.id = s.decided_by
 left join lateral (
-  select d.decision, d.reason, d.at, c.number, c.condition
-  from decisions d left join concession_current c on c.id = d.concession_id
+  -- Not the view of all concessions as they stand: it would be made anew for every row.
+  select d.decision, d.reason, d.at, c.number,
+    (select e.condition from concession_events e where e.concession_id = c.id order by e.seq desc limit 1) as condition
+  from decisions d left join concessions c on c.id = d.concession_id
   where s.version > 0 and d.finding_id = s.finding_id and d.seq = s.version
 ) k on true`;

@@ -1,5 +1,5 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
-import { row, rows } from '#server/db/rows.ts';
+import { rows } from '#server/db/rows.ts';
 import { findingTitle } from '#shared/findings/render.ts';
 import type { NonconformitySummary } from '#shared/generated/api-types.ts';
 import { pareto } from '#shared/nonconformities/pareto.ts';
@@ -17,12 +17,6 @@ export async function summarise(
 ): Promise<NonconformitySummary> {
   const where = nonconformityConditions(filter);
   const from = `from finding_states s where ${where.sql}`;
-  const totals = await row<{ findings: number; records: number; checked: number }>(
-    em,
-    `select count(*)::int as findings, count(distinct s.record_id)::int as records,
-       (select count(*)::int from lines where record_id is not null) as checked ${from}`,
-    where.values,
-  );
   const byRule = await rows<{ code: string; count: number }>(
     em,
     `select s.code, count(*)::int as count ${from} group by s.code`,
@@ -31,18 +25,23 @@ export async function summarise(
   const byContractor = await rows<ContractorRow>(
     em,
     `with hit as (select s.contractor_id, count(distinct s.record_id)::int as n ${from} and s.record_id is not null group by 1)
-     select o.id, o.name, count(l.id)::int as records, coalesce(max(hit.n), 0)::int as nonconforming
-     from organisations o
-     join batches b on b.contractor_id = o.id
-     join lines l on l.batch_id = b.id and l.record_id is not null
+     , checked as (
+       select b.contractor_id, sum(l.n)::int as n
+       from (select batch_id, count(*) as n from lines where record_id is not null group by 1) l
+       join batches b on b.id = l.batch_id group by 1
+     )
+     select o.id, o.name, checked.n as records, coalesce(hit.n, 0)::int as nonconforming
+     from checked join organisations o on o.id = checked.contractor_id
      left join hit on hit.contractor_id = o.id
-     group by o.id, o.name order by o.name`,
+     order by o.name`,
     where.values,
   );
+  const sum = (list: readonly number[]): number => list.reduce((all, one) => all + one, 0);
   return {
-    findings: totals?.findings ?? 0,
-    records: totals?.records ?? 0,
-    recordsChecked: totals?.checked ?? 0,
+    // Every finding has one rule, every record one contractor: their sums are the totals.
+    findings: sum(byRule.map((rule) => rule.count)),
+    records: sum(byContractor.map((item) => item.nonconforming)),
+    recordsChecked: sum(byContractor.map((item) => item.records)),
     byRule: pareto(byRule.map((rule) => ({ ...rule, title: findingTitle(rule.code) }))),
     byContractor: byContractor.map(withInterval),
     openActions: await openActions(em, where),

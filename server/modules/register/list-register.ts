@@ -6,7 +6,7 @@ import type { RegisterRow } from '#shared/generated/api-types.ts';
 import type { Ability } from '#shared/permissions/ability.ts';
 import { presentRegister } from './present-register.ts';
 import { registerConditions, type RegisterFilter } from './register-filter.ts';
-import { REGISTER_COLUMNS, REGISTER_FROM, type RegisterDbRow } from './register-select.ts';
+import { REGISTER_COLUMNS, REGISTER_JOINS, REGISTER_SCOPE, type RegisterDbRow } from './register-select.ts';
 
 /** A leading minus sorts the other way: latest first, Z to A. */
 export const REGISTER_SORTS = [
@@ -66,9 +66,14 @@ export async function listRegister(
   const beyond = direction === 'desc' ? '<' : '>';
   const found = await rows<RegisterDbRow>(
     em,
-    `select ${REGISTER_COLUMNS} ${REGISTER_FROM} where ${where.sql}
-       and ($${next}::${sort.cast} is null or (${sort.sql}, v.id) ${beyond} ($${next}::${sort.cast}, $${next + 1}::uuid))
-     order by ${sort.sql} ${direction}, v.id ${direction} limit $${next + 2}`,
+    // The page first: what is joined is joined for the rows shown only.
+    `select ${REGISTER_COLUMNS}
+     from (
+       select v.* ${REGISTER_SCOPE} where ${where.sql}
+         and ($${next}::${sort.cast} is null or (${sort.sql}, v.id) ${beyond} ($${next}::${sort.cast}, $${next + 1}::uuid))
+       order by ${sort.sql} ${direction}, v.id ${direction} limit $${next + 2}
+     ) v ${REGISTER_JOINS}
+     order by ${sort.sql} ${direction}, v.id ${direction}`,
     [...where.values, after?.[0] ?? null, after?.[1] ?? null, limit + 1],
   );
   return toPage({
@@ -83,7 +88,7 @@ export async function listRegister(
 async function count(em: EntityManager, where: { sql: string; values: unknown[] }): Promise<number | null> {
   const found = await row<{ n: number }>(
     em,
-    `select count(*)::int as n from (select 1 ${REGISTER_FROM} where ${where.sql} limit ${COUNT_LIMIT + 1}) counted`,
+    `select count(*)::int as n from (select 1 ${REGISTER_SCOPE} where ${where.sql} limit ${COUNT_LIMIT + 1}) counted`,
     where.values,
   );
   return found && found.n <= COUNT_LIMIT ? found.n : null;

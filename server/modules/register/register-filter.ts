@@ -42,7 +42,7 @@ export function registerConditions(
   add(options.contractorId, (p) => `v.contractor_id = ${p}::uuid`);
   add(
     filter.q?.replaceAll(/[\\%_]/g, String.raw`\$&`).concat('%'),
-    (p) => `(v.structure_number ilike ${p} or v.record_number ilike ${p})`,
+    (p) => `(lower(v.structure_number) like lower(${p}) or lower(v.record_number) like lower(${p}))`,
   );
   add(filter.workOrder, (p) => `v.work_order_id = ${p}::uuid`);
   add(filter.contractor, (p) => `v.contractor_id = ${p}::uuid`);
@@ -51,9 +51,11 @@ export function registerConditions(
   add(filter.to, (p) => `v.work_day <= ${p}::date`);
   add(
     filter.lot,
-    (p) => `exists (select 1 from pours p where p.record_id = v.record_id and p.lot_text = ${p})`,
+    // As a list made first: who poured a lot is few, and how few is not known before it is looked up.
+    (p) => `v.record_id = any(array(select p.record_id from pours p where p.lot_text = ${p}))`,
   );
-  add(filter.conforming, (p) => `v.nonconforming = (${p} = 'no')`);
+  if (filter.conforming)
+    conditions.push(filter.conforming === 'no' ? 'v.nonconforming' : 'not v.nonconforming');
   add(filter.rule, (p) => `v.rule_codes @> array[${p}]`);
   if (filter.versions !== 'all') conditions.push('c.version_id is not null');
   return { sql: conditions.length > 0 ? conditions.join(' and ') : 'true', values };

@@ -26,13 +26,19 @@ export type RegisterDbRow = {
   reason: string | null;
 };
 
-export const REGISTER_FROM = `
+/** What conditions and orders are over, and all that is counted. */
+export const REGISTER_SCOPE = `
 from register_versions v
+left join register_current c on c.version_id = v.id`;
+
+export const REGISTER_JOINS = `
 left join register_current c on c.version_id = v.id
 join records r on r.id = v.record_id
 join organisations o on o.id = v.contractor_id
 join work_orders w on w.id = v.work_order_id
 left join users u on u.id = v.entered_by`;
+
+export const REGISTER_FROM = `from register_versions v ${REGISTER_JOINS}`;
 
 export const REGISTER_COLUMNS = `
 v.id, v.record_id, v.record_number, v.n, c.version_id is not null as current, v.structure_number, v.kind,

@@ -184,7 +184,11 @@ ${ITEMS.replace(
 join findings f on f.id = s.finding_id
 left join decisions d on d.finding_id = s.finding_id and d.seq = s.version
 left join users u on u.id = d.actor_id
-left join concession_current c on c.id = d.concession_id
+left join lateral (
+  select k.number, e.condition, e.ends_on
+  from concessions k join concession_events e on e.concession_id = k.id
+  where k.id = d.concession_id order by e.seq desc limit 1
+) c on true
 where`,
 )} and i.ordinal > $2 and i.ordinal <= $3
 order by i.ordinal, f.ordinal`;
