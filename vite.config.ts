@@ -1,9 +1,10 @@
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
+import { initialBudget } from './scripts/lib/initial-budget.mjs';
 
 export default defineConfig({
-  plugins: [react(), tailwindcss()],
+  plugins: [react(), tailwindcss(), initialBudget()],
   publicDir: 'src/public',
   // No assets as data: addresses: the content security policy allows fonts and pictures from the server alone.
   build: { outDir: 'dist', sourcemap: true, target: 'es2022', assetsInlineLimit: 0 },

@@ -10,6 +10,7 @@ const INPUTS = [
   'index.html',
   'tailwind.config.ts',
   'vite.config.ts',
+  'scripts/lib/initial-budget.mjs',
   'package.json',
   'package-lock.json',
 ];

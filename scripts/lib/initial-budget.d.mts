@@ -1,0 +1,3 @@
+import type { Plugin } from 'vite';
+
+export function initialBudget(options?: { mostKb?: number }): Plugin;
