@@ -36,6 +36,17 @@ export const SCREENS: readonly Screen[] = [
   },
   { name: 'kits for the truck', as: 'first', path: () => '/planner?view=table' },
   { name: 'new work order', as: 'administrator', path: () => '/work-orders', press: /^New work order/ },
+  { name: 'choosing what to check for', as: 'first', path: () => '/check' },
+  {
+    name: 'checking a workbook first',
+    as: 'first',
+    path: ({ of }) => `/work-orders/${of.first.orderId}/check`,
+  },
+  {
+    name: 'typing a line',
+    as: 'first',
+    path: ({ of }) => `/work-orders/${of.first.orderId}/check?tab=line`,
+  },
   { name: 'batches', as: 'first', path: () => '/batches' },
   { name: 'draft batch', as: 'first', path: ({ of }) => `/batches/${of.first.draft.id}` },
   { name: 'submitting', as: 'first', path: ({ of }) => `/batches/${of.first.draft.id}`, press: /^Submit/ },
