@@ -29,7 +29,8 @@ export async function ensureClientBuild(root) {
   const { code, output } = await attempt(
     process.execPath,
     ['node_modules/vite/bin/vite.js', 'build', '--logLevel', 'warn'],
-    { cwd: root },
+    // Whoever asks (tests say NODE_ENV=test): what is served is never React's development build.
+    { cwd: root, env: { ...process.env, NODE_ENV: 'production' } },
   );
   if (code !== 0 || !existsSync(page)) throw new Error(`The client could not be built.\n${output}`);
   mkdirSync(path.dirname(stamp), { recursive: true });
