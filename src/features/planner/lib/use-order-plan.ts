@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { startTransition, useEffect, useState } from 'react';
 import type { PlannedStructure } from '#shared/generated/api-types.ts';
 import { orderPlanner, sumOrder, type OrderPlan, type OrderRow } from '#shared/planner/plan-order.ts';
 import type { PlanTexts } from '#shared/planner/plan-texts.ts';
@@ -35,7 +35,7 @@ export function useOrderPlan({ structures, texts, context, metric }: Asked): {
         if (performance.now() - begun > SLICE_MS) break;
       }
       if (rows.length < structures.length) timer = setTimeout(slice, 0);
-      else setMade({ plan: sumOrder(rows), of: texts });
+      else startTransition(() => setMade({ plan: sumOrder(rows), of: texts }));
     };
     timer = setTimeout(slice, 0);
     return () => clearTimeout(timer);
