@@ -47,7 +47,7 @@ it('asks for one more attempt', async () => {
   show(JOB);
   await userEvent.setup().click(screen.getByRole('button', { name: /^Try again/ }));
   const [address, options] = asked.mock.calls[0] ?? [];
-  expect([String(address), options?.method]).toEqual([`/api/jobs/parked/${JOB.id}/retry`, 'POST']);
+  expect([address, options?.method]).toEqual([`/api/jobs/parked/${JOB.id}/retry`, 'POST']);
 });
 
 it('offers nothing to whom may not', () => {
