@@ -7,14 +7,13 @@ import type { RelevelSection } from './relevel-section.ts';
 
 /** Section from left to right: the pad where it stands now, its slope before as a dashed line, the wedge under it. */
 export function padSectionMarks(section: RelevelSection, places: RelevelPlaces, metric: boolean): Mark[] {
-  const { left, right, padY, deepLeftY, deepRightY } = places;
+  const { left, right, padLeftY, padRightY, deepLeftY, deepRightY } = places;
   const { gapsIn } = section;
-  const width = right - left;
   const ground = Math.max(deepLeftY, deepRightY) + 44;
   return [
     text('section title', {
       x: places.compact ? 12 : Math.min(left, 138),
-      y: padY - PAD - BOX - 12,
+      y: Math.min(padLeftY, padRightY) - PAD - BOX - 12,
       runs: [{ text: 'Section, left to right', tone: 'muted' }],
     }),
     path(
@@ -22,25 +21,33 @@ export function padSectionMarks(section: RelevelSection, places: RelevelPlaces, 
       { material: 'soil' },
     ),
     path(
-      `M${at(left, padY)}L${at(right, padY)}L${at(right, gapsIn ? deepRightY : padY + 16)}L${at(left, gapsIn ? deepLeftY : padY + 16)}Z`,
+      `M${at(left, padLeftY)}L${at(right, padRightY)}L${at(right, gapsIn ? deepRightY : padRightY + 16)}L${at(left, gapsIn ? deepLeftY : padLeftY + 16)}Z`,
       gapsIn ? { fill: 'sheet', material: 'foam', stroke: 'ink', weight: 1.4 } : { fill: 'sheet', ...GHOST },
     ),
-    box(left, { y: padY - PAD, width, height: PAD, fill: 'sunk' }),
-    box(left + width * 0.12, { y: padY - PAD - BOX, width: width * 0.76, height: BOX, fill: 'sheet' }),
+    box(places, { from: 0, to: 1, above: 0, height: PAD, fill: 'sunk' }),
+    box(places, { from: 0.12, to: 0.88, above: PAD, height: BOX, fill: 'sheet' }),
     ...before(section, places),
     ...(gapsIn ? depths(gapsIn, places, metric) : []),
   ];
 }
 
+/** A part of the pad between two shares of its width, sloping with it. */
 function box(
-  x: number,
-  { y, width, height, fill }: { y: number; width: number; height: number; fill: 'sunk' | 'sheet' },
-): Mark {
-  return path(`M${at(x, y)}L${at(x + width, y)}L${at(x + width, y + height)}L${at(x, y + height)}Z`, {
+  { left, right, padLeftY, padRightY }: RelevelPlaces,
+  {
+    from,
+    to,
+    above,
+    height,
     fill,
-    stroke: 'ink',
-    weight: 1.4,
-  });
+  }: { from: number; to: number; above: number; height: number; fill: 'sunk' | 'sheet' },
+): Mark {
+  const corner = (share: number, up: number) =>
+    at(left + (right - left) * share, padLeftY + (padRightY - padLeftY) * share - up);
+  return path(
+    `M${corner(from, above)}L${corner(to, above)}L${corner(to, above + height)}L${corner(from, above + height)}Z`,
+    { fill, stroke: 'ink', weight: 1.4 },
+  );
 }
 
 /** How the top of the pad ran before, about its middle; a slope that would leave the drawing is cut at its edge. */
@@ -60,7 +67,7 @@ function before({ slopes }: RelevelSection, { left, right, padY }: RelevelPlaces
 /** Mean gap at either side, under the edge that it belongs to. */
 function depths(
   gaps: readonly number[],
-  { left, right, padY, deepLeftY, deepRightY, compact }: RelevelPlaces,
+  { left, right, padLeftY, padRightY, deepLeftY, deepRightY, compact }: RelevelPlaces,
   metric: boolean,
 ): Mark[] {
   // On a narrow sheet both stand under their edge, or beside it where they would meet.
@@ -69,7 +76,7 @@ function depths(
   const [frontLeft = 0, backLeft = 0, backRight = 0, frontRight = 0] = gaps;
   const meanLeft = (frontLeft + backLeft) / 2;
   const meanRight = (frontRight + backRight) / 2;
-  const side = (part: string, { x, deepY }: { x: number; deepY: number }): Mark[] =>
+  const side = (part: string, { x, padY, deepY }: { x: number; padY: number; deepY: number }): Mark[] =>
     deepY - padY < 2
       ? []
       : [
@@ -86,17 +93,17 @@ function depths(
             : []),
         ];
   return [
-    ...side('dimension left gap', { x: left - 11, deepY: deepLeftY }),
-    ...side('dimension right gap', { x: right + 11, deepY: deepRightY }),
+    ...side('dimension left gap', { x: left - 11, padY: padLeftY, deepY: deepLeftY }),
+    ...side('dimension right gap', { x: right + 11, padY: padRightY, deepY: deepRightY }),
     text('dimension left gap', {
       x: under ? left : left - 19,
-      y: under ? deepLeftY + 19 : (padY + deepLeftY) / 2 + 4,
+      y: under ? deepLeftY + 19 : (padLeftY + deepLeftY) / 2 + 4,
       anchor: under ? 'start' : 'end',
       runs: [{ text: dimensionText(meanLeft, 'in', metric), bold: true }],
     }),
     text('dimension right gap', {
       x: beside ? right + 19 : right,
-      y: beside ? (padY + deepRightY) / 2 + 4 : deepRightY + 19,
+      y: beside ? (padRightY + deepRightY) / 2 + 4 : deepRightY + 19,
       anchor: beside ? 'start' : 'end',
       runs: [
         { text: dimensionText(meanRight, 'in', metric), bold: true },

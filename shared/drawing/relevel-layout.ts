@@ -134,7 +134,7 @@ function pointOf(
       ? label.finding.field
       : label.id.replace('missing ', '');
   if (field === null || label.finding?.code.startsWith('photo-')) return null;
-  const { right, left, backY, frontY, padY, deepRightY } = places;
+  const { right, left, backY, frontY, padRightY, deepRightY } = places;
   if (field === 'foam' || /^(lot|kit|quantity|product|pour|component|wasted)/.test(field)) {
     return { x: right - (right - left) * 0.12, y: backY + (frontY - backY) * 0.3 };
   }
@@ -149,9 +149,10 @@ function pointOf(
     const text = cornerText(Number(corner), { gapIn: section.cornersIn[Number(corner) - 1] ?? null, metric });
     return { x: right + CORNER + textWidth(text, FONT, true) + 6, y: cornerBaseline(y, places) - 4 };
   }
-  if (/^(gap|plane)/.test(field)) return { x: right - 6, y: (padY + deepRightY) / 2 };
-  if (field === 'before' || field.startsWith('slopeBefore')) return { x: right - 14, y: padY - PAD - 4 };
+  if (/^(gap|plane)/.test(field)) return { x: right - 6, y: (padRightY + deepRightY) / 2 };
+  if (field === 'before' || field.startsWith('slopeBefore'))
+    return { x: right - 14, y: padRightY - PAD / 2 - 5 };
   if (field === 'after' || /^(slope|raised|lowered|released)/.test(field))
-    return { x: right, y: padY - PAD / 2 };
+    return { x: right, y: padRightY - PAD / 2 };
   return field.startsWith('pad') ? { x: right, y: frontY - 20 } : null;
 }

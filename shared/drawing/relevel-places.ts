@@ -9,8 +9,10 @@ export type RelevelPlaces = {
   /** Plan: back edge above, doors below. */
   readonly backY: number;
   readonly frontY: number;
-  /** Section: underside of the pad, and of the ground below its left and right edge. */
+  /** Section: underside of the pad in its middle and at its edges as it slopes now, and the ground below them. */
   readonly padY: number;
+  readonly padLeftY: number;
+  readonly padRightY: number;
   readonly deepLeftY: number;
   readonly deepRightY: number;
   /** No room for lines beside the plan: its sizes stand among the labels. */
@@ -22,6 +24,7 @@ const SIGN_IN = 48;
 /** Thickness of pad and box are not measured either: they are a sign, the wedge under them is to scale. */
 export const PAD = 18;
 export const BOX = 44;
+const MOST_RISE = 24;
 
 export function relevelPlaces(section: RelevelSection, spec: SheetSpec): RelevelPlaces {
   const lengthIn = section.lengthIn ?? SIGN_IN;
@@ -37,6 +40,10 @@ export function relevelPlaces(section: RelevelSection, spec: SheetSpec): Relevel
   const backY = spec.compact ? 76 : 100;
   const frontY = backY + lengthIn * scale;
   const padY = frontY + (spec.compact ? 66 : 78) + PAD + BOX + 26;
+  // Higher at the right is up; a slope that no pad has is cut, so that it stays on the sheet.
+  const rise = Math.max(-MOST_RISE, Math.min(MOST_RISE, ((section.slopes.afterAcross ?? 0) / 12) * 2 * half));
+  const padLeftY = padY + rise / 2;
+  const padRightY = padY - rise / 2;
   return {
     scale,
     left: axisX - half,
@@ -44,8 +51,10 @@ export function relevelPlaces(section: RelevelSection, spec: SheetSpec): Relevel
     backY,
     frontY,
     padY,
-    deepLeftY: padY + Math.max(0, meanLeft) * scale,
-    deepRightY: padY + Math.max(0, meanRight) * scale,
+    padLeftY,
+    padRightY,
+    deepLeftY: padLeftY + Math.max(0, meanLeft) * scale,
+    deepRightY: padRightY + Math.max(0, meanRight) * scale,
     compact: spec.compact,
   };
 }
