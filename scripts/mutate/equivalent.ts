@@ -76,6 +76,7 @@ export const EQUIVALENT: readonly Equivalent[] = [
   },
   { file: 'shared/calc/pole-profile.ts', code: 'to > from', to: '>=', why: NOTHING_THERE },
   { file: 'shared/calc/pole-profile.ts', code: 'i1 <= 0', to: '<', why: NOTHING_THERE },
+  { file: 'shared/calc/pole-profile.ts', code: 'i2 <= 0', to: '<', why: NOTHING_THERE },
   {
     file: 'shared/calc/pole-profile.ts',
     code: 'i1 >= 0',
