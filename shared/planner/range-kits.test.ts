@@ -25,6 +25,11 @@ it.each([
   expect(found?.surplusFt3).toBeCloseTo(surplus, 3);
 });
 
+it('rises less in the cold', () => {
+  // WK4's kits, 24.5 ft³ by name, at 50 °F: factor 0.9 between 0.80 at 40 °F and 1.00 at 60 °F.
+  expect(answer(20, { tempF: '50' })?.placedFt3).toBeCloseTo(22.05, 6);
+});
+
 /** Every count of each size up to a bound, tried one after the other: no order, no pruning. */
 function best(sizes: readonly number[], need: number): number[] {
   const sorted = [...sizes].sort((a, b) => b - a);
