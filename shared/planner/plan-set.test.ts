@@ -44,6 +44,13 @@ describe('a pole to be set', () => {
     expect(plan.voidFt3?.high).toBeCloseTo(6.7358, 4);
   });
 
+  it('takes a pole by the class table as no thinner than the table has it', () => {
+    // By hand: 1 in thicker, 11.6634 to 12.3655 in, 4.7251 ft³ of pole in 13.0900 ft³ of bore. Not thinner: high is the likely 9.1185.
+    const plan = planOne({ ...POLE, tolBoreIn: '0', tolDepthIn: '0', tolPoleIn: '1' }, CONTEXT);
+    expect(plan.voidFt3?.low).toBeCloseTo(8.3649, 4);
+    expect(plan.voidFt3?.high).toBeCloseTo(9.1185, 4);
+  });
+
   it('takes the least auger that leaves the standard’s 2 in all round', () => {
     // Butt 35.7059/π = 11.3655 in: 16 in leaves 2.317 in, 15 in 1.817 in.
     expect(planOne(PLAN_DEFAULTS, CONTEXT).boreIn).toBe(16);
