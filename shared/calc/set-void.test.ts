@@ -36,9 +36,11 @@ const spaces = records.map(spaceOf);
 const off = (actual: number, expected: number) =>
   Math.abs(actual - expected) / Math.max(1, Math.abs(expected)) / 1e-9;
 
-/** Areas in ft² written out anew from the readings, apart from the code under test. */
-function areaAt(space: SetSpace, z: number): number {
-  const part = space.bore.parts.find(({ fromFt, toFt }) => z >= fromFt && z <= toFt && toFt > fromFt);
+/** Areas in ft² written out anew from the readings, apart from the code under test: at `z`, of the stretch that `within` lies in. */
+function areaAt(space: SetSpace, z: number, within: number): number {
+  const part = space.bore.parts.find(
+    ({ fromFt, toFt }) => within >= fromFt && within <= toFt && toFt > fromFt,
+  );
   if (part === undefined) return 0;
   const share = (z - part.fromFt) / (part.toFt - part.fromFt);
   const a = part.top.a * (1 - share) + part.bottom.a * share;
@@ -46,16 +48,16 @@ function areaAt(space: SetSpace, z: number): number {
   const { pole } = space;
   const size = pole.groundLineIn + ((pole.buttIn - pole.groundLineIn) * z) / pole.embedmentFt;
   const inside = pole.openWallIn === null ? 0 : size - 2 * pole.openWallIn;
-  const poleArea = z <= pole.embedmentFt ? areaFactor(pole.section) * (size ** 2 - inside ** 2) : 0;
+  const poleArea = within <= pole.embedmentFt ? areaFactor(pole.section) * (size ** 2 - inside ** 2) : 0;
   return ((Math.PI / 4) * a * b - poleArea) / 144;
 }
 
 /** Simpson's rule between two depths without a break of the profile: exact for areas that are polynomials to the third degree. */
 function simpson(space: SetSpace, from: number, to: number): number {
-  // Just inside the ends, where a neighbouring part's area does not count.
-  const nudge = (to - from) * 1e-13;
-  const ends = areaAt(space, from + nudge) + areaAt(space, to - nudge);
-  return ((to - from) / 6) * (ends + 4 * areaAt(space, (from + to) / 2));
+  // The middle says which stretch it is: at its ends a neighbour's area does not count, however short it is.
+  const middle = (from + to) / 2;
+  const ends = areaAt(space, from, middle) + areaAt(space, to, middle);
+  return ((to - from) / 6) * (ends + 4 * areaAt(space, middle, middle));
 }
 
 describe('void of a set record', () => {
