@@ -2,6 +2,7 @@ import { rmSync } from 'node:fs';
 import { createServer, type RequestListener } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import path from 'node:path';
+import pg from 'pg';
 import type { TestProject } from 'vitest/node';
 import { newAccountKey, startAzurite } from '#scripts/lib/azurite.mjs';
 import { freePort } from '#scripts/lib/free-port.mjs';
@@ -62,7 +63,6 @@ export default async function setup(project: TestProject): Promise<() => Promise
 }
 
 async function makeTemplate(ownerUrl: string): Promise<void> {
-  const { default: pg } = await import('pg');
   const client = new pg.Client({ connectionString: ownerUrl });
   await client.connect();
   await client.query(`create database ${TEMPLATE}`);

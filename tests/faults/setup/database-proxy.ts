@@ -82,7 +82,7 @@ function pass(client: Socket, upstream: Socket, rules: Rule[]): void {
 }
 
 /** A connection that ends on one side ends on the other. */
-export function joinEnds(client: Socket, upstream: Socket): void {
+function joinEnds(client: Socket, upstream: Socket): void {
   for (const [one, other] of [
     [client, upstream],
     [upstream, client],
