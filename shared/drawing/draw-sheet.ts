@@ -71,7 +71,7 @@ export function drawSheet(sheet: SheetInput): SheetDrawing {
 }
 
 function hasInset(record: SheetRecord, purpose: SheetPurpose): boolean {
-  if (record.kind === 'straighten') return needsLeanPlan(straightenSection(record.values));
+  if (record.kind === 'straighten') return needsLeanPlan(straightenSection(record.values, record.events));
   return record.kind === 'set' && needsPlan(setSection(record, purpose));
 }
 

@@ -74,6 +74,13 @@ describe('the section of a set pole', () => {
     expect(section.foam?.liftsFt[0]).toBeCloseTo(4, 4);
   });
 
+  it('ends where the last event left it: 9 in down as found, topped up to grade', () => {
+    const found = { ...set, foamTopBelowGradeIn: 9 };
+    const events = [{ event: 2, foamTopBelowGradeIn: 0 }];
+    expect(setSection({ values: found, derived: NO_FIGURES }).foam?.topFt).toBe(0.75);
+    expect(setSection({ values: found, derived: NO_FIGURES, events }).foam?.topFt).toBe(0);
+  });
+
   it('shows no lifts where the amount of one is not known', () => {
     expect(liftShares([{ pourNumber: 1, event: 1, kitFt3: null, quantity: 1, wastedQuantity: 0 }])).toEqual(
       [],
@@ -156,6 +163,11 @@ describe('a straightened pole', () => {
     expect(slopes.after).toBeCloseTo(0.6 / 120, 10);
     // Held 0.3 further back.
     expect(slopes.held).toBeCloseTo(0.3 / 120, 10);
+  });
+
+  it('leans as the last event left it', () => {
+    const events: FieldValues[] = [{ leanInPer10Ft: 0.24, leanAzimuthDeg: 90 }, { waterIn: 0 }];
+    expect(straightenSection(values, events).slopes.after).toBeCloseTo(0.24 / 120, 10);
   });
 
   it('carries its wedge between its face and the soil, both gaps to scale', () => {

@@ -1,5 +1,6 @@
 import { bisect } from '#shared/calc/bisect.ts';
 import { boreAxesAt, boreProfile, type BoreProfile } from '#shared/calc/bore-profile.ts';
+import { lastFoamTop } from '#shared/calc/last-foam-top.ts';
 import { poleSizeAt, type PoleProfile } from '#shared/calc/pole-profile.ts';
 import { poleBelowGrade, setSpace, spaceBetween, type SetSpace } from '#shared/calc/set-space.ts';
 import { numberOf, positiveOf, textOf } from '#shared/calc/values.ts';
@@ -49,9 +50,16 @@ export type SetSection = {
 
 /** What a *set* record looks like in section, as numbers alone. What was not measured is null and named in `missing`. */
 export function setSection(
-  { values, derived, pours = [] }: Pick<SheetRecord, 'values' | 'derived' | 'pours'>,
+  {
+    values: asFound,
+    derived,
+    pours = [],
+    events = [],
+  }: Pick<SheetRecord, 'values' | 'derived' | 'pours' | 'events'>,
   purpose: SheetPurpose = 'record',
 ): SetSection {
+  // Fill sums all events, so the foam ends where the last of them left it.
+  const values = lastFoamTop(asFound, events);
   const bore = boreProfile(values);
   const pole = poleBelowGrade(values)?.pole ?? null;
   const space = setSpace(values, { foamFollowsGrade: false });

@@ -36,6 +36,8 @@ export type SheetRecord = {
   readonly derived: Derived;
   /** Without them the foam is drawn as one. */
   readonly pours?: readonly SheetPour[];
+  /** What rework and repair left, in order; `values` stay as they were found. */
+  readonly events?: readonly FieldValues[];
 };
 
 export type TitleBlockData = {

@@ -25,7 +25,7 @@ const DASHED = new Set(['gapAtGradeIn', 'gapDepthFt', 'girthGroundLineIn', 'lean
 export function straightenLayout(given: LayoutInput): StraightenLayout {
   const input = { ...given, spec: straightenSpec(given.spec) };
   const { record, spec, metric, findings, foot } = input;
-  const section = straightenSection(record.values);
+  const section = straightenSection(record.values, record.events);
   const places = straightenPlaces(section, spec);
   const down = depths(section, places, input);
   const onLine = new Set(down.map((dimension) => dimension.balloon?.finding.id));

@@ -35,7 +35,11 @@ export type StraightenSection = {
 const PER_FT = 1 / 120;
 
 /** What a *straighten* record looks like in section, as numbers alone. */
-export function straightenSection(values: FieldValues): StraightenSection {
+export function straightenSection(
+  asFound: FieldValues,
+  events: readonly FieldValues[] = [],
+): StraightenSection {
+  const values = lastLeanAfter(asFound, events);
   const wedge = wedgeOf(values, null);
   const embedmentFt = positiveOf(values, 'embedmentFt');
   const depthFt = positiveOf(values, 'gapDepthFt');
@@ -66,6 +70,17 @@ export function straightenSection(values: FieldValues): StraightenSection {
     },
     deepestFt: Math.max(embedmentFt ?? 0, depthFt === null ? 4 : depthFt + 0.6),
     missing: poleIn === null ? [...missing, 'girthGroundLineIn'] : missing,
+  };
+}
+
+/** As the last event left it, where one says; else as it was after release. */
+function lastLeanAfter(values: FieldValues, events: readonly FieldValues[]): FieldValues {
+  const last = events.findLast((event) => numberOf(event, 'leanInPer10Ft') !== null);
+  if (!last) return values;
+  return {
+    ...values,
+    leanAfterInPer10Ft: numberOf(last, 'leanInPer10Ft'),
+    leanAfterAzimuthDeg: numberOf(last, 'leanAzimuthDeg'),
   };
 }
 

@@ -892,6 +892,15 @@ export interface RecordSheetData {
     [k: string]: unknown;
   };
   pours: PourRow[];
+  /**
+   * Rework and repair, in order; as-found values stay in the record.
+   */
+  events: {
+    event: number | null;
+    values: {
+      [k: string]: unknown;
+    };
+  }[];
   findings: FindingRow[];
   photos: Photo[];
   history: HistoryEntry[];

@@ -23,9 +23,13 @@ export async function readRecordSheet(
 ): Promise<RecordSheetData> {
   const { id, actor, ability } = options;
   const record = await readRecord(em, options);
-  const kept = await row<{ raw: Record<string, unknown>; batch_id: string }>(
+  const kept = await row<{
+    raw: Record<string, unknown>;
+    events: RecordSheetData['events'];
+    batch_id: string;
+  }>(
     em,
-    'select r.raw, v.batch_id from records r join revisions v on v.id = r.revision_id where r.id = $1',
+    'select r.raw, r.events, v.batch_id from records r join revisions v on v.id = r.revision_id where r.id = $1',
     [id],
   );
   if (!kept) throw new Error(`The record ${id} is gone.`);
@@ -47,6 +51,7 @@ export async function readRecordSheet(
     record,
     cells: kept.raw,
     pours: await listPours(em, id),
+    events: kept.events.map(({ event, values }) => ({ event, values })),
     findings: findings.map((finding) => presentFinding(finding, { actor, ability })),
     photos: await photosOfLine(em, { photoIds: record.photos.map((photo) => photo.id), actor, ability }),
     history: await listHistory(em, { lineId: record.lineId, owner: actor.orgKind === 'owner' }),

@@ -64,7 +64,12 @@ function figureGroup(
 ): { figure: PageGroup; height: number } {
   const { data, limits, zone } = content;
   const drawing = drawSheet({
-    record: { ...data.record, values: data.record.values as FieldValues, pours: data.pours },
+    record: {
+      ...data.record,
+      values: data.record.values as FieldValues,
+      pours: data.pours,
+      events: data.events.map((event) => event.values as FieldValues),
+    },
     findings: sheetFindings(data.findings),
     titleBlock: titleBlockData(data.titleBlock),
     limits,

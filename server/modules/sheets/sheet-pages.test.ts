@@ -78,6 +78,7 @@ function content(findings: number): SheetContent {
       decision: { decision: 'approve', reason: null, by: 'R. Osei', at: '2026-04-16T15:40:00.000Z' },
     },
     pours: [],
+    events: [],
     findings: Array.from({ length: findings }, (_, index) => finding(index + 1)),
     photos: [
       {

@@ -9,7 +9,12 @@ import type { FieldValues } from '#shared/records/types.ts';
 export function useSheetData(data: RecordSheetData) {
   return useMemo(
     () => ({
-      record: { ...data.record, values: data.record.values as FieldValues, pours: data.pours },
+      record: {
+        ...data.record,
+        values: data.record.values as FieldValues,
+        pours: data.pours,
+        events: data.events.map((event) => event.values as FieldValues),
+      },
       findings: sheetFindings(data.findings),
       titleBlock: titleBlockData(data.titleBlock),
       stamp: lineStamp(data.record, data.findings),
