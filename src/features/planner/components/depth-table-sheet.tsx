@@ -40,7 +40,7 @@ export function DepthTableSheet({ table, head, dueFt, standard }: Props) {
             </p>
           )}
           <p className="mt-2 text-small text-ink-2">
-            Each cell: kits in ft³, the void in ft³ below them. † leaves less than{' '}
+            Each cell: kits in ft³, the void in ft³ below them. * leaves less than{' '}
             {formatNumber(leastGapIn(standard), { digits: 1 })} in round the pole: take a wider bore. × the
             pole does not go in. {dueFt === null ? '' : `Depth due as planned: ${formatNumber(dueFt)} ft.`}
           </p>
@@ -109,7 +109,7 @@ function Cell({ cell }: { readonly cell: TableCell }) {
         {cell.kits ? kitsText(cell.kits.kits) : '–'}
         {cell.fit === 'narrow' ? (
           <>
-            <span aria-hidden="true"> †</span>
+            <span aria-hidden="true"> *</span>
             <span className="sr-only"> gap too narrow</span>
           </>
         ) : null}

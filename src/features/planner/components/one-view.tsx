@@ -52,7 +52,7 @@ export function OneView({ texts, type, settle, context, products }: Props) {
   const priceOf = useCallback((kitFt3: number) => amountBySize(texts, 'price', kitFt3), [texts]);
   return (
     <PlanFormProvider value={form}>
-      <div className="grid flex-1 md:grid-cols-[20rem_minmax(0,1fr)] xl:grid-cols-[20rem_minmax(0,1fr)_27rem] print:flex print:flex-col">
+      <div className="grid flex-1 grid-cols-[minmax(0,1fr)] md:grid-cols-[20rem_minmax(0,1fr)] xl:grid-cols-[20rem_minmax(0,1fr)_27rem] print:flex print:flex-col">
         <form
           aria-label="What is planned"
           onSubmit={(event) => event.preventDefault()}
@@ -130,7 +130,7 @@ function WhatIfs({ plan, texts, context }: PartProps & { readonly texts: PlanTex
   const typed = useDeferredValue(texts);
   const reading = useMemo(() => readPlan(typed), [typed]);
   return (
-    <div className="mt-3 grid gap-x-3 border-t border-hairline lg:max-xl:grid-cols-1 2xl:grid-cols-2">
+    <div className="mt-3 grid grid-cols-[minmax(0,1fr)] gap-x-3 border-t border-hairline 2xl:grid-cols-2">
       <WaterSection plan={later} standard={context.standard} />
       <RockSection reading={reading} context={context} />
     </div>

@@ -97,7 +97,7 @@ export function OrderView({ orderId, everything, state, context, products }: Pro
   const sizes = sample[0]?.assumptions.kitsFt3 ?? [];
   return (
     <PlanFormProvider value={form}>
-      <div className="grid flex-1 md:grid-cols-[20rem_minmax(0,1fr)] print:block">
+      <div className="grid flex-1 grid-cols-[minmax(0,1fr)] md:grid-cols-[20rem_minmax(0,1fr)] print:block">
         <form
           aria-label="What is assumed"
           onSubmit={(event) => event.preventDefault()}

@@ -46,7 +46,7 @@ export function TableView({ texts, type, settle, context, products }: Props) {
   );
   return (
     <PlanFormProvider value={form}>
-      <div className="grid flex-1 md:grid-cols-[20rem_minmax(0,1fr)] print:block">
+      <div className="grid flex-1 grid-cols-[minmax(0,1fr)] md:grid-cols-[20rem_minmax(0,1fr)] print:block">
         <form
           aria-label="Pole and assumptions"
           onSubmit={(event) => event.preventDefault()}
