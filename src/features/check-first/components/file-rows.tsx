@@ -66,9 +66,10 @@ function CheckWords({ check: { state } }: { check: WorkbookCheck }) {
       return (
         <Progress
           done={state.done}
-          total={state.lines}
+          // Until the first lines come, how far it is cannot be told, and the bar makes no claim.
+          total={state.done > 0 ? state.lines : 0}
           things="lines checked"
-          label={state.rows > 0 ? `${formatCount(state.rows)} rows read` : 'The workbook is being read'}
+          label={readingWords(state)}
         />
       );
     case 'done':
@@ -76,4 +77,9 @@ function CheckWords({ check: { state } }: { check: WorkbookCheck }) {
     default:
       return <p>It ended without a result; see the workbook above.</p>;
   }
+}
+
+function readingWords({ rows, lines }: { readonly rows: number; readonly lines: number }): string {
+  if (lines > 0) return `${counted(lines, 'line')} read; the rules run over them`;
+  return rows > 0 ? `${formatCount(rows)} rows read` : 'The workbook is being read';
 }

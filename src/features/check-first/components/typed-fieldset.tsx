@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { TypedInput } from './typed-input.tsx';
-import { isBlank, type PlacedFinding } from '../lib/place-findings.ts';
+import type { PlacedFinding } from '../lib/place-findings.ts';
 import { inputId, type TypedField } from '../lib/typed-fields.ts';
 import type { TypedValues } from '#shared/workbook/typed-workbook.ts';
 
@@ -33,7 +33,7 @@ export function TypedFieldset(props: Props) {
               field={field}
               pour={pour}
               value={values[field.key] ?? ''}
-              findings={left.has(id) ? findings : findings.filter((one) => !isBlank(one))}
+              findings={left.has(id) ? findings : findings.filter((one) => !one.blank)}
               onChange={(value) => onChange(field.key, value)}
               onLeave={() => onLeave(id)}
             />

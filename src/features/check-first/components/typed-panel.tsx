@@ -7,6 +7,7 @@ import { placeFindings, type PlacedFinding } from '../lib/place-findings.ts';
 import { groupsOf, POUR_FIELDS } from '../lib/typed-fields.ts';
 import { useTypedCheck } from '../lib/use-typed-check.ts';
 import { NEW_POUR, useTypedDraft } from '../lib/use-typed-draft.ts';
+import { Cautions } from '#src/components/ui/caution.tsx';
 import { Button } from '#src/components/ui/button.tsx';
 import { KINDS, type Kind } from '#shared/records/types.ts';
 import { useUser } from '#src/lib/session/session.ts';
@@ -37,8 +38,14 @@ export function TypedPanel({ order, context }: Props) {
   const groups = useMemo(() => groupsOf(draft.kind), [draft.kind]);
   const findings = useMemo(() => {
     const fields = new Set(groups.flatMap((group) => group.fields.map(({ key }) => key)));
-    return isEmpty ? [] : placeFindings(result, fields);
-  }, [groups, result, isEmpty]);
+    return isEmpty || result === null ? [] : placeFindings(result, { draft, fields });
+  }, [groups, result, draft, isEmpty]);
+  // What is still blank is drawn as lacking; a balloon for each would hide the rest.
+  const drawn = useMemo(() => {
+    const line = result?.line ?? null;
+    const said = new Set(findings.flatMap((one) => (one.blank ? [] : [one.finding])));
+    return line && { ...line, findings: line.findings.filter((finding) => said.has(finding)) };
+  }, [result, findings]);
   const placed = useMemo(() => byInput(findings), [findings]);
   const shared = {
     placed,
@@ -137,9 +144,9 @@ export function TypedPanel({ order, context }: Props) {
       </form>
       <aside aria-label="Drawing" className="min-w-0 border-hairline lg:border-l">
         <div className="lg:sticky lg:top-band">
-          {result?.line && !isEmpty ? (
+          {drawn && !isEmpty ? (
             <div className="px-3 py-3">
-              <LineDrawing line={result.line} context={context} />
+              <LineDrawing line={drawn} context={context} />
             </div>
           ) : (
             <p className="px-gutter py-3 text-table text-muted">
@@ -147,6 +154,9 @@ export function TypedPanel({ order, context }: Props) {
             </p>
           )}
           {result && !isEmpty ? <NotRun notRun={result.notRun} /> : null}
+          <div className="px-gutter py-3">
+            <Cautions />
+          </div>
         </div>
       </aside>
     </div>

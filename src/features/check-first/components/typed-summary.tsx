@@ -1,4 +1,4 @@
-import { isBlank, type PlacedFinding } from '../lib/place-findings.ts';
+import type { PlacedFinding } from '../lib/place-findings.ts';
 import { Glyph } from '#src/components/ui/glyph.tsx';
 import { SEVERITY_WORDS } from '#src/components/ui/state-word.tsx';
 import { counted } from '#src/lib/formats.ts';
@@ -11,9 +11,9 @@ const goTo = (input: string): void => {
 
 /** All that the check says of the line, each leading to its field. */
 export function TypedSummary({ placed, checked }: { placed: readonly PlacedFinding[]; checked: boolean }) {
-  const blank = placed.filter(isBlank);
-  const said = placed.filter((one) => !isBlank(one));
-  const [first] = blank;
+  const said = placed.filter((one) => !one.blank);
+  const first = placed.find((one) => one.blank);
+  const blank = new Set(placed.flatMap((one) => (one.blank ? [one.input] : []))).size;
   return (
     <section aria-labelledby="typed-summary" className="border-b border-hairline px-gutter py-3">
       <h2 id="typed-summary" className="font-semibold" role="status">
@@ -21,7 +21,7 @@ export function TypedSummary({ placed, checked }: { placed: readonly PlacedFindi
           ? 'The check begins with the first key'
           : placed.length === 0
             ? 'Nothing found on this line'
-            : `${counted(said.length, 'finding')}${blank.length > 0 ? `, ${counted(blank.length, 'field')} still to fill in` : ''}`}
+            : `${counted(said.length, 'finding')}${blank > 0 ? `, ${counted(blank, 'field')} still to fill in` : ''}`}
       </h2>
       {said.length > 0 || first ? (
         <ul className="mt-1 grid gap-1 text-table">

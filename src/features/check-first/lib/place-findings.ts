@@ -3,9 +3,15 @@ import { HEADER_ROWS } from '#shared/workbook/layout.ts';
 import { inputId, POUR_FIELDS } from './typed-fields.ts';
 import { inOrder } from './result-view.ts';
 import type { TypedResult } from './use-typed-check.ts';
+import type { TypedDraft } from './use-typed-draft.ts';
 
 /** A finding with the input that it is about; null: the line as a whole. */
-export type PlacedFinding = { readonly finding: ShownFinding; readonly input: string | null };
+export type PlacedFinding = {
+  readonly finding: ShownFinding;
+  readonly input: string | null;
+  /** Nothing stands there yet: said beside the field once it was left, and in the summary as a number. */
+  readonly blank: boolean;
+};
 
 const ONLY_IN_POURS = new Set(POUR_FIELDS.map(({ key }) => key));
 
@@ -17,18 +23,22 @@ function inputOf({ sheet, row, field }: ShownFinding, fields: ReadonlySet<string
   return ONLY_IN_POURS.has(field) ? inputId(0, field) : null;
 }
 
-/** Findings on a typed line and its pours; the sheets that a typed line has none of are left out. */
-export function placeFindings(
-  result: TypedResult | null,
-  fields: ReadonlySet<string>,
-): readonly PlacedFinding[] {
-  if (result === null) return [];
-  const loose = result.loose.filter(({ sheet }) => sheet === 'Pours');
-  return inOrder([...(result.line?.findings ?? []), ...loose]).map((finding) => ({
-    finding,
-    input: inputOf(finding, fields),
-  }));
+function isBlankIn(draft: TypedDraft, { sheet, row, field, code }: ShownFinding): boolean {
+  if (code === 'record-missing') return true;
+  if (field === null) return false;
+  const inPour = sheet === 'Pours' && row !== null && field !== 'structureNumber';
+  const values = inPour ? draft.pours[row - HEADER_ROWS.data] : draft.values;
+  return (values?.[field] ?? '').trim() === '';
 }
 
-/** A blank field: said beside it once it was left, and in the summary as a number. */
-export const isBlank = ({ finding }: PlacedFinding): boolean => finding.code === 'record-missing';
+/** Findings on a typed line and its pours; the sheets that a typed line has none of are left out. */
+export function placeFindings(
+  result: TypedResult,
+  typed: { readonly draft: TypedDraft; readonly fields: ReadonlySet<string> },
+): readonly PlacedFinding[] {
+  const loose = result.loose.filter(({ sheet }) => sheet === 'Pours');
+  return inOrder([...(result.line?.findings ?? []), ...loose]).map((finding) => {
+    const input = inputOf(finding, typed.fields);
+    return { finding, input, blank: input !== null && isBlankIn(typed.draft, finding) };
+  });
+}
