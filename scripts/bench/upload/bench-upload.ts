@@ -3,14 +3,9 @@
  * Brings up its own database, blob store and server (web and worker in one process, as by default) on loopback. Prints the time of the whole,
  * the server's memory, its event loop's delay, and what other people's requests took during the check beside those at rest.
  */
-import { readFile } from 'node:fs/promises';
 import { setTimeout as sleep } from 'node:timers/promises';
-import {
-  type BenchSite,
-  benchSite,
-  benchWorkbookFile,
-  seedPhotographs,
-} from '#scripts/bench/lib/bench-site.ts';
+import { type BenchSite, benchSite, benchWorkbookFile } from '#scripts/bench/lib/bench-site.ts';
+import { checkBatchOverHttp } from '#scripts/bench/lib/check-batch-over-http.ts';
 import type { Client } from '#scripts/bench/lib/client.ts';
 import { memoryOf } from '#scripts/bench/lib/memory.ts';
 import { startBench } from '#scripts/bench/lib/start-bench.ts';
@@ -79,24 +74,12 @@ async function probe(client: Client, task: () => Promise<void>): Promise<number[
   return times;
 }
 
-/** A new batch with four photographs a line, its workbook, and its check until it is done. */
+/** Checks a new batch and gives its counts. */
 async function checkOne(
   client: Client,
   site: BenchSite,
   file: { workbook: string; lines: number },
 ): Promise<unknown> {
-  const { id } = await client.send<{ id: string }>('POST', `/api/work-orders/${site.order.id}/batches`);
-  await seedPhotographs(bench, { batchId: id, lines: file.lines });
-  const form = new FormData();
-  form.set('workbook', new Blob([await readFile(file.workbook)]), 'bench.xlsx');
-  await client.send('PUT', `/api/batches/${id}/workbook`, { form });
-  for (;;) {
-    const { state, problem } = await client.get<{ state: string; problem: unknown }>(
-      `/api/batches/${id}/check`,
-    );
-    if (state === 'failed') throw new Error(`The check failed: ${JSON.stringify(problem)}`);
-    if (state === 'done') break;
-    await sleep(100);
-  }
+  const id = await checkBatchOverHttp(bench, client, { orderId: site.order.id, ...file });
   return (await client.get<{ counts: unknown }>(`/api/batches/${id}`)).counts;
 }
