@@ -1,5 +1,5 @@
 import { buffer } from 'node:stream/consumers';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { textWidth } from '#shared/drawing/text-width.ts';
 import type { FindingRow, RecordSheetData } from '#shared/generated/api-types.ts';
 import { createPdf } from './create-pdf.ts';
@@ -9,6 +9,9 @@ import { readPdfForTests } from './read-pdf-for-tests.ts';
 import type { SheetContent } from './sheet-content.ts';
 import { markWriter } from './write-marks.ts';
 import { writePages } from './write-pages.ts';
+
+// Fonts are read and packed for each file: slow on a busy machine.
+vi.setConfig({ testTimeout: 60_000 });
 
 const finding = (number: number): FindingRow => ({
   id: `f${number}`,
