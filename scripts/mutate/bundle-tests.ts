@@ -31,9 +31,9 @@ export async function findMutants(files: readonly string[]) {
 
 const instrumented = (texts: ReadonlyMap<string, string>): Plugin => ({
   name: 'instrumented',
-  setup: ({ onLoad, onResolve }) => {
-    onResolve({ filter: /^#/ }, ({ path }) => ({ path: join(ROOT, path.slice(1)) }));
-    onLoad({ filter: /\/shared\/(rules|calc)\/.*\.ts$/ }, ({ path }) => {
+  setup: (build) => {
+    build.onResolve({ filter: /^#/ }, ({ path }) => ({ path: join(ROOT, path.slice(1)) }));
+    build.onLoad({ filter: /\/shared\/(rules|calc)\/.*\.ts$/ }, ({ path }) => {
       const contents = texts.get(relative(ROOT, path));
       return contents === undefined ? undefined : { contents, loader: 'ts' };
     });

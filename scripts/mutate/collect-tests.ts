@@ -16,15 +16,16 @@ const bodyOf = (rest: Rest): Body => {
 export function testCollector() {
   const tests: CollectedTest[] = [];
   const names: string[] = [];
-  const add = (name: string, body: Body, row: readonly unknown[]) =>
-    void tests.push({ name: [...names, name].join(' > '), run: () => body(...row) });
-  const group = (name: string, body: Body, row: readonly unknown[]) => {
+  const add = (name: string, body: Body, row: readonly unknown[]): void => {
+    tests.push({ name: [...names, name].join(' > '), run: () => body(...row) });
+  };
+  const group = (name: string, body: Body, row: readonly unknown[]): void => {
     names.push(name);
     body(...row);
     names.pop();
   };
   const withEach = (enter: typeof add) =>
-    Object.assign((name: string, ...rest: Rest) => void enter(name, bodyOf(rest), []), {
+    Object.assign((name: string, ...rest: Rest) => enter(name, bodyOf(rest), []), {
       each:
         (rows: readonly unknown[]) =>
         (name: string, ...rest: Rest) => {

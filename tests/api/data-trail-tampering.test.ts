@@ -62,12 +62,15 @@ it('holds as it is', async () => {
 });
 
 it.each(PLACES)('finds row %i with any one column changed, also with its hash made to fit', async (seq) => {
+  const missed: string[] = [];
   for (const [column, value] of COLUMNS) {
     const change = `update trail set ${column} = ${value} where seq = ${seq}`;
-    expect(await tampered(change), column).toContain(`${seq} changed`);
-    // A hash made again from what was never changed is the old one: nothing was done.
-    if (column !== 'hash') expect(await tampered(change, rehash(seq)), `${column}, hash too`).not.toEqual([]);
+    if (!(await tampered(change)).includes(`${seq} changed`)) missed.push(change);
+    // A hash alone that is made again is the old one: nothing was done.
+    if (column !== 'hash' && (await tampered(change, rehash(seq))).length === 0)
+      missed.push(`${change}, hash too`);
   }
+  expect(missed).toEqual([]);
 });
 
 it.each(PLACES)('finds row %i removed, also with those after it moved up', async (seq) => {

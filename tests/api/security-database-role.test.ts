@@ -71,6 +71,7 @@ describe('the application’s account', () => {
   });
 
   it('is refused each way round a guard, on every such table', async () => {
+    const allowed: string[] = [];
     for (const table of await guarded()) {
       for (const statement of [
         `alter table ${table} disable trigger append_only`,
@@ -82,9 +83,15 @@ describe('the application’s account', () => {
         `create rule nothing as on insert to ${table} do instead nothing`,
         `create trigger mine before insert on ${table} for each row execute function refuse_change()`,
         `drop table ${table} cascade`,
-      ])
-        await expect(run(data.orm.em.fork(), statement), statement).rejects.toMatchObject({ code: '42501' });
+      ]) {
+        const code = await run(data.orm.em.fork(), statement).then(
+          () => 'done',
+          (error: { code?: string }) => error.code,
+        );
+        if (code !== '42501') allowed.push(`${statement}: ${code}`);
+      }
     }
+    expect(allowed).toEqual([]);
   });
 });
 

@@ -69,7 +69,7 @@ describe('a session', () => {
     const cookie = String(signed.headers['set-cookie']?.[0]).split(';')[0] ?? '';
     const at = supertest(second.app);
     expect((await at.get('/api/session').set('Cookie', cookie)).status).toBe(200);
-    const csrf = String((signed.body as { csrfToken: string }).csrfToken);
+    const csrf = (signed.body as { csrfToken: string }).csrfToken;
     const ended = await at.delete('/api/session').set('Cookie', cookie).set('X-CSRF-Token', csrf);
     expect(ended.status).toBe(204);
     expect((await supertest(first.app).get('/api/session').set('Cookie', cookie)).status).toBe(401);
