@@ -1,9 +1,19 @@
+import { once } from 'node:events';
 import { createWriteStream } from 'node:fs';
 import type { Writable } from 'node:stream';
 import ExcelJS from 'exceljs';
 
 export type Writer = ExcelJS.stream.xlsx.WorkbookWriter;
 export type SheetWriter = ExcelJS.Worksheet;
+
+/** The streaming writer pipes each sheet into the archive and does not wait for it; its types do not show the pipe. */
+type Piped = { readonly stream?: { readonly pipes?: readonly Writable[] } };
+
+/** Waits until the archive has taken what was written of a sheet: rows that come quicker than they are packed would pile up in memory. */
+export async function drained(sheet: SheetWriter): Promise<void> {
+  for (const pipe of (sheet as unknown as Piped).stream?.pipes ?? [])
+    if (pipe.writableNeedDrain) await once(pipe, 'drain');
+}
 
 export type Validation = {
   readonly type: 'list' | 'whole';

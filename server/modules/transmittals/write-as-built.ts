@@ -2,7 +2,7 @@ import type { Writable } from 'node:stream';
 import { serialOf, DAY_FORMAT, TIME_FORMAT } from '#server/workbook/excel-time.ts';
 import { pagesAcross } from '#server/workbook/print-pages.ts';
 import { HINT, TEXT, TITLE } from '#server/workbook/template-style.ts';
-import { streamWorkbook, type SheetWriter, type Writer } from '#server/workbook/workbook-writer.ts';
+import { drained, streamWorkbook, type SheetWriter, type Writer } from '#server/workbook/workbook-writer.ts';
 import type { ExportColumn, ExportRow } from '#shared/export/as-built-columns.ts';
 import { neutral } from '#shared/export/csv.ts';
 import { columnLetters } from '#shared/workbook/xml/cell-address.ts';
@@ -10,7 +10,7 @@ import { columnWidth, fixedColumns, numberFormat, rowHeight, wraps } from './as-
 import { writeCover, type Cover } from './write-cover.ts';
 import type { ContentSheet } from './read-content.ts';
 
-/** The writer hands its rows to a compressor that cannot say "wait": after so many the event loop gets a turn. */
+/** Rows between two words on progress. */
 const BREATHE = 200;
 
 /**
@@ -39,6 +39,7 @@ export async function writeAsBuilt(
         for await (const row of sheet.rows()) {
           writeRow(written, sheet.columns, row);
           n += 1;
+          await drained(written);
           if (isKind) structures += 1;
           if (n % BREATHE === 0) await onRow(structures);
         }
