@@ -48,6 +48,8 @@ export async function startBench(): Promise<Bench> {
   const stop = async (): Promise<void> => {
     for (const each of stops.splice(0).toReversed()) await each();
   };
+  for (const signal of ['SIGINT', 'SIGTERM'] as const)
+    process.once(signal, () => void stop().finally(() => process.exit(1)));
   try {
     const folder = tempFolder('upstand-bench-');
     stops.push(() => rmSync(folder, { recursive: true, force: true }));
