@@ -53,6 +53,6 @@ describe('two hashes so near', () => {
     // Seven bits differ in the second, six in the third.
     const all = ['0000000000000000', '000000000000007f', '000000000000003f', 'ffffffffffffffff'].map(hash);
     nearHashes(all, 6).eachNear(hash('0000000000000000'), (...one) => found.push(one.join(' ')));
-    expect([...new Set(found)].toSorted()).toEqual(['0 0', '2 6']);
+    expect(new Set(found)).toEqual(new Set(['0 0', '2 6']));
   });
 });
