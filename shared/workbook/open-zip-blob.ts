@@ -5,6 +5,8 @@ import { findPacked, readZipDirectory, type ZipEntry } from './zip-directory.ts'
 
 const STORED = 0;
 const DEFLATED = 8;
+/** As large as the server's inflating hands on: what goes without an end is noticed after as many bytes here as there. */
+const PIECE = 16_384;
 
 async function* chunksOf(stream: ReadableStream<Uint8Array>): AsyncGenerator<Uint8Array> {
   const reader = stream.getReader();
@@ -12,7 +14,7 @@ async function* chunksOf(stream: ReadableStream<Uint8Array>): AsyncGenerator<Uin
     for (;;) {
       const { done, value } = await reader.read();
       if (done) return;
-      yield value;
+      for (let at = 0; at < value.length; at += PIECE) yield value.subarray(at, at + PIECE);
     }
   } finally {
     // Ended early, nothing more is inflated; a stream that failed already fails again.

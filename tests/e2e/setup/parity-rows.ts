@@ -22,11 +22,16 @@ const RECORD = ['kind', 'structureNumber', 'sheet', 'row', 'values', 'derived'] 
 
 type Given = object;
 
+/** Digits of a figure that are compared: engines differ in the last ones of a sine, and Node and Chromium are two. */
+const DIGITS = 13;
+const rounded = (_key: string, value: unknown): unknown =>
+  typeof value === 'number' ? Number(value.toPrecision(DIGITS)) : value;
+
 function picked(one: Given, keys: readonly string[]): Readonly<Record<string, unknown>> {
   const known = new Map<string, unknown>(Object.entries(one));
   // As JSON has it: what is absent and what is undefined are one.
   return JSON.parse(
-    JSON.stringify(Object.fromEntries(keys.map((key) => [key, known.get(key) ?? null]))),
+    JSON.stringify(Object.fromEntries(keys.map((key) => [key, known.get(key) ?? null])), rounded),
   ) as Readonly<Record<string, unknown>>;
 }
 
