@@ -13,13 +13,15 @@ export async function makeWorkbook(rows: BatchRows, name: string): Promise<Uploa
       done();
     },
   });
-  const { set, pours, events, photos, workOrder, contractor, foreman, notes } = rows;
+  const { set, straighten, relevel, pours, events, photos, workOrder, contractor, foreman, notes } = rows;
   await writeWorkbook(target, {
     workOrder,
     contractor,
     foreman,
     ...(notes ? { notes } : {}),
     set,
+    straighten,
+    relevel,
     pours,
     events,
     photos,

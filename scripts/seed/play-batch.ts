@@ -36,7 +36,7 @@ export async function playBatch(
     await handIn(cast.contractor, { batchId, rows, fileName: `${batch.number}-1.xlsx` });
     if (story.next.state === 'submitted') await answerAndSubmit(cast.contractor, { batchId, answers: {} });
   }
-  if (story.state === 'on-record') await record(cast.clerk, { batchId, issue: story.transmittal === true });
+  if (story.state === 'on-record') await record(cast.clerk, { batchId, title: story.transmittal ?? null });
 }
 
 async function answerAndSubmit(
@@ -90,16 +90,16 @@ function dueDay(): string {
 
 async function record(
   clerk: ApiClient,
-  { batchId, issue }: { batchId: string; issue: boolean },
+  { batchId, title }: { batchId: string; title: string | null },
 ): Promise<void> {
   const { items } = await clerk.get<{ items: RecordRow[] }>(`/api/batches/${batchId}/records?limit=200`);
   const recordIds = items.filter((record) => record.state === 'approved').map((record) => record.id);
   const { entries } = await clerk.post<RegisterEntriesReply>('/api/register/entries', { recordIds });
-  if (!issue) return;
+  if (title === null) return;
   const recordNumbers = entries.map((entry) => entry.recordNumber);
   await clerk.post<Transmittal>('/api/transmittals', {
     scope: { recordNumbers },
-    title: 'Fallow Road tie line, first five structures',
+    title,
   });
 }
 

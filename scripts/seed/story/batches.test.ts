@@ -23,7 +23,7 @@ async function findingsOf(workOrder: string, lines: readonly StoryLine[]): Promi
   writeFileSync(file, (await makeWorkbook(rows, 'story.xlsx')).bytes);
   const photos = new Map<string, PhotoFact[]>();
   for (const { fileName, subject, capture } of rows.photographs) {
-    const key = `set|${subject.structureNumber}|1`;
+    const key = `${subject.kind}|${subject.structureNumber}|1`;
     photos.set(key, [
       ...(photos.get(key) ?? []),
       {
@@ -94,6 +94,8 @@ describe('what the demo’s batches are found to be', () => {
     ],
     'decided, not yet entered': ['18-0102 hardware-early'],
     'concession asked': ['18-0106 water-deep'],
+    'repairs on record': ['17-0440 pad-slope'],
+    'three kinds under review': ['17-0433 lean-left', '17-0441 gap-plane'],
   };
 
   it.each(BATCHES.filter((batch) => batch.state !== 'draft'))('$key', async ({ key, workOrder, lines }) => {

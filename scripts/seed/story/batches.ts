@@ -1,5 +1,6 @@
 import type { StoryLine } from './build-batch-rows.ts';
 import type { Deviation } from './deviations.ts';
+import { REPAIR_BATCHES } from './repair-batches.ts';
 
 /** How far the story takes a batch. */
 export type StoryState = 'draft' | 'checked' | 'submitted' | 'in-review' | 'decided' | 'on-record';
@@ -27,8 +28,8 @@ export type StoryBatch = {
   readonly undecided?: readonly string[];
   /** What the contractor hands in after the return; submitted or left as a checked draft. */
   readonly next?: { readonly lines: readonly StoryLine[]; readonly state: 'checked' | 'submitted' };
-  /** The clerk enters what was approved, and issues it. */
-  readonly transmittal?: boolean;
+  /** The clerk enters what was approved, and issues it under this title. */
+  readonly transmittal?: string;
 };
 
 /** A crew's day: one pole after the other, fifty minutes apart. */
@@ -74,7 +75,7 @@ export const BATCHES: readonly StoryBatch[] = [
         reason: 'The photograph shows soil tamped to grade.',
       },
     },
-    transmittal: true,
+    transmittal: 'Fallow Road tie line, first five structures',
   },
   {
     key: 'returned in part',
@@ -201,4 +202,5 @@ export const BATCHES: readonly StoryBatch[] = [
     },
   },
   { key: 'just begun', workOrder: '18', state: 'draft', lines: [] },
+  ...REPAIR_BATCHES,
 ];

@@ -1,9 +1,11 @@
 import { classTableOf } from '#shared/calc/class-table.ts';
+import { deriveRelevel } from '#shared/calc/derive-relevel.ts';
 import { deriveSet } from '#shared/calc/derive-set.ts';
+import { deriveStraighten } from '#shared/calc/derive-straighten.ts';
 import { dueDepthFt } from '#shared/calc/due-depth.ts';
 import { planKits } from '#shared/calc/kit-plan.ts';
 import { tableGirthAt } from '#shared/calc/pole-sizes.ts';
-import type { FieldValues, Scalar } from '#shared/records/types.ts';
+import type { FieldValues, Kind, Scalar } from '#shared/records/types.ts';
 import { DEMO_PRODUCT, DEMO_STANDARD } from '#shared/standard/demo.ts';
 import type { Random } from '../photograph/random.ts';
 import { after } from './clock.ts';
@@ -16,7 +18,7 @@ export function soundSetValues(
   planned: PlannedStructure,
   { random, boredAt, foreman }: { random: Random; boredAt: string; foreman: string },
 ): Values {
-  const { latitude, longitude, ground, poleLengthFt, poleClass, poleMaterial } = planned.design;
+  const { ground, poleLengthFt, poleClass, poleMaterial } = planned.design;
   const pole: Values = { poleLengthFt, poleClass, poleMaterial };
   const due =
     dueDepthFt({
@@ -53,24 +55,36 @@ export function soundSetValues(
     letGoAt: after(pouredAt, random.whole(5, 8)),
     hardwareAt,
     loadAt: random.chance(0.5) ? 'not-yet' : after(pouredAt, random.whole(75, 140)),
-    latitude: sixPlaces(latitude + random.between(-1, 1) * 0.000012),
-    longitude: sixPlaces(longitude + random.between(-1, 1) * 0.000012),
-    accuracyFt: random.pick([2, 3, 3, 5]),
-    locateTicket: `LT-26-${planned.structureNumber.slice(-4)}`,
-    locateFrom: dayBefore(boredAt, 4),
-    locateTo: dayBefore(boredAt, -10),
+    ...placeValues(planned, { random, openedAt: boredAt }),
     foreman,
+  };
+}
+
+/** Where it stands, and the locate ticket that was valid when the ground was opened. */
+export function placeValues(
+  { structureNumber, design }: PlannedStructure,
+  { random, openedAt }: { random: Random; openedAt: string },
+): Values {
+  return {
+    latitude: sixPlaces(design.latitude + random.between(-1, 1) * 0.000012),
+    longitude: sixPlaces(design.longitude + random.between(-1, 1) * 0.000012),
+    accuracyFt: random.pick([2, 3, 3, 5]),
+    locateTicket: `LT-26-${structureNumber.slice(-4)}`,
+    locateFrom: dayBefore(openedAt, 4),
+    locateTo: dayBefore(openedAt, -10),
   };
 }
 
 export type PourValues = Values & { kitFt3: number; quantity: number };
 
+const DERIVE = { set: deriveSet, straighten: deriveStraighten, relevel: deriveRelevel };
+
 /** Kits that cover the void with the standard's allowance, one row a size, poured at one time. */
 export function soundPours(
   values: FieldValues,
-  { random, lot, pouredAt }: { random: Random; lot: string; pouredAt: string },
+  { kind, random, lot, pouredAt }: { kind: Kind; random: Random; lot: string; pouredAt: string },
 ): PourValues[] {
-  const { voidFt3 } = deriveSet({ values, pours: [], standard: DEMO_STANDARD, product: DEMO_PRODUCT });
+  const { voidFt3 } = DERIVE[kind]({ values, pours: [], standard: DEMO_STANDARD, product: DEMO_PRODUCT });
   const plan =
     voidFt3 === null
       ? null
