@@ -16,13 +16,15 @@ export function TypedSummary({ placed, checked }: { placed: readonly PlacedFindi
   const blank = new Set(placed.flatMap((one) => (one.blank ? [one.input] : []))).size;
   return (
     <section aria-labelledby="typed-summary" className="border-b border-hairline px-gutter py-3">
-      <h2 id="typed-summary" className="font-semibold" role="status">
-        {!checked
-          ? 'The check begins with the first key'
-          : placed.length === 0
-            ? 'Nothing found on this line'
-            : `${counted(said.length, 'finding')}${blank > 0 ? `, ${counted(blank, 'field')} still to fill in` : ''}`}
-      </h2>
+      <div role="status">
+        <h2 id="typed-summary" className="font-semibold">
+          {!checked
+            ? 'The check begins with the first key'
+            : placed.length === 0
+              ? 'Nothing found on this line'
+              : `${counted(said.length, 'finding')}${blank > 0 ? `, ${counted(blank, 'field')} still to fill in` : ''}`}
+        </h2>
+      </div>
       {said.length > 0 || first ? (
         <ul className="mt-1 grid gap-1 text-table">
           {said.map(({ finding, input }) => (
