@@ -58,6 +58,8 @@ function readable(own: OwnObjects): string[] {
     '/api/register',
     '/api/register?versions=all',
     `/api/register/${own.recordNumber}`,
+    `/api/sheets/${own.sheetFileId}`,
+    `/api/work-orders/${own.orderId}/check-context`,
     '/api/products',
     '/api/standard/versions',
   ];
