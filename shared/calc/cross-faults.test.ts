@@ -36,6 +36,17 @@ describe('kits wasted', () => {
   });
 });
 
+describe('the cable opening of a pad', () => {
+  it.each([
+    ['as large as the pad', { padLengthIn: 40, openingLengthIn: 40 }, []],
+    ['longer', { padLengthIn: 40, openingLengthIn: 40.5 }, ['openingLengthIn']],
+    ['wider', { padWidthIn: 36, openingWidthIn: 37 }, ['openingWidthIn']],
+    ['of a pad not measured', { padLengthIn: null, openingLengthIn: 12 }, []],
+  ])('%s', (_what, values, fields) => {
+    expect(fieldsOf('relevel', values)).toEqual(fields);
+  });
+});
+
 it('is total on what is no record', () => {
   for (const value of [null, undefined, 'text', 3, []]) expect(crossFaults('set', value)).toEqual([]);
 });

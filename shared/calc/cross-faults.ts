@@ -21,6 +21,14 @@ function untaped(values: FieldValues, ends: readonly (readonly string[])[]): Fie
   return ends.flatMap((fields) => (given(values, fields) ? [] : [missing(fields[0] ?? '')]));
 }
 
+/** A part that is larger than its whole. */
+function larger(values: FieldValues, { field, than }: { field: string; than: string }): FieldFault[] {
+  const part = numberOf(values, field);
+  const limit = numberOf(values, than);
+  if (part === null || limit === null || part <= limit) return [];
+  return [{ field, keyword: 'maximum', params: { comparison: '<=', limit, of: than } }];
+}
+
 const GROUND_LINE = ['girthGroundLineIn', 'diameterGroundLineIn'] as const;
 const BUTT = ['girthButtIn', 'diameterButtIn'] as const;
 
@@ -36,18 +44,13 @@ export function crossFaults(kind: string, value: unknown): FieldFault[] {
     }
     case 'straighten':
       return untaped(values, [GROUND_LINE]);
-    case 'pour': {
-      const quantity = numberOf(values, 'quantity');
-      const wasted = numberOf(values, 'wastedQuantity');
-      if (quantity === null || wasted === null || wasted <= quantity) return [];
+    case 'relevel':
       return [
-        {
-          field: 'wastedQuantity',
-          keyword: 'maximum',
-          params: { comparison: '<=', limit: quantity, of: 'quantity' },
-        },
+        ...larger(values, { field: 'openingLengthIn', than: 'padLengthIn' }),
+        ...larger(values, { field: 'openingWidthIn', than: 'padWidthIn' }),
       ];
-    }
+    case 'pour':
+      return larger(values, { field: 'wastedQuantity', than: 'quantity' });
     default:
       return [];
   }

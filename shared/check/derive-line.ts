@@ -7,6 +7,7 @@ import {
   GROUND_LINE_SIZE_FIELDS,
   POLE_FIELDS,
   SIZE_FIELDS,
+  withoutClass,
 } from '#shared/records/size-fields.ts';
 import type { Derived, FieldValues, Kind } from '#shared/records/types.ts';
 import type { LineEvent, Pour } from '#shared/rules/types.ts';
@@ -65,15 +66,17 @@ const withoutBroken = (
   { kind, values, events, broken }: Pick<Line, 'kind' | 'values' | 'events' | 'broken'>,
 ): Derived => {
   const any = (fields: readonly string[]): boolean => fields.some((field) => broken.has(field));
-  const noVoid = any(VOID[kind]) || events.some((event) => event.broken.has('foamTopBelowGradeIn'));
+  // A pole that was taped has its sizes whatever its class was written down as.
+  const anySize = (fields: readonly string[]): boolean => any(withoutClass(fields, { kind, values }));
+  const noVoid = anySize(VOID[kind]) || events.some((event) => event.broken.has('foamTopBelowGradeIn'));
   const due = ['ground', 'rockFromFt', 'poleLengthFt', ...(values['ground'] === 'soil' ? [] : BORE_FIELDS)];
   return {
     ...derived,
     ...(noVoid ? { voidFt3: null, fillRatio: null, fillRatioU: null, worstReading: null } : {}),
-    ...(kind === 'set' && any([...SPACE, 'waterIn', 'waterMeasured']) ? { waterWithPoleIn: null } : {}),
-    ...(any([...SIZE_FIELDS, 'leastGapIn']) ? { leastAnnulusIn: null } : {}),
+    ...(kind === 'set' && anySize([...SPACE, 'waterIn', 'waterMeasured']) ? { waterWithPoleIn: null } : {}),
+    ...(anySize([...SIZE_FIELDS, 'leastGapIn']) ? { leastAnnulusIn: null } : {}),
     ...(any(due) ? { dueFt: null } : {}),
-    ...(any(POLE_FIELDS) ? { poleTaped: null } : {}),
+    ...(anySize(POLE_FIELDS) ? { poleTaped: null } : {}),
   };
 };
 

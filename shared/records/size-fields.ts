@@ -1,3 +1,5 @@
+import type { FieldValues, Kind } from './types.ts';
+
 /** Fields of the bore's diameters. */
 export const BORE_FIELDS = ['boreTopIn', 'boreTopAcrossIn', 'boreBottomIn', 'boreBottomAcrossIn'] as const;
 
@@ -18,3 +20,22 @@ export const POLE_FIELDS = [
 
 /** Fields of the annulus: bore and pole. */
 export const SIZE_FIELDS = [...BORE_FIELDS, ...POLE_FIELDS] as const;
+
+const isGiven = (values: FieldValues, fields: readonly string[]): boolean =>
+  fields.some((field) => typeof values[field] === 'number');
+
+/** Whether sizes were taped where the kind's void needs them: then nothing hangs on the class table. */
+export const isTaped = (kind: Kind, values: FieldValues): boolean => {
+  const groundLine = isGiven(values, ['girthGroundLineIn', 'diameterGroundLineIn']);
+  if (kind === 'straighten') return groundLine || isGiven(values, ['gapWidthIn']);
+  return groundLine && isGiven(values, ['girthButtIn', 'diameterButtIn']);
+};
+
+/** Of these fields, those on which the sizes of this line hang. */
+export const withoutClass = (
+  fields: readonly string[],
+  { kind, values }: { readonly kind: Kind; readonly values: FieldValues },
+): readonly string[] =>
+  isTaped(kind, values)
+    ? fields.filter((field) => !(CLASS_FIELDS as readonly string[]).includes(field))
+    : fields;

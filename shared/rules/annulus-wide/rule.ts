@@ -1,5 +1,5 @@
 import { greatestAnnulusIn } from '#shared/calc/annulus.ts';
-import { SIZE_FIELDS } from '#shared/records/size-fields.ts';
+import { SIZE_FIELDS, withoutClass } from '#shared/records/size-fields.ts';
 import { say } from '#shared/findings/say.ts';
 import { aboveLimit } from '../against-limit.ts';
 import { numberOf, paramsSchema } from '../params.ts';
@@ -27,7 +27,7 @@ export const annulusWide: LineRule = {
   paramsSchema: schema,
   check: (line, params) => {
     // A blank stands for its default, an unreadable reading for nothing.
-    if (SIZE_FIELDS.some((field) => line.broken.has(field))) return [];
+    if (withoutClass(SIZE_FIELDS, line).some((field) => line.broken.has(field))) return [];
     const measured = greatestAnnulusIn(line.values);
     if (measured === null) return [];
     return aboveLimit({ measured, limit: numberOf(params, schema, 'greatestGapIn'), unit: 'in' });

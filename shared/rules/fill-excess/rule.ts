@@ -16,6 +16,13 @@ const schema = paramsSchema({
   },
 });
 
+/** What may be larger than it was written down, and where to look first. */
+const SPACE = {
+  set: { may: 'The bore may be', look: 'the bore sizes' },
+  straighten: { may: 'The gap may be', look: 'the gaps, their width and depth' },
+  relevel: { may: 'The gaps may be', look: 'the gaps, the pad and its opening' },
+} as const;
+
 export const fillExcess: LineRule = {
   code: 'fill-excess',
   title: 'Fill excessive',
@@ -49,9 +56,9 @@ export const fillExcess: LineRule = {
       params,
     });
   },
-  message: ({ measured, limit, params }) =>
+  message: ({ kind, measured, limit, params }) =>
     measured === null
       ? `${say(params['placedFt3'], 'ft3')} of foam was placed where the readings leave no void at all.`
-      : `${say(params['placedFt3'], 'ft3')} of foam was placed for a void of ${say(params['voidFt3'], 'ft3')}: fill ratio ${say(measured, 'ratio')}, over ${say(limit, 'ratio')}. The bore may be larger than written down, or foam ran off.`,
-  remedy: () => 'Check the bore sizes and the kits poured, or say where the foam went.',
+      : `${say(params['placedFt3'], 'ft3')} of foam was placed for a void of ${say(params['voidFt3'], 'ft3')}: fill ratio ${say(measured, 'ratio')}, over ${say(limit, 'ratio')}. ${SPACE[kind ?? 'set'].may} larger than written down, or foam ran off.`,
+  remedy: ({ kind }) => `Check ${SPACE[kind ?? 'set'].look} and the kits poured, or say where the foam went.`,
 };

@@ -29,6 +29,12 @@ describeRule(waterDeep, {
       expected: [{ measured: 5, limit: 2, margin: -3 }],
     },
     {
+      name: 'deeper than the bore: it cannot rise past grade, and the readings are told',
+      // 6 ft are 72 in.
+      line: { values: { waterIn: 100, boreDepthFt: 6 }, derived: { waterWithPoleIn: 72 } },
+      expected: [{ measured: 72, limit: 2, margin: -70, params: { waterIn: 100, boreIn: 72 } }],
+    },
+    {
       name: 'found by a later event',
       line: {
         values: { waterIn: 0 },
