@@ -1,9 +1,10 @@
 import { formatNumber, unitWord } from '#shared/units/format-quantity.ts';
 import { METRIC } from '#shared/units/convert.ts';
 import { at, circle, path, round, type Mark } from './marks.ts';
-import { FONT, INSET, LINE } from './sheet-spec.ts';
+import { INSET } from './sheet-spec.ts';
 import type { Point, Run } from './sheet-types.ts';
 import type { Lean, StraightenSection } from './straighten-section.ts';
+import { textLines } from './text-lines.ts';
 
 const RADIUS = 42;
 
@@ -121,13 +122,5 @@ function words({ before, after, rake }: StraightenSection, { x, y, metric, limit
           ],
         ]),
   ];
-  return lines.map((runs, index) => ({
-    is: 'text',
-    x,
-    y: y + index * LINE,
-    runs,
-    size: FONT,
-    anchor: 'start',
-    part: 'leans',
-  }));
+  return textLines(lines, { x, y, part: 'leans' });
 }

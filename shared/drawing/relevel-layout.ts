@@ -1,6 +1,7 @@
-import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
+import { formatQuantity } from '#shared/units/format-quantity.ts';
 import { aboutReading } from './anchors.ts';
 import { dimensionText } from './dimension-text.ts';
+import { factLabel, foamFact } from './fact-labels.ts';
 import { findingLabels, missingLabels } from './finding-labels.ts';
 import { placeColumn, type ColumnLabel, type PlacedText } from './label-column.ts';
 import type { LayoutInput } from './layout-input.ts';
@@ -60,21 +61,8 @@ function facts(
   const { derived } = record;
   const spoken = new Set(findings.map((finding) => finding.code));
   const out: ColumnLabel[] = [];
-  const add = (id: string, title: string, detail: string) =>
-    out.push({ id, title, detail, tone: 'ink', finding: null, optional: true });
-  if (
-    derived.placedFt3 !== null &&
-    derived.voidFt3 !== null &&
-    derived.fillRatio !== null &&
-    !spoken.has('fill-short')
-  ) {
-    const u = derived.fillRatioU === null ? '' : ` ± ${formatNumber(derived.fillRatioU, { fixed: true })}`;
-    add(
-      'foam',
-      `Foam ${dimensionText(derived.placedFt3, 'ft3', metric)} placed`,
-      `fill ratio ${formatNumber(derived.fillRatio, { fixed: true })}${u} of void ${formatQuantity(derived.voidFt3, 'ft3', { metric })}`,
-    );
-  }
+  const add = (...label: Parameters<typeof factLabel>) => out.push(factLabel(...label));
+  if (!spoken.has('fill-short')) out.push(...foamFact(derived, metric));
   if (spec.compact && section.lengthIn !== null && section.widthIn !== null)
     add(
       'pad',

@@ -3,8 +3,9 @@ import { SECTION_SIDES, type Section } from '#shared/calc/section.ts';
 import { at, circle, path, round, through, type Mark } from './marks.ts';
 import { crossText, dimensionText } from './dimension-text.ts';
 import type { SetSection } from './set-section.ts';
-import { FONT, INSET, LINE } from './sheet-spec.ts';
+import { INSET, LINE } from './sheet-spec.ts';
 import type { Point, Run } from './sheet-types.ts';
+import { textLines } from './text-lines.ts';
 
 const RADIUS = 44;
 
@@ -60,7 +61,7 @@ export function planMarks(
       ? [path(outline(inside * scale), { fill: 'sheet', stroke: 'pole', weight: 1, dash: [4, 3] })]
       : []),
     ...axes(centre),
-    ...words(
+    ...textLines(
       [
         [{ text: 'Plan at grade', tone: 'muted' }],
         [
@@ -73,7 +74,7 @@ export function planMarks(
         ],
         ...shapeWords(pole.section, inside > 0).map((text): Run[] => [{ text, tone: 'muted' }]),
       ],
-      { x: x + 2 * RADIUS + 14, y: y + INSET / 2 - 1.2 * LINE },
+      { x: x + 2 * RADIUS + 14, y: y + INSET / 2 - 1.2 * LINE, part: 'plan' },
     ),
   ];
 }
@@ -92,18 +93,6 @@ function axes({ x, y }: Point): Mark[] {
       dash: [10, 3, 2, 3],
     }),
   ];
-}
-
-function words(lines: readonly (readonly Run[])[], { x, y }: Point): Mark[] {
-  return lines.map((runs, index) => ({
-    is: 'text',
-    x,
-    y: y + index * LINE,
-    runs,
-    size: FONT,
-    anchor: 'start',
-    part: 'plan',
-  }));
 }
 
 function shapeWords(section: Section, open: boolean): string[] {

@@ -1,6 +1,7 @@
-import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
+import { formatQuantity } from '#shared/units/format-quantity.ts';
 import { aboutReading } from './anchors.ts';
 import { dimensionText } from './dimension-text.ts';
+import { factLabel, foamFact } from './fact-labels.ts';
 import { downDimension, type DownDimension } from './down-dimension.ts';
 import { findingLabels, missingLabels } from './finding-labels.ts';
 import { placeColumn, type ColumnLabel, type PlacedText } from './label-column.ts';
@@ -126,8 +127,7 @@ function facts(section: StraightenSection, { record, limits, metric, findings }:
   const spoken = new Set(findings.map((finding) => finding.field));
   const told = new Set(findings.map((finding) => finding.code));
   const out: ColumnLabel[] = [];
-  const add = (id: string, title: string, detail: string) =>
-    out.push({ id, title, detail, tone: 'ink', finding: null, optional: true });
+  const add = (...label: Parameters<typeof factLabel>) => out.push(factLabel(...label));
   const amount = (value: number) => dimensionText(value, 'in-per-10ft', metric);
   if (before && !spoken.has('leanBeforeInPer10Ft'))
     add('before', `Before ${amount(before.amount)}`, towards(before));
@@ -151,19 +151,7 @@ function facts(section: StraightenSection, { record, limits, metric, findings }:
       wedge.widthFrom === 'gapWidthIn' ? 'width as measured' : 'width of the pole at grade',
     );
   }
-  if (
-    derived.placedFt3 !== null &&
-    derived.voidFt3 !== null &&
-    derived.fillRatio !== null &&
-    !told.has('fill-short')
-  ) {
-    const u = derived.fillRatioU === null ? '' : ` ± ${formatNumber(derived.fillRatioU, { fixed: true })}`;
-    add(
-      'foam',
-      `Foam ${dimensionText(derived.placedFt3, 'ft3', metric)} placed`,
-      `fill ratio ${formatNumber(derived.fillRatio, { fixed: true })}${u} of void ${formatQuantity(derived.voidFt3, 'ft3', { metric })}`,
-    );
-  }
+  if (!told.has('fill-short')) out.push(...foamFact(derived, metric));
   if (section.waterIn !== null && !spoken.has('waterIn')) {
     const limit = limits.waterMostIn;
     add(
