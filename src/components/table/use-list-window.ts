@@ -40,3 +40,5 @@ export function useListWindow(options: {
   }, [last, count]);
   return { virtualizer, items, margin };
 }
+
+export type ListWindow = ReturnType<typeof useListWindow>;

@@ -3,6 +3,7 @@ import type { FindingActions } from './finding-item.tsx';
 import { LineItem } from './line-item.tsx';
 import type { LineView } from '../lib/line-view.ts';
 import { useListWindow } from '#src/components/table/use-list-window.ts';
+import { WindowList } from '#src/components/table/window-list.tsx';
 import { useHotkeys } from '#src/lib/use-hotkeys.ts';
 
 type Props = FindingActions & { readonly lines: readonly LineView[]; readonly decided: boolean };
@@ -11,7 +12,7 @@ type Props = FindingActions & { readonly lines: readonly LineView[]; readonly de
 export function LineList({ lines, ...rest }: Props) {
   const body = useRef<HTMLDivElement>(null);
   const [active, setActive] = useState(-1);
-  const { virtualizer, items, margin } = useListWindow({
+  const window = useListWindow({
     body,
     count: lines.length,
     rowHeight: 120,
@@ -21,40 +22,14 @@ export function LineList({ lines, ...rest }: Props) {
   function move(step: number): void {
     const next = Math.max(0, Math.min(lines.length - 1, active + step));
     setActive(next);
-    virtualizer.scrollToIndex(next);
+    window.virtualizer.scrollToIndex(next);
   }
   useHotkeys({ j: () => move(1), k: () => move(-1) });
   return (
-    <div
-      ref={body}
-      role="list"
-      aria-label="Lines"
-      className="relative"
-      style={{ height: virtualizer.getTotalSize() }}
-    >
-      {items.map((item) => {
-        const line = lines[item.index];
-        return line ? (
-          <div
-            key={item.key}
-            ref={virtualizer.measureElement}
-            data-index={item.index}
-            role="listitem"
-            aria-setsize={lines.length}
-            aria-posinset={item.index + 1}
-            aria-current={item.index === active ? 'true' : undefined}
-            className="absolute inset-x-0 top-0"
-            style={{ transform: `translateY(${item.start - margin}px)` }}
-          >
-            <LineItem
-              line={line}
-              active={item.index === active}
-              onActive={() => setActive(item.index)}
-              {...rest}
-            />
-          </div>
-        ) : null;
-      })}
-    </div>
+    <WindowList label="Lines" body={body} window={window} rows={lines} active={active}>
+      {(line, index) => (
+        <LineItem line={line} active={index === active} onActive={() => setActive(index)} {...rest} />
+      )}
+    </WindowList>
   );
 }

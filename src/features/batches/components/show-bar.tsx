@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 import type { Show } from '../lib/filter-lines.ts';
 import { isIncomplete, wantsLook, type BatchView } from '../lib/line-view.ts';
-import { classNames } from '#src/lib/class-names.ts';
+import { ChoiceBar } from '#src/components/table/choice-bar.tsx';
 import { counted, formatCount } from '#src/lib/formats.ts';
 
 type Props = {
@@ -11,7 +11,7 @@ type Props = {
   readonly children?: ReactNode;
 };
 
-/** `5 lines want a look   17 clean   all 22`: each shows its own. */
+/** Which lines are shown; those that must be completed before submitting have a choice of their own. */
 export function ShowBar({ view, show, onShow, children }: Props) {
   const want = view.lines.filter(wantsLook).length;
   const incomplete = [...view.loose, ...view.lines.flatMap((line) => line.findings)].filter(
@@ -24,28 +24,8 @@ export function ShowBar({ view, show, onShow, children }: Props) {
   ];
   if (incomplete > 0) choices.push({ value: 'incomplete', text: `${incomplete} to complete first` });
   return (
-    <div
-      role="group"
-      aria-label="Which lines"
-      className="flex flex-wrap gap-x-4 border-b border-hairline px-gutter py-1 text-table"
-    >
-      {choices.map(({ value, text }) => (
-        <button
-          key={value}
-          type="button"
-          aria-pressed={show === value}
-          onClick={() => onShow(value)}
-          className={classNames(
-            'min-h-7 border-b-2 pointer-coarse:min-h-11',
-            show === value
-              ? 'border-ink font-semibold text-ink'
-              : 'border-transparent text-muted hover:text-ink',
-          )}
-        >
-          {text}
-        </button>
-      ))}
+    <ChoiceBar label="Which lines" chosen={show} onChoose={onShow} choices={choices}>
       {children}
-    </div>
+    </ChoiceBar>
   );
 }
