@@ -1,6 +1,6 @@
+import { shownFinding } from '#shared/check/shown-finding.ts';
 import type { CheckedRecord, CheckResult, Skipped } from '#shared/check/types.ts';
 import { countFindings } from '#shared/findings/count-findings.ts';
-import { renderFinding } from '#shared/findings/render.ts';
 import type { Finding } from '#shared/findings/types.ts';
 import { say } from '#shared/findings/say.ts';
 import { lineKey } from '#shared/records/structure-key.ts';
@@ -22,6 +22,9 @@ const REASON: Readonly<Record<Skipped['reason'], string>> = {
   'own-only': 'ran on the contractor’s own structures alone',
 };
 
+const onlyIn = ({ standards }: Skipped): string =>
+  standards ? `, version ${standards.join(' and ')} only` : '';
+
 /** Breaks a text into lines that begin at a column. */
 const wrap = (text: string, indent: number): string => {
   const lines = [''];
@@ -34,7 +37,7 @@ const wrap = (text: string, indent: number): string => {
 };
 
 const findingLines = (finding: Finding): string => {
-  const { title, message, remedy } = renderFinding(finding);
+  const { title, message, remedy } = shownFinding(finding);
   const place = finding.cell === null ? (finding.sheet ?? '') : `${finding.sheet} ${finding.cell}`;
   const head = `  ${finding.severity.padEnd(15)}${place.padEnd(14)}${title}  [${finding.code}]`;
   return [
@@ -73,7 +76,7 @@ export const reportText = (result: CheckResult): string => {
     );
   });
   const batch = byLine.get('') ?? [];
-  const skipped = result.skipped.map(({ code, reason }) => `  ${code.padEnd(16)}${REASON[reason]}`);
+  const skipped = result.skipped.map((one) => `  ${one.code.padEnd(16)}${REASON[one.reason]}${onlyIn(one)}`);
   const counts = countFindings(result.findings);
   return [
     ...lines,

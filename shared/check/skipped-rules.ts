@@ -25,8 +25,12 @@ export const skippedRules = (
   rules.flatMap((rule): Skipped[] => {
     const lacking = rule.needs.find((part) => context[part] === null);
     if (lacking) return [{ code: rule.code, reason: REASON[lacking] }];
-    const off = standards.some((standard) => ruleSetting(standard.body, rule.code)?.on !== true);
-    if (off) return [{ code: rule.code, reason: 'off' }];
+    const off = standards.filter((standard) => ruleSetting(standard.body, rule.code)?.on !== true);
+    if (off.length > 0) {
+      const inPart = off.length < standards.length;
+      const numbers = off.map((standard) => standard.n).toSorted((a, b) => a - b);
+      return [{ code: rule.code, reason: 'off', ...(inPart ? { standards: numbers } : {}) }];
+    }
     const inPart = rule.needs.some((part) => context.ownOnly?.includes(part));
     return inPart ? [{ code: rule.code, reason: 'own-only' }] : [];
   });

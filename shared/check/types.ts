@@ -40,6 +40,8 @@ export type Skipped = {
     | 'no-earlier-check'
     /** It ran on the contractor's own records only. */
     | 'own-only';
+  /** Numbers of the standards that have it off, where others that were used have it on. */
+  readonly standards?: readonly number[];
 };
 
 export type CheckResult = {

@@ -1,4 +1,4 @@
-import type { Kind, Scalar } from '#shared/records/types.ts';
+import type { Kind } from '#shared/records/types.ts';
 import { sheetLayout } from '#shared/workbook/layout.ts';
 
 /** `clock` and `day` are written as real dates; `text` never as a formula. */
@@ -39,7 +39,7 @@ const TAIL: readonly ExportColumn[] = [
   column('enteredOn', 'Entered on record', 'day'),
 ];
 
-function fieldColumns(record: Kind | 'pour'): ExportColumn[] {
+function fieldColumns(record: Kind | 'pour' | 'event'): ExportColumn[] {
   return sheetLayout(record).columns.map((field) => ({
     key: field.key,
     heading: field.heading,
@@ -53,10 +53,24 @@ function fieldColumns(record: Kind | 'pour'): ExportColumn[] {
   }));
 }
 
+/** What is computed of a pole in a bore alone. */
+const NOT_OF: Readonly<Record<Kind, readonly string[]>> = {
+  set: [],
+  straighten: ['dueFt', 'leastAnnulusIn'],
+  relevel: ['dueFt', 'leastAnnulusIn', 'waterWithPoleIn'],
+};
+
 /** Columns of a kind's sheet in an issued as-built: the record as handed in, then what was computed and decided. */
-export const kindColumns = (kind: Kind): readonly ExportColumn[] => [...HEAD, ...fieldColumns(kind), ...TAIL];
+export const kindColumns = (kind: Kind): readonly ExportColumn[] => [
+  ...HEAD,
+  ...fieldColumns(kind),
+  ...TAIL.filter(({ key }) => !NOT_OF[kind].includes(key)),
+];
 
 export const POUR_COLUMNS: readonly ExportColumn[] = [HEAD[0] as ExportColumn, ...fieldColumns('pour')];
+
+/** Rework and repair: what was done after the first time, event by event. */
+export const EVENT_COLUMNS: readonly ExportColumn[] = [HEAD[0] as ExportColumn, ...fieldColumns('event')];
 
 export const FINDING_COLUMNS: readonly ExportColumn[] = [
   HEAD[0] as ExportColumn,
@@ -77,5 +91,3 @@ export const FINDING_COLUMNS: readonly ExportColumn[] = [
   column('condition', 'Condition', 'text'),
   column('endsOn', 'Ends on', 'day'),
 ];
-
-export type ExportRow = Readonly<Record<string, Scalar | undefined>>;

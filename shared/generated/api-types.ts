@@ -97,6 +97,17 @@ export interface BatchRevision {
   submittedAt: string | null;
   decidedAt: string | null;
   lines: number;
+  /**
+   * Rules that the standard of its lines has off.
+   */
+  rulesOff: {
+    code: string;
+    title: string;
+    /**
+     * Versions that have it off, where another that lines were checked on has it on; null: all.
+     */
+    standards: number[] | null;
+  }[];
 }
 /**
  * A contractor's batch with its newest revision.

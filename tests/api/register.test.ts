@@ -191,7 +191,15 @@ describe('a transmittal', () => {
     const bytes = file.body as Buffer;
     expect(createHash('sha256').update(bytes).digest('hex')).toBe(issued.sha256);
     const book = read(bytes);
-    expect(book.SheetNames).toEqual(['Cover', 'Set', 'Straighten', 'Re-level', 'Pours', 'Findings']);
+    expect(book.SheetNames).toEqual([
+      'Cover',
+      'Set',
+      'Straighten',
+      'Re-level',
+      'Pours',
+      'Events',
+      'Findings',
+    ]);
     const set = rowsOf(book.Sheets['Set']);
     expect(
       set.map((row) => [

@@ -3,6 +3,7 @@ import { rows } from '#server/db/rows.ts';
 import { FINDING_FACTS, toFinding, type FindingFacts } from '#server/modules/records/finding-facts.ts';
 import { renderFinding } from '#shared/findings/render.ts';
 import {
+  EVENT_COLUMNS,
   FINDING_COLUMNS,
   kindColumns,
   POUR_COLUMNS,
@@ -51,6 +52,11 @@ export function readContent(em: EntityManager, transmittalId: string): readonly 
       name: 'Pours',
       columns: POUR_COLUMNS,
       rows: () => inChunks<PourRow, ExportRow>(em, { sql: POURS, values: [transmittalId], map: pourRow }),
+    },
+    {
+      name: 'Events',
+      columns: EVENT_COLUMNS,
+      rows: () => inChunks<EventRow, ExportRow>(em, { sql: EVENTS, values: [transmittalId], map: eventRow }),
     },
     {
       name: 'Findings',
@@ -134,32 +140,49 @@ function recordRow(row: RecordRow): ExportRow {
   };
 }
 
-type PourRow = { ordinal: number; record_number: string; structure_number: string; kind: string } & Record<
-  string,
-  string | number | null
->;
+type OfStructure = { ordinal: number; record_number: string; structure_number: string; kind: Kind };
+type PourRow = OfStructure & { written: FieldValues | null } & Record<string, unknown>;
 
 const POURS = `
 select i.ordinal, v.record_number, v.structure_number, v.kind, p.pour_number, p.event, p.poured_wall, p.product_code, p.lot_text,
-  p.kit_ft3, p.quantity, p.wasted_quantity, p.component_a_temp_f, p.component_b_temp_f
+  p.kit_ft3, p.quantity, p.wasted_quantity, p.component_a_temp_f, p.component_b_temp_f, p.raw->'values' as written
 ${ITEMS.replace('where', 'join pours p on p.record_id = r.id where')} and i.ordinal > $2 and i.ordinal <= $3
 order by i.ordinal, p.n`;
 
 function pourRow(row: PourRow): ExportRow {
   return {
+    ...row.written,
     recordNumber: row.record_number,
     structureNumber: row.structure_number,
     kind: row.kind,
-    pourNumber: row['pour_number'],
-    event: row['event'],
-    pouredAt: row['poured_wall'],
-    product: row['product_code'],
-    lot: row['lot_text'],
-    kitFt3: row['kit_ft3'],
-    quantity: row['quantity'],
-    wastedQuantity: row['wasted_quantity'],
-    componentATempF: row['component_a_temp_f'],
-    componentBTempF: row['component_b_temp_f'],
+    pourNumber: row['pour_number'] as number | null,
+    event: row['event'] as number,
+    pouredAt: row['poured_wall'] as string | null,
+    product: row['product_code'] as string | null,
+    lot: row['lot_text'] as string | null,
+    kitFt3: row['kit_ft3'] as number | null,
+    quantity: row['quantity'] as number | null,
+    wastedQuantity: row['wasted_quantity'] as number | null,
+    componentATempF: row['component_a_temp_f'] as number | null,
+    componentBTempF: row['component_b_temp_f'] as number | null,
+  };
+}
+
+type EventRow = OfStructure & { event: number | null; written: FieldValues };
+
+const EVENTS = `
+select i.ordinal, v.record_number, v.structure_number, v.kind, e.value->'event' as event, e.value->'values' as written
+${ITEMS.replace('where', 'cross join lateral jsonb_array_elements(r.events) with ordinality e(value, n) where')}
+  and i.ordinal > $2 and i.ordinal <= $3
+order by i.ordinal, e.n`;
+
+function eventRow(row: EventRow): ExportRow {
+  return {
+    ...row.written,
+    recordNumber: row.record_number,
+    structureNumber: row.structure_number,
+    kind: row.kind,
+    event: row.event,
   };
 }
 

@@ -7,7 +7,7 @@ export function expectAsBuiltCells(
   entered: { structures: readonly string[]; lot: string },
 ): void {
   const book = read(bytes);
-  expect(book.SheetNames).toEqual(['Cover', 'Set', 'Straighten', 'Re-level', 'Pours', 'Findings']);
+  expect(book.SheetNames).toEqual(['Cover', 'Set', 'Straighten', 'Re-level', 'Pours', 'Events', 'Findings']);
   const set = dataOf(book.Sheets['Set']);
   // Worked record WR-01 gives the void of 8.6701 ft³; 9.5 ft³ were placed.
   expect(set.map((row) => [row['structureNumber'], row['embedmentFt'], row['conforms']])).toEqual([

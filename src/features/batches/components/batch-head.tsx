@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { batchRevisionsQuery } from '../api/batch-revisions.ts';
+import { batchRevisionsQuery } from '#src/lib/api/batch-revisions.ts';
 import { SheetsMenu } from './sheets-menu.tsx';
 import { Fact, PageBand } from '#src/components/ui/page-band.tsx';
 import { STATUS_WORDS, StateWord } from '#src/components/ui/state-word.tsx';

@@ -17,6 +17,7 @@ import { WithdrawDialog } from './withdraw-dialog.tsx';
 import { LINE_FILTERS } from '../lib/filter-lines.ts';
 import { joinFindings } from '../lib/line-view.ts';
 import { whyNotSubmit } from '../lib/why-not-submit.ts';
+import { RulesOff } from '#src/components/evidence/rules-off.tsx';
 import { DocumentTitle } from '#src/components/ui/document-title.tsx';
 import { useFilters } from '#src/lib/filters/use-filters.ts';
 import { useUser } from '#src/lib/session/session.ts';
@@ -94,6 +95,7 @@ export function BatchPage({ batch }: { batch: Batch }) {
               onNewest={() => go({ revision: null, tab: null, show: null })}
             />
           )}
+          <RulesOff batchId={batch.id} revision={n} />
         </aside>
         <div className="flex min-h-[50dvh] min-w-0 flex-col border-hairline lg:border-l">
           <BatchTabs

@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { batchRevisionsQuery } from '../api/batch-revisions.ts';
+import { batchRevisionsQuery } from '#src/lib/api/batch-revisions.ts';
 import { IntakeRow } from './intake-row.tsx';
 import { Button } from '#src/components/ui/button.tsx';
 import { Moment } from '#src/components/ui/moment.tsx';

@@ -19,10 +19,11 @@ export type NotRunGroup = { readonly reason: string; readonly titles: readonly s
 /** Rules that did not run, by the reason. */
 export function groupNotRun(notRun: readonly NotRun[]): readonly NotRunGroup[] {
   const groups = new Map<string, string[]>();
-  for (const { reason, title } of notRun) {
+  for (const { reason, title, standards } of notRun) {
+    const named = standards ? `${title} (version ${standards.join(' and ')} only)` : title;
     const titles = groups.get(WORDS[reason]);
-    if (titles) titles.push(title);
-    else groups.set(WORDS[reason], [title]);
+    if (titles) titles.push(named);
+    else groups.set(WORDS[reason], [named]);
   }
   return [...groups].map(([reason, titles]) => ({ reason, titles }));
 }
