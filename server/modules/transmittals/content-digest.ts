@@ -1,4 +1,5 @@
 import { createHash } from 'node:crypto';
+import { exportValue } from '#shared/export/export-row.ts';
 import type { ContentSheet } from './read-content.ts';
 
 export type ContentSummary = {
@@ -15,10 +16,13 @@ export async function contentDigest(sheets: readonly ContentSheet[]): Promise<Co
   for (const sheet of sheets) {
     hash.update(`${JSON.stringify([sheet.name, ...sheet.columns.map((column) => column.key)])}\n`);
     let n = 0;
-    for await (const row of sheet.rows()) {
-      hash.update(`${JSON.stringify(sheet.columns.map((column) => row[column.key] ?? null))}\n`);
-      n += 1;
-    }
+    for await (const rows of sheet.chunks())
+      for (const row of rows) {
+        hash.update(
+          `${JSON.stringify(sheet.columns.map((column) => exportValue(row, column.key) ?? null))}\n`,
+        );
+        n += 1;
+      }
     counts.set(sheet.name, n);
   }
   return { digest: hash.digest('hex'), counts };

@@ -8,17 +8,17 @@ import {
   kindColumns,
   POUR_COLUMNS,
   type ExportColumn,
-  type ExportRow,
 } from '#shared/export/as-built-columns.ts';
+import type { ExportRow } from '#shared/export/export-row.ts';
 import { KINDS, SHEET_OF_KIND, type Derived, type FieldValues, type Kind } from '#shared/records/types.ts';
 
 /** Rows fetched at a time: memory does not grow with the scope. */
-const CHUNK = 500;
+const CHUNK = 50;
 
 export type ContentSheet = {
   readonly name: string;
   readonly columns: readonly ExportColumn[];
-  readonly rows: () => AsyncGenerator<ExportRow>;
+  readonly chunks: () => AsyncGenerator<readonly ExportRow[]>;
 };
 
 type RecordRow = {
@@ -43,7 +43,7 @@ export function readContent(em: EntityManager, transmittalId: string): readonly 
   const kindSheet = (kind: Kind): ContentSheet => ({
     name: SHEET_OF_KIND[kind],
     columns: kindColumns(kind),
-    rows: () =>
+    chunks: () =>
       inChunks<RecordRow, ExportRow>(em, { sql: RECORDS, values: [transmittalId, kind], map: recordRow }),
   });
   return [
@@ -51,17 +51,18 @@ export function readContent(em: EntityManager, transmittalId: string): readonly 
     {
       name: 'Pours',
       columns: POUR_COLUMNS,
-      rows: () => inChunks<PourRow, ExportRow>(em, { sql: POURS, values: [transmittalId], map: pourRow }),
+      chunks: () => inChunks<PourRow, ExportRow>(em, { sql: POURS, values: [transmittalId], map: pourRow }),
     },
     {
       name: 'Events',
       columns: EVENT_COLUMNS,
-      rows: () => inChunks<EventRow, ExportRow>(em, { sql: EVENTS, values: [transmittalId], map: eventRow }),
+      chunks: () =>
+        inChunks<EventRow, ExportRow>(em, { sql: EVENTS, values: [transmittalId], map: eventRow }),
     },
     {
       name: 'Findings',
       columns: FINDING_COLUMNS,
-      rows: () =>
+      chunks: () =>
         inChunks<FindingRow, ExportRow>(em, { sql: FINDINGS, values: [transmittalId], map: findingRow }),
     },
   ];
@@ -71,11 +72,11 @@ export function readContent(em: EntityManager, transmittalId: string): readonly 
 async function* inChunks<Row extends { ordinal: number }, Out>(
   em: EntityManager,
   query: { sql: string; values: readonly unknown[]; map: (row: Row) => Out },
-): AsyncGenerator<Out> {
+): AsyncGenerator<readonly Out[]> {
   let last = 0;
   for (;;) {
     const found = await rows<Row>(em, query.sql, [...query.values, last, last + CHUNK]);
-    for (const item of found) yield query.map(item);
+    yield found.map(query.map);
     last += CHUNK;
     if (found.length === 0 && !(await anyBeyond(em, String(query.values[0]), last))) return;
   }
@@ -118,25 +119,27 @@ order by i.ordinal`;
 
 function recordRow(row: RecordRow): ExportRow {
   return {
-    ...row.values,
-    recordNumber: row.record_number,
-    version: row.n,
-    voidFt3: row.derived.voidFt3,
-    placedFt3: row.derived.placedFt3,
-    fillRatio: row.derived.fillRatio,
-    fillRatioU: row.derived.fillRatioU,
-    dueFt: row.derived.dueFt,
-    waterWithPoleIn: row.derived.waterWithPoleIn,
-    leastAnnulusIn: row.derived.leastAnnulusIn,
-    conforms: row.nonconforming ? 'no' : 'yes',
-    concessions: row.concessions.join('; '),
-    standard: row.standard,
-    contractor: row.contractor,
-    workOrder: row.work_order,
-    batch: row.batch,
-    revision: row.revision,
-    photographs: row.photographs,
-    enteredOn: row.entered_on,
+    written: row.values,
+    known: {
+      recordNumber: row.record_number,
+      version: row.n,
+      voidFt3: row.derived.voidFt3,
+      placedFt3: row.derived.placedFt3,
+      fillRatio: row.derived.fillRatio,
+      fillRatioU: row.derived.fillRatioU,
+      dueFt: row.derived.dueFt,
+      waterWithPoleIn: row.derived.waterWithPoleIn,
+      leastAnnulusIn: row.derived.leastAnnulusIn,
+      conforms: row.nonconforming ? 'no' : 'yes',
+      concessions: row.concessions.join('; '),
+      standard: row.standard,
+      contractor: row.contractor,
+      workOrder: row.work_order,
+      batch: row.batch,
+      revision: row.revision,
+      photographs: row.photographs,
+      enteredOn: row.entered_on,
+    },
   };
 }
 
@@ -151,20 +154,22 @@ order by i.ordinal, p.n`;
 
 function pourRow(row: PourRow): ExportRow {
   return {
-    ...row.written,
-    recordNumber: row.record_number,
-    structureNumber: row.structure_number,
-    kind: row.kind,
-    pourNumber: row['pour_number'] as number | null,
-    event: row['event'] as number,
-    pouredAt: row['poured_wall'] as string | null,
-    product: row['product_code'] as string | null,
-    lot: row['lot_text'] as string | null,
-    kitFt3: row['kit_ft3'] as number | null,
-    quantity: row['quantity'] as number | null,
-    wastedQuantity: row['wasted_quantity'] as number | null,
-    componentATempF: row['component_a_temp_f'] as number | null,
-    componentBTempF: row['component_b_temp_f'] as number | null,
+    written: row.written,
+    known: {
+      recordNumber: row.record_number,
+      structureNumber: row.structure_number,
+      kind: row.kind,
+      pourNumber: row['pour_number'] as number | null,
+      event: row['event'] as number,
+      pouredAt: row['poured_wall'] as string | null,
+      product: row['product_code'] as string | null,
+      lot: row['lot_text'] as string | null,
+      kitFt3: row['kit_ft3'] as number | null,
+      quantity: row['quantity'] as number | null,
+      wastedQuantity: row['wasted_quantity'] as number | null,
+      componentATempF: row['component_a_temp_f'] as number | null,
+      componentBTempF: row['component_b_temp_f'] as number | null,
+    },
   };
 }
 
@@ -178,11 +183,13 @@ order by i.ordinal, e.n`;
 
 function eventRow(row: EventRow): ExportRow {
   return {
-    ...row.written,
-    recordNumber: row.record_number,
-    structureNumber: row.structure_number,
-    kind: row.kind,
-    event: row.event,
+    written: row.written,
+    known: {
+      recordNumber: row.record_number,
+      structureNumber: row.structure_number,
+      kind: row.kind,
+      event: row.event,
+    },
   };
 }
 
@@ -220,22 +227,24 @@ function findingRow(row: FindingRow): ExportRow {
   // What concerns another contractor stays out of a document that goes to many.
   const { title, message } = renderFinding(toFinding(row, false));
   return {
-    recordNumber: row.record_number,
-    structureNumber: row.structure_number,
-    code: row.code,
-    title,
-    severity: row.severity,
-    measured: row.measured,
-    limit: row.limit_value,
-    margin: row.margin,
-    unit: row.unit,
-    sentence: message,
-    decision: row.severity === 'note' ? '' : row.state,
-    grounds: row.grounds,
-    reason: row.reason,
-    decidedBy: row.decided_by,
-    concession: row.concession,
-    condition: row.condition,
-    endsOn: row.ends_on,
+    known: {
+      recordNumber: row.record_number,
+      structureNumber: row.structure_number,
+      code: row.code,
+      title,
+      severity: row.severity,
+      measured: row.measured,
+      limit: row.limit_value,
+      margin: row.margin,
+      unit: row.unit,
+      sentence: message,
+      decision: row.severity === 'note' ? '' : row.state,
+      grounds: row.grounds,
+      reason: row.reason,
+      decidedBy: row.decided_by,
+      concession: row.concession,
+      condition: row.condition,
+      endsOn: row.ends_on,
+    },
   };
 }

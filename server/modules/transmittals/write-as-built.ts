@@ -3,7 +3,8 @@ import { serialOf, DAY_FORMAT, TIME_FORMAT } from '#server/workbook/excel-time.t
 import { pagesAcross } from '#server/workbook/print-pages.ts';
 import { HINT, TEXT, TITLE } from '#server/workbook/template-style.ts';
 import { drained, streamWorkbook, type SheetWriter, type Writer } from '#server/workbook/workbook-writer.ts';
-import type { ExportColumn, ExportRow } from '#shared/export/as-built-columns.ts';
+import type { ExportColumn } from '#shared/export/as-built-columns.ts';
+import { exportValue, type ExportRow, type ExportValue } from '#shared/export/export-row.ts';
 import { neutral } from '#shared/export/csv.ts';
 import { columnLetters } from '#shared/workbook/xml/cell-address.ts';
 import { columnWidth, fixedColumns, numberFormat, rowHeight, wraps } from './as-built-layout.ts';
@@ -36,13 +37,14 @@ export async function writeAsBuilt(
         const isKind = sheet.columns.some((column) => column.key === 'conforms');
         const written = openSheet(writer, sheet, cover);
         let n = 0;
-        for await (const row of sheet.rows()) {
-          writeRow(written, sheet.columns, row);
-          n += 1;
-          await drained(written);
-          if (isKind) structures += 1;
-          if (n % BREATHE === 0) await onRow(structures);
-        }
+        for await (const rows of sheet.chunks())
+          for (const row of rows) {
+            writeRow(written, sheet.columns, row);
+            n += 1;
+            await drained(written);
+            if (isKind) structures += 1;
+            if (n % BREATHE === 0) await onRow(structures);
+          }
         written.commit();
       }
       await onRow(structures);
@@ -95,11 +97,12 @@ function addStyled(sheet: SheetWriter, cells: readonly string[], style: object, 
   row.commit();
 }
 
-function writeRow(sheet: SheetWriter, columns: readonly ExportColumn[], values: ExportRow): void {
-  const row = sheet.addRow(columns.map((column) => cellOf(column, values[column.key])));
+function writeRow(sheet: SheetWriter, columns: readonly ExportColumn[], content: ExportRow): void {
+  const values = columns.map((column) => exportValue(content, column.key));
+  const row = sheet.addRow(columns.map((column, index) => cellOf(column, values[index])));
   const wrapped: { text: string; width: number }[] = [];
   columns.forEach((column, index) => {
-    const value = values[column.key];
+    const value = values[index];
     const cell = row.getCell(index + 1);
     cell.alignment = { vertical: 'top', ...(wraps(column) ? TEXT.alignment : {}) };
     if (column.type === 'clock') cell.numFmt = TIME_FORMAT;
@@ -114,7 +117,7 @@ function writeRow(sheet: SheetWriter, columns: readonly ExportColumn[], values: 
 }
 
 /** Real dates as serials, numbers as numbers; text never as a formula. */
-function cellOf(column: ExportColumn, value: ExportRow[string]): string | number | boolean | null {
+function cellOf(column: ExportColumn, value: ExportValue): string | number | boolean | null {
   if (value === null || value === undefined) return null;
   if (typeof value !== 'string') return value;
   if (column.type === 'clock' || column.type === 'day')
