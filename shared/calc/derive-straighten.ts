@@ -1,7 +1,7 @@
-import type { DeriveInput } from './derive-set.ts';
+import type { DeriveInput, ReadInput, SpaceRead } from './derive-set.ts';
 import { dueColumns } from './due-depth.ts';
 import { fillOf } from './fill.ts';
-import type { ReadingGroup } from './fill-uncertainty.ts';
+import type { SourcedGroup } from './fill-uncertainty.ts';
 import { GROUND_LINE_FIELDS } from './pole-sizes.ts';
 import { wedgeOf, wedgeVoid, type Wedge } from './straighten-void.ts';
 import { numberOf, positiveOf } from './values.ts';
@@ -9,7 +9,7 @@ import type { Derived, FieldValues } from '#shared/records/types.ts';
 import type { Standard } from '#shared/standard/types.ts';
 
 /** Gaps move together, if measured: a blank gap is exact. Width by the pole's uncertainty, foamed depth by that of depths. */
-function readings(values: FieldValues, wedge: Wedge, { uncertainty }: Standard): ReadingGroup[] {
+function readings(values: FieldValues, wedge: Wedge, { uncertainty }: Standard): SourcedGroup[] {
   const shiftBy = (change: Partial<Record<'grade' | 'depth' | 'width' | 'height', number>>) =>
     wedgeVoid({
       gapAtGradeIn: wedge.gapAtGradeIn + (change.grade ?? 0),
@@ -24,6 +24,7 @@ function readings(values: FieldValues, wedge: Wedge, { uncertainty }: Standard):
   const byHeight = (by: number) => shiftBy({ height: by });
   return [
     {
+      source: 'gap',
       u: uncertainty.gapIn,
       shifted: (by) => shiftBy({ grade: by, depth: by * atDepth }),
       readings: [
@@ -32,11 +33,13 @@ function readings(values: FieldValues, wedge: Wedge, { uncertainty }: Standard):
       ],
     },
     {
+      source: 'width',
       u: wedge.widthFrom === 'table' ? uncertainty.poleTableIn : uncertainty.poleTapedIn,
       shifted: byWidth,
       readings: [{ field: width, shifted: byWidth }],
     },
     {
+      source: 'depth',
       u: uncertainty.depthIn,
       shifted: byHeight,
       readings: [{ field: 'gapDepthFt', shifted: byHeight }],
@@ -44,16 +47,25 @@ function readings(values: FieldValues, wedge: Wedge, { uncertainty }: Standard):
   ];
 }
 
+function wedgeFor({ values, standard }: ReadInput): Wedge | null {
+  const lengthFt = positiveOf(values, 'poleLengthFt');
+  const usualFt = lengthFt === null ? null : dueColumns(standard.dueDepth, lengthFt).soilFt;
+  return wedgeOf(values, usualFt);
+}
+
+/** The void of a *straighten* record with the readings that it hangs on. */
+export function straightenSpaceRead(input: ReadInput): SpaceRead {
+  const wedge = wedgeFor(input);
+  if (wedge === null) return { voidFt3: null, groups: [] };
+  return { voidFt3: wedgeVoid(wedge), groups: readings(input.values, wedge, input.standard) };
+}
+
 /** Derived figures of a *straighten* record; water is always measured with the pole in. Total: a figure whose values are missing is null. */
 export function deriveStraighten(input: DeriveInput): Derived {
   const { values, pours, standard, product } = input;
-  const lengthFt = positiveOf(values, 'poleLengthFt');
-  const usualFt = lengthFt === null ? null : dueColumns(standard.dueDepth, lengthFt).soilFt;
-  const wedge = wedgeOf(values, usualFt);
-  const voidFt3 = wedge === null ? null : wedgeVoid(wedge);
-  const groups = wedge === null ? [] : readings(values, wedge, standard);
+  const wedge = wedgeFor(input);
   return {
-    ...fillOf({ voidFt3, groups, pours, product, standard }),
+    ...fillOf({ ...straightenSpaceRead(input), pours, product, standard }),
     dueFt: null,
     waterWithPoleIn: numberOf(values, 'waterIn'),
     leastAnnulusIn: null,

@@ -7,6 +7,10 @@ export type ReadingGroup = {
   readonly readings: readonly { readonly field: string; readonly shifted: (by: number) => number | null }[];
 };
 
+/** What the readings of a group are of. */
+export type ReadingSource = 'bore' | 'pole' | 'depth' | 'gap' | 'width';
+export type SourcedGroup = ReadingGroup & { readonly source: ReadingSource };
+
 export type FillUncertainty = {
   /** Expanded uncertainty of the fill ratio, k = 2. */
   readonly expanded: number;
@@ -23,9 +27,10 @@ function slope(shifted: (by: number) => number | null): number {
   return up === null || down === null ? 0 : (up - down) / (2 * STEP);
 }
 
-type Contribution = { readonly group: ReadingGroup; readonly uV: number };
+type Contribution<G extends ReadingGroup = ReadingGroup> = { readonly group: G; readonly uV: number };
 
-function contributions(groups: readonly ReadingGroup[]): readonly Contribution[] {
+/** u_V of each group alone, ft³. */
+export function contributions<G extends ReadingGroup>(groups: readonly G[]): readonly Contribution<G>[] {
   return groups.map((group) => ({ group, uV: Math.abs(slope(group.shifted)) * group.u }));
 }
 

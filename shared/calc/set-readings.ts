@@ -1,4 +1,4 @@
-import type { ReadingGroup } from './fill-uncertainty.ts';
+import type { ReadingSource, SourcedGroup } from './fill-uncertainty.ts';
 import { BUTT_FIELDS, GROUND_LINE_FIELDS, type PoleSize } from './pole-sizes.ts';
 import { setSpace, setVoid, type SetSpace } from './set-space.ts';
 import { numberOf } from './values.ts';
@@ -24,7 +24,7 @@ function fieldOf(size: PoleSize, [girth, diameter]: readonly [string, string]): 
 }
 
 /** The readings of a *set* void by tape: bore diameters, pole sizes, depths. */
-export function setReadings(values: FieldValues, space: SetSpace, standard: Standard): ReadingGroup[] {
+export function setReadings(values: FieldValues, space: SetSpace, standard: Standard): SourcedGroup[] {
   const { uncertainty } = standard;
   const options = { foamFollowsGrade: standard.foamFollowsGrade };
   // One copy for all shifts of a line, put back after each: copying it for each took longer than the computation.
@@ -39,7 +39,11 @@ export function setReadings(values: FieldValues, space: SetSpace, standard: Stan
     for (const field of fields) if (Object.hasOwn(values, field)) copy[field] = values[field] ?? null;
     return space === null ? null : setVoid(space);
   };
-  const group = (u: number, fields: readonly string[], unit: number): ReadingGroup => ({
+  const group = (
+    source: ReadingSource,
+    { u, fields, unit }: { u: number; fields: readonly string[]; unit: number },
+  ): SourcedGroup => ({
+    source,
     u,
     shifted: (by) => movedVoid(fields, by * unit),
     readings: fields.map((field) => ({
@@ -55,7 +59,8 @@ export function setReadings(values: FieldValues, space: SetSpace, standard: Stan
     { field: groundLine, groundLine: 1, butt: butt === null ? 1 : 0 },
     { field: butt, groundLine: groundLine === null ? 1 : 0, butt: 1 },
   ];
-  const pole: ReadingGroup = {
+  const pole: SourcedGroup = {
+    source: 'pole',
     u: space.sizes.taped ? uncertainty.poleTapedIn : uncertainty.poleTableIn,
     shifted: (by) => setVoid(withPole(space, by, by)),
     readings: ends.flatMap(({ field, groundLine, butt }) =>
@@ -64,5 +69,9 @@ export function setReadings(values: FieldValues, space: SetSpace, standard: Stan
         : [{ field, shifted: (by: number) => setVoid(withPole(space, by * groundLine, by * butt)) }],
     ),
   };
-  return [group(uncertainty.boreIn, BORE_FIELDS, 1), pole, group(uncertainty.depthIn, DEPTH_FIELDS, 1 / 12)];
+  return [
+    group('bore', { u: uncertainty.boreIn, fields: BORE_FIELDS, unit: 1 }),
+    pole,
+    group('depth', { u: uncertainty.depthIn, fields: DEPTH_FIELDS, unit: 1 / 12 }),
+  ];
 }

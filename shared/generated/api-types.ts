@@ -912,6 +912,45 @@ export interface RecordSheetData {
       [k: string]: unknown;
     };
   }[];
+  /**
+   * What the uncertainty of the fill ratio comes from, the greatest part first.
+   */
+  uncertainty: {
+    source: 'bore' | 'pole' | 'depth' | 'gap' | 'width' | 'yield';
+    fields: string[];
+    /**
+     * Expanded uncertainty (k = 2) of one reading: inches, for the yield a share.
+     */
+    within: number;
+    /**
+     * Expanded uncertainty of the fill ratio (k = 2), if this were all.
+     */
+    ofRatio: number;
+    /**
+     * Of u squared; the shares add to 1.
+     */
+    share: number;
+  }[];
+  /**
+   * Estimated share of full strength when each thing was done. Never a design value.
+   */
+  strength: {
+    event: number;
+    field: string;
+    /**
+     * Wall clock.
+     */
+    at: string;
+    /**
+     * Since the event's last pour.
+     */
+    minutes: number;
+    /**
+     * The coldest component of that pour.
+     */
+    tempF: number;
+    share: number;
+  }[];
   findings: FindingRow[];
   photos: Photo[];
   history: HistoryEntry[];

@@ -99,6 +99,28 @@ describe('a batch of three kinds', () => {
     );
   });
 
+  it('shows of a record what its ± comes from, and how strong the foam was, event by event', async () => {
+    const line = (await recordsOf(contractor, batch, '&structure=T-1'))[0];
+    const sheet = (await contractor.get(`/api/records/${line?.id}`)).body;
+    const rounded = (rows: Record<string, unknown>[], ...keys: string[]) =>
+      rows.map((row) =>
+        keys.map((key) => (typeof row[key] === 'number' ? Number(row[key].toFixed(3)) : row[key])),
+      );
+    // Gaps of 7.5 and 1.5 in, together: 2 · 0.125 / 9; width 0.1 / 11.5; depth 0.5 / 57.6; yield 3 %: squared, over their sum.
+    expect(rounded(sheet.uncertainty, 'source', 'share')).toEqual([
+      ['yield', 0.494],
+      ['gap', 0.423],
+      ['width', 0.041],
+      ['depth', 0.041],
+    ]);
+    // Poured at 10:00 and released at 10:20: 0.5 + 0.3 · ln(20/3) / ln 20 = 0.690; reattached at 11:00: 0.8.
+    expect(rounded(sheet.strength, 'event', 'field', 'minutes', 'share')).toEqual([
+      [1, 'releasedAt', 20, 0.69],
+      [1, 'reattachedAt', 60, 0.8],
+      [2, 'releasedAt', 20, 0.69],
+    ]);
+  });
+
   it('is submitted, taken, decided: clean, on evidence, with a concession, returned', async () => {
     expect((await contractor.post(`${batch.path}/submit`)).body.status).toBe('submitted');
     expect((await inspector.post(`${batch.path}/take`)).body.status).toBe('in-review');

@@ -10,6 +10,7 @@ import { FINDING_SELECT, type FindingDbRow } from './finding-select.ts';
 import { listHistory } from './list-history.ts';
 import { listPours } from './list-pours.ts';
 import { presentFinding } from './present-finding.ts';
+import { readEstimates } from './read-estimates.ts';
 import { readRecord } from './read-record.ts';
 import { titleBlock } from './title-block.ts';
 
@@ -47,11 +48,13 @@ export async function readRecordSheet(
     `select record_number as "recordNumber", n as version from register_versions where record_id = $1 order by n desc limit 1`,
     [id],
   );
+  const events = kept.events.map(({ event, values }) => ({ event, values }));
   return {
     record,
     cells: kept.raw,
     pours: await listPours(em, id),
-    events: kept.events.map(({ event, values }) => ({ event, values })),
+    events,
+    ...(await readEstimates(em, { record, events })),
     findings: findings.map((finding) => presentFinding(finding, { actor, ability })),
     photos: await photosOfLine(em, { photoIds: record.photos.map((photo) => photo.id), actor, ability }),
     history: await listHistory(em, { lineId: record.lineId, owner: actor.orgKind === 'owner' }),

@@ -3,8 +3,8 @@ import { Quantity } from '#src/components/ui/quantity.tsx';
 import type { RecordRow } from '#shared/generated/api-types.ts';
 import { fieldTitle } from '#shared/records/field-meta.ts';
 
-/** What was computed from the measurements. */
-export function DerivedFigures({ record }: { record: RecordRow }) {
+/** What was computed from the measurements. Without a fill ratio there is no table of what its ± comes from: `hint` says it here. */
+export function DerivedFigures({ record, hint }: { record: RecordRow; hint: boolean }) {
   const { derived, kind } = record;
   const figures = [
     { word: 'Void', value: derived.voidFt3, unit: 'ft3' },
@@ -27,7 +27,7 @@ export function DerivedFigures({ record }: { record: RecordRow }) {
           </div>
         ))}
       </dl>
-      {derived.worstReading && typeof derived.worstReading === 'string' ? (
+      {hint && derived.worstReading ? (
         <p className="px-gutter pb-2.5 text-small text-ink-2">
           Most of the uncertainty comes from {fieldTitle(kind, derived.worstReading).toLowerCase()}: measure
           that again first.

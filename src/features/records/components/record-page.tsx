@@ -19,6 +19,8 @@ import { Measurements } from '#src/features/records/components/measurements.tsx'
 import { PoursTable } from '#src/features/records/components/pours-table.tsx';
 import { PrintFindings } from '#src/features/records/components/print-findings.tsx';
 import { RecordFindings } from '#src/features/records/components/record-findings.tsx';
+import { StrengthTable } from '#src/features/records/components/strength-table.tsx';
+import { UncertaintyTable } from '#src/features/records/components/uncertainty-table.tsx';
 import { sheetLimitsQuery } from '#src/lib/api/sheet-limits.ts';
 import { counted } from '#src/lib/formats.ts';
 import { useUser } from '#src/lib/session/session.ts';
@@ -83,7 +85,9 @@ export function RecordPage({ data }: { data: RecordSheetData }) {
             <PrintFindings findings={findings} />
           </div>
           <div className="border-t border-hairline print:hidden">
-            <DerivedFigures record={record} />
+            <DerivedFigures record={record} hint={data.uncertainty.length === 0} />
+            <UncertaintyTable data={data} />
+            <StrengthTable data={data} />
             <Measurements data={data} />
             <PoursTable pours={data.pours} />
           </div>
