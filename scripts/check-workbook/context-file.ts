@@ -1,11 +1,21 @@
 import { Ajv2020 } from 'ajv/dist/2020.js';
 import { KINDS, type Kind } from '#shared/records/types.ts';
-import type { Product } from '#shared/standard/types.ts';
+import type { KnownBeside } from '#shared/check/known-beside.ts';
+import type { Product, Standard } from '#shared/standard/types.ts';
+import { KNOWN_BESIDE, listOf } from './known-beside-schema.ts';
+import { schemaFaults } from './schema-faults.ts';
 
 /** A context file as it stands; a part left out is not known, and the rules that need it are skipped. */
-export type ContextFile = {
+export type ContextFile = KnownBeside & {
   readonly zone?: string;
   readonly asOf?: string;
+  /** In any order; left out, the demo's. */
+  readonly standards?: readonly {
+    readonly id: string;
+    readonly n: number;
+    readonly effectiveOn: string;
+    readonly body: Standard;
+  }[];
   readonly products?: readonly Product[];
   readonly lots?: readonly {
     readonly product: string;
@@ -35,17 +45,19 @@ const number = { type: ['number', 'null'] };
 
 const DAY = '^\\d{4}-\\d{2}-\\d{2}$';
 const STATUS = { enum: ['in-use', 'held', 'recalled'] };
-const list = (properties: object) => ({
-  type: 'array',
-  items: { type: 'object', required: Object.keys(properties), additionalProperties: false, properties },
-});
-
 const SCHEMA = {
   type: 'object',
   additionalProperties: false,
   properties: {
+    ...KNOWN_BESIDE,
     zone: text,
     asOf: text,
+    standards: listOf({
+      id: text,
+      n: { type: 'integer', minimum: 1 },
+      effectiveOn: { type: 'string', pattern: DAY },
+      body: { type: 'object' },
+    }),
     products: { type: 'array', items: { type: 'object' } },
     lots: {
       type: 'array',
@@ -58,8 +70,8 @@ const SCHEMA = {
           number: text,
           expiresOn: { type: ['string', 'null'], pattern: DAY },
           status: STATUS,
-          history: list({ on: { type: 'string', pattern: DAY }, status: STATUS }),
-          received: list({
+          history: listOf({ on: { type: 'string', pattern: DAY }, status: STATUS }),
+          received: listOf({
             kitFt3: { type: 'number', exclusiveMinimum: 0 },
             quantity: { type: 'integer', minimum: 0 },
           }),
@@ -91,11 +103,5 @@ const SCHEMA = {
 const validate = new Ajv2020({ allErrors: true, allowUnionTypes: true }).compile(SCHEMA);
 
 /** What is wrong with a context file, each with the place in it; empty when it can be used. */
-export const contextFaults = (value: unknown): readonly string[] => {
-  if (validate(value)) return [];
-  return (validate.errors ?? []).map((error) => {
-    const extra: unknown = error.params['additionalProperty'];
-    const name = typeof extra === 'string' ? ` (${extra})` : '';
-    return `${error.instancePath.slice(1) || 'the file'}: ${error.message ?? error.keyword}${name}`;
-  });
-};
+export const contextFaults = (value: unknown): readonly string[] =>
+  validate(value) ? [] : schemaFaults(validate.errors);

@@ -2,11 +2,14 @@ import { Ajv2020 } from 'ajv/dist/2020.js';
 import schema from '#schemas/api/check-context.schema.json' with { type: 'json' };
 import { isZone } from '#shared/dates/wall-clock.ts';
 import type { CheckContextData } from '#shared/generated/api-types.ts';
+import { KNOWN_BESIDE } from './known-beside-schema.ts';
+import { schemaFaults } from './schema-faults.ts';
 import { validateProduct, validateStandard } from '#shared/generated/validators.mjs';
 
 // Formats are the server's to check; what a day or an instant is used for finds out by itself.
 const ajv = new Ajv2020({ allErrors: true, allowUnionTypes: true, validateFormats: false });
-const validate = ajv.compile(schema);
+/** As the server gives it, and what may be known beside that. */
+const validate = ajv.compile({ ...schema, properties: { ...schema.properties, ...KNOWN_BESIDE } });
 
 /** The reply of `GET /api/work-orders/:id/check-context`, kept as a file? Told by what a context file never has. */
 export const isOrderContext = (value: unknown): boolean =>
@@ -14,10 +17,7 @@ export const isOrderContext = (value: unknown): boolean =>
 
 /** What is wrong with it, each with the place; empty when it can be used. */
 export const orderContextFaults = (value: unknown): readonly string[] => {
-  if (!validate(value))
-    return (validate.errors ?? []).map(
-      ({ instancePath, message, keyword }) => `${instancePath.slice(1) || 'the file'}: ${message ?? keyword}`,
-    );
+  if (!validate(value)) return schemaFaults(validate.errors);
   const { zone, asOf, standards, products } = value as unknown as CheckContextData;
   return [
     ...(isZone(zone) ? [] : [`zone: "${zone}" is no IANA time zone`]),

@@ -1,6 +1,5 @@
+import { shownFinding } from '#shared/check/shown-finding.ts';
 import type { CheckedRecord, CheckResult } from '#shared/check/types.ts';
-import { renderFinding } from '#shared/findings/render.ts';
-import type { Finding } from '#shared/findings/types.ts';
 import type { Pour } from '#shared/rules/types.ts';
 
 const pourRow = (pour: Pour) => ({
@@ -32,16 +31,10 @@ const recordRow = (record: CheckedRecord) => ({
   events: record.events.map(({ row, values }) => ({ row, values })),
 });
 
-/** What only the owner may see never leaves by this door. */
-const findingRow = (finding: Finding) => {
-  const { ownerParams: _ownerParams, ...shown } = finding;
-  return { ...shown, ...renderFinding(finding) };
-};
-
-/** The check as one JSON document `{records, findings, skipped}`. */
+/** The check as one JSON document `{records, findings, skipped}`. What only the owner may see never leaves by this door. */
 export const reportJson = (result: CheckResult): string =>
   JSON.stringify({
     records: result.records.map(recordRow),
-    findings: result.findings.map(findingRow),
+    findings: result.findings.map(shownFinding),
     skipped: result.skipped,
   });

@@ -1,11 +1,11 @@
 import { run } from '#server/db/rows.ts';
 import { createSubmittedBatch } from '#tests/factories/submitted-batch.ts';
 import { createWorkOrder } from '#tests/factories/work-orders.ts';
-import type { Harness } from '#tests/setup/api-harness.ts';
+import type { Stage } from '#tests/setup/api-harness.ts';
 
 /** A structure set by another contractor (or the one named) and on record, written straight into the tables. */
 export async function createOnRecord(
-  harness: Harness,
+  harness: Stage,
   options: { structureNumber: string; latitude: number; longitude: number; contractorId?: string },
 ): Promise<void> {
   const em = harness.em();

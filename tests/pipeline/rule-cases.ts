@@ -156,12 +156,18 @@ export const RULE_CASES: readonly RuleCase[] = [
   },
   {
     code: 'record-unreadable',
-    fails: { values: { leanInPer10Ft: '1.200,5' }, expected: { field: 'leanInPer10Ft', margin: null } },
+    fails: {
+      values: { leanInPer10Ft: '1.200,5' },
+      expected: { field: 'leanInPer10Ft', measured: '1.200,5', margin: null },
+    },
     passes: { values: { leanInPer10Ft: ' 0.2 ' } },
   },
   {
     code: 'record-unit',
-    fails: { values: { accuracyFt: '16 in' }, expected: { field: 'accuracyFt', margin: null } },
+    fails: {
+      values: { accuracyFt: '16 in' },
+      expected: { field: 'accuracyFt', measured: '16 in', margin: null },
+    },
     passes: { values: { accuracyFt: '16 ft' } },
   },
   {
@@ -170,9 +176,12 @@ export const RULE_CASES: readonly RuleCase[] = [
     passes: { values: { structureUse: 'Dead-end' } },
   },
   {
-    // A brand is looked for from 10 ft below grade to 30 ft above it.
+    // A brand is looked for from 10 ft below grade to 30 ft above it: 30 − 31 = −1.
     code: 'record-range',
-    fails: { values: { brandHeightFt: 31 }, expected: { field: 'brandHeightFt', measured: 31, limit: 30 } },
+    fails: {
+      values: { brandHeightFt: 31 },
+      expected: { field: 'brandHeightFt', measured: 31, limit: 30, margin: -1, unit: 'ft' },
+    },
     passes: { values: { brandHeightFt: 30 } },
   },
 ];

@@ -1,6 +1,6 @@
 import type { Skipped } from '#shared/check/types.ts';
 import type { ShownFinding } from '#shared/check/shown-finding.ts';
-import type { CheckContextData } from '#shared/generated/api-types.ts';
+import type { OrderContextData } from '#shared/check/context-from-data.ts';
 import type { Derived, FieldValues, Kind } from '#shared/records/types.ts';
 import type { TypedLine } from '#shared/workbook/typed-workbook.ts';
 import type { RefusalCode, RefusalParams } from '#shared/workbook/workbook-refused.ts';
@@ -36,12 +36,12 @@ export type CheckedPour = {
 export type NotRun = Skipped & { readonly title: string };
 
 export type ToCheckWorker =
-  | { readonly type: 'workbook'; readonly file: Blob; readonly context: CheckContextData }
+  | { readonly type: 'workbook'; readonly file: Blob; readonly context: OrderContextData }
   | {
       readonly type: 'typed';
       readonly turn: number;
       readonly line: TypedLine;
-      readonly context: CheckContextData;
+      readonly context: OrderContextData;
     };
 
 export type FromCheckWorker =

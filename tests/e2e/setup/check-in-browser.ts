@@ -1,6 +1,6 @@
 import type { Page } from 'playwright-core';
 import type { CheckedLine, FromCheckWorker } from '#src/workers/check/protocol.ts';
-import type { CheckContextData } from '#shared/generated/api-types.ts';
+import type { OrderContextData } from '#shared/check/context-from-data.ts';
 
 export type BrowserCheck = {
   readonly lines: readonly CheckedLine[];
@@ -16,7 +16,7 @@ export async function workerUrl(page: Page): Promise<string> {
 /** Checks these bytes on the page by the product's own worker, in the messages that the product's own screen sends. */
 export function checkInBrowser(
   page: Page,
-  asked: { readonly url: string; readonly bytes: Buffer; readonly context: CheckContextData },
+  asked: { readonly url: string; readonly bytes: Buffer; readonly context: OrderContextData },
 ): Promise<BrowserCheck> {
   return page.evaluate(
     ({ url, base64, context }) =>
