@@ -2,6 +2,7 @@ import { DecisionLine } from '#src/components/evidence/decision-line.tsx';
 import { MeasuredAgainst } from '#src/components/ui/measured-against.tsx';
 import { formatInstant } from '#src/lib/formats.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
+import { keepTogether } from '#src/lib/keep-together.ts';
 
 /** `Set!H9`; null where a finding has no place in the workbook. */
 export function cellOf({ sheet, cell }: Pick<FindingRow, 'sheet' | 'cell'>): string | null {
@@ -24,7 +25,7 @@ export function FindingFacts({ finding, remedy }: { finding: FindingRow; remedy:
       />
       <p className="text-ink-2">
         {cell === null ? null : <span className="whitespace-nowrap text-ink">{cell}. </span>}
-        {finding.message}
+        {keepTogether(finding.message)}
       </p>
       {remedy && finding.remedy ? <p className="text-muted">{finding.remedy}</p> : null}
       {answer ? (

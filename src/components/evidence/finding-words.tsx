@@ -2,6 +2,7 @@ import type { ReactNode } from 'react';
 import { Glyph } from '#src/components/ui/glyph.tsx';
 import { MeasuredAgainst } from '#src/components/ui/measured-against.tsx';
 import { SEVERITY_WORDS } from '#src/components/ui/state-word.tsx';
+import { keepTogether } from '#src/lib/keep-together.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 
 type Props = {
@@ -26,7 +27,7 @@ export function FindingWords({ finding, lead, children }: Props) {
           {lead}
           {finding.title}
         </h3>
-        <p className="text-ink-2">{finding.message}</p>
+        <p className="text-ink-2">{keepTogether(finding.message)}</p>
         {finding.margin === null && typeof finding.measured !== 'number' ? null : (
           <MeasuredAgainst {...finding} />
         )}
@@ -37,7 +38,7 @@ export function FindingWords({ finding, lead, children }: Props) {
               {'. '}
             </span>
           ) : null}
-          {finding.remedy}
+          {keepTogether(finding.remedy)}
         </p>
         {children}
       </div>

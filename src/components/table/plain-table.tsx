@@ -1,5 +1,7 @@
-import type { ReactNode } from 'react';
+import { useLayoutEffect, useRef, useState, type ReactNode } from 'react';
+import { PlainCards } from '#src/components/table/plain-cards.tsx';
 import { classNames } from '#src/lib/class-names.ts';
+import { useWidth } from '#src/lib/use-width.ts';
 
 export type PlainColumn<Row> = {
   readonly id: string;
@@ -8,7 +10,7 @@ export type PlainColumn<Row> = {
   readonly cell: (row: Row) => ReactNode;
 };
 
-type Props<Row> = {
+export type PlainTableProps<Row> = {
   /** Said to screen readers. */
   readonly caption: string;
   readonly columns: readonly PlainColumn<Row>[];
@@ -16,11 +18,32 @@ type Props<Row> = {
   readonly rowKey: (row: Row) => string;
 };
 
-/** A short table that stands whole on the page (measurements, versions, pours). Scrolls sideways inside itself when narrow. */
-export function PlainTable<Row>({ caption, columns, rows, rowKey }: Props<Row>) {
+/** A short table that stands whole on the page (measurements, versions, pours); cards where it is wider than its place. */
+export function PlainTable<Row>({ caption, columns, rows, rowKey }: PlainTableProps<Row>) {
+  const frame = useRef<HTMLDivElement>(null);
+  const width = useWidth(frame);
+  // What the table took when it did not fit: it comes back where there is that much again.
+  const [needed, setNeeded] = useState(0);
+  const cards = width > 0 && needed > width;
+  useLayoutEffect(() => {
+    const place = frame.current;
+    const table = place?.firstElementChild;
+    if (!place || !table || cards) return undefined;
+    const observer = new ResizeObserver(() => {
+      if (place.scrollWidth > place.clientWidth) setNeeded(place.scrollWidth);
+    });
+    observer.observe(place);
+    observer.observe(table);
+    return () => observer.disconnect();
+  }, [cards]);
+  if (cards)
+    return (
+      <div ref={frame}>
+        <PlainCards caption={caption} columns={columns} rows={rows} rowKey={rowKey} />
+      </div>
+    );
   return (
-    // oxlint-disable-next-line jsx-a11y/no-noninteractive-tabindex -- what scrolls must be reachable by keyboard
-    <div role="region" aria-label={caption} tabIndex={0} className="overflow-x-auto">
+    <div ref={frame} className="overflow-x-auto">
       <table className="w-full border-collapse text-table">
         <caption className="sr-only">{caption}</caption>
         <thead>
@@ -30,7 +53,7 @@ export function PlainTable<Row>({ caption, columns, rows, rowKey }: Props<Row>) 
                 key={column.id}
                 scope="col"
                 className={classNames(
-                  'px-2 py-1.5 font-semibold whitespace-nowrap text-ink-2 first:pl-gutter last:pr-gutter',
+                  'px-2 py-1.5 font-semibold whitespace-nowrap text-ink-2 first:pl-gutter last:pr-gutter max-sm:px-1.5',
                   column.figures ? 'text-right' : 'text-left',
                 )}
               >
@@ -46,7 +69,7 @@ export function PlainTable<Row>({ caption, columns, rows, rowKey }: Props<Row>) 
                 <td
                   key={column.id}
                   className={classNames(
-                    'px-2 py-1.5 align-baseline first:pl-gutter last:pr-gutter',
+                    'px-2 py-1.5 align-baseline first:pl-gutter last:pr-gutter max-sm:px-1.5',
                     column.figures && 'text-right whitespace-nowrap',
                   )}
                 >

@@ -1,5 +1,6 @@
 import { Tabs as Radix } from 'radix-ui';
 import { useEffect, useRef, type ReactNode } from 'react';
+import { classNames } from '#src/lib/class-names.ts';
 
 type Tab<T extends string> = { readonly value: T; readonly label: string; readonly count?: number };
 
@@ -8,11 +9,13 @@ type Props<T extends string> = {
   readonly value: T;
   readonly onChange: (value: T) => void;
   readonly tabs: readonly Tab<T>[];
+  /** In a pane: set in less than on a page. */
+  readonly pane?: boolean;
   readonly children: ReactNode;
 };
 
 /** Views of one thing, each with its count. The panel is one: its content follows `value`. */
-export function Tabs<T extends string>({ label, value, onChange, tabs, children }: Props<T>) {
+export function Tabs<T extends string>({ label, value, onChange, tabs, pane, children }: Props<T>) {
   // A press tells of the same tab twice, by pointer and by focus, before an address has changed: once counts.
   const asked = useRef(value);
   useEffect(() => {
@@ -31,7 +34,10 @@ export function Tabs<T extends string>({ label, value, onChange, tabs, children 
     >
       <Radix.List
         aria-label={label}
-        className="flex shrink-0 gap-4 overflow-x-auto border-b border-hairline px-3 pt-1.5 text-table"
+        className={classNames(
+          'flex shrink-0 gap-4 overflow-x-auto border-b border-hairline pt-1.5 text-table',
+          pane ? 'px-3' : 'px-gutter',
+        )}
       >
         {tabs.map((tab) => (
           <Radix.Trigger
@@ -44,7 +50,7 @@ export function Tabs<T extends string>({ label, value, onChange, tabs, children 
           </Radix.Trigger>
         ))}
       </Radix.List>
-      <Radix.Content value={value} tabIndex={-1} className="min-h-0 flex-1 outline-none">
+      <Radix.Content value={value} tabIndex={-1} className="flex min-h-0 flex-1 flex-col outline-none">
         {children}
       </Radix.Content>
     </Radix.Root>

@@ -40,7 +40,7 @@ export function CameraButton({ lines, files, onPhotograph }: Props) {
           <path d="M1.5 4.5h5l1.8-3h7.4l1.8 3h5v14h-21z" strokeLinejoin="round" />
           <circle cx="12" cy="11" r="4.2" />
         </svg>
-        <span className="truncate">Photograph {next.label}</span>
+        <span className="py-2 text-left leading-tight whitespace-normal">Photograph {next.label}</span>
       </FileButton>
       {missing.length > 1 ? (
         <p className="mt-1.5 text-small text-muted">

@@ -110,13 +110,26 @@ function Findings({ title, gone, list }: FindingsProps) {
     <>
       <SectionHead title={title} aside={list.length} />
       <ul className="border-b border-hairline px-gutter py-2">
-        {list.map((one, index) => (
-          <li key={`${one.code} ${one.structureNumber} ${index}`} className="flex items-center gap-2 py-0.5">
+        {together(list).map(({ one, times }) => (
+          <li key={`${one.code} ${one.structureNumber}`} className="flex items-center gap-2 py-0.5">
             <Glyph name={gone ? 'tick' : 'info'} />
             <span className="font-semibold">{one.structureNumber ?? 'The workbook'}</span> {one.title}
+            {times > 1 ? <span className="text-muted">{times} times</span> : null}
           </li>
         ))}
       </ul>
     </>
   );
+}
+
+/** The same rule on the same structure is said once, and how often. */
+function together(
+  list: FindingsProps['list'],
+): readonly { one: FindingsProps['list'][number]; times: number }[] {
+  const known = new Map<string, { one: FindingsProps['list'][number]; times: number }>();
+  for (const one of list) {
+    const key = `${one.code} ${one.structureNumber}`;
+    known.set(key, { one, times: (known.get(key)?.times ?? 0) + 1 });
+  }
+  return [...known.values()];
 }

@@ -63,7 +63,7 @@ export function LineItem({ line, active, onActive, decided, ...actions }: Props)
             {counted(record.photos.length, 'photograph')}, row {record.row}
           </span>
         </p>
-        <span className="lg:ml-4">
+        <span className="lg:ml-6">
           <DrawingButton recordId={record.id} structureNumber={record.structureNumber} />
         </span>
         {decided && record.decision?.reason ? (

@@ -67,7 +67,10 @@ export function PhotographsRow({ batch, open, files, counts, onFiles, onRetry, o
           />
         </div>
       )}
-      {unplacedPhotos > 0 ? (
+      {unplacedPhotos > 0 && batch.status === 'checking' ? (
+        <p>The check places them; what it cannot place comes to you.</p>
+      ) : null}
+      {unplacedPhotos > 0 && batch.status !== 'checking' ? (
         <button
           type="button"
           onClick={onUnplaced}

@@ -34,14 +34,14 @@ export function CheckedLineItem({ line, context }: { line: CheckedLine; context:
             </span>
           </span>
         </h3>
-        <p className="ml-auto text-table text-ink-2 lg:ml-6">
+        <p className="pl-6 text-table text-ink-2">
           {findings.length === 0 ? 'no findings' : counted(findings.length, 'finding')}
           <span className="text-muted">
             {' · '}
             {line.sheet} row {line.row}
           </span>
         </p>
-        <div className="lg:ml-6">
+        <div className="lg:pl-6">
           <Button
             kind="quiet"
             size="small"

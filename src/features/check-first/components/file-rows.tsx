@@ -17,20 +17,34 @@ export function FileRows({ check }: { check: WorkbookCheck }) {
         glyph={bad ? 'triangle' : file ? 'tick' : 'dotted'}
         title="Workbook"
         action={
-          <FileButton
-            kind={file ? 'quiet' : 'primary'}
-            size="small"
-            accept={ACCEPT}
-            label={file ? 'Choose another workbook' : 'Choose the workbook'}
-            onFiles={([chosen]) => chosen && take(chosen)}
-          >
-            {file ? 'another' : 'Choose'}
-          </FileButton>
+          file ? (
+            <FileButton
+              kind="quiet"
+              size="small"
+              accept={ACCEPT}
+              label="Choose another workbook"
+              onFiles={([chosen]) => chosen && take(chosen)}
+            >
+              another
+            </FileButton>
+          ) : null
         }
       >
         <p className="break-words">
           {file ? file.name : 'Drop it on this page or choose it. It stays on this device.'}
         </p>
+        {file ? null : (
+          <div className="mt-2">
+            <FileButton
+              kind="primary"
+              accept={ACCEPT}
+              label="Choose the workbook"
+              onFiles={([chosen]) => chosen && take(chosen)}
+            >
+              Choose the workbook
+            </FileButton>
+          </div>
+        )}
         {bad ? (
           <div role="alert" className="mt-1 text-nonconform">
             <p className="font-semibold">

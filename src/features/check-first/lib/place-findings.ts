@@ -31,12 +31,15 @@ function isBlankIn(draft: TypedDraft, { sheet, row, field, code }: ShownFinding)
   return (values?.[field] ?? '').trim() === '';
 }
 
-/** Findings on a typed line and its pours; the sheets that a typed line has none of are left out. */
+/**
+ * Findings on a typed line and its pours; the sheets that a typed line has none of are left out. Its pours are its
+ * own: while no more than its number is typed it is no line yet, and a pour without a line would be said in vain.
+ */
 export function placeFindings(
   result: TypedResult,
   typed: { readonly draft: TypedDraft; readonly fields: ReadonlySet<string> },
 ): readonly PlacedFinding[] {
-  const loose = result.loose.filter(({ sheet }) => sheet === 'Pours');
+  const loose = result.loose.filter(({ sheet, code }) => sheet === 'Pours' && code !== 'pour-orphan');
   return inOrder([...(result.line?.findings ?? []), ...loose]).map((finding) => {
     const input = inputOf(finding, typed.fields);
     return { finding, input, blank: input !== null && isBlankIn(typed.draft, finding) };

@@ -36,7 +36,8 @@ it('a recall says whom it reaches and that it is final', () => {
   expect(effectsOf(LOT, 'recalled')).toEqual([
     '3 structures have foam of it: 2 on record, 1 undecided.',
     'Brindle and Tamsett are told by e-mail, each of their own structures only.',
-    'No decision changes by itself: what is approved or on record stays, and is listed on this page.',
+    'No decision changes by itself: what is submitted, approved or on record is not checked again, and is listed on this page.',
+    'Every check from now on finds each pour of it, whenever it was poured.',
     'A recall is final. Nothing more can be received of the lot, and it cannot be released.',
   ]);
 });
@@ -44,7 +45,8 @@ it('a recall says whom it reaches and that it is final', () => {
 it('a hold of a lot that nobody used tells nobody', () => {
   expect(effectsOf({ ...LOT, uses: [] }, 'held')).toEqual([
     'No structure has foam of this lot so far.',
-    'No decision changes by itself: what is approved or on record stays, and is listed on this page.',
+    'No decision changes by itself: what is submitted, approved or on record is not checked again, and is listed on this page.',
+    'Every check from now on finds what is poured of it while it is held; what was poured before stands.',
     'A hold ends when the lot is released or recalled.',
   ]);
 });

@@ -17,6 +17,7 @@ export function effectsOf(lot: LotDetail, type: BlockingType): readonly string[]
   const said = [whereItWent(lot)];
   if (type === 'released') {
     said.push('The lot is in use again. Nobody is told by e-mail.');
+    said.push('What was poured of it on the days it was held is still found by the check.');
     return said;
   }
   const contractors = [...new Set(lot.uses.map((use) => use.contractor.name))].toSorted();
@@ -25,7 +26,12 @@ export function effectsOf(lot: LotDetail, type: BlockingType): readonly string[]
       `${contractors.join(' and ')} ${contractors.length === 1 ? 'is' : 'are'} told by e-mail, each of their own structures only.`,
     );
   said.push(
-    'No decision changes by itself: what is approved or on record stays, and is listed on this page.',
+    'No decision changes by itself: what is submitted, approved or on record is not checked again, and is listed on this page.',
+  );
+  said.push(
+    type === 'recalled'
+      ? 'Every check from now on finds each pour of it, whenever it was poured.'
+      : 'Every check from now on finds what is poured of it while it is held; what was poured before stands.',
   );
   said.push(
     type === 'recalled'

@@ -40,9 +40,7 @@ export function RateChart({ contractors }: { contractors: readonly Contractor[] 
           <ul>
             {shown.map((one) => (
               <li key={one.id} className={GRID}>
-                <span className="truncate" title={one.name}>
-                  {one.name}
-                </span>
+                <span className="py-1 leading-tight">{one.name}</span>
                 <svg width="100%" height="33" aria-hidden="true" className="overflow-visible">
                   <line
                     x1={at(all)}

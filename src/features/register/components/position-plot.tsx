@@ -1,7 +1,7 @@
 import { useRef } from 'react';
 import { Link } from 'react-router-dom';
 import { paths } from '#src/config/paths.ts';
-import { counted } from '#src/lib/formats.ts';
+import { counted, formatCount } from '#src/lib/formats.ts';
 import { useUnitSystem } from '#src/lib/settings/unit-system.ts';
 import { useWidth } from '#src/lib/use-width.ts';
 import type { RegisterRow } from '#shared/generated/api-types.ts';
@@ -15,7 +15,7 @@ const NAME = { width: 58, height: 15 };
 const FEET_A_METRE = 1 / 0.3048;
 
 /** Where the structures of the rows loaded stand, to scale, north up; each mark leads to its record. */
-export function PositionPlot({ rows }: { rows: readonly RegisterRow[] }) {
+export function PositionPlot({ rows, total }: { rows: readonly RegisterRow[]; total: number | null }) {
   const frame = useRef<HTMLDivElement>(null);
   const width = useWidth(frame);
   const metric = useUnitSystem() === 'metric';
@@ -74,7 +74,11 @@ export function PositionPlot({ rows }: { rows: readonly RegisterRow[] }) {
       </div>
       <p className="flex flex-wrap gap-x-5 px-gutter py-1.5 text-small text-muted">
         <span>
-          {counted(placed.length, 'position')} of the rows loaded{extent}.
+          {counted(placed.length, 'position')}
+          {extent}.
+          {total !== null && total > rows.length
+            ? ` Of ${formatCount(total)} records the ${formatCount(rows.length)} loaded so far are plotted: filter, or scroll the list for more.`
+            : ''}
           {away > 0 ? ` ${counted(away, 'row')} without one.` : ''}
         </span>
         <span className="inline-flex items-center gap-1.5">

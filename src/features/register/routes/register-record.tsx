@@ -16,6 +16,7 @@ import { kindWord } from '#src/lib/filters/rule-options.ts';
 import { counted } from '#src/lib/formats.ts';
 import type { RegisterRow } from '#shared/generated/api-types.ts';
 import { registerVersionsQuery } from '../api/register-versions.ts';
+import { Pole } from '../components/pole.tsx';
 import { Conformity } from '../components/conformity.tsx';
 
 const COLUMNS: readonly PlainColumn<RegisterRow>[] = [
@@ -39,7 +40,7 @@ const COLUMNS: readonly PlainColumn<RegisterRow>[] = [
       ),
   },
   { id: 'state', title: 'State', cell: (row) => <Conformity row={row} /> },
-  { id: 'pole', title: 'Pole', cell: (row) => row.pole ?? '–' },
+  { id: 'pole', title: 'Pole', cell: (row) => <Pole pole={row.pole} /> },
   {
     id: 'embedment',
     title: 'Embedment',

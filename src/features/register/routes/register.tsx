@@ -96,7 +96,7 @@ export function Component() {
         }
       />
       <FilterBar filters={filters} define={define} />
-      {plotted && list.rows.length > 0 ? <PositionPlot rows={list.rows} /> : null}
+      {plotted && list.rows.length > 0 ? <PositionPlot rows={list.rows} total={list.total} /> : null}
       <DataList
         label="Register"
         list={list}

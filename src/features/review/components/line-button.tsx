@@ -23,7 +23,7 @@ export function LineButton({ line, current, onSelect }: Props) {
       className={look(current)}
     >
       <Glyph name={state.glyph} />
-      <span className="min-w-0 flex-1 truncate">
+      <span className="min-w-0 flex-1 truncate" title={lineWords(line, metric)}>
         <span className="font-semibold">{line.structureNumber}</span>
         {line.occurrence > 1 ? ` (${line.occurrence})` : ''}{' '}
         <span className="text-small text-ink-2">{lineWords(line, metric)}</span>

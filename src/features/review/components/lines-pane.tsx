@@ -35,7 +35,7 @@ export function LinesPane({ desk, batch, lines, clean }: Props) {
     );
   return (
     <>
-      <Tabs label="Which lines" value={desk.place.tab} onChange={desk.place.setTab} tabs={tabs}>
+      <Tabs pane label="Which lines" value={desk.place.tab} onChange={desk.place.setTab} tabs={tabs}>
         <div className="flex h-full min-h-0 flex-col max-lg:h-[60dvh]">
           <LineList lines={desk.listed} selected={desk.line} onSelect={desk.select} ownFindings={desk.own} />
         </div>

@@ -15,29 +15,21 @@ const COLUMNS: readonly PlainColumn<RuleRow>[] = [
     ),
   },
   {
-    id: 'compares',
-    title: 'Compares with',
+    id: 'limits',
+    title: 'Compares with, and the limit',
     cell: (row) =>
       row.limits.length === 0 ? (
         <span className="text-muted">the record itself</span>
       ) : (
         row.limits.map((limit) => (
-          <span key={limit.key} className="block">
-            {limit.title}
+          <span key={limit.key} className="flex max-w-md items-baseline justify-between gap-4">
+            <span>{limit.title}</span>
+            <span className="shrink-0">
+              <Quantity value={limit.value} unit={limit.unit} />
+            </span>
           </span>
         ))
       ),
-  },
-  {
-    id: 'limit',
-    title: 'Limit',
-    figures: true,
-    cell: (row) =>
-      row.limits.map((limit) => (
-        <span key={limit.key} className="block">
-          <Quantity value={limit.value} unit={limit.unit} />
-        </span>
-      )),
   },
   { id: 'severity', title: 'Severity', cell: (row) => <StateWord {...SEVERITY_WORDS[row.severity]} /> },
   {

@@ -20,24 +20,24 @@ export function OrderActions({ order, mayContinue }: { order: WorkOrder; mayCont
         </p>
       ) : null}
       {plansKits ? (
-        <ButtonLink to={plannerAddress({ view: 'order', order: order.id })}>Plan kits</ButtonLink>
+        <ButtonLink size="small" to={plannerAddress({ view: 'order', order: order.id })}>
+          Plan kits
+        </ButtonLink>
       ) : null}
       <a
         href={`/api/work-orders/${order.id}/template.xlsx`}
         download
-        className="inline-flex min-h-8.5 items-center border border-ink px-3.5 text-table font-semibold whitespace-nowrap hover:bg-sunk pointer-coarse:min-h-11"
+        className="inline-flex min-h-7 items-center border border-ink px-2.5 text-small font-semibold whitespace-nowrap hover:bg-sunk pointer-coarse:min-h-11"
       >
         Download workbook template
       </a>
-      <ButtonLink to={paths.checkFirst.to(order.id)}>Check a workbook first</ButtonLink>
-      {open ? (
-        <ButtonLink kind="primary" to={paths.batch.to(open)}>
-          Continue the open batch
-        </ButtonLink>
-      ) : null}
+      <ButtonLink size="small" to={paths.checkFirst.to(order.id)}>
+        Check a workbook first
+      </ButtonLink>
       {order.can.includes('create-batch') ? (
         <Button
           kind={open ? 'secondary' : 'primary'}
+          size="small"
           busy={start.isPending ? 'Opening' : false}
           onClick={() =>
             start.mutate(order.id, { onSuccess: (batch) => void navigate(paths.batch.to(batch.id)) })
@@ -45,6 +45,11 @@ export function OrderActions({ order, mayContinue }: { order: WorkOrder; mayCont
         >
           Open a new batch
         </Button>
+      ) : null}
+      {open ? (
+        <ButtonLink kind="primary" size="small" to={paths.batch.to(open)}>
+          Continue the open batch
+        </ButtonLink>
       ) : null}
     </>
   );

@@ -30,7 +30,7 @@ const COLUMNS: readonly PlainColumn<Batch>[] = [
   { id: 'nc', title: 'Nonconformities', figures: true, cell: (row) => row.counts.nonconformity },
   { id: 'query', title: 'Queries', figures: true, cell: (row) => row.counts.query },
   { id: 'photos', title: 'Photographs', figures: true, cell: (row) => row.counts.photos },
-  { id: 'due', title: 'Due', cell: (row) => (row.revision.dueOn ? formatDay(row.revision.dueOn) : '') },
+  { id: 'due', title: 'Due', cell: (row) => (row.revision.dueOn ? formatDay(row.revision.dueOn) : 'none') },
 ];
 
 export function OrderBatches({ orderId }: { orderId: string }) {
