@@ -13,7 +13,8 @@ import {
 const CONTAINER = 'upstand';
 /** Beneath here lie uploads under way; the sweeper leaves young ones alone. */
 export const INCOMING = 'incoming/';
-const BUFFER_BYTES = 4 * 1024 * 1024;
+/** Blocks of the store: it takes 50,000 of them, far more than any file here has. */
+const BUFFER_BYTES = 1024 * 1024;
 const BUFFERS = 2;
 const COPY_POLL_MS = 250;
 

@@ -1,5 +1,5 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
-import { rows } from '#server/db/rows.ts';
+import { rows, run } from '#server/db/rows.ts';
 import { FINDING_FACTS, toFinding, type FindingFacts } from '#server/modules/records/finding-facts.ts';
 import { renderFinding } from '#shared/findings/render.ts';
 import {
@@ -13,7 +13,7 @@ import type { ExportRow } from '#shared/export/export-row.ts';
 import { KINDS, SHEET_OF_KIND, type Derived, type FieldValues, type Kind } from '#shared/records/types.ts';
 
 /** Rows fetched at a time: memory does not grow with the scope. */
-const CHUNK = 50;
+const CHUNK = 100;
 
 export type ContentSheet = {
   readonly name: string;
@@ -68,27 +68,22 @@ export function readContent(em: EntityManager, transmittalId: string): readonly 
   ];
 }
 
-/** Pages by `ordinal`; every query takes it as its last parameter and ends in `limit`. A structure's rows stay together. */
-async function* inChunks<Row extends { ordinal: number }, Out>(
+/** Through a cursor of em's transaction: planned once, and no more rows here than are being written. */
+async function* inChunks<Row extends object, Out>(
   em: EntityManager,
   query: { sql: string; values: readonly unknown[]; map: (row: Row) => Out },
 ): AsyncGenerator<readonly Out[]> {
-  let last = 0;
+  await run(em, `declare content no scroll cursor for ${query.sql}`, query.values);
   for (;;) {
-    const found = await rows<Row>(em, query.sql, [...query.values, last, last + CHUNK]);
-    yield found.map(query.map);
-    last += CHUNK;
-    if (found.length === 0 && !(await anyBeyond(em, String(query.values[0]), last))) return;
+    const found = await rows<Row>(em, `fetch ${CHUNK} from content`);
+    if (found.length === 0) break;
+    const chunk = found.map(query.map);
+    yield chunk;
+    // Promises of queries gone by hold on to what they gave until the old heap is looked through: give them nothing.
+    found.length = 0;
+    chunk.length = 0;
   }
-}
-
-async function anyBeyond(em: EntityManager, transmittalId: string, ordinal: number): Promise<boolean> {
-  const beyond = await rows(
-    em,
-    'select 1 from transmittal_items where transmittal_id = $1 and ordinal > $2 limit 1',
-    [transmittalId, ordinal],
-  );
-  return beyond.length > 0;
+  await run(em, 'close content');
 }
 
 const ITEMS = `
@@ -114,7 +109,7 @@ join batches b on b.id = rev.batch_id
 join organisations o on o.id = v.contractor_id
 join work_orders w on w.id = v.work_order_id
 left join standard_versions sv on sv.id = r.standard_id
-where i.transmittal_id = $1 and v.kind = $2 and i.ordinal > $3 and i.ordinal <= $4
+where i.transmittal_id = $1 and v.kind = $2
 order by i.ordinal`;
 
 function recordRow(row: RecordRow): ExportRow {
@@ -149,7 +144,7 @@ type PourRow = OfStructure & { written: FieldValues | null } & Record<string, un
 const POURS = `
 select i.ordinal, v.record_number, v.structure_number, v.kind, p.pour_number, p.event, p.poured_wall, p.product_code, p.lot_text,
   p.kit_ft3, p.quantity, p.wasted_quantity, p.component_a_temp_f, p.component_b_temp_f, p.raw->'values' as written
-${ITEMS.replace('where', 'join pours p on p.record_id = r.id where')} and i.ordinal > $2 and i.ordinal <= $3
+${ITEMS.replace('where', 'join pours p on p.record_id = r.id where')}
 order by i.ordinal, p.n`;
 
 function pourRow(row: PourRow): ExportRow {
@@ -178,7 +173,6 @@ type EventRow = OfStructure & { event: number | null; written: FieldValues };
 const EVENTS = `
 select i.ordinal, v.record_number, v.structure_number, v.kind, e.value->'event' as event, e.value->'values' as written
 ${ITEMS.replace('where', 'cross join lateral jsonb_array_elements(r.events) with ordinality e(value, n) where')}
-  and i.ordinal > $2 and i.ordinal <= $3
 order by i.ordinal, e.n`;
 
 function eventRow(row: EventRow): ExportRow {
@@ -220,7 +214,7 @@ left join lateral (
   where k.id = d.concession_id order by e.seq desc limit 1
 ) c on true
 where`,
-)} and i.ordinal > $2 and i.ordinal <= $3
+)}
 order by i.ordinal, f.ordinal`;
 
 function findingRow(row: FindingRow): ExportRow {
