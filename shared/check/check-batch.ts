@@ -11,7 +11,7 @@ import { viewLine, type ViewedLine } from './line-view.ts';
 import { orderFindings, orderRecords } from './order.ts';
 import { prepare } from './prepare.ts';
 import type { PlacedIssue } from './prepared.ts';
-import { runBatchRules, runLineRules } from './run-rules.ts';
+import { lineRunner, runBatchRules } from './run-rules.ts';
 import { skippedRules } from './skipped-rules.ts';
 import { toFinding, type Found } from './to-finding.ts';
 import type { CheckedRecord, CheckResult } from './types.ts';
@@ -89,10 +89,7 @@ export const checkBatch = (source: SourceBatch, context: CheckContext): CheckRes
   const clock = clockOf(context.zone);
   const prepared = prepare(source, context, clock);
   const viewed = prepared.lines.flatMap((line) => viewLine(line, context, clock) ?? []);
-  const found = [
-    ...prepared.issues.map(issueFound),
-    ...viewed.flatMap((line) => runLineRules(RULES, line, context)),
-  ];
+  const found = [...prepared.issues.map(issueFound), ...viewed.flatMap(lineRunner(RULES, context))];
   const standard = batchStandard(viewed, context);
   if (standard) {
     const batch = {

@@ -18,17 +18,18 @@ const numberText = (value: unknown): string =>
   String(typeof value === 'number' ? value : 999).padStart(3, '0');
 
 /** By event, pour number, then content: no figure may hang on the order of rows, not even by its last digit. */
-const contentOrder = (rows: readonly CleanRow[]): CleanRow[] => {
-  const keys = new Map(
-    rows.map((row) => {
-      const { event = 1, pourNumber } = row.values;
-      return [
-        row,
-        `${numberText(event)} ${numberText(pourNumber)} ${canonical(row.values)} ${rowContent(row.source)}`,
-      ];
-    }),
-  );
-  return rows.toSorted((a, b) => byText(keys.get(a) ?? '', keys.get(b) ?? ''));
+const contentOrder = (rows: readonly CleanRow[]): readonly CleanRow[] => {
+  if (rows.length < 2) return rows;
+  const keyed = rows.map((row) => {
+    const { event = 1, pourNumber } = row.values;
+    return { row, numbers: `${numberText(event)} ${numberText(pourNumber)}`, content: '' };
+  });
+  // Rows that their numbers tell apart, as nearly all, are not written out whole.
+  const contentOf = (one: (typeof keyed)[number]): string =>
+    (one.content ||= `${canonical(one.row.values)} ${rowContent(one.row.source)}`);
+  return keyed
+    .toSorted((a, b) => byText(a.numbers, b.numbers) || byText(contentOf(a), contentOf(b)))
+    .map(({ row }) => row);
 };
 
 const eventsOf = (target: Target, rows: readonly CleanRow[], clock: Clock) => {

@@ -1,9 +1,17 @@
 import type { Severity } from '#shared/findings/types.ts';
 import { fieldTitle } from '#shared/records/field-meta.ts';
 import { lineKey } from '#shared/records/structure-key.ts';
-import type { SourceRow } from '#shared/records/types.ts';
-import type { BatchView, CheckContext, FindingDraft, Rule, StandardInForce } from '#shared/rules/types.ts';
+import type { Kind, SourceRow } from '#shared/records/types.ts';
+import type {
+  BatchView,
+  CheckContext,
+  FindingDraft,
+  LineRule,
+  Rule,
+  StandardInForce,
+} from '#shared/rules/types.ts';
 import { ruleSetting } from '#shared/standard/rule-setting.ts';
+import type { RuleSetting } from '#shared/standard/types.ts';
 import { changedToPass } from './changed-to-pass.ts';
 import type { PreparedLine } from './prepared.ts';
 import { recordNameOf } from './record-name.ts';
@@ -53,20 +61,53 @@ const unprovedFound = (
   };
 };
 
+type InUse = { readonly rule: LineRule; readonly setting: RuleSetting };
+
+/** The rules that run on lines of a kind under a standard; found once, not line by line. */
+const rulesInUse = (rules: readonly Rule[], context: CheckContext) => {
+  const known = new Map<StandardInForce, Map<Kind, readonly InUse[]>>();
+  const find = ({ view, standard }: ViewedLine): readonly InUse[] =>
+    rules.flatMap((rule): InUse[] => {
+      if (rule.scope !== 'line' || !rule.kinds.includes(view.kind)) return [];
+      const setting = ruleSetting(standard.body, rule.code);
+      if (setting?.on !== true || rule.needs.some((part) => context[part] === null)) return [];
+      return [{ rule, setting }];
+    });
+  return (viewed: ViewedLine): readonly InUse[] => {
+    const ofKind = known.get(viewed.standard) ?? new Map<Kind, readonly InUse[]>();
+    known.set(viewed.standard, ofKind);
+    const found = ofKind.get(viewed.view.kind) ?? find(viewed);
+    ofKind.set(viewed.view.kind, found);
+    return found;
+  };
+};
+
 /** What all rules find on one line. One `unproved` a blank cell, whichever rules needed it. */
-export const runLineRules = (
+export const lineRunner = (
   rules: readonly Rule[],
-  viewed: ViewedLine,
   context: CheckContext,
+): ((viewed: ViewedLine) => readonly Found[]) => {
+  const running = rulesInUse(rules, context);
+  return (viewed) => runLineRules(viewed, { running: running(viewed), rules, context });
+};
+
+const runLineRules = (
+  viewed: ViewedLine,
+  {
+    running,
+    rules,
+    context,
+  }: {
+    readonly running: readonly InUse[];
+    readonly rules: readonly Rule[];
+    readonly context: CheckContext;
+  },
 ): readonly Found[] => {
   const { view, line, standard } = viewed;
   const found: Found[] = [];
   const blank = new Map<string, Found>();
   const unproved = ruleSetting(standard.body, UNPROVED);
-  for (const rule of rules) {
-    if (rule.scope !== 'line' || !rule.kinds.includes(view.kind)) continue;
-    const setting = ruleSetting(standard.body, rule.code);
-    if (setting?.on !== true || rule.needs.some((part) => context[part] === null)) continue;
+  for (const { rule, setting } of running) {
     for (const draft of rule.check(view, setting.params, context)) {
       const source = draft.source ?? view.source;
       if (draft.unproved === undefined) {

@@ -17,8 +17,6 @@ type Reading = {
   readonly product: Product;
   /** All readings of the pour would be usual ones in °C. */
   readonly asCelsius: boolean;
-  /** What is the same in every finding on this reading. */
-  readonly draft: Pick<FindingDraft, 'source' | 'field' | 'part' | 'params'>;
 };
 
 /** Whether a reading, taken as °C, lies in a product's band of full yield. */
@@ -44,16 +42,20 @@ export const againstBand = (
     return COMPONENTS.flatMap(([component, field]) => {
       const measured = pour[field];
       if (measured === null) return [];
-      const part = `${component} ${pourPart(pour)}`;
-      const params = {
-        component,
-        pourNumber: pour.pourNumber,
-        product: product.code,
-        lowF: product.fullYieldF.lowF,
-        highF: product.fullYieldF.highF,
-        asCelsius,
-      };
-      return judge({ measured, product, asCelsius, draft: { source: pour.source, field, part, params } });
+      return judge({ measured, product, asCelsius }).map((found) => ({
+        ...found,
+        source: pour.source,
+        field,
+        part: `${component} ${pourPart(pour)}`,
+        params: {
+          component,
+          pourNumber: pour.pourNumber,
+          product: product.code,
+          lowF: product.fullYieldF.lowF,
+          highF: product.fullYieldF.highF,
+          asCelsius,
+        },
+      }));
     });
   });
   return [...drafts, ...missingTemperatures(line.pours)];

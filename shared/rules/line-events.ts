@@ -49,8 +49,21 @@ const groupPours = (pours: readonly Pour[]): PourGroup[] =>
     .toSorted(([a], [b]) => (a ?? Number.MAX_VALUE) - (b ?? Number.MAX_VALUE))
     .map(([pourNumber, rows]) => ({ pourNumber, rows, atMs: latest(rows) }));
 
-/** The line's events in order. Clock rules run event by event, so that a later top-up does not put the first hardware in the wrong. */
+const made = new WeakMap<LineView, readonly EventView[]>();
+
+/**
+ * The line's events in order; made once for a line, since a dozen rules ask. Clock rules run event by event, so that a
+ * later top-up does not put the first hardware in the wrong.
+ */
 export const lineEvents = (line: LineView): readonly EventView[] => {
+  const before = made.get(line);
+  if (before) return before;
+  const events = eventsOf(line);
+  made.set(line, events);
+  return events;
+};
+
+const eventsOf = (line: LineView): readonly EventView[] => {
   // A pour whose event cannot be read belongs to no clock.
   const dated = line.pours.filter((pour) => !pour.broken.has('event'));
   const pours = bucket(dated, (pour) => pour.event);

@@ -19,11 +19,18 @@ export const clockFuture: LineRule = {
   paramsSchema: paramsSchema({}),
   check: (line, _params, { asOfMs, zone }) => {
     if (asOfMs === null) return [];
-    const limit = toWallClock(asOfMs, zone);
     const late = (atMs: number, draft: Partial<FindingDraft>): FindingDraft[] =>
       atMs <= asOfMs
         ? []
-        : [{ measured: null, limit, unit: 'min', ...draft, margin: (asOfMs - atMs) / MINUTE_MS }];
+        : [
+            {
+              measured: null,
+              limit: toWallClock(asOfMs, zone),
+              unit: 'min',
+              ...draft,
+              margin: (asOfMs - atMs) / MINUTE_MS,
+            },
+          ];
     return lineEvents(line).flatMap(({ event, source, values, instants, pours }) => [
       ...[...instants].flatMap(([field, atMs]) =>
         late(atMs, {

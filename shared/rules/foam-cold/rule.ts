@@ -14,9 +14,8 @@ export const foamCold: LineRule = {
   needs: [],
   paramsSchema: paramsSchema({}),
   check: (line, _params, context) =>
-    againstBand(line, context, ({ draft, measured, product, asCelsius }) =>
+    againstBand(line, context, ({ measured, product, asCelsius }) =>
       belowLimit({
-        ...draft,
         ...(asCelsius ? { severity: 'query' as const } : {}),
         measured,
         limit: product.allowedF.lowF,

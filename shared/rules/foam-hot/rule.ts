@@ -14,8 +14,8 @@ export const foamHot: LineRule = {
   needs: [],
   paramsSchema: paramsSchema({}),
   check: (line, _params, context) =>
-    againstBand(line, context, ({ draft, measured, product }) =>
-      aboveLimit({ ...draft, measured, limit: product.allowedF.highF, unit: 'degF' }),
+    againstBand(line, context, ({ measured, product }) =>
+      aboveLimit({ measured, limit: product.allowedF.highF, unit: 'degF' }),
     ),
   message: ({ measured, limit, params }) =>
     `Component ${say(params['component'], null)} of pour ${say(params['pourNumber'], null)} was at ${say(measured, 'degF')}; ${say(params['product'], null)} may not be poured above ${say(limit, 'degF')}.`,
