@@ -9,6 +9,7 @@ export function PlainCards<Row>({ caption, columns, rows, rowKey }: PlainTablePr
         <div key={rowKey(row)} role="row" className="border-b border-hairline px-gutter py-2.5">
           {main ? (
             <div role="cell" className="font-semibold">
+              {main.figures ? <span className="text-small font-normal text-muted">{main.title} </span> : null}
               {main.cell(row)}
             </div>
           ) : null}

@@ -82,12 +82,14 @@ export function Component() {
     rowKey: (row) => row.id,
     storageKey: 'concessions',
   });
+  // Not counted by the server; known once the last page is here.
+  const total = list.total ?? (list.hasMore || list.isPending ? null : list.rows.length);
   return (
     <>
       <DocumentTitle>Concessions</DocumentTitle>
       <PageBand
         title="Concessions"
-        facts={list.total === null ? null : <Fact>{counted(list.total, 'concession')}</Fact>}
+        facts={total === null ? null : <Fact>{counted(total, 'concession')}</Fact>}
         actions={<ColumnChooser columns={COLUMNS} {...columns} />}
       />
       <FilterBar filters={filters} define={FILTERS} />

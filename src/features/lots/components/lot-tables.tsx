@@ -38,7 +38,7 @@ const EVENTS: readonly PlainColumn<LotEvent>[] = [
         <Quantity value={row.quantity * row.kitFt3} unit="ft3" />
       ),
   },
-  { id: 'reason', title: 'Reason', cell: (row) => row.reason ?? '' },
+  { id: 'reason', title: 'Reason', cell: (row) => row.reason ?? '–' },
   { id: 'at', title: 'When', cell: (row) => <Moment at={row.at} /> },
   { id: 'by', title: 'By', cell: (row) => row.by || '–' },
 ];

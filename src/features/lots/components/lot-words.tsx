@@ -20,8 +20,20 @@ export const EVENT_WORDS: Readonly<Record<LotEvent['type'], string>> = {
   recalled: 'Recalled',
 };
 
-export function Expiry({ on }: { on: string | null }) {
-  if (on === null) return <span className="text-muted">none given</span>;
-  if (on >= localToday()) return <>{formatDay(on)}</>;
+type ExpiryProps = {
+  readonly on: string | null;
+  /** Where no heading says what day it is. */
+  readonly worded?: boolean;
+};
+
+export function Expiry({ on, worded }: ExpiryProps) {
+  if (on === null) return <span className="text-muted">{worded ? 'no expiry given' : 'none given'}</span>;
+  if (on >= localToday())
+    return (
+      <>
+        {worded ? <span className="text-muted">expires </span> : null}
+        {formatDay(on)}
+      </>
+    );
   return <StateWord glyph="triangle" word={`expired ${formatDay(on)}`} />;
 }

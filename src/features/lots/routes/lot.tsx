@@ -65,8 +65,8 @@ function LotFacts({ lot }: { lot: LotDetail }) {
     <>
       <Fact>{lot.product.code}</Fact>
       <LotStatus status={lot.status} />
-      <Fact word="expires">
-        <Expiry on={lot.expiresOn} />
+      <Fact>
+        <Expiry on={lot.expiresOn} worded />
       </Fact>
       <Fact word="received">
         <Quantity value={lot.receivedFt3} unit="ft3" />

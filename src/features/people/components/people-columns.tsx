@@ -1,5 +1,6 @@
 import { createContext, useContext } from 'react';
 import type { DataColumn } from '#src/components/table/columns.ts';
+import { Address } from '#src/components/ui/address.tsx';
 import { Moment } from '#src/components/ui/moment.tsx';
 import { StateWord } from '#src/components/ui/state-word.tsx';
 import type { Person } from '#shared/generated/api-types.ts';
@@ -28,7 +29,7 @@ function Account({ row }: { row: Person }) {
 
 export const PEOPLE_COLUMNS: readonly DataColumn<Person>[] = [
   { id: 'name', title: 'Name', min: 8, grow: 1.2, main: true, cell: (row) => <Name row={row} /> },
-  { id: 'email', title: 'E-mail', min: 14, grow: 2, cell: (row) => row.email },
+  { id: 'email', title: 'E-mail', min: 14, grow: 2, cell: (row) => <Address>{row.email}</Address> },
   { id: 'role', title: 'Role', min: 7, cell: (row) => row.role },
   { id: 'organisation', title: 'Organisation', min: 11, grow: 1.6, cell: (row) => row.organisation.name },
   { id: 'account', title: 'Account', min: 6, cell: (row) => <Account row={row} /> },

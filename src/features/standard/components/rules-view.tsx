@@ -16,7 +16,7 @@ const COLUMNS: readonly PlainColumn<RuleRow>[] = [
   },
   {
     id: 'limits',
-    title: 'Compares with, and the limit',
+    title: 'Limits',
     cell: (row) =>
       row.limits.length === 0 ? (
         <span className="text-muted">the record itself</span>
