@@ -1,9 +1,7 @@
-import { createHash } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { run } from '#server/db/rows.ts';
-import { PHOTO_PIPELINE } from '#server/modules/photos/pipeline.ts';
 import type { FindingRow } from '#shared/generated/api-types.ts';
 import { DEMO_STANDARD } from '#shared/standard/demo.ts';
+import { photographWithHash } from '#tests/factories/photo-facts.ts';
 import { photograph } from '#tests/factories/photograph.ts';
 import { placeOf } from '#tests/factories/place.ts';
 import { pourRow, pourRows, setRow } from '#tests/factories/set-row.ts';
@@ -114,19 +112,7 @@ describe('photographs', () => {
   });
 
   it('alike by their hashes are found', async () => {
-    const facts = async (phash: string) => {
-      const bytes = await photograph();
-      const sha256 = createHash('sha256').update(bytes).digest('hex');
-      const em = harness.em();
-      await run(em, 'insert into blobs (sha256, size) values ($1, $2)', [sha256, bytes.length]);
-      await run(
-        em,
-        `insert into photo_facts (sha256, pipeline, width, height, taken_wall, phash)
-         values ($1, $2, 1000, 750, '2026-04-14T10:00:00', $3)`,
-        [sha256, PHOTO_PIPELINE, phash],
-      );
-      return bytes;
-    };
+    const facts = (phash: string) => photographWithHash(harness.em(), { phash });
     const batch = await startBatch(contractor, site);
     // Six bits are alike, seven are not: 0xcf and 0x8f against 0xf0.
     await upload(batch, [

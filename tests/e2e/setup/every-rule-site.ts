@@ -1,11 +1,10 @@
-import { createHash } from 'node:crypto';
 import { row, run } from '#server/db/rows.ts';
 import { DEMO_STANDARD } from '#shared/standard/demo.ts';
 import type { KnownBeside } from '#shared/check/known-beside.ts';
 import type { Photo } from '#shared/generated/api-types.ts';
 import { createLot } from '#tests/factories/foam.ts';
 import { photograph } from '#tests/factories/photograph.ts';
-import { photographWithHash } from '#tests/factories/photo-facts.ts';
+import { giveFacts, photographWithHash, sha256Of } from '#tests/factories/photo-facts.ts';
 import { placeOf } from '#tests/factories/place.ts';
 import { pourRows, setRow } from '#tests/factories/set-row.ts';
 import { createStandard } from '#tests/factories/standards.ts';
@@ -33,7 +32,6 @@ export type EveryRuleSite = {
   readonly beside: KnownBeside;
 };
 
-const sha = (bytes: Buffer): string => createHash('sha256').update(bytes).digest('hex');
 const BAND = 0xaaaa;
 
 /** The order that all is planned on, with its lots, its area and what others have on record. */
@@ -95,15 +93,19 @@ export async function makeEveryRuleSite(
   );
 
   const alike = await photographWithHash(server.em(), { phash: 'aaaaaaaaaaaaaaf0', band: BAND });
-  const made = { reused, alike };
+  const given = { reused, alike };
   const shots = await Promise.all(
     EVERY_SHOT.map(async (shot) => {
       const { width, height } = shot.facts;
       const size = { width: width ?? 1, height: height ?? 1 };
-      const bytes =
-        shot.bytes === 'own' ? await photograph({ ...size, exif: exifOf(shot.facts) }) : made[shot.bytes];
-      return { ...shot, picture: bytes, sha256: sha(bytes) };
+      const picture =
+        shot.bytes === 'own' ? await photograph({ ...size, exif: exifOf(shot.facts) }) : given[shot.bytes];
+      return { ...shot, picture, sha256: sha256Of(picture) };
     }),
+  );
+  await giveFacts(
+    server.em(),
+    shots.filter(({ measured }) => !measured),
   );
   const batch = await startBatch(agent, site);
   await send(
@@ -118,8 +120,8 @@ export async function makeEveryRuleSite(
     batch,
     beside: everyRuleBeside({
       shots: shots.map(({ picture: _picture, ...shot }) => shot),
-      reused: sha(reused),
-      alike: sha(others),
+      reused: sha256Of(reused),
+      alike: sha256Of(others),
       batch: first.number,
     }),
   };
