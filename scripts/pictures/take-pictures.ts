@@ -9,7 +9,7 @@ const FOLDER = new URL('../../docs/pictures/', import.meta.url).pathname;
 const base = process.argv[2] ?? 'http://127.0.0.1:4600';
 const executablePath = process.env['CHROMIUM_PATH'] ?? '/usr/bin/chromium';
 
-type Row = { id: string; status: string; counts?: { nonconformity: number } };
+type Row = { id: string; status: string; counts?: { lines: number; nonconformity: number } };
 type Listed = { items: Row[] };
 
 const KINDS = ['set', 'straighten', 'relevel'] as const;
@@ -28,7 +28,10 @@ async function takeAll(using: Browser): Promise<void> {
     const page = await using.newPage({ viewport: { width: 1440, height: 900 }, colorScheme: theme });
     await signIn(page, 'inspector@larkmoor.example', info.demo.password);
     const batches = await read<Listed>(page, '/api/batches?limit=200');
-    const batch = batches.items.find((one) => one.status === 'in-review');
+    // The largest of those under review.
+    const batch = batches.items
+      .filter((one) => one.status === 'in-review')
+      .toSorted((a, b) => (b.counts?.lines ?? 0) - (a.counts?.lines ?? 0))[0];
     if (!batch) throw new Error('The demo has no batch in review any more: npm run reset, then npm start.');
     await take(page, `/review/${batch.id}`, `review-desk-${theme}`);
     const records = await read<Listed>(page, `/api/batches/${batch.id}/records?limit=200`);

@@ -21,7 +21,13 @@ const cells = {
 };
 
 describe('measurements of a record', () => {
-  const groups = measurementGroups({ record, cells }, false);
+  const events = [
+    {
+      event: 2,
+      values: { structureNumber: 'L-1', event: 2, foamTopBelowGradeIn: 0.5, letGoAt: 'not-by-us' },
+    },
+  ];
+  const groups = measurementGroups({ record, cells, events }, false);
   const row = (field: string) => groups.flatMap((group) => group.rows).find((one) => one.field === field);
 
   it('names value, unit and cell, and what was written where it reads differently', () => {
@@ -36,8 +42,21 @@ describe('measurements of a record', () => {
     expect(row('boreDepthFt')).toMatchObject({ value: 'cannot be read', written: 'deep', cell: 'Set!U9' });
   });
 
+  it('tells each rework in a group of its own', () => {
+    expect(groups.at(-1)?.rows.map((one) => [one.field, one.value])).toEqual([
+      ['letGoAt', 'not by us'],
+      ['foamTopBelowGradeIn', '0.5 in'],
+    ]);
+  });
+
   it('leaves out blank groups and keeps what no group knows', () => {
-    expect(groups.map((group) => group.title)).toEqual(['Pole', 'Bore', 'Clock', 'Other']);
+    expect(groups.map((group) => group.title)).toEqual([
+      'Pole',
+      'Bore',
+      'Clock',
+      'Other',
+      'Rework or repair, event 2',
+    ]);
     expect(row('crewSize')?.cell).toBe('Set!BA9');
   });
 });

@@ -15,27 +15,46 @@ export type MeasurementRow = {
 };
 export type MeasurementGroup = { readonly title: string; readonly rows: readonly MeasurementRow[] };
 
-type Source = Pick<RecordSheetData, 'cells'> & {
+type Source = Pick<RecordSheetData, 'cells' | 'events'> & {
   readonly record: Pick<RecordSheetData['record'], 'kind' | 'sheet' | 'values'>;
 };
 
+/** Said by the group's title and the page's. */
+const EVENT_HEAD: ReadonlySet<string> = new Set(['structureNumber', 'kind', 'event']);
+
 /** Everything that was written of a line, in groups; a blank field is left out. */
-export function measurementGroups({ record, cells }: Source, metric: boolean): readonly MeasurementGroup[] {
+export function measurementGroups(
+  { record, cells, events }: Source,
+  metric: boolean,
+): readonly MeasurementGroup[] {
   const groups = FIELD_GROUPS[record.kind];
   const named = new Set(groups.flatMap((group) => group.fields));
   const other = [...new Set([...Object.keys(record.values), ...Object.keys(cells)])].filter(
     (field) => !named.has(field),
   );
-  return [...groups, { title: 'Other', fields: other }]
-    .map(({ title, fields }) => ({
-      title,
-      rows: fields.flatMap((field) => rowOf({ record, cells }, { field, metric }) ?? []),
-    }))
-    .filter((group) => group.rows.length > 0);
+  const written = [...groups, { title: 'Other', fields: other }].map(({ title, fields }) => ({
+    title,
+    rows: fields.flatMap((field) => rowOf({ record, cells }, { field, metric }) ?? []),
+  }));
+  return [...written, ...events.map((event) => eventGroup(event, metric))].filter(
+    (group) => group.rows.length > 0,
+  );
+}
+
+/** What a rework or repair left; what was found before it stays as it is above. */
+function eventGroup({ event, values }: RecordSheetData['events'][number], metric: boolean): MeasurementGroup {
+  const fields = [...RECORD_FIELDS.event].filter(([field]) => !EVENT_HEAD.has(field));
+  return {
+    title: `Rework or repair, event ${event ?? 'not numbered'}`,
+    rows: fields.flatMap(([field, meta]) => {
+      const value = show(values[field], meta.unit, metric);
+      return value === null ? [] : [{ field, title: meta.title, value, written: null, cell: null }];
+    }),
+  };
 }
 
 function rowOf(
-  { record, cells }: Source,
+  { record, cells }: Pick<Source, 'record' | 'cells'>,
   { field, metric }: { field: string; metric: boolean },
 ): MeasurementRow | null {
   const value = record.values[field];

@@ -1,4 +1,3 @@
-import { RulesOffFact } from '#src/components/evidence/rules-off.tsx';
 import { Button } from '#src/components/ui/button.tsx';
 import { Fact, PageBand } from '#src/components/ui/page-band.tsx';
 import { DecisionBar } from '#src/components/ui/progress.tsx';
@@ -37,7 +36,6 @@ export function DeskBand({ batch, counts, onClose, move }: Props) {
           {revision.standards.length > 0 ? (
             <Fact word="standard">{revision.standards.join(', ')}</Fact>
           ) : null}
-          <RulesOffFact batchId={batch.id} revision={open ? revision.number - 1 : revision.number} />
           {holder && holder.id !== user.id ? <Fact word="held by">{holder.name}</Fact> : null}
           {open ? <Fact>revision {revision.number} is with the contractor</Fact> : null}
           {open || batch.status === 'in-review' ? null : (

@@ -1,4 +1,5 @@
 import { Button } from '#src/components/ui/button.tsx';
+import { RulesOff } from '#src/components/evidence/rules-off.tsx';
 import { Tabs } from '#src/components/ui/tabs.tsx';
 import { useApproveClean } from '#src/features/review/api/approve-clean.ts';
 import { LineList } from '#src/features/review/components/line-list.tsx';
@@ -40,6 +41,7 @@ export function LinesPane({ desk, batch, lines, clean }: Props) {
           <LineList lines={desk.listed} selected={desk.line} onSelect={desk.select} ownFindings={desk.own} />
         </div>
       </Tabs>
+      <RulesOff batchId={batch.id} revision={shownRevision(batch)} />
       {clean > 0 && batch.can.includes('close-review') ? (
         <div className="shrink-0 border-t border-hairline px-3 py-2">
           {approve.error ? (
@@ -60,4 +62,10 @@ export function LinesPane({ desk, batch, lines, clean }: Props) {
       ) : null}
     </>
   );
+}
+
+/** What is decided here was submitted; a newer revision is the contractor's until they submit it. */
+function shownRevision({ status, revision }: Batch): number {
+  const open = status === 'draft' || status === 'checking' || status === 'checked';
+  return open ? revision.number - 1 : revision.number;
 }
