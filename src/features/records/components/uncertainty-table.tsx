@@ -50,13 +50,17 @@ export function UncertaintyTable({ data }: { data: RecordSheetData }) {
         rowKey={(part) => part.source}
       />
       {worstReading ? (
-        <p className="px-gutter py-2.5 text-small text-ink-2">
-          Of the readings, {fieldTitle(record.kind, worstReading).toLowerCase()} contributes most: measure
-          that again first.
-        </p>
+        <p className="px-gutter py-2.5 text-small text-ink-2">{againFirst(record.kind, worstReading)}</p>
       ) : null}
     </section>
   );
+}
+
+/** The four gaps of a pad weigh the same: none of them comes before the others. */
+function againFirst(kind: Kind, worstReading: string): string {
+  return kind === 'relevel'
+    ? 'Of the readings, the gaps contribute most: measure all four again first.'
+    : `Of the readings, ${fieldTitle(kind, worstReading).toLowerCase()} contributes most: measure that again first.`;
 }
 
 function sourceCell({ source, fields }: Part, kind: Kind) {
@@ -64,7 +68,7 @@ function sourceCell({ source, fields }: Part, kind: Kind) {
   return (
     <>
       {WORDS[source]}
-      <span className="block text-small text-muted">
+      <span className="block text-small font-normal text-muted">
         {source === 'yield' ? 'as the owner’s standard states it' : read || 'by the class table, not taped'}
       </span>
     </>

@@ -45,9 +45,15 @@ const COLUMNS: readonly PlainColumn<RegisterRow>[] = [
     id: 'embedment',
     title: 'Embedment',
     figures: true,
-    cell: (row) => <Quantity value={row.embedmentFt} unit="ft" />,
+    // A pad has neither depth; what is due is due of a pole that is set.
+    cell: (row) => (row.kind === 'relevel' ? '–' : <Quantity value={row.embedmentFt} unit="ft" />),
   },
-  { id: 'due', title: 'Due', figures: true, cell: (row) => <Quantity value={row.dueFt} unit="ft" /> },
+  {
+    id: 'due',
+    title: 'Due',
+    figures: true,
+    cell: (row) => (row.kind === 'set' ? <Quantity value={row.dueFt} unit="ft" /> : '–'),
+  },
   {
     id: 'fill',
     title: 'Fill ratio',
