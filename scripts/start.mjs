@@ -70,6 +70,12 @@ async function start() {
   await step('Client', async (say) =>
     say((await ensureClientBuild(root)) ? 'built' : 'already built from these sources'),
   );
+  await step('Child processes', async (say) => {
+    // By import here: the packages were perhaps not there when this program began.
+    const { buildChildPrograms } = await import('./lib/child-programs.mjs');
+    env.CHILD_PROGRAMS = await buildChildPrograms(root);
+    say('built');
+  });
   const server = await step('Server', () =>
     startServer({ settings, env, logFile: path.join(logs, 'server.log') }),
   );

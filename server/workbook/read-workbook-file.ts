@@ -1,7 +1,5 @@
-import { fork, type ChildProcess } from 'node:child_process';
 import { open } from 'node:fs/promises';
-import { createRequire } from 'node:module';
-import { fileURLToPath, pathToFileURL } from 'node:url';
+import { startChild } from '#server/children/start-child.ts';
 import { checkFileSize } from '#shared/workbook/preflight.ts';
 import type { Workbook } from '#shared/workbook/types.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
@@ -22,25 +20,14 @@ export type ReadOptions = {
 const WATCH_EVERY_MS = 50;
 /** How a process ends whose heap is full: by SIGABRT, or by what a shell makes of it. */
 const ABORTED = 134;
-const CHILD = fileURLToPath(new URL('./reader-child.ts', import.meta.url));
 const inSlot = createSlots(2);
-
-function startChild(path: string, heapLimitMb: number): ChildProcess {
-  const loader = pathToFileURL(createRequire(import.meta.url).resolve('tsx')).href;
-  return fork(CHILD, [path], {
-    execArgv: [`--max-old-space-size=${heapLimitMb}`, '--import', loader],
-    // Nothing of the server's settings (database, secrets) is within reach of code that reads a stranger's file.
-    env: { TZ: 'UTC', PATH: process.env['PATH'] ?? '', NODE_ENV: 'production' },
-    stdio: ['ignore', 'ignore', 'ignore', 'ipc'],
-  });
-}
 
 function readInChild(
   path: string,
   { timeLimitMs = 30_000, memoryLimitBytes = 400_000_000, heapLimitMb = 256 }: ReadOptions,
 ): Promise<Workbook> {
   return new Promise((resolve, reject) => {
-    const child = startChild(path, heapLimitMb);
+    const child = startChild('reader', { args: [path], flags: [`--max-old-space-size=${heapLimitMb}`] });
     const collector = createCollector();
     let verdict: WorkbookRefused | null = null;
     let done = false;

@@ -7,13 +7,20 @@
 import { mkdtemp, rm, stat } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
 import { median } from '#scripts/bench/lib/stats.ts';
+import { buildChildPrograms } from '#scripts/lib/child-programs.mjs';
 import { machine } from '#scripts/bench/machine.ts';
 import { writeBenchWorkbook } from './bench-workbook.ts';
 import { compareFindings } from './compare-findings.ts';
-import { runOpenpyxl, runStep } from './run-steps.ts';
+import { buildStep, runOpenpyxl, runStep } from './run-steps.ts';
 import { wholeCheck } from './whole-check.ts';
 
+// As the product runs: plain files, as `npm start` builds them.
+process.env['CHILD_PROGRAMS'] = await buildChildPrograms(
+  fileURLToPath(new URL('../../../', import.meta.url)),
+);
+const step = await buildStep();
 const [lines = 10_000, runs = 3] = process.argv.slice(2).map(Number);
 const folder = await mkdtemp(join(tmpdir(), 'upstand-bench-'));
 try {
@@ -23,8 +30,8 @@ try {
   let found = await wholeCheck(file, lines);
   const script = await runOpenpyxl(file);
   const steps = [
-    { name: 'reader alone', run: () => runStep('read', file) },
-    { name: 'reader and records', run: () => runStep('records', file) },
+    { name: 'reader alone', run: () => runStep(step, 'read', file) },
+    { name: 'reader and records', run: () => runStep(step, 'records', file) },
     { name: 'whole, all rules', run: async () => void (found = await wholeCheck(file, lines)) },
     { name: 'openpyxl script, two rules', run: async () => void (await runOpenpyxl(file)) },
   ];

@@ -1,5 +1,6 @@
 import { spawn } from 'node:child_process';
 import { fileURLToPath } from 'node:url';
+import { build } from 'esbuild';
 import { DEMO_PRODUCT, DEMO_STANDARD } from '#shared/standard/demo.ts';
 
 export type Structures = {
@@ -27,13 +28,22 @@ function run(program: string, args: readonly string[], input: string): Promise<s
   });
 }
 
-export async function runStep(step: 'read' | 'records', file: string): Promise<void> {
-  await run(
-    process.execPath,
-    // As the product starts its own.
-    ['--max-semi-space-size=32', '--import', 'tsx', here('./step-child.ts'), step, file],
-    '',
-  );
+/** The step's program in one plain file, as the product's own are; gives its path. */
+export async function buildStep(): Promise<string> {
+  const outfile = here('../../../node_modules/.cache/upstand-bench/step.mjs');
+  await build({
+    entryPoints: [here('./step-child.ts')],
+    outfile,
+    bundle: true,
+    packages: 'external',
+    platform: 'node',
+    format: 'esm',
+  });
+  return outfile;
+}
+
+export async function runStep(program: string, step: 'read' | 'records', file: string): Promise<void> {
+  await run(process.execPath, ['--max-semi-space-size=32', program, step, file], '');
 }
 
 /** Says how to install openpyxl when it is not there, and fails. */

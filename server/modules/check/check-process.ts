@@ -1,6 +1,4 @@
-import { fork, type ChildProcess } from 'node:child_process';
-import { createRequire } from 'node:module';
-import { fileURLToPath, pathToFileURL } from 'node:url';
+import { startChild } from '#server/children/start-child.ts';
 import { residentMemory } from '#server/workbook/resident-memory.ts';
 import { WorkbookRefused } from '#shared/workbook/workbook-refused.ts';
 import type {
@@ -20,7 +18,6 @@ const READ_MS = 30_000;
 const WATCH_EVERY_MS = 50;
 /** Rows of a list in one message to the process. */
 const SLICE = 2_000;
-const CHILD = fileURLToPath(new URL('./check-child.ts', import.meta.url));
 
 /** How a process ends whose heap is full: by SIGABRT, or by what a shell makes of it. */
 const ABORTED = 134;
@@ -36,18 +33,6 @@ export type CheckProcess = {
   readonly end: () => void;
 };
 
-function startChild(path: string): ChildProcess {
-  const loader = pathToFileURL(createRequire(import.meta.url).resolve('tsx')).href;
-  return fork(CHILD, [path], {
-    // A young generation as large as the work: most of what is read lives until the end, and was copied over and over.
-    execArgv: [`--max-old-space-size=${HEAP_MB}`, '--max-semi-space-size=32', '--import', loader],
-    // Nothing of the server's settings (database, secrets) is within reach of code that reads a stranger's file.
-    env: { TZ: 'UTC', PATH: process.env['PATH'] ?? '', NODE_ENV: 'production' },
-    stdio: ['ignore', 'ignore', 'ignore', 'ipc'],
-    serialization: 'advanced',
-  });
-}
-
 /** Why a process said nothing more: over the workbook, or over what we made of it. */
 function endedEarly({ full, read }: { full: boolean; read: boolean }): Error {
   if (full) return new WorkbookRefused('reader-memory');
@@ -59,7 +44,12 @@ function endedEarly({ full, read }: { full: boolean; read: boolean }): Error {
  * not grow with the workbook. Rows cross one document at a time.
  */
 export function startCheckProcess(path: string, signal: AbortSignal): CheckProcess {
-  const child = startChild(path);
+  const child = startChild('check', {
+    args: [path],
+    // A young generation as large as the work: most of what is read lives until the end, and was copied over and over.
+    flags: [`--max-old-space-size=${HEAP_MB}`, '--max-semi-space-size=32'],
+    serialization: 'advanced',
+  });
   const arrived: FromCheck[] = [];
   let wake: (() => void) | null = null;
   let failure: Error | null = null;

@@ -1,9 +1,7 @@
-import { fork, type ChildProcess } from 'node:child_process';
-import { createRequire } from 'node:module';
-import { fileURLToPath, pathToFileURL } from 'node:url';
+import type { ChildProcess } from 'node:child_process';
+import { startChild } from '#server/children/start-child.ts';
 import type { PictureAnswer, PictureRequest } from './picture-messages.ts';
 
-const CHILD = fileURLToPath(new URL('./picture-child.ts', import.meta.url));
 const TIME_LIMIT_MS = 60_000;
 
 const CRASHED: PictureAnswer = {
@@ -18,7 +16,7 @@ export class PictureProcess {
 
   async decode(request: PictureRequest, signal: AbortSignal): Promise<PictureAnswer> {
     signal.throwIfAborted();
-    const child = (this.#child ??= start());
+    const child = (this.#child ??= startChild('picture', { flags: ['--max-old-space-size=256'] }));
     const answer = await new Promise<PictureAnswer | 'aborted'>((resolve) => {
       const timer = setTimeout(() => child.kill('SIGKILL'), TIME_LIMIT_MS);
       const onMessage = (message: unknown) => end(message as PictureAnswer);
@@ -45,14 +43,4 @@ export class PictureProcess {
     this.#child?.kill('SIGKILL');
     this.#child = null;
   }
-}
-
-function start(): ChildProcess {
-  const loader = pathToFileURL(createRequire(import.meta.url).resolve('tsx')).href;
-  return fork(CHILD, [], {
-    execArgv: ['--max-old-space-size=256', '--import', loader],
-    // Nothing of the server's settings (database, secrets) is within reach of code that reads a stranger's picture.
-    env: { TZ: 'UTC', PATH: process.env['PATH'] ?? '', NODE_ENV: 'production' },
-    stdio: ['ignore', 'ignore', 'ignore', 'ipc'],
-  });
 }

@@ -1,0 +1,1 @@
+export function buildChildPrograms(root: string): Promise<string>;
