@@ -18,6 +18,10 @@ describe('registry', () => {
     expect(RULES.map((rule) => rule.code).toSorted()).toEqual(folders.toSorted());
   });
 
+  it('is all that the demo standard sets, and no more', () => {
+    expect(Object.keys(DEMO_STANDARD.rules).toSorted()).toEqual(folders.toSorted());
+  });
+
   it.each(folders)('%s has rule, test and README', (folder) => {
     const files = ['rule.ts', 'rule.test.ts', 'README.md'];
     expect(files.filter((file) => !existsSync(new URL(`${folder}/${file}`, HERE)))).toEqual([]);
