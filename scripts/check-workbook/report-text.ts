@@ -76,7 +76,7 @@ export const reportText = (result: CheckResult): string => {
     );
   });
   const batch = byLine.get('') ?? [];
-  const skipped = result.skipped.map((one) => `  ${one.code.padEnd(16)}${REASON[one.reason]}${onlyIn(one)}`);
+  const skipped = result.skipped.map((one) => `  ${one.code.padEnd(19)}${REASON[one.reason]}${onlyIn(one)}`);
   const counts = countFindings(result.findings);
   return [
     ...lines,

@@ -106,8 +106,8 @@ describe('a batch over two versions of the standard', () => {
   });
 
   it('keeps what it was judged on when a later version is published', async () => {
-    // In force from a day before both: not for what was handed in already.
-    await publish('2026-04-01', {
+    // In force from a day before the work of May: not for what was handed in already.
+    await publish('2026-05-10', {
       'plumb-out': { ...rules['plumb-out'], params: { ...rules['plumb-out'].params, limitInPer10Ft: 0.1 } },
     });
     expect(await judged(inspector)).toEqual(TWO_VERSIONS);
