@@ -100,7 +100,12 @@ export function DataList<Row extends object>({
               onSort={filters?.toggleSort}
             />
           )}
-          <div ref={body} role="rowgroup" className="relative" style={{ height: virtualizer.getTotalSize() }}>
+          <div
+            ref={body}
+            role="rowgroup"
+            className="relative print:h-auto!"
+            style={{ height: virtualizer.getTotalSize() }}
+          >
             {items.map((item) => {
               const row = rows[item.index];
               return row ? (
@@ -112,7 +117,8 @@ export function DataList<Row extends object>({
                   aria-rowindex={item.index + 2}
                   aria-current={item.index === active ? 'true' : undefined}
                   onFocus={() => setActive(item.index)}
-                  className="absolute inset-x-0 top-0"
+                  // On paper the rows take the heights that they have there.
+                  className="absolute inset-x-0 top-0 print:static! print:transform-none!"
                   style={{ transform: `translateY(${item.start - margin}px)` }}
                 >
                   <Row

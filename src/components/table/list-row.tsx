@@ -27,7 +27,7 @@ export function ListRow<Row>({ row, columns, active, to }: Props<Row>) {
           key={column.id}
           role="cell"
           className={classNames(
-            'line-clamp-2 min-w-0 py-1 break-words [&_*]:whitespace-normal',
+            'line-clamp-3 min-w-0 print:line-clamp-none py-1 break-words [&_*]:whitespace-normal',
             column.figures && 'text-right',
             column.main && 'font-semibold',
           )}

@@ -57,7 +57,7 @@ export function SubmitDialog({ batch, view, hindrances, onClose, onShow }: Props
             <Row part word="of them clean" figure={clean} />
             <Row word="Nonconformities that stand" figure={nonconformity} />
             <Row word="Queries that stand" figure={query} />
-            <Row part word="of these not answered in writing" figure={unanswered} />
+            <Row word="Findings without an answer in writing" figure={unanswered} />
             <Row word="Photographs" figure={photos} />
             <Row part word="of them on no line" figure={unplacedPhotos} />
           </dl>

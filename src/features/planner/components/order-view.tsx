@@ -10,6 +10,7 @@ import type { PlanState } from '../lib/use-plan-texts.ts';
 import { FoamFields } from './foam-fields.tsx';
 import { FormSection } from './form-section.tsx';
 import { OrderKits } from './order-kits.tsx';
+import { OrderPrintHead } from './order-print-head.tsx';
 import { OrderPicker } from './order-picker.tsx';
 import { OrderStructures } from './order-structures.tsx';
 import type { PlannedRow } from './order-columns.tsx';
@@ -132,6 +133,7 @@ export function OrderView({ orderId, everything, state, context, products }: Pro
             <Skeleton lines={10} />
           ) : (
             <>
+              <OrderPrintHead {...{ orderId, everything, texts: later, context }} />
               <OrderKits
                 allotted={allotted}
                 priceOf={priceOf}
@@ -161,6 +163,7 @@ export function OrderView({ orderId, everything, state, context, products }: Pro
                 }
               />
               <OrderStructures rows={plan.rows} rowTo={rowTo} />
+              <div className="mt-4 hidden break-inside-avoid print:block">{CAUTIONS}</div>
             </>
           )}
         </div>

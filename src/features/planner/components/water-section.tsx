@@ -4,6 +4,7 @@ import { PlanInput } from './plan-input.tsx';
 import { PlainTable, type PlainColumn } from '#src/components/table/plain-table.tsx';
 import { Figure } from '#src/components/ui/figure.tsx';
 import { Glyph } from '#src/components/ui/glyph.tsx';
+import { classNames } from '#src/lib/class-names.ts';
 import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { Quantity, useUnitWord } from '#src/components/ui/quantity.tsx';
 import {
@@ -44,7 +45,12 @@ export function WaterSection({ plan, standard }: { readonly plan: Plan; readonly
           )
         }
       />
-      <div className="grid grid-cols-[9rem_minmax(0,1fr)] items-end gap-3 px-gutter py-3">
+      <div
+        className={classNames(
+          'grid grid-cols-[9rem_minmax(0,1fr)] items-end gap-3 px-gutter py-3',
+          met === null && 'print:hidden',
+        )}
+      >
         <PlanInput name="waterIn" label="Standing now" />
         <div aria-live="polite" className="text-table">
           {met && goesIn ? <Action answer={met} most={most} /> : null}

@@ -85,7 +85,7 @@ export function RecordPage({ data }: { data: RecordSheetData }) {
             <PrintFindings findings={findings} />
           </div>
           <div className="border-t border-hairline print:hidden">
-            <DerivedFigures record={record} hint={data.uncertainty.length === 0} />
+            <DerivedFigures record={record} hint={data.uncertainty.length === 0} limits={limits.data} />
             <UncertaintyTable data={data} />
             <StrengthTable data={data} />
             <Measurements data={data} />
