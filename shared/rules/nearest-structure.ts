@@ -66,6 +66,8 @@ export const nearestStructure = <T>(
             apartFt < nearest.apartFt ||
             (apartFt === nearest.apartFt && distanceFt < nearest.distanceFt);
           if (nearer) nearest = { other: other.of, apartFt, distanceFt };
+          // Nothing is nearer, and thousands may have been given the very same place.
+          if (distanceFt === 0) return nearest;
         }
       }
     }

@@ -19,7 +19,7 @@ export const READER_LIMITS = {
   /** Cell styles and number formats; Excel itself allows 65,490. */
   styles: 100_000,
   rows: 200_000,
-  cells: 600_000,
+  cells: 1_000_000,
   sharedStrings: 500_000,
   /** Characters of the table of shared strings, and of all cells handed on (a string used twice counts twice). */
   characters: 20_000_000,
