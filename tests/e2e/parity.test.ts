@@ -18,6 +18,6 @@ beforeAll(async () => {
 }, 240_000);
 afterAll(() => made?.end());
 
-compareEveryRule(stage);
 compareWorkbooks(stage);
 compareRefused(stage);
+compareEveryRule(stage);

@@ -49,36 +49,66 @@ const doneIn = ({ lines, end }: BrowserCheck) => {
   };
 };
 
-/** The mixed workbook with a failing line for every rule and a clean one of each kind. */
+type Compared = {
+  readonly server: { readonly findings: readonly object[]; readonly records: readonly object[] };
+  readonly browser: ReturnType<typeof doneIn>;
+  /** In the browser, on no more than the page is told before hand-in. */
+  readonly routeFed: ReturnType<typeof doneIn>;
+  readonly cli: Spawned;
+  readonly report: Report;
+  readonly asOf: string;
+};
+
+async function everywhere({ agent, page, url, contextOf, folder, ...stage }: ParityStage): Promise<Compared> {
+  const { site, batch, beside } = await makeEveryRuleSite(stage.server, { agent, site: stage.site });
+  const bytes = await everyRuleWorkbook(site);
+  const reply = await agent.put(`${batch.path}/workbook`).attach('workbook', bytes, 'batch.xlsx');
+  if (reply.status !== 202) throw new Error(`The workbook was refused: ${reply.text}`);
+  await stage.server.drain();
+  const server = { findings: await findingsOf(agent, batch), records: await recordsOf(agent, batch) };
+  const asOf = await checkedAt(stage.server, batch);
+  // One "now" for all of them: a time that is still to come is told with it.
+  const told = { ...(await contextOf(site.order.id)), asOf };
+  const whole: OrderContextData = { ...told, ...beside };
+  const [workbook, context] = [join(folder, 'every-rule.xlsx'), join(folder, 'every-rule.json')];
+  await writeFile(workbook, bytes);
+  await writeFile(context, JSON.stringify(whole));
+  const [cli, browser, routeFed] = await Promise.all([
+    npmCheck([workbook, '--json', '--context', context]),
+    checkInBrowser(page, { url, bytes, context: whole }),
+    checkInBrowser(page, { url, bytes, context: told }),
+  ]);
+  return {
+    server,
+    browser: doneIn(browser),
+    routeFed: doneIn(routeFed),
+    cli,
+    report: JSON.parse(cli.stdout) as Report,
+    asOf,
+  };
+}
+
+/**
+ * The mixed workbook with a failing line for every rule and a clean one of each kind. It is begun with the file and held
+ * against the literals at its end, so that its many steps fall between those of the other comparisons.
+ */
 export function compareEveryRule(stage: () => ParityStage): void {
+  let begun: Promise<Compared>;
+  beforeAll(() => {
+    begun = everywhere(stage());
+    // Told where it is awaited.
+    begun.catch(() => null);
+  });
+
   describe('one line for every rule’s failing side, and a clean line of each kind', () => {
-    let server: { findings: readonly object[]; records: readonly object[] };
-    let browser: ReturnType<typeof doneIn>;
-    let routeFed: ReturnType<typeof doneIn>;
-    let cli: Spawned;
+    let server: Compared['server'];
+    let browser: Compared['browser'];
+    let routeFed: Compared['routeFed'];
+    let cli: Compared['cli'];
     let report: Report;
     let asOf: string;
-
     beforeAll(async () => {
-      const { agent, page, url, contextOf, folder, ...rest } = stage();
-      const { site, batch, beside } = await makeEveryRuleSite(rest.server, { agent, site: rest.site });
-      const bytes = await everyRuleWorkbook(site);
-      const reply = await agent.put(`${batch.path}/workbook`).attach('workbook', bytes, 'batch.xlsx');
-      expect(reply.status).toBe(202);
-      await rest.server.drain();
-      server = { findings: await findingsOf(agent, batch), records: await recordsOf(agent, batch) };
-      asOf = await checkedAt(rest.server, batch);
-      // One "now" for all of them: a time that is still to come is told with it.
-      const told = { ...(await contextOf(site.order.id)), asOf };
-      const whole: OrderContextData = { ...told, ...beside };
-      const [workbook, context] = [join(folder, 'every-rule.xlsx'), join(folder, 'every-rule.json')];
-      await writeFile(workbook, bytes);
-      await writeFile(context, JSON.stringify(whole));
-      const spawned = npmCheck([workbook, '--json', '--context', context]);
-      browser = doneIn(await checkInBrowser(page, { url, bytes, context: whole }));
-      routeFed = doneIn(await checkInBrowser(page, { url, bytes, context: told }));
-      cli = await spawned;
-      report = JSON.parse(cli.stdout) as Report;
+      ({ server, browser, routeFed, cli, report, asOf } = await begun);
     }, 240_000);
 
     it('has every rule of the registry', () => {
