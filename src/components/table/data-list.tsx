@@ -81,7 +81,12 @@ export function DataList<Row extends object>({
   return (
     <div ref={frame} className="flex flex-1 flex-col">
       {list.error && rows.length === 0 ? (
-        <ErrorState error={list.error} what="The list" onRetry={list.refetch} />
+        <ErrorState
+          error={list.error}
+          what="The list"
+          onRetry={list.refetch}
+          onClear={filters && filters.count > 0 ? filters.clear : undefined}
+        />
       ) : null}
       {list.isPending ? <Skeleton lines={12} /> : null}
       {!list.isPending && !list.error && rows.length === 0 ? empty : null}

@@ -9,11 +9,15 @@ type Props = {
   /** What the person was about to see or do: "The batch". */
   readonly what?: string;
   readonly onRetry?: () => void;
+  /** Of a list: its filters stand in the address, and an address may be out of date. */
+  readonly onClear?: () => void;
 };
 
 /** What happened, what it means, what to do. */
-export function ErrorState({ error, what, onRetry }: Props) {
+export function ErrorState({ error, what, onRetry, onClear }: Props) {
   const problem = error instanceof ApiProblem ? error : null;
+  // The sentence often says the one thing that is wrong already.
+  const further = (problem?.errors ?? []).filter(({ detail }) => !problem?.message.includes(detail));
   return (
     <div role="alert" className="flex max-w-prose gap-3 px-gutter py-6">
       <Glyph name="triangle" className="mt-0.5" />
@@ -23,9 +27,9 @@ export function ErrorState({ error, what, onRetry }: Props) {
           {problem?.message ??
             'Something in this page failed. What you sent before is kept. Load the page again; if it fails again, tell the administrator.'}
         </p>
-        {problem && problem.errors.length > 0 ? (
+        {further.length > 0 ? (
           <ul className="mt-2 list-disc pl-5 text-ink-2">
-            {problem.errors.map((entry) => (
+            {further.map((entry) => (
               <li key={`${entry.pointer} ${entry.code} ${entry.detail}`}>{entry.detail}</li>
             ))}
           </ul>
@@ -34,6 +38,10 @@ export function ErrorState({ error, what, onRetry }: Props) {
           <p className="mt-3">
             <TextLink to={paths.home.to()}>What waits for you</TextLink>
           </p>
+        ) : problem?.status === 400 && onClear ? (
+          <Button className="mt-4" onClick={onClear}>
+            Clear the filters
+          </Button>
         ) : onRetry ? (
           <Button className="mt-4" onClick={onRetry}>
             Try again

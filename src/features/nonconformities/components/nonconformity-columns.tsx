@@ -12,7 +12,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     id: 'structure',
     title: 'Structure',
     min: 4.8,
-    grow: 0.3,
+    grow: 0.1,
     main: true,
     cell: (row) => row.structureNumber ?? `batch ${row.batch.number}`,
   },
@@ -20,7 +20,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     id: 'rule',
     title: 'Rule',
     min: 7,
-    grow: 1.5,
+    grow: 8,
     cell: (row) => <span title={row.message}>{row.title}</span>,
   },
   {
@@ -28,7 +28,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     title: 'Measured',
     figures: true,
     min: 6.2,
-    grow: 0.6,
+    grow: 0.1,
     cell: (row) => <ComparedValue value={row.measured} unit={row.unit} plusMinus={row.uncertainty} />,
   },
   {
@@ -36,7 +36,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     title: 'Limit',
     figures: true,
     min: 5,
-    grow: 0.6,
+    grow: 6.3,
     // A word alone, as of the view that a missing photograph should show, is no limit.
     cell: (row) => (
       <ComparedValue
@@ -50,7 +50,7 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     title: 'Margin',
     figures: true,
     min: 5,
-    grow: 1,
+    grow: 7.2,
     cell: (row) =>
       row.margin === null ? (
         <span className="text-muted">–</span>
@@ -65,25 +65,25 @@ export const NONCONFORMITY_COLUMNS: readonly DataColumn<Nonconformity>[] = [
     off: true,
     cell: (row) => <StateWord {...SEVERITY_WORDS[row.severity]} />,
   },
-  { id: 'state', title: 'State', min: 9.2, grow: 0.4, cell: (row) => <NonconformityState row={row} /> },
+  { id: 'state', title: 'State', min: 9.2, grow: 0.1, cell: (row) => <NonconformityState row={row} /> },
   {
     id: 'due',
     title: 'Action due',
     min: 6,
-    grow: 2.5,
+    grow: 7.5,
     cell: (row) => <span title={actionDue(row)}>{actionDue(row)}</span>,
   },
-  { id: 'contractor', title: 'Contractor', min: 5.6, grow: 2.6, cell: (row) => row.contractor.name },
-  { id: 'lot', title: 'Lot', min: 4.8, grow: 0.4, cell: (row) => row.lots.join(', ') || '–' },
+  { id: 'contractor', title: 'Contractor', min: 5.6, grow: 10.3, cell: (row) => row.contractor.name },
+  { id: 'lot', title: 'Lot', min: 4.8, grow: 0.1, cell: (row) => row.lots.join(', ') || '–' },
   {
     id: 'installed',
     title: 'Installed',
     figures: true,
     min: 5.9,
-    grow: 0.3,
+    grow: 0.1,
     cell: (row) => (row.installedOn ? <Day on={row.installedOn} /> : 'not known'),
   },
-  { id: 'by', title: 'Decided by', min: 5.2, grow: 0.4, cell: (row) => row.decidedBy ?? '–' },
+  { id: 'by', title: 'Decided by', min: 5.2, grow: 0.1, cell: (row) => row.decidedBy ?? '–' },
   { id: 'kind', title: 'Kind', min: 5, off: true, cell: (row) => (row.kind ? kindWord(row.kind) : '–') },
   { id: 'order', title: 'Work order', min: 5, off: true, cell: (row) => row.workOrder.number },
   {
