@@ -35,6 +35,23 @@ export function PhotoGrid({ photos, onOpen, wide }: Props) {
   );
 }
 
+/** The place of prints that are still to come, as large as they will be, so that nothing moves when they do. */
+export function PhotoGridSpace({ photos }: { readonly photos: readonly Pick<Photo, 'id' | 'view'>[] }) {
+  return (
+    <ul aria-hidden className={classNames('grid gap-2 px-3 py-2.5', columnsFor(photos.length))}>
+      {photos.map((photo) => (
+        <li key={photo.id} className="min-w-0 border border-rule bg-paper">
+          <span className="block aspect-3/2 bg-sunk" />
+          <span className="block px-1.5 py-1">
+            <span className="block truncate text-small font-semibold">{viewWord(photo.view)}</span>
+            <span className="block text-micro">{'\u00A0'}</span>
+          </span>
+        </li>
+      ))}
+    </ul>
+  );
+}
+
 /** More prints stand closer, so that what is said of them stays in sight. */
 function columnsFor(count: number, wide = false): string {
   if (wide) return 'grid-cols-[repeat(auto-fill,minmax(9rem,1fr))]';

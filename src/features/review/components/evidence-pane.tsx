@@ -1,6 +1,6 @@
 import { HistoryList } from '#src/components/evidence/history-list.tsx';
 import { LineRevisions } from '#src/components/evidence/line-revisions.tsx';
-import { PhotoGrid } from '#src/components/evidence/photo-grid.tsx';
+import { PhotoGrid, PhotoGridSpace } from '#src/components/evidence/photo-grid.tsx';
 import { SectionHead } from '#src/components/ui/page-band.tsx';
 import { FindingDecision } from '#src/features/review/components/finding-decision.tsx';
 import { FindingItem } from '#src/features/review/components/finding-item.tsx';
@@ -13,7 +13,9 @@ import { counted } from '#src/lib/formats.ts';
 export function EvidencePane({ desk, onPhoto }: { desk: DeskModel; onPhoto: (index: number) => void }) {
   const { hand, sheet, whole } = desk;
   const photos = whole ? [] : (sheet.data?.photos ?? []);
-  const views = new Set(photos.map((photo) => photo.view)).size;
+  // Known with the list of lines, before the record is.
+  const expected = sheet.data ? photos : (desk.record?.photos ?? []);
+  const views = new Set(expected.map((photo) => photo.view)).size;
   const decided = desk.due.filter((finding) => finding.state !== 'undecided').length;
   const numbers = new Map(desk.due.map((finding, index) => [finding.id, index + 1]));
   const record = whole ? null : (sheet.data?.record ?? null);
@@ -24,12 +26,13 @@ export function EvidencePane({ desk, onPhoto }: { desk: DeskModel; onPhoto: (ind
           <SectionHead
             title="Evidence"
             aside={
-              photos.length === 0
+              expected.length === 0
                 ? 'no photographs'
-                : `${counted(photos.length, 'photograph')}, ${counted(views, 'view')}`
+                : `${counted(expected.length, 'photograph')}, ${counted(views, 'view')}`
             }
           />
           {photos.length > 0 ? <PhotoGrid photos={photos} onOpen={onPhoto} /> : null}
+          {!sheet.data && expected.length > 0 ? <PhotoGridSpace photos={expected} /> : null}
         </section>
       )}
       <section aria-label="Findings">
