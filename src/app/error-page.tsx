@@ -4,16 +4,25 @@ import { ErrorState } from '#src/components/ui/error-state.tsx';
 
 /** A page that failed while it was drawn, or whose code could not be fetched after a new version was put up. */
 export function ErrorPage() {
-  const error = useRouteError();
   return (
     <main>
+      <ErrorInShell />
+    </main>
+  );
+}
+
+/** The same inside the shell, which is the page's main part already. */
+export function ErrorInShell() {
+  const error = useRouteError();
+  return (
+    <>
       <h1 className="sr-only">This page failed</h1>
       <ErrorState
         error={isNotFetched(error) ? NOT_FETCHED : error}
         what="The page"
         onRetry={() => globalThis.location.reload()}
       />
-    </main>
+    </>
   );
 }
 

@@ -1,5 +1,5 @@
 import { createBrowserRouter, type RouteObject } from 'react-router-dom';
-import { ErrorPage } from '#src/app/error-page.tsx';
+import { ErrorInShell, ErrorPage } from '#src/app/error-page.tsx';
 import { NotFound } from '#src/app/not-found.tsx';
 import { SessionGate } from '#src/app/session-gate.tsx';
 import { Skeleton } from '#src/components/ui/skeleton.tsx';
@@ -71,7 +71,7 @@ export function createRouter() {
         {
           Component: SessionGate,
           // A page that fails leaves the header standing.
-          children: [{ ErrorBoundary: ErrorPage, children: SIGNED_IN }],
+          children: [{ ErrorBoundary: ErrorInShell, children: SIGNED_IN }],
         },
       ],
     },
