@@ -46,7 +46,7 @@ try {
   for (const finding of open.items.slice(0, times))
     decide.push(
       await inspector.time('PUT', `/api/findings/${finding.id}/decision`, {
-        body: { decision: 'reject', action: 'rework', dueOn: null, reason: 'Set it deeper.' },
+        body: { decision: 'reject', action: 'rework', dueOn: '2099-01-01', reason: 'Set it deeper.' },
         headers: { 'if-match': `"${finding.version}"` },
       }),
     );
