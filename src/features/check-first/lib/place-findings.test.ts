@@ -89,4 +89,12 @@ describe('where a finding on a typed line belongs', () => {
       placed([finding({ kind: null, sheet: 'Batch', field: 'foreman' }), finding({ field: null })]),
     ).toEqual([{ input: null, blank: false }]);
   });
+
+  it('says nothing of a pour without a line: the pours of a typed line are its own', () => {
+    expect(
+      placed([
+        finding({ kind: null, code: 'pour-orphan', sheet: 'Pours', row: 4, field: 'structureNumber' }),
+      ]),
+    ).toEqual([]);
+  });
 });
