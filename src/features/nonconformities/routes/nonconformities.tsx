@@ -71,7 +71,7 @@ export function Component() {
         }
       />
       <FilterBar filters={filters} define={define} />
-      {summary.isError ? (
+      {summary.isError && !list.error ? (
         <ErrorState error={summary.error} what="The summary" onRetry={() => void summary.refetch()} />
       ) : null}
       {summary.data && summary.data.findings > 0 ? <SummaryCharts summary={summary.data} /> : null}
