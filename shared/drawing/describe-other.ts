@@ -1,5 +1,6 @@
-import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
+import { formatQuantity } from '#shared/units/format-quantity.ts';
 import { dimensionText } from './dimension-text.ts';
+import { foamPlacedSentence } from './fact-labels.ts';
 import { findingSentence } from './finding-text.ts';
 import type { LayoutInput } from './layout-input.ts';
 import { missingName } from './missing-name.ts';
@@ -12,13 +13,9 @@ function said(sentences: Said): string[] {
   return sentences.filter((one): one is string => typeof one === 'string');
 }
 
-function common({ record, findings, metric }: LayoutInput, missing: readonly string[]): Said {
-  const { placedFt3, voidFt3, fillRatio } = record.derived;
+function common({ record, findings, purpose, metric }: LayoutInput, missing: readonly string[]): Said {
   return [
-    placedFt3 !== null &&
-      voidFt3 !== null &&
-      fillRatio !== null &&
-      `${dimensionText(placedFt3, 'ft3', metric)} of foam were placed in a void of ${dimensionText(voidFt3, 'ft3', metric)}: a fill ratio of ${formatNumber(fillRatio, { fixed: true })}.`,
+    foamPlacedSentence(record.derived, { purpose, metric }),
     missing.length > 0 && `Not given: ${missing.map(missingName).join(', ').toLowerCase()}.`,
     ...findings.map((finding) => findingSentence(finding, metric)),
   ];

@@ -1,16 +1,21 @@
 import { SECTION_SIDES, type Section } from '#shared/calc/section.ts';
 import { numberOf, textOf } from '#shared/calc/values.ts';
-import { formatNumber } from '#shared/units/format-quantity.ts';
 import { crossText, dimensionText } from './dimension-text.ts';
+import { foamPlacedSentence } from './fact-labels.ts';
 import { findingSentence } from './finding-text.ts';
 import { missingName } from './missing-name.ts';
 import type { SetSection } from './set-section.ts';
-import type { SheetFinding, SheetRecord } from './sheet-types.ts';
+import type { SheetFinding, SheetPurpose, SheetRecord } from './sheet-types.ts';
 
 /** The same as the drawing says, in sentences. */
 export function describeSet(
   record: SheetRecord,
-  { section, findings, metric }: { section: SetSection; findings: readonly SheetFinding[]; metric: boolean },
+  {
+    section,
+    findings,
+    purpose,
+    metric,
+  }: { section: SetSection; findings: readonly SheetFinding[]; purpose: SheetPurpose; metric: boolean },
 ): string[] {
   const ft = (value: number) => dimensionText(value, 'ft', metric);
   const inches = (value: number) => dimensionText(value, 'in', metric);
@@ -27,10 +32,7 @@ export function describeSet(
       `It stands ${ft(section.embedmentFt)} deep${section.dueFt === null ? '' : `; ${ft(section.dueFt)} is due`}.`,
     derived.leastAnnulusIn !== null &&
       `The space between bore and pole is at least ${inches(derived.leastAnnulusIn)}.`,
-    derived.placedFt3 !== null &&
-      derived.voidFt3 !== null &&
-      derived.fillRatio !== null &&
-      `${dimensionText(derived.placedFt3, 'ft3', metric)} of foam were placed in a void of ${dimensionText(derived.voidFt3, 'ft3', metric)}: a fill ratio of ${formatNumber(derived.fillRatio, { digits: 2, fixed: true })}.`,
+    foamPlacedSentence(derived, { purpose, metric }),
     section.foam !== null && liftSentence(section.foam, ft),
     section.foam !== null && foamSentence(section.foam, ft),
     waterSentence(section, { derivedIn: derived.waterWithPoleIn, inches }),

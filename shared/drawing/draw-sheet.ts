@@ -102,7 +102,7 @@ function contentOf(input: LayoutInput): Content {
   const layout = setLayout(input);
   return {
     marks: setMarks(layout, input),
-    sentences: describeSet(record, { section: layout.section, findings, metric }),
+    sentences: describeSet(record, { section: layout.section, findings, purpose: input.purpose, metric }),
     leftOut: layout.leftOut,
   };
 }

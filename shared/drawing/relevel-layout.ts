@@ -56,13 +56,13 @@ export function relevelLayout(input: LayoutInput): RelevelLayout {
 
 function facts(
   section: RelevelSection,
-  { record, spec, limits, metric, findings }: LayoutInput,
+  { record, spec, limits, purpose, metric, findings }: LayoutInput,
 ): ColumnLabel[] {
   const { derived } = record;
   const spoken = new Set(findings.map((finding) => finding.code));
   const out: ColumnLabel[] = [];
   const add = (...label: Parameters<typeof factLabel>) => out.push(factLabel(...label));
-  if (!spoken.has('fill-short')) out.push(...foamFact(derived, metric));
+  if (!spoken.has('fill-short')) out.push(...foamFact(derived, { purpose, metric }));
   if (spec.compact && section.lengthIn !== null && section.widthIn !== null)
     add(
       'pad',

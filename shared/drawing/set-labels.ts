@@ -2,6 +2,7 @@ import { numberOf } from '#shared/calc/values.ts';
 import { formatNumber, formatQuantity } from '#shared/units/format-quantity.ts';
 import { anchorOf, type AnchorName } from './anchors.ts';
 import { dimensionText } from './dimension-text.ts';
+import { foamTitle } from './fact-labels.ts';
 import { findingLabels, missingLabels } from './finding-labels.ts';
 import type { ColumnLabel } from './label-column.ts';
 import type { SetSection } from './set-section.ts';
@@ -52,7 +53,7 @@ function factLabels({ record, section, limits, metric, purpose }: Input): LabelC
     const lifts = section.foam && section.foam.liftsFt.length > 0 ? section.foam.liftsFt.length + 1 : 1;
     add(
       'foam',
-      `Foam ${text(derived.placedFt3, 'ft3')} placed${lifts > 1 ? ` in ${lifts} lifts` : ''}`,
+      `${foamTitle(derived.placedFt3, purpose, metric)}${lifts > 1 ? ` in ${lifts} lifts` : ''}`,
       fillDetail(record, limits, metric),
     );
   } else if (purpose === 'plan' && derived.voidFt3 !== null) {

@@ -121,7 +121,10 @@ function depths(
   ];
 }
 
-function facts(section: StraightenSection, { record, limits, metric, findings }: LayoutInput): ColumnLabel[] {
+function facts(
+  section: StraightenSection,
+  { record, limits, purpose, metric, findings }: LayoutInput,
+): ColumnLabel[] {
   const { derived } = record;
   const { before, after, rake, springback, wedge } = section;
   const spoken = new Set(findings.map((finding) => finding.field));
@@ -151,7 +154,7 @@ function facts(section: StraightenSection, { record, limits, metric, findings }:
       wedge.widthFrom === 'gapWidthIn' ? 'width as measured' : 'width of the pole at grade',
     );
   }
-  if (!told.has('fill-short')) out.push(...foamFact(derived, metric));
+  if (!told.has('fill-short')) out.push(...foamFact(derived, { purpose, metric }));
   if (section.waterIn !== null && !spoken.has('waterIn')) {
     const limit = limits.waterMostIn;
     add(

@@ -57,7 +57,13 @@ function SetFacts({ plan, standard }: { readonly plan: Plan; readonly standard: 
       </Fact>
       {depthFt !== null && dueFt !== null && Math.abs(depthFt - dueFt) > 1e-9 ? (
         <Fact word="Depth planned">
-          <MeasuredAgainst measured={depthFt} limit={dueFt} margin={depthFt - dueFt} unit="ft" />
+          <MeasuredAgainst
+            word="planned"
+            measured={depthFt}
+            limit={dueFt}
+            margin={depthFt - dueFt}
+            unit="ft"
+          />
         </Fact>
       ) : null}
       <Fact word="Bore">
@@ -71,12 +77,18 @@ function SetFacts({ plan, standard }: { readonly plan: Plan; readonly standard: 
       </Fact>
       {least === null ? null : (
         <Fact word="Least gap">
-          <MeasuredAgainst measured={least} limit={narrow} margin={least - narrow} unit="in" />
+          <MeasuredAgainst word="planned" measured={least} limit={narrow} margin={least - narrow} unit="in" />
         </Fact>
       )}
       {greatest === null || wide === null ? null : (
         <Fact word="Greatest gap">
-          <MeasuredAgainst measured={greatest} limit={wide} margin={wide - greatest} unit="in" />
+          <MeasuredAgainst
+            word="planned"
+            measured={greatest}
+            limit={wide}
+            margin={wide - greatest}
+            unit="in"
+          />
         </Fact>
       )}
     </>
