@@ -11,6 +11,7 @@ import { startPostgres } from './lib/postgres.mjs';
 import { StartProblem, printProblem } from './lib/problem.mjs';
 import { endRunning, run } from './lib/run.mjs';
 import { readSecrets } from './lib/secrets.mjs';
+import { serverFlags } from './lib/server-flags.mjs';
 import { runningServices } from './lib/services-running.mjs';
 import { takeDataFolder } from './lib/start-lock.mjs';
 import { readStartSettings } from './lib/start-settings.mjs';
@@ -147,7 +148,7 @@ async function startServer({ settings, env, logFile }) {
     startChild({
       name: 'The server',
       command: process.execPath,
-      args: [...endWithParentArgs, '--import', 'tsx', 'server/index.ts'],
+      args: [...serverFlags, ...endWithParentArgs, '--import', 'tsx', 'server/index.ts'],
       cwd: root,
       env,
       logFile,

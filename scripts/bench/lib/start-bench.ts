@@ -9,6 +9,7 @@ import pg from 'pg';
 import { startAzurite } from '#scripts/lib/azurite.mjs';
 import { freePort } from '#scripts/lib/free-port.mjs';
 import { startPostgres } from '#scripts/lib/postgres.mjs';
+import { serverFlags } from '#scripts/lib/server-flags.mjs';
 import { tempFolder } from '#scripts/lib/temp-folder.mjs';
 import { createOrm } from '#server/db/orm.ts';
 import { migrate } from '#server/db/migrate.ts';
@@ -99,7 +100,7 @@ async function startServer(
   const dataDir = mkdtempSync(path.join(tmpdir(), 'upstand-bench-data-'));
   const ending = new URL('../../lib/end-with-parent.mjs', import.meta.url).href;
   const imports = [ending, 'tsx', ...options.imports].flatMap((each) => ['--import', each]);
-  const child = spawn(process.execPath, [...imports, 'server/index.ts'], {
+  const child = spawn(process.execPath, [...serverFlags, ...imports, 'server/index.ts'], {
     cwd: ROOT,
     env: {
       PATH: process.env['PATH'],

@@ -5,6 +5,7 @@
 import { spawn } from 'node:child_process';
 import { randomUUID } from 'node:crypto';
 import { fileURLToPath } from 'node:url';
+import { serverFlags } from '#scripts/lib/server-flags.mjs';
 import { seedRegister } from '#scripts/bench/lib/seed-register.ts';
 import { startBench, type Bench } from '#scripts/bench/lib/start-bench.ts';
 import { machine } from '#scripts/bench/machine.ts';
@@ -49,7 +50,7 @@ async function issue(bench: Bench, lines: number): Promise<Issued> {
   return new Promise((resolve, reject) => {
     const child = spawn(
       process.execPath,
-      ['--import', 'tsx', fileURLToPath(new URL('./issue-child.ts', import.meta.url)), id],
+      [...serverFlags, '--import', 'tsx', fileURLToPath(new URL('./issue-child.ts', import.meta.url)), id],
       {
         env: {
           PATH: process.env['PATH'],

@@ -1,0 +1,2 @@
+/** Node's flags for the server. */
+export const serverFlags: readonly string[];
