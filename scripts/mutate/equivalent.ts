@@ -138,16 +138,22 @@ export const EQUIVALENT: readonly Equivalent[] = [
     why: 'A kit of size 0 leads to no sum: what is left without it is the same sum.',
   },
   {
-    file: 'shared/calc/strength-share.ts',
-    code: 't <= before.minutes',
-    to: '<',
-    why: 'At the first point both branches give its share.',
+    file: 'shared/calc/strength-at.ts',
+    code: '(pour.pourNumber ?? 0) > (last.pourNumber ?? 0)',
+    to: '>=',
+    why: 'Rows of one number at one time are one pour: either of them names it.',
   },
   {
     file: 'shared/calc/strength-share.ts',
     code: 't <= point.minutes',
     to: '<',
     why: 'At a point the curves on both sides of it give its share.',
+  },
+  {
+    file: 'shared/rules/nearest-structure.ts',
+    code: 'reachFt > 0',
+    to: '>=',
+    why: 'Without any reach the cells have no numbers, and nothing is met in them.',
   },
   {
     file: 'shared/calc/water-with-pole.ts',

@@ -38,6 +38,13 @@ describe('strength when something was done', () => {
     expect(shares([lift, other], at(40))).toEqual([[30, 40, 0.6612]]);
   });
 
+  it('counts of two pours at one time the one of the higher number, in whatever order they come', () => {
+    // At 40 °F everything takes twice as long: 30 min read as 15 do.
+    const second = pour({ pourNumber: 2, componentBTempF: 40 });
+    expect(shares([pour(), second], at(30))).toEqual([[30, 40, 0.6612]]);
+    expect(shares([second, pour()], at(30))).toEqual([[30, 40, 0.6612]]);
+  });
+
   it('keeps each event’s own clock', () => {
     const later = pour({ event: 2, atMs: 1000 * MINUTE });
     expect(shares([pour(), later], at(15), at(1015, 2), at(15, 3))).toEqual([

@@ -26,14 +26,18 @@ export type StrengthAt = {
 const MINUTE_MS = 60_000;
 const UNUSED = { kitFt3: null, quantity: null, wastedQuantity: 0 };
 
-/** The rows of the event's last pour; null without one, or where a time that could be later is not known. */
+/** The rows of the event's last pour, of two at one time that of the higher number; null without one, or where a time that could be later is not known. */
 function lastPour(pours: readonly PourAt[], event: number) {
   const own = pours.filter((pour) => pour.event === event);
   let last: (PourAt & { readonly atMs: number }) | null = null;
   for (const pour of own) {
     const { atMs } = pour;
     if (atMs === null) return null;
-    if (last === null || atMs > last.atMs) last = { ...pour, atMs };
+    const later =
+      last === null ||
+      atMs > last.atMs ||
+      (atMs === last.atMs && (pour.pourNumber ?? 0) > (last.pourNumber ?? 0));
+    if (later) last = { ...pour, atMs };
   }
   if (last === null) return null;
   const { atMs, pourNumber } = last;

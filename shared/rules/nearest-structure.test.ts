@@ -18,4 +18,24 @@ describe('nearestStructure', () => {
     // One each, and the first also meets itself.
     expect(looked).toBe(1_001);
   });
+
+  // 0.00001° of latitude are some 3.6 ft, 0.00002° some 7.3 ft: both within the 10 ft that two accuracies swallow.
+  const of = (name: string, north: number) => ({
+    place: { ...HERE, latitude: HERE.latitude + north },
+    accuracyFt: 5,
+    of: name,
+  });
+  const nearestOf = (...others: ReturnType<typeof of>[]) => {
+    const here = of('here', 0);
+    return nearestStructure([here, ...others], 3)(here, (other) => other !== 'here')?.other;
+  };
+
+  it('takes the nearer by distance where accuracies swallow both, in whatever order they come', () => {
+    expect(nearestOf(of('near', 0.00001), of('far', 0.00002))).toBe('near');
+    expect(nearestOf(of('far', 0.00002), of('near', 0.00001))).toBe('near');
+  });
+
+  it('takes the first of two at one place', () => {
+    expect(nearestOf(of('first', 0.00001), of('second', 0.00001))).toBe('first');
+  });
 });

@@ -103,6 +103,11 @@ const CASES: readonly (readonly [code: string, finding: Partial<Finding>, words:
   ['unproved', { measured: 'not-measured', params: { title: 'Water' } }, 'says "not measured"'],
   ['water-deep', { measured: 3, limit: 2, params: { waterIn: 3 } }, 'with the structure in the bore'],
   ['water-deep', { measured: 3, limit: 2, params: { waterIn: 1.5 } }, 'in the open bore stands'],
+  [
+    'water-deep',
+    { measured: 72, limit: 2, params: { waterIn: 100, boreIn: 72 } },
+    'more than the bore is deep',
+  ],
   ['load-early', { measured: -5, limit: 60, params: { factor: 1 } }, '5 min before the last pour'],
   ['load-early', { measured: 0, limit: 60, params: { factor: 1 } }, '0 min after the last pour'],
   ['load-early', { measured: 50, limit: 60, params: { factor: 1 } }, '60 min is due.'],
@@ -145,6 +150,8 @@ describe('what to do about it', () => {
     ['clock-unreal', { problem: 'gap' }, 'Correct the time'],
     ['kit-unknown', { what: 'product' }, 'Write the product'],
     ['kit-unknown', { what: 'kit' }, 'Write the kit size'],
+    ['water-deep', { waterIn: 3 }, 'bailed before foam is poured'],
+    ['water-deep', { waterIn: 100, boreIn: 72 }, 'Correct the depth of water or of the bore'],
   ])('%s: %j', (code, params, words) => {
     expect(ruleOf(code)?.remedy({ ...EMPTY, code, params })).toContain(words);
   });

@@ -1,5 +1,7 @@
+import { expect, it } from 'vitest';
+import { DEMO_CONTEXT } from '#shared/check/demo-context.ts';
 import { describeRule } from '../describe-rule.ts';
-import { eventOf } from '../testing.ts';
+import { eventOf, lineOf } from '../testing.ts';
 import { waterDeep } from './rule.ts';
 
 describeRule(waterDeep, {
@@ -49,4 +51,11 @@ describeRule(waterDeep, {
       expected: [{ unproved: 'waterIn' }],
     },
   ],
+});
+
+it('water as deep as the bore is full, not more than it holds', () => {
+  // 6 ft are 72 in.
+  const line = lineOf({ values: { waterIn: 72, boreDepthFt: 6 }, derived: { waterWithPoleIn: 72 } });
+  const [found] = waterDeep.check(line, { limitIn: 2 }, DEMO_CONTEXT);
+  expect(found?.params).toEqual({ waterIn: 72, event: 1 });
 });
